@@ -1,0 +1,104 @@
+import { type Beam, type BeamLoad, beamFields, beamLength, type Field } from './beam.ts';
+
+/** A member cut into pieces at its supports and wherever a load starts, ends or stands. */
+export interface Grid {
+  readonly fields: readonly Field[];
+  /** Left ends of the pieces, in from the member's left end, then the right end of the last. */
+  readonly edges: Float64Array;
+  /** Index of the first piece of each field, then the number of pieces. */
+  readonly first: readonly number[];
+  /** Number of pieces. */
+  readonly count: number;
+  /** Places nearer than this are one, in. */
+  readonly tolerance: number;
+}
+
+/** Two places are the same when nearer than this part of the member's length. */
+const SAME_PLACE = 1e-10;
+
+/** Cuts a beam at its supports and at the places of `loads`. */
+export function gridOf(
+  beam: Beam,
+  loads: readonly BeamLoad[],
+  fields: readonly Field[] = beamFields(beam),
+): Grid {
+  const length = beamLength(beam);
+  const tolerance = SAME_PLACE * length;
+  const cuts: number[] = [];
+  for (const load of loads) {
+    if (load.type === 'point') cuts.push(load.at);
+    else cuts.push(load.from, load.to);
+  }
+  cuts.sort((a, b) => a - b);
+  const edges: number[] = [];
+  const first: number[] = [];
+  let next = 0;
+  for (const field of fields) {
+    first.push(edges.length);
+    edges.push(field.start);
+    const end = field.start + field.length - tolerance;
+    let last = field.start;
+    for (; next < cuts.length && cuts[next]! < end; next++) {
+      const cut = cuts[next]!;
+      if (cut <= last + tolerance) continue;
+      edges.push(cut);
+      last = cut;
+    }
+  }
+  first.push(edges.length);
+  const count = edges.length;
+  edges.push(length);
+  return { fields, edges: Float64Array.from(edges), first, count, tolerance };
+}
+
+/** Index of the piece that starts at x or holds it; the last piece for the member's right end. */
+export function pieceAt(grid: Grid, x: number): number {
+  let lo = 0;
+  let hi = grid.count - 1;
+  while (lo < hi) {
+    const mid = (lo + hi + 1) >> 1;
+    if (grid.edges[mid]! <= x + grid.tolerance) lo = mid;
+    else hi = mid - 1;
+  }
+  return lo;
+}
+
+/** Index of the field that holds a piece. */
+export function fieldOfPiece(grid: Grid, piece: number): number {
+  let field = 0;
+  while (grid.first[field + 1]! <= piece) field++;
+  return field;
+}
+
+/** Loads as the pieces of a grid see them. */
+export interface PieceLoads {
+  /** Line load at the start of each piece, lb/in, and its growth along it, lb/in². */
+  readonly q0: Float64Array;
+  readonly q1: Float64Array;
+  /** Point load at the start of each piece, then at the member's right end, lb. */
+  readonly points: Float64Array;
+}
+
+/** Spreads loads over the pieces of a grid that was cut at their places. Parts outside [from, to) are left out. */
+export function spread(grid: Grid, loads: readonly BeamLoad[], from = 0, to = grid.count): PieceLoads {
+  const q0 = new Float64Array(grid.count);
+  const q1 = new Float64Array(grid.count);
+  const points = new Float64Array(grid.count + 1);
+  const { edges, tolerance } = grid;
+  const right = edges[grid.count]!;
+  for (const load of loads) {
+    if (load.type === 'point') {
+      const atEnd = load.at >= right - tolerance;
+      const piece = atEnd ? grid.count : pieceAt(grid, load.at);
+      if (atEnd ? to === grid.count : piece >= from && piece < to) points[piece]! += load.load;
+      continue;
+    }
+    const growth = (load.end - load.start) / (load.to - load.from);
+    for (let p = Math.max(from, pieceAt(grid, load.from)); p < to; p++) {
+      if (edges[p + 1]! > load.to + tolerance) break;
+      q0[p]! += load.start + growth * (edges[p]! - load.from);
+      q1[p]! += growth;
+    }
+  }
+  return { q0, q1, points };
+}
