@@ -1,0 +1,11 @@
+export { type KindEffects, kindAnalysis, reactionRange } from './analysis.ts';
+export { areaToLine } from './area-to-line.ts';
+export { type Combination, type CombinationTable, combinationTable } from './combinations.ts';
+export { compileEffects, type EffectsOptions } from './compile.ts';
+export { type Curve, type CurveExtreme, type Curves, type CurvesOf, curves } from './curves.ts';
+export type { Effects, LateralCase, ShearAtDepth, Term, TermGroup } from './effects.ts';
+export { KIND_LETTER, KIND_WORD, LOAD_DURATION, LOAD_KINDS, type LoadKind } from './kinds.ts';
+export type { AppliedLoad, CombinationSet, LiveReduction, Loading } from './loading.ts';
+export { liveReductionFactor } from './reduction.ts';
+export { slopedLength, slopeStretch } from './slope.ts';
+export { termValue } from './term-value.ts';

@@ -1,0 +1,58 @@
+import type { Found } from './bar.ts';
+import type { Term } from './effects.ts';
+import type { LoadParts } from './parts.ts';
+import { type Pattern, patternName } from './patterns.ts';
+
+/** Numbers the patterns that terms name, "all spans" first; a name is made once, when a term first needs it. */
+export interface PatternBook {
+  readonly names: readonly string[];
+  index(pattern: Pattern): number;
+  term(found: Found): Term;
+}
+
+const ALL_SPANS = 'all spans';
+
+export function patternBook(parts: LoadParts): PatternBook {
+  const names = [ALL_SPANS];
+  const loaded = { live: 0, roofLive: 0, snow: 0 };
+  let patterns = false;
+  for (const { kind, parts: fieldParts } of parts.kinds) {
+    if (!fieldParts) continue;
+    patterns = true;
+    loaded[kind as keyof Pattern] = fieldParts.reduce((bits, part, f) => (part ? bits | (1 << f) : bits), 0);
+  }
+  const known = new Map<number, number>([[bitsOf(loaded, loaded), 0]]);
+  const index = (pattern: Pattern): number => {
+    if (!patterns) return 0;
+    const key = bitsOf(pattern, loaded);
+    let i = known.get(key);
+    if (i === undefined) {
+      i = names.length;
+      names.push(patternName(pattern, parts.fields, loaded));
+      known.set(key, i);
+    }
+    return i;
+  };
+  return {
+    names,
+    index,
+    term: ({ base, perWeight, valueAt, combination, pattern, at, place }) => ({
+      base,
+      perWeight,
+      valueAt,
+      combination,
+      pattern: index(pattern),
+      at,
+      place,
+    }),
+  };
+}
+
+/** Only loaded fields tell patterns apart; a beam has eight fields at most. */
+function bitsOf(pattern: Pattern, loaded: Pattern): number {
+  return (
+    (pattern.live & loaded.live) |
+    ((pattern.roofLive & loaded.roofLive) << 8) |
+    ((pattern.snow & loaded.snow) << 16)
+  );
+}

@@ -1,0 +1,118 @@
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import { compileEffects } from '../../src/loads/compile.ts';
+import type { Loading } from '../../src/loads/loading.ts';
+import { anyMember, member } from './members.ts';
+
+// NDS 3.4.3.1: uniform loads within d of the face left out, point loads within d counted x/d (x from the face).
+function shear(loading: Loading, depth: number, w = 0, duration?: number) {
+  const effects = compileEffects({ ...loading, shearAt: 'd' }, { heaviest: 3, deadFactor: 1 });
+  const list = effects.shearAtDepth!(depth, w);
+  return duration === undefined ? list[0]! : list.find((one) => one.duration === duration)!;
+}
+
+const l = 160;
+const uniform = member({ spans: [l] }, { area: { dead: 0.1 }, tributary: 60, bearing: [4, 4] });
+
+describe('shear at d from the face', () => {
+  test('of a simple span under a uniform load is w(l/2 - bearing/2 - d)', () => {
+    expect(shear(uniform, 12).value).toBeCloseTo(6 * (80 - 2 - 12), 9);
+    expect(shear(uniform, 12).term.at).toBeCloseTo(14, 9);
+  });
+
+  test('is none where d reaches the middle of the span', () => {
+    const effects = compileEffects({ ...uniform, shearAt: 'd' }, { heaviest: 3, deadFactor: 1 });
+    expect(effects.shearAtDepth!(90, 0).every((one) => Math.abs(one.value) < 1e-9)).toBe(true);
+  });
+
+  test('adds own weight at the weight asked for', () => {
+    const { value, term } = shear({ ...uniform, selfWeight: true }, 12, 2);
+    expect(value).toBeCloseTo(8 * 66, 9);
+    expect(term.base + 2 * term.perWeight).toBeCloseTo(value, 9);
+  });
+
+  test('counts a point load x from the face with x/d of its shear', () => {
+    const d = 16;
+    const at = (x: number) =>
+      member(
+        { spans: [l] },
+        { bearing: [4, 4], loads: [{ kind: 'live', type: 'point', at: 2 + x, load: 1000 }] },
+      );
+    for (const x of [4, 8, 12]) {
+      const reaction = (1000 * (l - 2 - x)) / l;
+      // The shear from this load beyond it is what the other support bears.
+      const expected = Math.max((x / d) * reaction, 1000 - reaction);
+      expect(shear(at(x), d, 0, 1).value).toBeCloseTo(expected, 8);
+    }
+    expect(shear(at(16), d, 0, 1).value).toBeCloseTo((1000 * (l - 18)) / l, 8);
+    expect(shear(at(40), d, 0, 1).value).toBeCloseTo((1000 * (l - 42)) / l, 8);
+  });
+
+  test('treats both ends alike: the mirrored member has the same shear', () => {
+    fc.assert(
+      fc.property(anyMember(3, 3), fc.integer({ min: 4, max: 20 }), (loading, depth) => {
+        const { beam } = loading;
+        if (beam.supports === 'cantilever') return;
+        const length = beam.overhangs.left + beam.spans.reduce((a, b) => a + b, 0) + beam.overhangs.right;
+        const mirrored: Loading = {
+          ...loading,
+          beam: {
+            ...beam,
+            spans: [...beam.spans].reverse(),
+            overhangs: { left: beam.overhangs.right, right: beam.overhangs.left },
+            fixed: { left: beam.fixed.right, right: beam.fixed.left },
+          },
+          loads: loading.loads.map((load) =>
+            load.type === 'point'
+              ? { ...load, at: length - load.at }
+              : { ...load, from: length - load.to, to: length - load.from, start: load.end, end: load.start },
+          ),
+        };
+        const at = (one: Loading) =>
+          compileEffects({ ...one, shearAt: 'd' }, { heaviest: 3, deadFactor: 1 }).shearAtDepth!(depth, 1.5);
+        const one = at(loading);
+        const two = at(mirrored);
+        for (const { duration, value } of one) {
+          const other = two.find((each) => each.duration === duration)?.value ?? 0;
+          expect(Math.abs(value - other)).toBeLessThanOrEqual(1e-9 * Math.max(1, value));
+        }
+      }),
+      { numRuns: 150, seed: 31 },
+    );
+  });
+
+  test('never exceeds the shear at the supports under downward loads, and comes up to it as d goes to nothing', () => {
+    const downward = anyMember(3, 3).map(
+      (loading): Loading => ({
+        ...loading,
+        area: { ...loading.area, windUp: 0 },
+        loads: loading.loads.filter((load) => load.kind !== 'windUp'),
+        bearing: loading.bearing.map(() => 0),
+        shearAt: 'd',
+      }),
+    );
+    fc.assert(
+      fc.property(downward, (loading) => {
+        const effects = compileEffects(loading, { heaviest: 3, deadFactor: 1 });
+        const at = (depth: number) => effects.shearAtDepth!(depth, 1);
+        for (const group of effects.shear) {
+          const support = Math.max(...group.terms.map((term) => term.base + term.perWeight));
+          const find = (depth: number) =>
+            at(depth).find((one) => one.duration === group.duration)?.value ?? 0;
+          for (const depth of [6, 12, 18]) expect(find(depth)).toBeLessThanOrEqual(support * (1 + 1e-9));
+          expect(find(1e-7)).toBeGreaterThanOrEqual(support * (1 - 1e-6) - 1e-3);
+        }
+      }),
+      { numRuns: 150, seed: 32 },
+    );
+  });
+
+  test('is not offered where shear is taken at the support', () => {
+    expect(compileEffects(uniform, { heaviest: 3, deadFactor: 1 }).shearAtDepth).toBeNull();
+  });
+
+  test('takes no relief at an end held against rotation, which does not bear on one surface', () => {
+    const loading = member({ spans: [l], supports: 'cantilever' }, { area: { dead: 0.1 }, tributary: 60 });
+    expect(shear(loading, 12).value).toBeCloseTo(6 * l, 9);
+  });
+});
