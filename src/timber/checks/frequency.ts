@@ -1,0 +1,46 @@
+import { areaToLine } from '../../loads/area-to-line.ts';
+import { slopedLength } from '../../loads/slope.ts';
+import { beamFields } from '../../statics/beam.ts';
+import type { Member } from '../member.ts';
+
+/** Acceleration of gravity, in/s². */
+const GRAVITY = 386.1;
+/** (βl)²/2π of the first mode: simple span π²/2π, cantilever 1.8751²/2π. */
+const MODE = { span: Math.PI / 2, overhang: 1.875104 ** 2 / (2 * Math.PI) } as const;
+
+/**
+ * First frequency, Hz, of the longest span under dead load alone (domain: f1 = (π/2)·sqrt(EI/(m·l⁴)), m = D/g).
+ * Line and point loads count as spread over the span. Null where there is no dead load. Advice, not code.
+ */
+export function firstFrequency(member: Member, w: number, EI: number): number | null {
+  const fields = beamFields(member.beam);
+  const spans = fields.some(({ kind }) => kind === 'span')
+    ? fields.filter(({ kind }) => kind === 'span')
+    : fields;
+  const longest = spans.reduce((most, field) => (field.length > most.length ? field : most));
+  const from = longest.start;
+  const to = from + longest.length;
+  let typed = 0;
+  for (const load of member.loads) {
+    if (load.kind !== 'dead') continue;
+    if (load.type === 'point') typed += load.at >= from && load.at <= to ? load.load : 0;
+    else typed += lineWithin(load, from, to);
+  }
+  const dead = areaToLine(member, 'dead') + typed / longest.length + (member.selfWeight ? w : 0);
+  if (dead <= 0) return null;
+  const length = slopedLength(member.slope, longest.length);
+  return MODE[longest.kind] * Math.sqrt((EI * GRAVITY) / (dead * length ** 4));
+}
+
+/** The part of a linearly varying load, lb, between two places. */
+function lineWithin(
+  load: { from: number; to: number; start: number; end: number },
+  from: number,
+  to: number,
+): number {
+  const a = Math.max(load.from, from);
+  const b = Math.min(load.to, to);
+  if (b <= a) return 0;
+  const at = (x: number) => load.start + ((load.end - load.start) * (x - load.from)) / (load.to - load.from);
+  return ((at(a) + at(b)) / 2) * (b - a);
+}

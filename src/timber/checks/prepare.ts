@@ -1,0 +1,113 @@
+import { compileEffects, type Effects } from '../../loads/effects.ts';
+import { slopedLength } from '../../loads/slope.ts';
+import { beamFields, beamLength, type Field, supportPlaces } from '../../statics/beam.ts';
+import { bearingArea } from '../factors/bearing-area.ts';
+import type { Bracing, Member } from '../member.ts';
+import { notchPlaceFault } from './notch.ts';
+import { type TermSet, termSet } from './term-set.ts';
+
+/** Everything of a member's checks that does not depend on its size, nor on its wood. */
+export interface Prepared {
+  readonly member: Member;
+  readonly effects: Effects;
+  readonly fields: readonly Field[];
+  /** Heaviest own weight that the demands are searched for, lb/in. */
+  readonly heaviest: number;
+  /** False for a member that carries nothing but itself: it does not pass. */
+  readonly loaded: boolean;
+  readonly shear: TermSet;
+  readonly endShear: TermSet;
+  readonly sagging: TermSet;
+  readonly hogging: TermSet;
+  readonly deflectionLive: TermSet;
+  readonly deflectionTotal: TermSet;
+  readonly bearing: TermSet;
+  readonly uplift: TermSet;
+  /** By field, in. */
+  readonly liveLimit: Float64Array;
+  readonly totalLimit: Float64Array;
+  /** By support: bearing length, in, and Cb. */
+  readonly bearingLength: Float64Array;
+  readonly Cb: Float64Array;
+  /** By support, lb; 0 where none is stated. */
+  readonly tiedDown: Float64Array;
+  /** By group of endShear: depth of the notch at that end, in. */
+  readonly notch: Float64Array;
+  /** The deeper of the two notches, in; Infinity where a notch stands at a place that allows none. */
+  readonly deepestNotch: number;
+  /** The same prepared for heavier sections, made when one is met. */
+  heavier: Prepared | null;
+}
+
+export interface PrepareOptions {
+  /** Heaviest own weight that will be rated without preparing again, lb/in. */
+  readonly heaviest?: number;
+}
+
+/** A wet 10 3/4 x 48 in glulam of Southern Pine weighs 11.6 lb/in: the heaviest on the racks, rounded up. */
+const HEAVIEST = 16;
+
+/** Searches combinations and patterns of a member once, for all sizes of section. */
+export function prepare(member: Member, options: PrepareOptions = {}): Prepared {
+  const heaviest = options.heaviest ?? HEAVIEST;
+  const effects = compileEffects(member, { heaviest, deadFactor: deadFactorOf(member) });
+  const fields = beamFields(member.beam);
+  const { typedFactors: typed, limits, notch, slope } = member;
+  const lengths = fields.map((field) => slopedLength(slope, field.length));
+  const spans = fields.map((field, f) => (field.kind === 'overhang' ? 2 : 1) * lengths[f]!);
+  const held = () => 0;
+  const top = (place: number) => unbracedLength(member.bracing, lengths[place]!);
+  const bottom = (place: number) => unbracedLength(member.bracingBottom, lengths[place]!);
+  const places = supportPlaces(member.beam);
+  const whole = beamLength(member.beam);
+  const { endShear } = effects;
+  return {
+    member,
+    effects,
+    fields,
+    heaviest,
+    loaded: isLoaded(member),
+    shear: termSet(effects.shear, typed?.CD?.value, held),
+    endShear: termSet(endShear, typed?.CD?.value, held),
+    sagging: termSet(effects.sagging, typed?.CD?.value, top, lengths),
+    hogging: termSet(effects.hogging, typed?.CD?.value, bottom, lengths),
+    deflectionLive: termSet(effects.deflectionLive, undefined, held),
+    deflectionTotal: termSet(effects.deflectionTotal, undefined, held),
+    bearing: termSet(effects.bearing, undefined, held),
+    uplift: termSet(effects.uplift, undefined, held),
+    liveLimit: Float64Array.from(spans, (span) => Math.min(span / limits.live, limits.liveMax ?? Infinity)),
+    totalLimit: Float64Array.from(spans, (span) => span / limits.total),
+    bearingLength: Float64Array.from(places, (_, s) => member.bearing[s]!),
+    Cb: Float64Array.from(places, (at, s) => typed?.Cb?.value ?? bearingArea(member.bearing[s]!, at, whole)),
+    tiedDown: Float64Array.from(places, (_, s) => member.tiedDown?.[s] ?? 0),
+    notch: Float64Array.from(endShear, ({ place }) => (place === 0 ? notch.left : notch.right)),
+    deepestNotch: notchPlaceFault(member) === null ? Math.max(notch.left, notch.right) : Infinity,
+    heavier: null,
+  };
+}
+
+/** What dead load counts in the total deflection (IBC Table 1604.3 note; NDS 3.5.2). */
+const HALF_DEAD = { seasoned: 0.5, other: 1 } as const;
+const KCR = { seasoned: 1.5, other: 2 } as const;
+
+/** Factor on dead load in the total deflection: half dead, or creep by Kcr. */
+export function deadFactorOf(member: Member): number {
+  const state = member.seasoned && member.service === 'dry' ? 'seasoned' : 'other';
+  return member.creep === 'Kcr' ? KCR[state] : HALF_DEAD[state];
+}
+
+/** Unbraced length of an edge in a field `length` long, in; 0 where it is held throughout. */
+export function unbracedLength(bracing: Bracing, length: number): number {
+  if (bracing === 'continuous') return 0;
+  return bracing === 'ends' ? length : bracing;
+}
+
+function isLoaded(member: Member): boolean {
+  const area = member.tributary > 0 && Object.values(member.area).some((load) => load > 0);
+  return (
+    area ||
+    member.loads.some((load) =>
+      load.type === 'point' ? load.load !== 0 : load.start !== 0 || load.end !== 0,
+    )
+  );
+}

@@ -1,0 +1,20 @@
+/** `lumber`: dimension lumber and MSR (NDS 4.3.9); `LVL` (8.3.7); `none`: timbers, glulam, typed values. */
+export type RepetitiveRule = 'lumber' | 'LVL' | 'none';
+
+const REPETITIVE: Readonly<Record<RepetitiveRule, number>> = { lumber: 1.15, LVL: 1.04, none: 1 };
+
+/** Members in contact or near each other that count as repetitive (NDS 4.3.9). */
+export const REPETITIVE_PLIES = 3;
+
+/** Cr on Fb: stated, or three plies or more. */
+export function repetitiveFactor(rule: RepetitiveRule, stated: boolean, plies: number): number {
+  return stated || plies >= REPETITIVE_PLIES ? REPETITIVE[rule] : 1;
+}
+
+/** Why Cr has its value. */
+export function repetitiveReason(rule: RepetitiveRule, stated: boolean, plies: number): string {
+  if (rule === 'none') return 'no repetitive use for this product, NDS 4.3.9';
+  const clause = rule === 'LVL' ? 'NDS 8.3.7' : 'NDS 4.3.9';
+  if (plies >= REPETITIVE_PLIES) return `${plies} plies in contact, ${clause}`;
+  return stated ? `three or more, at most 24 in apart, sharing load, ${clause}` : `not repetitive, ${clause}`;
+}

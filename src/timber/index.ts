@@ -1,0 +1,37 @@
+export { candidatesOf, eMin, glulamGroup, isComplete } from './candidates.ts';
+export { CAUTIONS } from './cautions.ts';
+export { type AdjustedValues, adjusted } from './checks/adjusted.ts';
+export { explainChecks } from './checks/explain.ts';
+export { governingField } from './checks/governing-field.ts';
+export { lineLoadOf } from './checks/line-load.ts';
+export { deadFactorOf, type Prepared, type PrepareOptions, prepare } from './checks/prepare.ts';
+export { rate } from './checks/rate.ts';
+export { type Wood, type WoodConditions, woodOf } from './checks/wood.ts';
+export {
+  type DesignValues,
+  gradesOf,
+  isRefusal,
+  lookUp,
+  type Refusal,
+  shortSpecies,
+  shortWood,
+  speciesOf,
+} from './design-values.ts';
+export { nominalOf, timberNominalOf } from './nominal.ts';
+export { checkStock, refusal, type StockFault, stockFault } from './refusal.ts';
+export { reportMember } from './report-member.ts';
+export { sectionWeight } from './section-weight.ts';
+export { liesFlat, standingDepth, standingWidth } from './standing.ts';
+export {
+  boardFeet,
+  mostPlies,
+  nextStockDepth,
+  nextStockWidth,
+  rackSizes,
+  rackSizesOf,
+  type Size,
+  sizeLabel,
+  stockDepths,
+  stockWidths,
+} from './stock-sizes.ts';
+export { density, ownWeight } from './weight.ts';
