@@ -1,0 +1,96 @@
+import type { Member, Section } from '../timber/member.ts';
+import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
+import { ratiosOf, sectionRater } from './ratios.ts';
+import { scaleLengths, scaleLoads } from './scale.ts';
+
+/** d ln(ratio) / d ln(quantity), at the member as it is. */
+export interface Exponents {
+  /** All spans, overhangs and load positions together. */
+  readonly span: number;
+  /** Depth and width vary freely, not by stock. */
+  readonly depth: number;
+  readonly width: number;
+  /** All applied loads together, own weight apart. */
+  readonly load: number;
+}
+
+export const EXPONENT_QUANTITIES = ['span', 'depth', 'width', 'load'] as const;
+
+/** Ideal exponents of the three powers (a uniform load on a simple span, no size effects, no own weight). */
+export const IDEAL: Readonly<Record<1 | 2 | 3, Exponents>> = {
+  1: { span: 1, depth: -1, width: -1, load: 1 },
+  2: { span: 2, depth: -2, width: -1, load: 1 },
+  3: { span: 3, depth: -3, width: -1, load: 1 },
+};
+
+/** Relative step of the two-sided difference: its error is of the order of its square. */
+const STEP = 1e-5;
+/** One-sided slopes further apart than this stand on the two sides of a step of some factor. */
+const STEP_APART = 0.05;
+
+/** Local exponents of every check that applies. */
+export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>> {
+  const section = sectionRater(member);
+  const grown = (key: 'width' | 'depth') => (by: number) => section(scaledSection(member.section, key, by));
+  const upright = !member.section.flat;
+  const slopes = {
+    span: slopesOf((by) => ratiosOf(scaleLengths(member, by))),
+    depth: slopesOf(grown(upright ? 'depth' : 'width')),
+    width: slopesOf(grown(upright ? 'width' : 'depth')),
+    load: slopesOf((by) => ratiosOf(scaleLoads(member, by))),
+  };
+  const exponents: Partial<Record<CheckId, Exponents>> = {};
+  CHECK_IDS.forEach((id, at) => {
+    const own = {
+      span: slopes.span[at]!,
+      depth: slopes.depth[at]!,
+      width: slopes.width[at]!,
+      load: slopes.load[at]!,
+    };
+    if (EXPONENT_QUANTITIES.every((quantity) => Number.isFinite(own[quantity]))) exponents[id] = own;
+  });
+  return exponents;
+}
+
+function scaledSection(section: Section, key: 'width' | 'depth', by: number): Section {
+  return { ...section, [key]: section[key] * by };
+}
+
+/** Slopes on logarithmic axes; where a factor steps the slope of the side that does not step. */
+function slopesOf(at: (factor: number) => Float64Array): number[] {
+  const below = at(1 - STEP);
+  const here = at(1);
+  const above = at(1 + STEP);
+  return Array.from(here, (ratio, index) => {
+    const left = Math.log(ratio / below[index]!) / -Math.log1p(-STEP);
+    const right = Math.log(above[index]! / ratio) / Math.log1p(STEP);
+    if (!Number.isFinite(left) || !Number.isFinite(right)) return Number.isFinite(left) ? left : right;
+    if (Math.abs(left - right) < STEP_APART) return (left + right) / 2;
+    return Math.abs(left) < Math.abs(right) ? left : right;
+  });
+}
+
+/** A local exponent this close to its ideal value is called whole. */
+const WHOLE_WITHIN = 0.005;
+
+/** Why the local exponents of a check are not the ideal ones, in words; "whole" where they are. */
+export function whyNotWhole(
+  member: Member,
+  power: 1 | 2 | 3,
+  exponents: Exponents,
+  check: CheckResult,
+): string {
+  const ideal = IDEAL[power];
+  if (EXPONENT_QUANTITIES.every((quantity) => Math.abs(exponents[quantity] - ideal[quantity]) < WHOLE_WITHIN))
+    return 'whole';
+  const causes: string[] = [];
+  const factor = (symbol: string) => check.factors.find((each) => each.symbol === symbol)?.value ?? 1;
+  if (member.selfWeight && Math.abs(exponents.load - 1) >= WHOLE_WITHIN) causes.push('own weight');
+  if (factor('CL') < 1) causes.push('CL');
+  if (factor('CV') < 1) causes.push('CV');
+  if (member.stock.product === 'timber' && factor('CF') < 1) causes.push('size factor');
+  if (power === 1 && member.shearAt === 'd') causes.push('shear at d');
+  if (member.loads.some((load) => load.type === 'point')) causes.push('point loads');
+  if (power === 3 && member.limits.liveMax !== null) causes.push('limit as a length');
+  return causes.length > 0 ? causes.join(', ') : 'loads not alike';
+}
