@@ -1,0 +1,31 @@
+import type { CombinationSet } from '../loads/loading.ts';
+import type { Units } from '../quantity/index.ts';
+import type { Member } from '../timber/member.ts';
+
+/** A job: its members, and how it wants to be shown and combined. */
+export interface Session {
+  /** Empty when the file gives none. */
+  readonly title: string;
+  readonly units: Units;
+  readonly combinations: CombinationSet;
+  /** One or more, names unique. */
+  readonly members: readonly SessionMember[];
+  /** The raw top of the file it was read from, without its members; absent for a session that was never a file. */
+  readonly written?: unknown;
+}
+
+export interface SessionMember {
+  readonly member: Member;
+  /** The raw record it was read from, so that the user's own text can be kept; undefined for a new member. */
+  readonly written: unknown;
+}
+
+export type SessionRead =
+  | { readonly ok: true; readonly session: Session }
+  | { readonly ok: false; readonly fault: string };
+
+/** Largest file and counts that are read (contract, "Session file"). */
+export const MAX_BYTES = 16 * 1024 * 1024;
+export const MAX_MEMBERS = 500;
+export const MAX_SPANS = 6;
+export const MAX_LOADS = 100;
