@@ -1,0 +1,57 @@
+import { useApp } from 'ink';
+import { type ReactElement, useRef, useState } from 'react';
+import type { Glyphs } from './draw/glyphs.ts';
+import { Screen } from './draw/screen.tsx';
+import type { Theme } from './draw/theme.ts';
+import { drawState } from './draw-state.ts';
+import type { Effect, State } from './state.ts';
+import { useKeys } from './terminal/use-keys.ts';
+import { type Event, update } from './update.ts';
+
+interface ExplorerProps {
+  /** The state to begin with. */
+  readonly initial: State;
+  readonly columns: number;
+  readonly rows: number;
+  readonly theme: Theme;
+  readonly glyphs: Glyphs;
+  /** Carries out what the state asks for and tells what came of it. */
+  readonly perform: (effect: Effect) => Event | null;
+}
+
+/** The loop: keys become events, events the next state, the state a screen. */
+export function Explorer({ initial, columns, rows, theme, glyphs, perform }: ExplorerProps): ReactElement {
+  const app = useApp();
+  const state = useRef(initial);
+  const [, redraw] = useState(0);
+
+  const happen = (events: readonly Event[]): void => {
+    const queue = [...events];
+    for (let event = queue.shift(); event !== undefined; event = queue.shift()) {
+      const step = update(state.current, event);
+      state.current = step.state;
+      for (const effect of step.effects) {
+        if (effect.do === 'leave') {
+          app.exit();
+          return;
+        }
+        const after = perform(effect);
+        if (after !== null) queue.unshift(after);
+      }
+    }
+    redraw((count) => count + 1);
+  };
+
+  useKeys({
+    onKeys: (keys) => happen(keys.map((press) => ({ type: 'key', press }))),
+    onPaste: (text) => happen([{ type: 'paste', text }]),
+  });
+
+  // The size is told from outside, so that a resize draws once, in the new size.
+  if (state.current.columns !== columns || state.current.rows !== rows) {
+    state.current = update(state.current, { type: 'resize', columns, rows }).state;
+  }
+
+  const { canvas, entry } = drawState(state.current, glyphs);
+  return <Screen canvas={canvas} theme={theme} entry={entry} />;
+}

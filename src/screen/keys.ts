@@ -1,0 +1,172 @@
+import type { KeyPress } from './terminal/key-press.ts';
+
+/** What a key asks for in the explorer. */
+export type Action =
+  | 'knob-up'
+  | 'knob-down'
+  | 'nudge-less'
+  | 'nudge-more'
+  | 'fine-less'
+  | 'fine-more'
+  | 'coarse-less'
+  | 'coarse-more'
+  | 'type'
+  | 'take-lit'
+  | 'undo'
+  | 'redo'
+  | 'next-member'
+  | 'previous-member'
+  | 'units'
+  | 'save'
+  | 'help'
+  | 'leave'
+  | `jump:${string}`;
+
+export interface Binding {
+  /** As the foot line and the help show it. */
+  readonly keys: string;
+  /** Names of the presses that ask for it: see `pressName`. */
+  readonly presses: readonly string[];
+  readonly action: Action;
+  /** One line of help. */
+  readonly help: string;
+  /** Word on the foot line; empty where it is not shown there. */
+  readonly foot: string;
+}
+
+const jump = (key: string, knob: string, help: string): Binding => ({
+  keys: key,
+  presses: [key],
+  action: `jump:${knob}`,
+  help,
+  foot: '',
+});
+
+/** Every key of the explorer. The order is that of the help; the foot line takes those that have a word. */
+export const BINDINGS: readonly Binding[] = [
+  { keys: '↑', presses: ['up'], action: 'knob-up', help: 'the knob above', foot: '' },
+  { keys: '↓', presses: ['down'], action: 'knob-down', help: 'the knob below', foot: '' },
+  { keys: '←', presses: ['left'], action: 'nudge-less', help: 'nudge the knob in hand down', foot: '' },
+  {
+    keys: '→',
+    presses: ['right'],
+    action: 'nudge-more',
+    help: 'nudge it up; a stock knob goes one size',
+    foot: '',
+  },
+  {
+    keys: '[',
+    presses: ['['],
+    action: 'fine-less',
+    help: 'a fine nudge down; takes a depth off the stock sizes',
+    foot: '',
+  },
+  { keys: ']', presses: [']'], action: 'fine-more', help: 'a fine nudge up', foot: '' },
+  {
+    keys: '{ or Shift ←',
+    presses: ['{', 'shift-left'],
+    action: 'coarse-less',
+    help: 'ten nudges down',
+    foot: '',
+  },
+  {
+    keys: '} or Shift →',
+    presses: ['}', 'shift-right'],
+    action: 'coarse-more',
+    help: 'ten nudges up',
+    foot: '',
+  },
+  {
+    keys: 'Enter',
+    presses: ['enter'],
+    action: 'type',
+    help: 'type a value in any unit; a digit starts it too',
+    foot: 'type',
+  },
+  jump('l', 'spans.0', 'take the span in hand'),
+  jump('d', 'section.depth', 'take the depth in hand'),
+  jump('b', 'section.width', 'take the width in hand'),
+  jump('n', 'section.plies', 'take the plies in hand'),
+  jump('t', 'tributary', 'take the tributary width or spacing in hand'),
+  jump('g', 'stock.grade', 'take the grade in hand'),
+  {
+    keys: 'x',
+    presses: ['x'],
+    action: 'take-lit',
+    help: 'put the lit size, the lightest that passes, in the beam',
+    foot: 'take lit',
+  },
+  { keys: 'u', presses: ['u'], action: 'undo', help: 'undo', foot: 'undo' },
+  { keys: 'r', presses: ['r'], action: 'redo', help: 'redo', foot: '' },
+  {
+    keys: 'Tab',
+    presses: ['tab'],
+    action: 'next-member',
+    help: 'the next member of the session',
+    foot: 'member',
+  },
+  {
+    keys: 'Shift Tab',
+    presses: ['shift-tab'],
+    action: 'previous-member',
+    help: 'the member before',
+    foot: '',
+  },
+  { keys: 'i', presses: ['i'], action: 'units', help: 'inches or SI', foot: '' },
+  {
+    keys: 's',
+    presses: ['s'],
+    action: 'save',
+    help: 'keep: write the session to its file, the only key that does',
+    foot: 'keep',
+  },
+  {
+    keys: '?',
+    presses: ['?'],
+    action: 'help',
+    help: 'these keys and the words of the program',
+    foot: 'keys',
+  },
+  {
+    keys: 'q',
+    presses: ['q', 'ctrl-c'],
+    action: 'leave',
+    help: 'leave; asks when something is not kept',
+    foot: 'leave',
+  },
+];
+
+const BY_PRESS = new Map(
+  BINDINGS.flatMap((binding) => binding.presses.map((press) => [press, binding.action] as const)),
+);
+
+/** The name a press is bound by: "up", "shift-left", "ctrl-c", "u". */
+export function pressName(press: KeyPress): string {
+  const base = press.name === 'char' ? (press.char ?? '') : press.name;
+  if (press.ctrl) return `ctrl-${base}`;
+  return press.shift && press.name !== 'char' ? `shift-${base}` : base;
+}
+
+/** What a press asks for; null where it is bound to nothing. */
+export function actionOf(press: KeyPress): Action | null {
+  return BY_PRESS.get(pressName(press)) ?? null;
+}
+
+/** Characters that start an entry on the knob in hand. */
+export function startsEntry(press: KeyPress): boolean {
+  return press.name === 'char' && !press.ctrl && !press.meta && /^[0-9.]$/.test(press.char ?? '');
+}
+
+/** Every word of the program in a line. */
+export const WORDS: readonly (readonly [string, string])[] = [
+  ['knob', 'a quantity you can nudge'],
+  ['nudge', 'one step of a knob'],
+  ['powers', 'shear on (l/h)¹, bending on (l/h)², deflection on (l/h)³; demand over capacity, limit at 1'],
+  ['ghost', 'where a gauge stood before this run of nudges'],
+  ['ruler', 'the l/h axis, zoned by the power that governs, with the stock depths at this span'],
+  ['stands to', 'the l/h up to which every check passes, by the power laws'],
+  ['rack', 'the stock sizes of the chosen wood, lightest first'],
+  ['lit', 'the lightest size of the rack that passes'],
+  ['reach', 'the longest span at which a size still passes'],
+  ['kept', 'what the file holds; s alone writes it'],
+];

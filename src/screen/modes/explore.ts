@@ -1,0 +1,145 @@
+import type { Step as NudgeSize } from '../../explore/knob.ts';
+import { lightestOf, takeSize } from '../../explore/rack.ts';
+import { editOf, inserted } from '../edit.ts';
+import { type Action, actionOf, startsEntry } from '../keys.ts';
+import { drawExplorer } from '../layout.ts';
+import {
+  isKept,
+  knobInHand,
+  memberOf,
+  momentOf,
+  refused,
+  type State,
+  type Step,
+  still,
+  unitsOf,
+  withMember,
+  withSession,
+} from '../state.ts';
+import type { KeyPress } from '../terminal/key-press.ts';
+import { viewOf } from '../view-model.ts';
+import { opened } from './entry.ts';
+import type { ModeOf, ModeRules } from './mode.ts';
+import { save } from './save-as.ts';
+
+/** The one screen: knobs, powers, ruler, rack. */
+export const explore: ModeRules<ModeOf<'explore'>> = {
+  press,
+  // Pasted on a knob: taken as the beginning of an entry, so that nothing happens unseen.
+  paste: (state, _mode, text) => (/[0-9]/.test(text) ? opened(state, inserted(editOf(''), text)) : state),
+  draw(state, _mode, canvas, glyphs) {
+    drawExplorer(viewOf(state), canvas, glyphs);
+    return null;
+  },
+};
+
+function press(state: State, _mode: ModeOf<'explore'>, press: KeyPress): Step {
+  if (startsEntry(press)) return still(opened(state, editOf(press.char ?? '')));
+  const action = actionOf(press);
+  return action === null ? still(state) : act(state, action);
+}
+
+function act(state: State, action: Action): Step {
+  if (action.startsWith('jump:')) return still(jump(state, action.slice('jump:'.length)));
+  switch (action) {
+    case 'knob-up':
+      return still(move(state, -1));
+    case 'knob-down':
+      return still(move(state, 1));
+    case 'nudge-less':
+      return still(nudge(state, -1, 'normal'));
+    case 'nudge-more':
+      return still(nudge(state, 1, 'normal'));
+    case 'fine-less':
+      return still(nudge(state, -1, 'fine'));
+    case 'fine-more':
+      return still(nudge(state, 1, 'fine'));
+    case 'coarse-less':
+      return still(nudge(state, -1, 'coarse'));
+    case 'coarse-more':
+      return still(nudge(state, 1, 'coarse'));
+    case 'type':
+      return still(opened(state, editOf('')));
+    case 'take-lit':
+      return still(takeLit(state));
+    case 'undo':
+      return still(undo(state));
+    case 'redo':
+      return still(redo(state));
+    case 'next-member':
+      return still(turnTo(state, 1));
+    case 'previous-member':
+      return still(turnTo(state, -1));
+    case 'units': {
+      const units = unitsOf(state) === 'us' ? 'si' : 'us';
+      return still(withSession(state, { ...state.session, units }));
+    }
+    case 'help':
+      return still({ ...state, mode: { name: 'help', scroll: 0 } });
+    case 'save':
+      return save(state, false);
+    case 'leave':
+      return isKept(state)
+        ? { state, effects: [{ do: 'leave' }] }
+        : still({ ...state, mode: { name: 'leaving' }, notice: null });
+    default:
+      return still(state);
+  }
+}
+
+function move(state: State, by: number): State {
+  const { knobs, index } = knobInHand(state);
+  const next = Math.min(knobs.length - 1, Math.max(0, index + by));
+  return { ...state, knob: knobs[next]!.key, notice: null };
+}
+
+function jump(state: State, key: string): State {
+  const { knobs } = knobInHand(state);
+  const wanted = key === 'tributary' && memberOf(state).spacing !== null ? 'spacing' : key;
+  return knobs.some((knob) => knob.key === wanted) ? { ...state, knob: wanted, notice: null } : state;
+}
+
+/** The ghost stays where the run of nudges on one knob began. */
+function ghostOf(state: State): State['ghost'] {
+  return state.ghost?.knob === state.knob ? state.ghost : { knob: state.knob, member: memberOf(state) };
+}
+
+function nudge(state: State, direction: 1 | -1, size: NudgeSize): State {
+  const { knobs, index } = knobInHand(state);
+  const turn = knobs[index]!.nudge(memberOf(state), direction, size, unitsOf(state));
+  if ('fault' in turn) return refused(state, turn.fault);
+  return { ...withMember(state, turn.member), ghost: ghostOf(state) };
+}
+
+function takeLit(state: State): State {
+  const member = memberOf(state);
+  const lit = lightestOf(member);
+  if (lit === null)
+    return refused(state, 'no size of this wood passes: try another grade, a shorter span or less load');
+  return { ...withMember(state, takeSize(member, lit)), ghost: { knob: 'rack', member } };
+}
+
+function undo(state: State): State {
+  const last = state.past.at(-1);
+  if (last === undefined) return refused(state, 'nothing to undo');
+  return {
+    ...state,
+    ...last,
+    past: state.past.slice(0, -1),
+    future: [momentOf(state), ...state.future],
+    ghost: null,
+    notice: null,
+  };
+}
+
+function redo(state: State): State {
+  const [next, ...future] = state.future;
+  if (next === undefined) return refused(state, 'nothing to redo');
+  return { ...state, ...next, past: [...state.past, momentOf(state)], future, ghost: null, notice: null };
+}
+
+function turnTo(state: State, by: number): State {
+  const count = state.session.members.length;
+  if (count === 1) return refused(state, 'this session has one member');
+  return { ...state, member: (state.member + by + count) % count, ghost: null, notice: null };
+}

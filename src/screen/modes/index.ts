@@ -1,0 +1,24 @@
+import type { Mode } from '../state.ts';
+import { entry } from './entry.ts';
+import { explore } from './explore.ts';
+import { help } from './help.ts';
+import { leaving } from './leaving.ts';
+import type { ModeOf, ModeRules } from './mode.ts';
+import { saveAs } from './save-as.ts';
+import { start } from './start.ts';
+
+/** The rules of every mode, by its name. */
+const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
+  explore,
+  entry,
+  'save-as': saveAs,
+  help,
+  leaving,
+  start,
+};
+
+/** The rules of the mode a state is in. */
+export function rulesOf(mode: Mode): ModeRules<Mode> {
+  // The table above pairs each name with the rules for it.
+  return RULES[mode.name] as ModeRules<Mode>;
+}

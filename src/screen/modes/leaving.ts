@@ -1,0 +1,26 @@
+import { drawExplorer } from '../layout.ts';
+import { drawPrompt } from '../panels/prompt.ts';
+import { EXPLORE, type State, type Step, still } from '../state.ts';
+import type { KeyPress } from '../terminal/key-press.ts';
+import { viewOf } from '../view-model.ts';
+import type { ModeOf, ModeRules } from './mode.ts';
+import { save } from './save-as.ts';
+
+/** The question before changes are lost. */
+export const leaving: ModeRules<ModeOf<'leaving'>> = {
+  press,
+  draw(state, _mode, canvas, glyphs) {
+    drawExplorer(viewOf(state), canvas, glyphs);
+    drawPrompt(canvas, 'Not everything is kept.', 's keep and leave   d leave without keeping   Esc stay');
+    return null;
+  },
+};
+
+function press(state: State, _mode: ModeOf<'leaving'>, press: KeyPress): Step {
+  if (press.name === 'escape') return still({ ...state, mode: EXPLORE });
+  if (press.name !== 'char') return still(state);
+  if (press.ctrl) return press.char === 'c' ? { state, effects: [{ do: 'leave' }] } : still(state);
+  if (press.char === 's') return save({ ...state, mode: EXPLORE }, true);
+  if (press.char === 'd' || press.char === 'q') return { state, effects: [{ do: 'leave' }] };
+  return still(state);
+}

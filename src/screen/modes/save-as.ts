@@ -1,0 +1,53 @@
+import { edited, editOf, inserted } from '../edit.ts';
+import { drawExplorer } from '../layout.ts';
+import { drawPrompt } from '../panels/prompt.ts';
+import { EXPLORE, isKept, type State, type Step, still } from '../state.ts';
+import type { KeyPress } from '../terminal/key-press.ts';
+import { viewOf } from '../view-model.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+
+/** The name of a file being typed, for a session that has none. */
+export const saveAs: ModeRules<ModeOf<'save-as'>> = {
+  press,
+  paste: (state, mode, text) => ({
+    ...state,
+    mode: { ...mode, edit: inserted(mode.edit, text), fault: null },
+  }),
+  draw(state, { edit, fault }, canvas, glyphs) {
+    drawExplorer(viewOf(state), canvas, glyphs);
+    const place = drawPrompt(canvas, 'keep as', fault ?? 'Enter writes the file, Esc goes back');
+    return { ...place, value: edit.text, cursor: edit.cursor };
+  },
+};
+
+/** Asks for the session to be written, and for a name first where it has none. */
+export function save(state: State, thenLeave: boolean): Step {
+  if (state.file === null) {
+    return still({
+      ...state,
+      mode: { name: 'save-as', edit: editOf('beam.json'), fault: null, thenLeave },
+      notice: null,
+    });
+  }
+  if (isKept(state))
+    return still({ ...state, notice: { text: `${state.file} already holds this`, refusal: false } });
+  return {
+    state,
+    effects: [{ do: 'save', file: state.file, session: state.session, fresh: false, thenLeave }],
+  };
+}
+
+function press(state: State, mode: ModeOf<'save-as'>, press: KeyPress): Step {
+  if (isCancel(press)) return still({ ...state, mode: EXPLORE });
+  if (press.name !== 'enter') {
+    const next = edited(mode.edit, press);
+    return still(next === null ? state : { ...state, mode: { ...mode, edit: next, fault: null } });
+  }
+  const file = mode.edit.text.trim();
+  if (file === '')
+    return still({ ...state, mode: { ...mode, fault: 'a file name is needed, such as beam.json' } });
+  return {
+    state: { ...state, mode: EXPLORE },
+    effects: [{ do: 'save', file, session: state.session, fresh: true, thenLeave: mode.thenLeave }],
+  };
+}

@@ -1,0 +1,111 @@
+import type { Canvas } from '../draw/canvas.ts';
+import { cells } from '../draw/cells.ts';
+import type { Glyphs } from '../draw/glyphs.ts';
+import { curveRows, heightAt, resample } from '../draw/plot.ts';
+import type { ChartView, View } from '../view.ts';
+import { heading, isFree, type Region, rule } from './region.ts';
+import { along, SCALE_LABELS } from './scale.ts';
+
+/** Cells left of the plot: a blank, the ratio's figures, the axis. */
+const BEFORE = 7;
+/** Cells right of it, where a curve says its power. */
+const AFTER = 2;
+/** Rows that are not the plot: heading, axis, labels. */
+const AROUND = 3;
+
+/** Fewer rows of plot are noise: a layout that has only less shows reach in the rack instead. */
+export const LEAST_CHART_ROWS = 9 + AROUND;
+
+/**
+ * The ratios of the three powers against the knob in hand, logarithmic as the gauges are, each in its own
+ * line, with the limit and a bead on each at now. `ruled` lays the heading into a rule.
+ */
+export function drawChart(
+  view: View,
+  canvas: Canvas,
+  region: Region,
+  glyphs: Glyphs,
+  options: { readonly ruled: boolean },
+): void {
+  if (options.ruled) rule(canvas, region, glyphs);
+  const { chart } = view;
+  if (chart === null) return;
+  const plot: Region = {
+    x: region.x + BEFORE,
+    y: region.y + 1,
+    columns: region.columns - BEFORE - AFTER,
+    rows: region.rows - AROUND,
+  };
+  if (plot.rows < 2 || plot.columns < 8) return;
+  const title = cells(chart.title);
+  if (options.ruled) heading(canvas, region, plot.x, title);
+  else if (title.length <= plot.columns) canvas.put(plot.x, region.y, title, 'quiet');
+
+  drawRatioAxis(canvas, plot, glyphs);
+  drawKnobAxis(chart, canvas, plot, region, glyphs);
+  const now = plot.x + Math.floor(Math.max(0, Math.min(1, chart.now)) * (plot.columns - 1));
+  const beads: number[] = [];
+  for (const { power, ratios } of chart.series) {
+    const heights = ratios.map(along);
+    const places = resample(heights, plot.columns, plot.rows);
+    const curve = curveRows(places, plot.rows, glyphs.chart.lines[power - 1]!);
+    for (const { column, row, text } of curve) overlay(canvas, plot.x + column, plot.y + row, text);
+    const height = heightAt(heights, chart.now) * (plot.rows - 1);
+    if (height > -0.5 && height < plot.rows - 0.5) beads.push(plot.y + plot.rows - 1 - Math.round(height));
+    labelEnds(places, canvas, plot, glyphs.superscripts[power - 1]!);
+  }
+  for (const y of beads) canvas.put(now, y, glyphs.now, 'nowStrong');
+  canvas.put(now, plot.y + plot.rows, glyphs.pointer, 'nowStrong');
+}
+
+function rowOf(ratio: number, plot: Region): number {
+  return plot.y + plot.rows - 1 - Math.round(along(ratio) * (plot.rows - 1));
+}
+
+/** The ratio's figures at the left and the line at the limit. */
+function drawRatioAxis(canvas: Canvas, plot: Region, glyphs: Glyphs): void {
+  const axis = plot.x - 1;
+  for (let y = plot.y; y < plot.y + plot.rows; y += 1) canvas.put(axis, y, glyphs.chart.upright, 'quiet');
+  for (const [ratio, label] of SCALE_LABELS) canvas.putRight(axis - 1, rowOf(ratio, plot), label, 'quiet');
+  canvas.put(plot.x, rowOf(1, plot), glyphs.chart.limit.repeat(plot.columns), 'quiet');
+}
+
+/** The knob's axis below the plot, with a tick and a label at each quarter as far as there is room. */
+function drawKnobAxis(chart: ChartView, canvas: Canvas, plot: Region, region: Region, glyphs: Glyphs): void {
+  const y = plot.y + plot.rows;
+  canvas.put(plot.x - 1, y, glyphs.chart.tick + glyphs.chart.level.repeat(plot.columns), 'quiet');
+  const labels = chart.labels;
+  const inner = { ...region, x: region.x + 1, columns: region.columns - 1 };
+  // The ends are placed first, then the middle, then the rest.
+  const last = labels.length - 1;
+  const order = [0, last, last / 2, ...labels.keys()].filter((index) => Number.isInteger(index));
+  for (const index of new Set(order)) {
+    const label = labels[index];
+    if (label === undefined) continue;
+    const column = index === 0 ? plot.x - 1 : plot.x + Math.round((index / last) * (plot.columns - 1));
+    canvas.put(column, y, glyphs.chart.tick, 'quiet');
+    const text = cells(label);
+    const middle = column - Math.floor(text.length / 2);
+    const at = Math.min(middle, region.x + region.columns - text.length);
+    if (isFree(canvas, inner, at, y + 1, text.length)) canvas.put(at, y + 1, text, 'quiet');
+  }
+}
+
+/** Draws a curve's row over what stands there; its blanks cover nothing. */
+function overlay(canvas: Canvas, x: number, y: number, text: string): void {
+  for (let index = 0; index < text.length; index += 1) {
+    if (text[index] !== ' ') canvas.put(x + index, y, text[index]!);
+  }
+}
+
+/** The power at the right of where its curve leaves the plot, where no other curve stands. */
+function labelEnds(places: readonly number[], canvas: Canvas, plot: Region, power: string): void {
+  const seen = (place: number): boolean => place > -0.5 && place < plot.rows - 0.5;
+  let last = places.length - 1;
+  while (last >= 0 && !seen(places[last]!)) last -= 1;
+  if (last < 1) return;
+  const y = plot.y + plot.rows - 1 - Math.round(places[last]!);
+  const x = plot.x + last;
+  const there = canvas.glyphs[y * canvas.columns + x];
+  if (there === ' ' || x >= plot.x + plot.columns) canvas.put(x, y, power, 'strong');
+}

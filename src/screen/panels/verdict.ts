@@ -1,0 +1,48 @@
+import type { Canvas } from '../draw/canvas.ts';
+import { cells, clip } from '../draw/cells.ts';
+import type { Glyphs } from '../draw/glyphs.ts';
+import type { View } from '../view.ts';
+import { showRatio } from './figures.ts';
+import type { Region } from './region.ts';
+import { write } from './region.ts';
+
+/** From this many columns the moves have a panel of their own. */
+const MOVES_BESIDE = 160;
+
+/**
+ * The verdict: a word in reverse video, what stops the member, and its cures as whole sentences. On two
+ * rows the cures have the second; on one they follow, and the moves fill what is left at the right end.
+ */
+export function drawVerdict(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): void {
+  const { verdict } = view;
+  const word = verdict.passes ? ' PASSES ' : ' FAILS ';
+  const left = region.x + 1;
+  const right = region.x + region.columns - 2;
+  canvas.put(left, region.y, word, 'verdict');
+
+  const start = left + word.length + 1;
+  const reason = clip(cells(verdict.reason), right - start + 1, glyphs);
+  canvas.put(start, region.y, reason, verdict.passes ? 'strong' : 'governsStrong');
+
+  const oneRow = region.rows < 2;
+  let x = oneRow && reason !== '' ? start + reason.length + 1 : start;
+  const y = oneRow ? region.y : region.y + 1;
+  for (const cure of verdict.cures) {
+    const sentence = cells(cure);
+    if (write(canvas, x, y, sentence, right - x + 1)) x += sentence.length + 1;
+    else break;
+  }
+  if (oneRow && region.columns < MOVES_BESIDE) drawAside(view, canvas, x + 2, right, y, glyphs);
+}
+
+/** "deepen 0.93 · a ply more 0.87" at the right end: as many moves, best first, as fit whole. */
+function drawAside(view: View, canvas: Canvas, from: number, end: number, y: number, glyphs: Glyphs): void {
+  let text = '';
+  for (const cure of view.cures) {
+    const item = `${cells(cure.kind)} ${showRatio(cure.ratio, glyphs)}`;
+    const longer = text === '' ? item : `${text} · ${item}`;
+    if (longer.length > end - from + 1) break;
+    text = longer;
+  }
+  canvas.put(end - text.length + 1, y, text, 'quiet');
+}

@@ -1,0 +1,138 @@
+import { knobsOf } from '../explore/knobs.ts';
+import type { Units } from '../quantity/index.ts';
+import type { Session } from '../session/session.ts';
+import type { Member } from '../timber/member.ts';
+import type { Edit } from './edit.ts';
+
+/** Everything the explorer knows; one value, never changed in place. */
+export interface State {
+  readonly session: Session;
+  /** The session as the file holds it; another identity than `session` means something is not kept. */
+  readonly kept: Session | null;
+  /** Where `s` writes; null until a name was given. */
+  readonly file: string | null;
+  /** Index of the member in hand. */
+  readonly member: number;
+  /** Key of the knob in hand. */
+  readonly knob: string;
+  readonly past: readonly Moment[];
+  readonly future: readonly Moment[];
+  /** Where the run of nudges on one knob began. */
+  readonly ghost: { readonly knob: string; readonly member: Member } | null;
+  readonly mode: Mode;
+  readonly notice: Notice | null;
+  readonly columns: number;
+  readonly rows: number;
+}
+
+/** A point to come back to. */
+export interface Moment {
+  readonly session: Session;
+  readonly member: number;
+  readonly knob: string;
+}
+
+export interface Notice {
+  readonly text: string;
+  /** A refusal stands in the style of what stops. */
+  readonly refusal: boolean;
+}
+
+export type Mode =
+  | { readonly name: 'explore' }
+  | { readonly name: 'entry'; readonly edit: Edit; readonly fault: string | null }
+  | {
+      readonly name: 'save-as';
+      readonly edit: Edit;
+      readonly fault: string | null;
+      readonly thenLeave: boolean;
+    }
+  | { readonly name: 'help'; readonly scroll: number }
+  | { readonly name: 'leaving' }
+  | StartMode;
+
+/** The three questions of an empty start. */
+export interface StartMode {
+  readonly name: 'start';
+  readonly step: 'use' | 'span' | 'tributary';
+  /** Index into the uses offered. */
+  readonly use: number;
+  readonly edit: Edit;
+  /** in */
+  readonly span: number;
+  readonly fault: string | null;
+}
+
+/** The mode of the one screen; every other mode comes back to it with Escape. */
+export const EXPLORE: Mode = { name: 'explore' };
+
+/** What one event comes to. */
+export interface Step {
+  readonly state: State;
+  readonly effects: readonly Effect[];
+}
+
+/** A step that asks for nothing outside. */
+export function still(state: State): Step {
+  return { state, effects: [] };
+}
+
+/** What is to be done outside the state; carried out in one place. */
+export type Effect =
+  | {
+      readonly do: 'save';
+      readonly file: string;
+      readonly session: Session;
+      readonly fresh: boolean;
+      readonly thenLeave: boolean;
+    }
+  | { readonly do: 'leave' };
+
+export function memberOf(state: State): Member {
+  return state.session.members[state.member]!.member;
+}
+
+export function unitsOf(state: State): Units {
+  return state.session.units;
+}
+
+export function isKept(state: State): boolean {
+  return state.session === state.kept;
+}
+
+/** The state with the member in hand changed; what was is put on the past. */
+export function withMember(state: State, member: Member): State {
+  const members = state.session.members.map((each, index) =>
+    index === state.member ? { ...each, member } : each,
+  );
+  return withSession(state, { ...state.session, members });
+}
+
+/** The state with another session; what was is put on the past. */
+export function withSession(state: State, session: Session): State {
+  return { ...state, session, past: [...state.past, momentOf(state)], future: [], notice: null };
+}
+
+export function momentOf(state: State): Moment {
+  return { session: state.session, member: state.member, knob: state.knob };
+}
+
+/** Knob in hand, kept when the member has it and the first one otherwise. */
+export function knobInHand(state: State): {
+  readonly knobs: ReturnType<typeof knobsOf>;
+  readonly index: number;
+} {
+  const knobs = knobsOf(memberOf(state));
+  return {
+    knobs,
+    index: Math.max(
+      0,
+      knobs.findIndex((knob) => knob.key === state.knob),
+    ),
+  };
+}
+
+/** The state with a refusal on the foot line; everything else stays. */
+export function refused(state: State, reason: string): State {
+  return { ...state, notice: { text: reason, refusal: true } };
+}
