@@ -1,0 +1,163 @@
+import { crossovers } from '../explore/crossovers.ts';
+import { exponentsOf } from '../explore/exponents.ts';
+import { judge } from '../explore/judge.ts';
+import { powersOf } from '../explore/powers.ts';
+import { ratiosOf } from '../explore/ratios.ts';
+import { spanToDepthOf } from '../explore/span-to-depth.ts';
+import {
+  harmless,
+  showQuantity,
+  showRatio,
+  showSmall,
+  showSpan,
+  showStress,
+  type Units,
+} from '../quantity/index.ts';
+import { reportMember } from '../timber/index.ts';
+import type { Member } from '../timber/member.ts';
+import { CHECK_IDS, type CheckId, type CheckResult, type MemberReport } from '../timber/report.ts';
+import { type Loaded, load, type SessionOptions } from './load.ts';
+import { closing, heading, notChecked, placeText, wrapped } from './prose.ts';
+import { STATUS } from './status.ts';
+import { table } from './table.ts';
+
+/** `thrice check FILE`: each member's checks, what governs, pass or fail. Status 0 when every member passes. */
+export function check(file: string, options: SessionOptions, print: (text: string) => void): number {
+  const loaded = load(file, options);
+  const results = loaded.members.map(({ member }) => checkedMember(member, loaded.only));
+  if (options.json === true) {
+    const document = { thrice: 1, ...notChecked(loaded.only).json, members: results.map(memberJson) };
+    print(`${JSON.stringify(document, null, 2)}\n`);
+  } else {
+    print(`${memberTexts(loaded, results).join('\n')}\n`);
+  }
+  return results.every((result) => result.passes) ? STATUS.yes : STATUS.no;
+}
+
+/** A report cut down to the checks asked for. */
+interface Checked {
+  readonly member: Member;
+  readonly report: MemberReport;
+  readonly checks: readonly CheckResult[];
+  readonly passes: boolean;
+  readonly governing: CheckId | null;
+  readonly ratios: Float64Array;
+}
+
+function checkedMember(member: Member, only: readonly CheckId[] | null): Checked {
+  const report = reportMember(member);
+  const ratios = ratiosOf(member);
+  const unloaded = report.cautions.some((caution) => caution.id === 'unloaded');
+  const { passes, governing } = judge(ratios, only);
+  const checks = report.checks.filter((each) => only === null || only.includes(each.id));
+  return { member, report, checks, passes: passes && !unloaded, governing, ratios };
+}
+
+/** JSON has no Infinity: a ratio that nothing can meet is null. */
+function finite(value: number): number | null {
+  return Number.isFinite(value) ? value : null;
+}
+
+function memberJson({ member, report, checks, passes, governing, ratios }: Checked) {
+  const exponents = exponentsOf(member);
+  const spanToDepth = spanToDepthOf(member);
+  const [shear, bending, deflection] = powersOf(ratios).map((power) => power.ratio ?? 0);
+  return {
+    name: report.name,
+    section: {
+      label: report.label,
+      width: report.width,
+      depth: report.depth,
+      plies: report.plies,
+      weight: report.weight,
+    },
+    passes,
+    governing,
+    spanToDepth,
+    crossovers: crossovers(spanToDepth, shear!, bending!, deflection!),
+    checks: checks.map((each) => ({
+      id: each.id,
+      ratio: finite(each.ratio),
+      demand: each.demand,
+      capacity: each.capacity,
+      unit: each.unit,
+      combination: each.combination,
+      pattern: each.pattern,
+      ...(SUPPORT_CHECKS.includes(each.id) ? { support: each.place } : { span: each.place }),
+      at: each.at,
+      clause: each.clause,
+      factors: Object.fromEntries(each.factors.map(({ symbol, value }) => [symbol, value])),
+      exponents: exponents[each.id] ?? null,
+    })),
+    advice: report.advice,
+    reactions: report.reactions.map(({ at, byKind, max, min }) => ({ at, byKind, max, min })),
+    analysis: report.analysis,
+    assumptions: report.assumptions,
+    cautions: report.cautions,
+  };
+}
+
+const SUPPORT_CHECKS: readonly CheckId[] = ['bearing', 'uplift', 'notch'];
+
+function memberTexts(loaded: Loaded, results: readonly Checked[]): string[] {
+  const lines = [...heading(loaded.session), ...notChecked(loaded.only).lines];
+  for (const result of results) lines.push('', ...memberText(result, loaded.units));
+  const failing = results.filter((result) => !result.passes).length;
+  if (results.length > 1)
+    lines.push(
+      '',
+      failing === 0 ? `all ${results.length} members pass` : `${failing} of ${results.length} members fail`,
+    );
+  return [...lines, '', ...closing()];
+}
+
+function memberText({ member, report, checks, passes, governing }: Checked, units: Units): string[] {
+  const spans = member.beam.spans.map((span) => showSpan(span, units)).join(', ');
+  const title = [
+    harmless(member.name),
+    report.label,
+    `${member.stock.species} ${member.stock.grade}`,
+    spans,
+  ].join('  ');
+  const rows = [...checks]
+    .sort((a, b) => CHECK_IDS.indexOf(a.id) - CHECK_IDS.indexOf(b.id))
+    .map((each) => [
+      each.id === governing ? '>' : '',
+      each.id,
+      measured(each, each.demand, units),
+      measured(each, each.capacity, units),
+      showRatio(each.ratio),
+      each.combination,
+      placeText(each, units),
+    ]);
+  return [
+    `${passes ? 'PASSES' : 'FAILS '}  ${title}`,
+    ...table(
+      [
+        { head: '', align: 'left' },
+        { head: 'check', align: 'left' },
+        { head: 'demand', align: 'right' },
+        { head: 'capacity', align: 'right' },
+        { head: 'ratio', align: 'right' },
+        { head: 'loads', align: 'left' },
+        { head: 'at', align: 'left' },
+      ],
+      rows,
+    ).map((line) => `  ${line}`),
+    ...report.cautions.flatMap((caution) => wrapped(`beware: ${caution.text}`, '  ')),
+    ...(report.assumptions.length > 0 ? wrapped(`assumed: ${report.assumptions.join('; ')}`, '  ') : []),
+  ];
+}
+
+function measured(each: CheckResult, value: number, units: Units): string {
+  switch (each.unit) {
+    case 'psi':
+      return showStress(value, units);
+    case 'in':
+      return showSmall(value, units);
+    case 'lb':
+      return showQuantity('pointLoad', value, units);
+    default:
+      return value.toFixed(1);
+  }
+}

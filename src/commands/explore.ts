@@ -1,0 +1,24 @@
+import { harmless } from '../quantity/index.ts';
+import { openExplorer } from '../screen/open-explorer.tsx';
+import { openScreen } from '../screen/terminal/open.tsx';
+import { load } from './load.ts';
+import { saveSession } from './save.ts';
+import { BadInput, STATUS } from './status.ts';
+import type { Streams } from './streams.ts';
+
+/** `thrice [FILE]`: the explorer. */
+export async function explore(file: string | null, streams: Streams): Promise<number> {
+  if (!process.stdin.isTTY || !process.stdout.isTTY) {
+    throw new BadInput(
+      'the explorer needs a terminal on stdin and stdout; without one use thrice check, rack, reach or schema (thrice --help)',
+    );
+  }
+  const session = file === null ? null : load(file, {}).session;
+  const end = await openScreen(openExplorer({ file, session, env: process.env, save: saveSession }));
+  if (end.kind === 'failed') {
+    streams.error(`thrice: stopped by a fault of its own: ${harmless(end.error.message, 200)}\n`);
+    return STATUS.no;
+  }
+  if (end.kind === 'refused') throw new BadInput(end.fault);
+  return STATUS.yes;
+}

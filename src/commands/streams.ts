@@ -1,0 +1,5 @@
+/** Where a command prints; tests give their own. */
+export interface Streams {
+  readonly out: (text: string) => void;
+  readonly error: (text: string) => void;
+}
