@@ -1,7 +1,7 @@
 import type { Member } from '../timber/member.ts';
 import type { NumberKnob } from './knob.ts';
 import { powersOf } from './powers.ts';
-import { ratiosOf } from './ratios.ts';
+import { ratiosLike } from './ratios.ts';
 
 /** Ratios of the three powers along a knob, at equal steps from `from` to `to` (base units). */
 export interface Curve {
@@ -12,13 +12,14 @@ export interface Curve {
 }
 
 export function curveOf(member: Member, knob: NumberKnob, from: number, to: number, samples: number): Curve {
-  const ratios: [number[], number[], number[]] = [[], [], []];
+  const along: [number[], number[], number[]] = [[], [], []];
+  const ratios = ratiosLike(member);
   for (let at = 0; at < samples; at += 1) {
     const value = from + ((to - from) * at) / (samples - 1);
-    const powers = powersOf(ratiosOf(knob.put(member, value)));
-    for (const [index, power] of powers.entries()) ratios[index]!.push(power.ratio ?? Number.NaN);
+    const powers = powersOf(ratios(knob.put(member, value)));
+    for (const [index, power] of powers.entries()) along[index]!.push(power.ratio ?? Number.NaN);
   }
-  return { from, to, ratios };
+  return { from, to, ratios: along };
 }
 
 /** Steps between the marks of an axis, in its units, and ten times, a hundred times those. */

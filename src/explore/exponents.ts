@@ -1,6 +1,6 @@
-import type { Member, Section } from '../timber/member.ts';
+import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
-import { ratiosOf, sectionRater } from './ratios.ts';
+import { ratiosLike } from './ratios.ts';
 import { scaleLengths, scaleLoads } from './scale.ts';
 
 /** d ln(ratio) / d ln(quantity), at the member as it is. */
@@ -30,14 +30,15 @@ const STEP_APART = 0.05;
 
 /** Local exponents of every check that applies. */
 export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>> {
-  const section = sectionRater(member);
-  const grown = (key: 'width' | 'depth') => (by: number) => section(scaledSection(member.section, key, by));
+  const ratios = ratiosLike(member);
+  const grown = (key: 'width' | 'depth') => (by: number) =>
+    ratios({ ...member, section: { ...member.section, [key]: member.section[key] * by } });
   const upright = !member.section.flat;
   const slopes = {
-    span: slopesOf((by) => ratiosOf(scaleLengths(member, by))),
+    span: slopesOf((by) => ratios(scaleLengths(member, by))),
     depth: slopesOf(grown(upright ? 'depth' : 'width')),
     width: slopesOf(grown(upright ? 'width' : 'depth')),
-    load: slopesOf((by) => ratiosOf(scaleLoads(member, by))),
+    load: slopesOf((by) => ratios(scaleLoads(member, by))),
   };
   const exponents: Partial<Record<CheckId, Exponents>> = {};
   CHECK_IDS.forEach((id, at) => {
@@ -50,10 +51,6 @@ export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>>
     if (EXPONENT_QUANTITIES.every((quantity) => Number.isFinite(own[quantity]))) exponents[id] = own;
   });
   return exponents;
-}
-
-function scaledSection(section: Section, key: 'width' | 'depth', by: number): Section {
-  return { ...section, [key]: section[key] * by };
 }
 
 /** Slopes on logarithmic axes; where a factor steps the slope of the side that does not step. */

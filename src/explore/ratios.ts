@@ -1,21 +1,29 @@
-import { prepare, rate, woodOf } from '../timber/index.ts';
-import type { Member, Section } from '../timber/member.ts';
+import { type Prepared, prepare, prepareLike, rate, type Wood, woodOf } from '../timber/index.ts';
+import type { Member } from '../timber/member.ts';
 import { CHECK_IDS } from '../timber/report.ts';
 
 /** Ratios of every check of a member, in the order of CHECK_IDS; NaN where a check does not apply. */
 export function ratiosOf(member: Member): Float64Array {
-  const ratios = new Float64Array(CHECK_IDS.length);
-  rate(prepare(member), woodOf(member), member.section, ratios);
-  return ratios;
+  return ratiosLike(member)(member);
 }
 
-/** The same for another section under the same loads, without preparing them again. */
-export function sectionRater(member: Member): (section: Section) => Float64Array {
-  const prepared = prepare(member);
-  const wood = woodOf(member);
-  return (section) => {
+/**
+ * The same for members that are like this one (another section, load or span): what need not be worked out again
+ * for them is kept.
+ */
+export function ratiosLike(member: Member): (like: Member) => Float64Array {
+  const prepared: Prepared = prepare(member);
+  const wood: Wood = woodOf(member);
+  return (like) => {
     const ratios = new Float64Array(CHECK_IDS.length);
-    rate(prepared, wood, section, ratios);
+    const own = like === member ? prepared : prepareLike(prepared, like);
+    rate(own, sameWood(member, like) ? wood : woodOf(like), like.section, ratios);
     return ratios;
   };
+}
+
+const WOOD_KEYS = ['stock', 'service', 'temperature', 'incised', 'repetitive', 'typedFactors'] as const;
+
+function sameWood(one: Member, other: Member): boolean {
+  return WOOD_KEYS.every((key) => one[key] === other[key]);
 }

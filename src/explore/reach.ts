@@ -1,4 +1,4 @@
-import { prepare, rate, type Wood } from '../timber/index.ts';
+import { prepare, prepareScaled, rate, type Wood } from '../timber/index.ts';
 import type { Member, Section } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../timber/report.ts';
 import { judge } from './judge.ts';
@@ -32,12 +32,13 @@ export function reachFinder(
   only: readonly CheckId[] | null = null,
 ): (section: Section) => Reach {
   const longest = Math.max(...member.beam.spans);
+  const here = prepare(member);
   const preparedAt = new Map<number, ReturnType<typeof prepare>>();
   const ratios = new Float64Array(CHECK_IDS.length);
   const worstAt = (section: Section, span: number) => {
     let prepared = preparedAt.get(span);
     if (prepared === undefined) {
-      prepared = prepare(scaleLengths(member, span / longest));
+      prepared = prepareScaled(here, scaleLengths(member, span / longest), span / longest);
       if (preparedAt.size < 4096) preparedAt.set(span, prepared);
     }
     rate(prepared, wood, section, ratios);

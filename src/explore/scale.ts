@@ -14,7 +14,7 @@ export function scaleLengths(member: Member, factor: number): Member {
       spans: beam.spans.map((span) => span * factor),
       overhangs: { left: beam.overhangs.left * factor, right: beam.overhangs.right * factor },
     },
-    loads: member.loads.map((load) => moved(load, factor)),
+    loads: member.loads.length === 0 ? member.loads : member.loads.map((load) => moved(load, factor)),
   };
 }
 

@@ -1,16 +1,16 @@
 import { DEFLECTION, MOMENT, SHEAR, STRIDE, V0, V1 } from '../statics/piece.ts';
 import type { States } from '../statics/solve.ts';
 import type { Found } from './bar.ts';
-import type { Effects, LateralCase, TermGroup } from './effects.ts';
-import { type Envelope, envelopeOf } from './envelope.ts';
+import type { Effects, TermGroup } from './effects.ts';
+import { type Envelope, variableEnvelope, withDead } from './envelope.ts';
 import { lateralCases } from './lateral-case.ts';
 import type { Loading } from './loading.ts';
+import { MomentGroup } from './moment-group.ts';
 import { type LoadParts, solveParts } from './parts.ts';
 import { type PatternBook, patternBook } from './pattern-book.ts';
 import { searchNumber, searchPieces } from './search.ts';
 import { shearBeyond } from './shear-at-depth.ts';
 import { slopeStretch } from './slope.ts';
-import { zeroMomentLength } from './zero-moment.ts';
 
 /** Own weights from 0 to `heaviest` (lb/in) are exact; `deadFactor` multiplies D, own weight included, in deflectionTotal. */
 export interface EffectsOptions {
@@ -34,15 +34,18 @@ export function compileEffects(loading: Loading, options: EffectsOptions): Effec
 export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
   const { heaviest } = options;
   const { table, fields, grid, solution } = parts;
-  const strength = envelopeOf(parts, table.strength, 1);
+  const variable = variableEnvelope(parts, table.strength);
+  const strength = withDead(variable, 1);
+  // The deflection list differs by its wind alone.
+  const windy = parts.kinds.some(({ kind }) => kind === 'wind' || kind === 'windUp');
+  const deflecting = windy ? variableEnvelope(parts, table.deflection, variable) : variable;
   const book = patternBook(parts);
   const every = table.strength.map((_, i) => i);
 
+  let endShear: TermGroup[] | null = null;
   const shear: TermGroup[] = [];
-  const endShear: TermGroup[] = [];
   const sagging: TermGroup[] = [];
   const hogging: TermGroup[] = [];
-  const ends = endSupports(parts);
   for (const { duration, combinations } of table.byDuration) {
     push(
       shear,
@@ -51,18 +54,18 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
       duration,
       -1,
     );
-    for (const end of ends) {
-      const found = searchNumber(strength, combinations, BOTH, end.read, end, heaviest);
-      push(endShear, found, book, duration, end.place);
-    }
     for (const lateral of lateralCases(parts, combinations)) {
       for (let f = 0; f < fields.length; f++) {
         const from = grid.first[f]!;
         const to = grid.first[f + 1]!;
+        const pushMoments = (groups: TermGroup[], found: readonly Found[]) => {
+          if (found.length > 0)
+            groups.push(new MomentGroup(strength, book, found, duration, f, lateral.case, heaviest));
+        };
         const down = searchPieces(strength, MOMENT, DOWN, lateral.combinations, from, to, heaviest);
-        pushMoments(sagging, down, strength, book, duration, f, lateral.case, heaviest);
+        pushMoments(sagging, down);
         const up = searchPieces(strength, MOMENT, UP, lateral.combinations, from, to, heaviest);
-        pushMoments(hogging, up, strength, book, duration, f, lateral.case, heaviest);
+        pushMoments(hogging, up);
       }
     }
   }
@@ -79,7 +82,7 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
   // Square to a sloped member the deflections are those on plan over cos².
   const stretch = slopeStretch(parts.loading.slope) ** 2;
   const deflections = (deadFactor: number): TermGroup[] => {
-    const envelope = envelopeOf(parts, table.deflection, deadFactor);
+    const envelope = withDead(deflecting, deadFactor);
     const groups: TermGroup[] = [];
     for (let f = 0; f < fields.length; f++) {
       const found = searchPieces(
@@ -102,7 +105,10 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
     deflectionCombinations: table.deflection,
     patterns: book.names,
     shear,
-    endShear,
+    get endShear() {
+      endShear ??= endShearOf(strength, book, heaviest);
+      return endShear;
+    },
     sagging,
     hogging,
     bearing,
@@ -111,6 +117,22 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
     deflectionTotal,
     shearAtDepth: parts.loading.shearAt === 'd' ? shearBeyond(strength, book) : null,
   };
+}
+
+function endShearOf(strength: Envelope, book: PatternBook, heaviest: number): TermGroup[] {
+  const groups: TermGroup[] = [];
+  for (const { duration, combinations } of strength.parts.table.byDuration) {
+    for (const end of endSupports(strength.parts)) {
+      push(
+        groups,
+        searchNumber(strength, combinations, BOTH, end.read, end, heaviest),
+        book,
+        duration,
+        end.place,
+      );
+    }
+  }
+  return groups;
 }
 
 /** The member's ends that are supports, with how to read the shear beside them. */
@@ -142,28 +164,6 @@ function push(
     place,
     zeroMomentLength: 0,
     lateralCase: 'other',
-    terms: found.map((term) => book.term(term)),
-  });
-}
-
-function pushMoments(
-  groups: TermGroup[],
-  found: readonly Found[],
-  envelope: Envelope,
-  book: PatternBook,
-  duration: number,
-  place: number,
-  lateralCase: LateralCase,
-  heaviest: number,
-): void {
-  if (found.length === 0) return;
-  let longest = 0;
-  for (const term of found) longest = Math.max(longest, zeroMomentLength(envelope, term, heaviest));
-  groups.push({
-    duration,
-    place,
-    zeroMomentLength: longest,
-    lateralCase,
     terms: found.map((term) => book.term(term)),
   });
 }

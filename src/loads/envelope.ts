@@ -1,5 +1,6 @@
 import { Q0, STRIDE, Y0 } from '../statics/piece.ts';
 import type { States } from '../statics/solve.ts';
+import { zeros } from '../statics/zeros.ts';
 import type { Combination } from './combinations.ts';
 import type { LoadKind } from './kinds.ts';
 import type { LoadParts } from './parts.ts';
@@ -14,6 +15,8 @@ export interface Envelope {
   readonly list: readonly Combination[];
   readonly hi: readonly States[];
   readonly lo: readonly States[];
+  /** Dead load where it is still to be added to hi and lo, times deadScale; null where they hold it. */
+  readonly dead: States | null;
   /** Dead factor of each combination times the envelope's own; own weight enters with it. */
   readonly deadScale: readonly number[];
   /** Combinations without patterns: hi and lo are the same plain sum. */
@@ -23,45 +26,99 @@ export interface Envelope {
   readonly ownForce: number;
 }
 
-/** `deadFactor` multiplies dead load, own weight included: 1 for strength, 0 for the variable part alone. */
+/** With `deadFactor` times dead load in hi and lo: 1 for strength, 0 for the variable part alone. */
 export function envelopeOf(parts: LoadParts, list: readonly Combination[], deadFactor: number): Envelope {
+  const apart = withDead(variableEnvelope(parts, list), deadFactor);
+  const { dead, deadScale, plain } = apart;
+  if (!dead) return apart;
+  const hi = apart.hi.map((states, c) => sum(states, dead, deadScale[c]!));
+  const lo = apart.lo.map((states, c) => (plain[c] ? hi[c]! : sum(states, dead, deadScale[c]!)));
+  return { ...apart, hi, lo, dead: null };
+}
+
+/** The variable part of every combination, without dead load; combinations with factors as in `like` are taken from it. */
+export function variableEnvelope(
+  parts: LoadParts,
+  list: readonly Combination[],
+  like: Envelope | null = null,
+): Envelope {
+  const size = STRIDE * parts.grid.count;
+  const supports = parts.solution.supports.length;
+  const blank = () => ({ data: zeros(size), reactions: zeros(supports) });
   const hi: States[] = [];
   const lo: States[] = [];
   const deadScale: number[] = [];
   const plain: boolean[] = [];
-  let force = 0;
-  let ownScale = 0;
-  const size = STRIDE * parts.grid.count;
-  const supports = parts.solution.supports.length;
-  for (const combination of list) {
-    const scale = deadFactor * (combination.factors.dead ?? 0);
-    const upper = { data: new Float64Array(size), reactions: new Float64Array(supports) };
-    let lower = upper;
-    if (parts.dead && scale !== 0) addTo(upper, parts.dead, scale);
-    let patterns = false;
-    for (const states of parts.kinds) {
-      if (states.parts && combination.factors[states.kind]) patterns = true;
+  for (let c = 0; c < list.length; c++) {
+    const { factors, variable } = list[c]!;
+    deadScale.push(0);
+    if (like && like.list[c]!.variable === variable) {
+      hi.push(like.hi[c]!);
+      lo.push(like.lo[c]!);
+      plain.push(like.plain[c]!);
+      continue;
     }
-    if (patterns) lower = { data: upper.data.slice(), reactions: upper.reactions.slice() };
+    let patterns = false;
+    for (const states of parts.kinds) if (states.parts && factors[states.kind]) patterns = true;
+    const upper = blank();
+    const lower = patterns ? blank() : upper;
     for (const states of parts.kinds) {
-      const factor = combination.factors[states.kind];
+      const factor = factors[states.kind];
       if (!factor) continue;
       addTo(upper, states.hi, factor);
       if (patterns) addTo(lower, states.lo, factor);
     }
     hi.push(upper);
     lo.push(lower);
-    deadScale.push(scale);
     plain.push(!patterns);
-    let sum = 0;
-    for (let i = 0; i < supports; i++)
-      sum += Math.max(Math.abs(upper.reactions[i]!), Math.abs(lower.reactions[i]!));
-    force = Math.max(force, sum);
-    ownScale = Math.max(ownScale, scale);
   }
-  let ownForce = 0;
-  if (parts.own) for (const reaction of parts.own.reactions) ownForce += ownScale * Math.abs(reaction);
-  return { parts, list, hi, lo, deadScale, plain, force, ownForce };
+  return { parts, list, hi, lo, dead: null, deadScale, plain, force: forceOf(hi, lo), ownForce: 0 };
+}
+
+/** The same with `deadFactor` times the dead load of each combination to be added. */
+export function withDead(variable: Envelope, deadFactor: number): Envelope {
+  if (deadFactor === 0) return variable;
+  const { parts, list, plain, hi, lo } = variable;
+  const deadScale = list.map(({ factors }) => deadFactor * (factors.dead ?? 0));
+  const most = Math.max(...deadScale);
+  return {
+    parts,
+    list,
+    hi,
+    lo,
+    dead: parts.dead,
+    deadScale,
+    plain,
+    force: variable.force + most * grossOf(parts.dead),
+    ownForce: most * grossOf(parts.own),
+  };
+}
+
+function grossOf(states: States | null): number {
+  let gross = 0;
+  if (states) for (const reaction of states.reactions) gross += Math.abs(reaction);
+  return gross;
+}
+
+function forceOf(hi: readonly States[], lo: readonly States[]): number {
+  let force = 0;
+  for (let c = 0; c < hi.length; c++) {
+    const upper = hi[c]!.reactions;
+    const lower = lo[c]!.reactions;
+    let borne = 0;
+    for (let i = 0; i < upper.length; i++) borne += Math.max(Math.abs(upper[i]!), Math.abs(lower[i]!));
+    if (borne > force) force = borne;
+  }
+  return force;
+}
+
+function sum(states: States, other: States, factor: number): States {
+  const data = zeros(states.data.length);
+  for (let i = 0; i < data.length; i++) data[i] = states.data[i]! + factor * other.data[i]!;
+  const reactions = zeros(states.reactions.length);
+  for (let i = 0; i < reactions.length; i++)
+    reactions[i] = states.reactions[i]! + factor * other.reactions[i]!;
+  return { data, reactions };
 }
 
 function addTo(target: States, states: States, factor: number): void {
@@ -147,7 +204,7 @@ export function partFactor(e: Envelope, c: number, kind: LoadKind, field: number
 }
 
 /** Adds up the six numbers at the start of one piece under a combination and pattern, own weight left out. */
-export function pieceUnder(e: Envelope, c: number, pattern: Pattern, piece: number, out: Float64Array): void {
+export function pieceUnder(e: Envelope, c: number, pattern: Pattern, piece: number, out: number[]): void {
   const o = STRIDE * piece;
   const { parts } = e;
   for (let i = Q0; i <= Y0; i++) out[i] = parts.dead ? e.deadScale[c]! * parts.dead.data[o + i]! : 0;

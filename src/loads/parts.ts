@@ -1,6 +1,7 @@
 import type { BeamLoad, Field } from '../statics/beam.ts';
 import { type Grid, gridOf, type PieceLoads, spread } from '../statics/grid.ts';
 import { type BeamSolution, type States, solveBeam, statesOf } from '../statics/solve.ts';
+import { zeros } from '../statics/zeros.ts';
 import { areaToLine, kindSign, planLoad } from './area-to-line.ts';
 import { type CombinationTable, combinationTable } from './combinations.ts';
 import { LOAD_KINDS, type LoadKind } from './kinds.ts';
@@ -55,9 +56,9 @@ export function solveParts(loading: Loading): LoadParts {
   };
   const wholeOf = (line: number, typed: readonly BeamLoad[]): States => {
     const states = typed.length > 0 ? statesOf(solution, grid, spread(grid, typed)) : null;
-    if (line === 0) return states ?? zeros(grid, solution.supports.length);
+    if (line === 0) return states ?? blankStates(grid, solution.supports.length);
     if (fields.length === 1 && !states) return scaled(units(0), line);
-    const target = states ?? zeros(grid, solution.supports.length);
+    const target = states ?? blankStates(grid, solution.supports.length);
     for (let f = 0; f < fields.length; f++) add(target, units(f), line);
     return target;
   };
@@ -125,9 +126,9 @@ function unitStates(solution: BeamSolution, grid: Grid): (field: number) => Stat
     let unit = made[field];
     if (!unit) {
       const loads = {
-        q0: new Float64Array(grid.count),
-        q1: new Float64Array(grid.count),
-        points: new Float64Array(grid.count + 1),
+        q0: zeros(grid.count),
+        q1: zeros(grid.count),
+        points: zeros(grid.count + 1),
       };
       loads.q0.fill(1, grid.first[field]!, grid.first[field + 1]!);
       unit = statesOf(solution, grid, loads);
@@ -141,14 +142,14 @@ function isEmpty(loads: PieceLoads): boolean {
   return [loads.q0, loads.q1, loads.points].every((list) => list.every((value) => value === 0));
 }
 
-function zeros(grid: Grid, supports: number): States {
-  return { data: new Float64Array(grid.count * 11), reactions: new Float64Array(supports) };
+function blankStates(grid: Grid, supports: number): States {
+  return { data: zeros(grid.count * 11), reactions: zeros(supports) };
 }
 
 export function scaled(states: States, factor: number): States {
-  const data = new Float64Array(states.data.length);
+  const data = zeros(states.data.length);
   for (let i = 0; i < data.length; i++) data[i] = factor * states.data[i]!;
-  const reactions = new Float64Array(states.reactions.length);
+  const reactions = zeros(states.reactions.length);
   for (let i = 0; i < reactions.length; i++) reactions[i] = factor * states.reactions[i]!;
   return { data, reactions };
 }
@@ -165,7 +166,7 @@ function patterned(
   grid: Grid,
   solution: BeamSolution,
 ): KindStates {
-  const blank = () => zeros(grid, solution.supports.length);
+  const blank = () => blankStates(grid, solution.supports.length);
   const whole = blank();
   for (const part of parts) if (part) add(whole, part, 1);
   const hi = blank();
@@ -194,7 +195,7 @@ function patterned(
   return { kind, whole, parts, hi, lo };
 }
 
-function addSigned(hi: Float64Array, lo: Float64Array, part: Float64Array): void {
+function addSigned(hi: number[], lo: number[], part: number[]): void {
   for (let i = 0; i < part.length; i++) {
     const value = part[i]!;
     if (value > 0) hi[i]! += value;
@@ -205,13 +206,13 @@ function addSigned(hi: Float64Array, lo: Float64Array, part: Float64Array): void
 /** Largest and smallest of every number over the arrangements of snow. */
 function boundSnow(
   cases: readonly SnowCase[],
-  hi: Float64Array,
-  lo: Float64Array,
-  parts: readonly (Float64Array | undefined)[],
+  hi: number[],
+  lo: number[],
+  parts: readonly (number[] | undefined)[],
 ): void {
   hi.fill(Number.NEGATIVE_INFINITY);
   lo.fill(Number.POSITIVE_INFINITY);
-  const sum = new Float64Array(hi.length);
+  const sum = zeros(hi.length);
   for (const { full } of cases) {
     sum.fill(0);
     for (let f = 0; f < parts.length; f++) {

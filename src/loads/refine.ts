@@ -1,5 +1,6 @@
 import { fieldOfPiece } from '../statics/grid.ts';
 import { foundPlaces, largestPlace, type Order, pieceValue, STRIDE, signChanges } from '../statics/piece.ts';
+import { zeros } from '../statics/zeros.ts';
 import type { Bar, Found } from './bar.ts';
 import type { Term } from './effects.ts';
 import { type Envelope, pieceUnder, WHOLE, worstPattern } from './envelope.ts';
@@ -8,9 +9,9 @@ import type { Pattern } from './patterns.ts';
 /** Extremes nearer than this part of a piece are at one place; the value's error is of second order in it. */
 const SAME_PLACE = 1e-7;
 
-const NUMBERS = new Float64Array(6);
-const SUMMED = new Float64Array(6);
-const HEAVY = new Float64Array(6);
+const NUMBERS = zeros(6);
+const SUMMED = zeros(6);
+const HEAVY = zeros(6);
 
 /** Works out one piece under one combination: the worst pattern is fixed between the sign changes of the parts. */
 export function refine(
@@ -25,7 +26,11 @@ export function refine(
   to: number,
 ): void {
   if (e.plain[c]) {
-    consider(e, order, sign, c, p, e.hi[c]!.data, STRIDE * p, from, to, WHOLE, bar, found);
+    const { data } = e.hi[c]!;
+    const o = STRIDE * p;
+    for (let i = 0; i < 6; i++)
+      NUMBERS[i] = data[o + i]! + (e.dead ? e.deadScale[c]! * e.dead.data[o + i]! : 0);
+    consider(e, order, sign, c, p, from, to, WHOLE, bar, found);
     return;
   }
   const cuts = patternCuts(e, order, c, p, from, to);
@@ -38,13 +43,13 @@ export function refine(
     const pattern = worstPattern(e, c, sign, (states) => pieceValue(states.data, STRIDE * p, order, middle));
     if (!cases) {
       pieceUnder(e, c, pattern, p, NUMBERS);
-      consider(e, order, sign, c, p, NUMBERS, 0, lo, hi, pattern, bar, found);
+      consider(e, order, sign, c, p, lo, hi, pattern, bar, found);
       continue;
     }
     for (const snow of cases) {
       const one = { live: pattern.live, roofLive: pattern.roofLive, snow: snow.full };
       pieceUnder(e, c, one, p, NUMBERS);
-      consider(e, order, sign, c, p, NUMBERS, 0, lo, hi, one, bar, found);
+      consider(e, order, sign, c, p, lo, hi, one, bar, found);
     }
   }
 }
@@ -64,15 +69,13 @@ function patternCuts(e: Envelope, order: Order, c: number, p: number, from: numb
   return cuts.length === 2 ? cuts : cuts.sort((a, b) => a - b);
 }
 
-/** Adds the extreme of one fixed pattern on part of a piece, unless the bar covers it. */
+/** Adds the extreme of the numbers in NUMBERS, one fixed pattern, on part of a piece, unless the bar covers it. */
 function consider(
   e: Envelope,
   order: Order,
   sign: number,
   c: number,
   p: number,
-  numbers: Float64Array,
-  o: number,
   lo: number,
   hi: number,
   pattern: Pattern,
@@ -83,14 +86,14 @@ function consider(
   const own = e.parts.own?.data ?? null;
   const ownAt = STRIDE * p;
   const scale = own ? e.deadScale[c]! : 0;
-  const t0 = largestPlace(numbers, o, order, sign, lo, hi);
-  const v0 = sign * pieceValue(numbers, o, order, t0);
+  const t0 = largestPlace(NUMBERS, 0, order, sign, lo, hi);
+  const v0 = sign * pieceValue(NUMBERS, 0, order, t0);
   let perWeight = 0;
   let vH = v0;
   let tH = t0;
   if (scale !== 0 && heaviest !== 0) {
     perWeight = sign * scale * pieceValue(own!, ownAt, order, t0);
-    for (let i = 0; i < 6; i++) HEAVY[i] = numbers[o + i]! + heaviest * scale * own![ownAt + i]!;
+    for (let i = 0; i < 6; i++) HEAVY[i] = NUMBERS[i]! + heaviest * scale * own![ownAt + i]!;
     tH = largestPlace(HEAVY, 0, order, sign, lo, hi);
     vH = sign * pieceValue(HEAVY, 0, order, tH);
   }
@@ -100,8 +103,8 @@ function consider(
   let valueAt: Term['valueAt'] = null;
   let raised = bar.raise(v0, perWeight);
   if (moves) {
-    const base = numbers.slice(o, o + 6);
-    const weight = own!.subarray(ownAt, ownAt + 6);
+    const base = NUMBERS.slice();
+    const weight = own!.slice(ownAt, ownAt + 6);
     valueAt = (w) => {
       for (let i = 0; i < 6; i++) SUMMED[i] = base[i]! + w * scale * weight[i]!;
       return sign * pieceValue(SUMMED, 0, order, largestPlace(SUMMED, 0, order, sign, lo, hi));

@@ -36,9 +36,10 @@ export function searchNumber(
   const bar = new Bar(e, SHEAR, heaviest);
   const found: Found[] = [];
   const own = e.parts.own ? read(e.parts.own) : 0;
+  const dead = e.dead ? read(e.dead) : 0;
   for (const c of combinations) {
     for (const sign of signs) {
-      const base = sign * read(sign > 0 ? e.hi[c]! : e.lo[c]!);
+      const base = sign * (read(sign > 0 ? e.hi[c]! : e.lo[c]!) + e.deadScale[c]! * dead);
       const perWeight = sign * own * e.deadScale[c]!;
       if (base <= 0 && base + heaviest * perWeight <= 0) continue;
       if (bar.covers(base, base + heaviest * perWeight)) continue;
@@ -72,28 +73,37 @@ export function searchPieces(
   const start = AT_START[order]!;
   const end = AT_END[order]!;
   const own = e.parts.own?.data ?? null;
-  raiseByEnds(e, start, end, signs, combinations, from, to, bar, found);
+  const dead = e.dead?.data ?? null;
+  raiseByEnds(e, order, signs, combinations, from, to, bar, found);
   const { edges } = e.parts.grid;
   for (const c of combinations) {
-    const scale = own ? e.deadScale[c]! : 0;
+    const deadBy = dead ? e.deadScale[c]! : 0;
+    const ownBy = own ? heaviest * e.deadScale[c]! : 0;
     for (const sign of signs) {
       const data = (sign > 0 ? e.hi[c]! : e.lo[c]!).data;
       for (let p = from; p < to; p++) {
         const o = STRIDE * p;
         const h = edges[p + 1]! - edges[p]!;
-        const a = sign * data[o + start]!;
-        const b = sign * data[o + end]!;
-        let bound0 = Math.max(a, b) + bulge(data, o, order, sign, h, null, 0);
-        let boundH = bound0;
-        if (scale !== 0 && heaviest !== 0) {
-          const by = heaviest * scale;
-          const aH = a + sign * by * own![o + start]!;
-          const bH = b + sign * by * own![o + end]!;
-          boundH = Math.max(aH, bH) + bulge(data, o, order, sign, h, own, by);
+        const bulge0 = bulge(data, o, order, sign, h, dead, deadBy, null, 0);
+        const bulgeH = ownBy === 0 ? bulge0 : bulge(data, o, order, sign, h, dead, deadBy, own, ownBy);
+        // The ends themselves have set the bar already.
+        if (bulge0 === 0 && bulgeH === 0) continue;
+        let a = data[o + start]!;
+        let b = data[o + end]!;
+        if (deadBy !== 0) {
+          a += deadBy * dead![o + start]!;
+          b += deadBy * dead![o + end]!;
         }
-        if (bound0 <= 0) bound0 = 0;
-        if (boundH <= 0) boundH = 0;
-        if (!bar.covers(bound0, boundH)) refine(e, order, sign, c, p, bar, found, 0, h);
+        const bound0 = (sign > 0 ? Math.max(a, b) : -Math.min(a, b)) + bulge0;
+        let boundH = bound0;
+        if (ownBy !== 0) {
+          a += ownBy * own![o + start]!;
+          b += ownBy * own![o + end]!;
+          boundH = (sign > 0 ? Math.max(a, b) : -Math.min(a, b)) + bulgeH;
+        }
+        if (bound0 <= 0 && boundH <= 0) continue;
+        if (!bar.covers(Math.max(0, bound0), Math.max(0, boundH)))
+          refine(e, order, sign, c, p, bar, found, 0, h);
       }
     }
   }
@@ -124,38 +134,38 @@ export function searchStretch(
   return kept(found, bar);
 }
 
-/** How far a quantity can rise above its end values within a piece. */
+/** How far a quantity can rise above its end values within a piece; numbers are data + deadBy dead + ownBy own. */
 function bulge(
-  data: Float64Array,
+  data: readonly number[],
   o: number,
   order: Order,
   sign: number,
   h: number,
-  own: Float64Array | null,
-  by: number,
+  dead: readonly number[] | null,
+  deadBy: number,
+  own: readonly number[] | null,
+  ownBy: number,
 ): number {
-  let curve: number;
-  if (order === SHEAR) curve = sign * (data[o + Q1]! + (own ? by * own[o + Q1]! : 0));
-  else if (order === MOMENT) curve = loadPeak(data, o, sign, own, by);
-  else {
-    const a = sign * (data[o + M0]! + (own ? by * own[o + M0]! : 0));
-    const b = sign * (data[o + M1]! + (own ? by * own[o + M1]! : 0));
-    curve = Math.max(a, b) + (Math.max(0, loadPeak(data, o, sign, own, by)) * h * h) / 8;
+  const at = (i: number): number => {
+    let value = data[o + i]!;
+    if (deadBy !== 0) value += deadBy * dead![o + i]!;
+    if (ownBy !== 0) value += ownBy * own![o + i]!;
+    return sign * value;
+  };
+  if (order === SHEAR) {
+    const curve = at(Q1);
+    return curve > 0 ? (curve * h * h) / 8 : 0;
   }
-  return curve > 0 ? (curve * h * h) / 8 : 0;
-}
-
-function loadPeak(data: Float64Array, o: number, sign: number, own: Float64Array | null, by: number): number {
-  const a = sign * (data[o + Q0]! + (own ? by * own[o + Q0]! : 0));
-  const b = sign * (data[o + QE]! + (own ? by * own[o + QE]! : 0));
-  return Math.max(a, b);
+  const load = Math.max(0, at(Q0), at(QE));
+  if (order === MOMENT) return (load * h * h) / 8;
+  const moment = Math.max(at(M0), at(M1)) + (load * h * h) / 8;
+  return moment > 0 ? (moment * h * h) / 8 : 0;
 }
 
 /** Sets the bar by the best end of a piece at no own weight and at the heaviest, and notes both as terms. */
 function raiseByEnds(
   e: Envelope,
-  start: number,
-  end: number,
+  order: Order,
   signs: readonly number[],
   combinations: readonly number[],
   from: number,
@@ -163,7 +173,10 @@ function raiseByEnds(
   bar: Bar,
   found: Found[],
 ): void {
+  const start = AT_START[order]!;
+  const end = AT_END[order]!;
   const own = e.parts.own?.data ?? null;
+  const dead = e.dead?.data ?? null;
   const h = bar.heaviest;
   let best0 = -1;
   let bestH = -1;
@@ -172,16 +185,20 @@ function raiseByEnds(
   let sign0 = 1;
   let signH = 1;
   for (const c of combinations) {
-    const scale = own ? e.deadScale[c]! : 0;
+    const deadBy = dead ? e.deadScale[c]! : 0;
+    const ownBy = own ? e.deadScale[c]! : 0;
     for (const sign of signs) {
       const data = (sign > 0 ? e.hi[c]! : e.lo[c]!).data;
       for (let p = from; p < to; p++) {
-        for (let side = 0; side < 2; side++) {
+        // Only shear differs between the end of one piece and the start of the next.
+        const sides = order === SHEAR || p === to - 1 ? 2 : 1;
+        for (let side = 0; side < sides; side++) {
           const i = STRIDE * p + (side === 0 ? start : end);
-          const base = sign * data[i]!;
-          const slope = scale === 0 ? 0 : sign * scale * own![i]!;
+          const base = sign * (deadBy === 0 ? data[i]! : data[i]! + deadBy * dead![i]!);
+          const slope = ownBy === 0 ? 0 : sign * ownBy * own![i]!;
           if (base <= 0 && base + h * slope <= 0) continue;
           const raised = bar.raise(base, slope);
+          if (raised === 0) continue;
           if (raised & 1) {
             best0 = i;
             c0 = c;
@@ -213,7 +230,8 @@ function endTerm(e: Envelope, i: number, start: number, c: number, sign: number)
   const piece = Math.floor(i / STRIDE);
   const atStart = i - STRIDE * piece === start;
   return {
-    base: sign * (sign > 0 ? e.hi[c]! : e.lo[c]!).data[i]!,
+    base:
+      sign * ((sign > 0 ? e.hi[c]! : e.lo[c]!).data[i]! + (e.dead ? e.deadScale[c]! * e.dead.data[i]! : 0)),
     perWeight: e.parts.own ? sign * e.deadScale[c]! * e.parts.own.data[i]! : 0,
     valueAt: null,
     combination: c,

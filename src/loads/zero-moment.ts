@@ -1,10 +1,11 @@
 import { foundPlaces, MOMENT, pieceValue, STRIDE, signChanges } from '../statics/piece.ts';
+import { zeros } from '../statics/zeros.ts';
 import type { Found } from './bar.ts';
 import { type Envelope, pieceUnder } from './envelope.ts';
 
 /** Moments this near to zero against the extreme are zero. */
 const ZERO = 1e-9;
-const NUMBERS = new Float64Array(6);
+const NUMBERS = zeros(6);
 
 /**
  * Length between the points of zero moment on either side of an extreme, in (NDS 5.3.6), under the term's own

@@ -4,7 +4,7 @@ export { type AdjustedValues, adjusted } from './checks/adjusted.ts';
 export { explainChecks } from './checks/explain.ts';
 export { governingField } from './checks/governing-field.ts';
 export { lineLoadOf } from './checks/line-load.ts';
-export { deadFactorOf, type Prepared, type PrepareOptions, prepare } from './checks/prepare.ts';
+export { deadFactorOf, type Prepared, type PrepareOptions, prepare, prepareLike, prepareScaled } from './checks/prepare.ts';
 export { rate } from './checks/rate.ts';
 export { type Wood, type WoodConditions, woodOf } from './checks/wood.ts';
 export {

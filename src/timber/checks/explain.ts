@@ -110,7 +110,7 @@ function bending(p: Prepared, wood: Wood, found: Governing, g: number, hogging: 
   };
 }
 
-function deflection(p: Prepared, wood: Wood, found: Governing, limits: Float64Array, clause: string): Part {
+function deflection(p: Prepared, wood: Wood, found: Governing, limits: readonly number[], clause: string): Part {
   return {
     demand: found.demand / (wood.at.E * wood.at.inertia),
     capacity: limits[found.place]!,

@@ -1,6 +1,5 @@
-import { compileEffects, type Effects } from '../../loads/effects.ts';
-import { slopedLength } from '../../loads/slope.ts';
-import { beamFields, beamLength, type Field, supportPlaces } from '../../statics/beam.ts';
+import { compileEffects, type Effects, isSelfSimilar, type Loading, scaleEffects, slopedLength } from '../../loads/index.ts';
+import { type Beam, beamFields, beamLength, type Field, supportPlaces } from '../../statics/beam.ts';
 import { bearingArea } from '../factors/bearing-area.ts';
 import type { Bracing, Member } from '../member.ts';
 import { notchPlaceFault } from './notch.ts';
@@ -24,15 +23,15 @@ export interface Prepared {
   readonly bearing: TermSet;
   readonly uplift: TermSet;
   /** By field, in. */
-  readonly liveLimit: Float64Array;
-  readonly totalLimit: Float64Array;
+  readonly liveLimit: readonly number[];
+  readonly totalLimit: readonly number[];
   /** By support: bearing length, in, and Cb. */
-  readonly bearingLength: Float64Array;
-  readonly Cb: Float64Array;
+  readonly bearingLength: readonly number[];
+  readonly Cb: readonly number[];
   /** By support, lb; 0 where none is stated. */
-  readonly tiedDown: Float64Array;
+  readonly tiedDown: readonly number[];
   /** By group of endShear: depth of the notch at that end, in. */
-  readonly notch: Float64Array;
+  readonly notch: readonly number[];
   /** The deeper of the two notches, in; Infinity where a notch stands at a place that allows none. */
   readonly deepestNotch: number;
   /** The same prepared for heavier sections, made when one is met. */
@@ -50,7 +49,54 @@ const HEAVIEST = 16;
 /** Searches combinations and patterns of a member once, for all sizes of section. */
 export function prepare(member: Member, options: PrepareOptions = {}): Prepared {
   const heaviest = options.heaviest ?? HEAVIEST;
-  const effects = compileEffects(member, { heaviest, deadFactor: deadFactorOf(member) });
+  return withEffects(member, compileEffects(member, { heaviest, deadFactor: deadFactorOf(member) }), heaviest);
+}
+
+/**
+ * The same for `member`, which is the prepared one with all its lengths multiplied by `factor`; where the loads
+ * allow it the search is not done again.
+ */
+export function prepareScaled(prepared: Prepared, member: Member, factor: number): Prepared {
+  const { heaviest, effects } = prepared;
+  return isSelfSimilar(member) ? withEffects(member, scaleEffects(effects, factor), heaviest) : prepare(member, { heaviest });
+}
+
+/**
+ * The same for a member that is like the prepared one: its search is done again only where its loads, its beam or
+ * the part of dead load in the total deflection differ, and not where one span alone became longer or shorter
+ * under loads that go along.
+ */
+export function prepareLike(prepared: Prepared, member: Member): Prepared {
+  const { member: like, heaviest, effects } = prepared;
+  if (deadFactorOf(member) === deadFactorOf(like) && LOADING_KEYS.every((key) => member[key] === like[key])) {
+    if (member.beam === like.beam) return withEffects(member, effects, heaviest);
+    if (member.loads.length === 0 && isOneSpan(member.beam) && isOneSpan(like.beam)) {
+      return prepareScaled(prepared, member, member.beam.spans[0]! / like.beam.spans[0]!);
+    }
+  }
+  return prepare(member, { heaviest });
+}
+
+/** What the effects depend on beside the beam and the part of dead load that counts. */
+const LOADING_KEYS = [
+  'tributary',
+  'area',
+  'loads',
+  'selfWeight',
+  'combinations',
+  'liveReduction',
+  'slope',
+  'bearing',
+  'shearAt',
+] as const satisfies readonly (keyof Loading)[];
+
+/** A single span between bearings that turn freely. */
+function isOneSpan({ spans, overhangs, supports, fixed }: Beam): boolean {
+  const whole = spans.length === 1 && overhangs.left === 0 && overhangs.right === 0;
+  return whole && supports === 'bearings' && !fixed.left && !fixed.right;
+}
+
+function withEffects(member: Member, effects: Effects, heaviest: number): Prepared {
   const fields = beamFields(member.beam);
   const { typedFactors: typed, limits, notch, slope } = member;
   const lengths = fields.map((field) => slopedLength(slope, field.length));
@@ -75,12 +121,12 @@ export function prepare(member: Member, options: PrepareOptions = {}): Prepared 
     deflectionTotal: termSet(effects.deflectionTotal, undefined, held),
     bearing: termSet(effects.bearing, undefined, held),
     uplift: termSet(effects.uplift, undefined, held),
-    liveLimit: Float64Array.from(spans, (span) => Math.min(span / limits.live, limits.liveMax ?? Infinity)),
-    totalLimit: Float64Array.from(spans, (span) => span / limits.total),
-    bearingLength: Float64Array.from(places, (_, s) => member.bearing[s]!),
-    Cb: Float64Array.from(places, (at, s) => typed?.Cb?.value ?? bearingArea(member.bearing[s]!, at, whole)),
-    tiedDown: Float64Array.from(places, (_, s) => member.tiedDown?.[s] ?? 0),
-    notch: Float64Array.from(endShear, ({ place }) => (place === 0 ? notch.left : notch.right)),
+    liveLimit: spans.map((span) => Math.min(span / limits.live, limits.liveMax ?? Infinity)),
+    totalLimit: spans.map((span) => span / limits.total),
+    bearingLength: member.bearing,
+    Cb: places.map((at, s) => typed?.Cb?.value ?? bearingArea(member.bearing[s]!, at, whole)),
+    tiedDown: places.map((_, s) => member.tiedDown?.[s] ?? 0),
+    notch: endShear.map(({ place }) => (place === 0 ? notch.left : notch.right)),
     deepestNotch: notchPlaceFault(member) === null ? Math.max(notch.left, notch.right) : Infinity,
     heavier: null,
   };

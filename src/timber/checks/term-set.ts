@@ -2,24 +2,24 @@ import type { LateralCase, TermGroup } from '../../loads/effects.ts';
 import { type VolumeRule, volumeLength } from '../factors/volume.ts';
 
 /**
- * The groups of one check laid out in flat arrays, so that the largest demand of a group at an own weight is a few
+ * The groups of one check laid out in flat arrays (plain ones: typed arrays cost more to make than they save), so that the largest demand of a group at an own weight is a few
  * multiplications. `first[g]` to `first[g + 1]` are the terms of group g.
  */
 export interface TermSet {
   readonly groups: readonly TermGroup[];
   readonly count: number;
-  readonly first: Int32Array;
-  readonly base: Float64Array;
-  readonly perWeight: Float64Array;
+  readonly first: readonly number[];
+  readonly base: readonly number[];
+  readonly perWeight: readonly number[];
   /** Terms whose extreme moves with the own weight; null where none does. */
   readonly moving: readonly (((w: number) => number) | null)[] | null;
-  readonly duration: Float64Array;
-  readonly place: Int32Array;
+  readonly duration: readonly number[];
+  readonly place: readonly number[];
   /** Bending: unbraced length of the compression edge, in; 0 where it is held throughout. */
-  readonly unbraced: Float64Array;
+  readonly unbraced: readonly number[];
   readonly lateral: readonly LateralCase[];
   /** Part of CV that goes with the length, by rule, made when first asked for. */
-  readonly volume: Partial<Record<VolumeRule, Float64Array>>;
+  readonly volume: Partial<Record<VolumeRule, readonly number[]>>;
 }
 
 /**
@@ -32,22 +32,36 @@ export function termSet(
   unbracedOf: (place: number) => number,
   lengths: readonly number[] = [],
 ): TermSet {
-  const terms = groups.flatMap((group) => group.terms);
-  const first = new Int32Array(groups.length + 1);
-  groups.forEach((group, g) => {
-    first[g + 1] = first[g]! + group.terms.length;
-  });
+  const first = [0];
+  const base: number[] = [];
+  const perWeight: number[] = [];
+  const moving: TermGroup['terms'][number]['valueAt'][] = [];
+  const unbraced: number[] = [];
+  const lateral: LateralCase[] = [];
+  let moves = false;
+  for (const group of groups) {
+    for (const term of group.terms) {
+      base.push(term.base);
+      perWeight.push(term.perWeight);
+      moving.push(term.valueAt);
+      moves ||= term.valueAt !== null;
+    }
+    first.push(base.length);
+    const free = unbracedOf(group.place);
+    unbraced.push(free);
+    lateral.push(lateralOf(group, free, lengths));
+  }
   return {
     groups,
     count: groups.length,
     first,
-    base: Float64Array.from(terms, (term) => term.base),
-    perWeight: Float64Array.from(terms, (term) => term.perWeight),
-    moving: terms.some((term) => term.valueAt !== null) ? terms.map((term) => term.valueAt) : null,
-    duration: Float64Array.from(groups, (group) => duration ?? group.duration),
-    place: Int32Array.from(groups, (group) => group.place),
-    unbraced: Float64Array.from(groups, (group) => unbracedOf(group.place)),
-    lateral: groups.map((group) => lateralOf(group, unbracedOf(group.place), lengths)),
+    base,
+    perWeight,
+    moving: moves ? moving : null,
+    duration: groups.map((group) => duration ?? group.duration),
+    place: groups.map((group) => group.place),
+    unbraced,
+    lateral,
     volume: {},
   };
 }
@@ -89,8 +103,8 @@ export function worstTerm(set: TermSet, g: number, w: number): number {
 }
 
 function termValue(
-  base: Float64Array,
-  perWeight: Float64Array,
+  base: readonly number[],
+  perWeight: readonly number[],
   moving: TermSet['moving'],
   t: number,
   w: number,
@@ -103,10 +117,10 @@ function termValue(
 }
 
 /** The length parts of CV of the groups under a rule. */
-export function volumeLengths(set: TermSet, rule: VolumeRule): Float64Array {
+export function volumeLengths(set: TermSet, rule: VolumeRule): readonly number[] {
   const known = set.volume[rule];
   if (known !== undefined) return known;
-  const made = Float64Array.from(set.groups, (group) => volumeLength(rule, group.zeroMomentLength));
+  const made = set.groups.map((group) => volumeLength(rule, group.zeroMomentLength));
   set.volume[rule] = made;
   return made;
 }

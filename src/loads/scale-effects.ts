@@ -1,0 +1,45 @@
+import type { Effects, Term, TermGroup } from './effects.ts';
+import type { Loading } from './loading.ts';
+
+/**
+ * True where a member with all its lengths multiplied by one factor has the same effects but for powers of that
+ * factor: line loads keep their size a length, so shear and reactions go with it once, moments twice, deflections
+ * at EI = 1 four times. Point loads do not grow with the length, nor does the depth within which shear is left out.
+ */
+export function isSelfSimilar(loading: Loading): boolean {
+  return loading.shearAt === 'support' && loading.loads.every((load) => load.type === 'line');
+}
+
+/** The effects of a self-similar loading with every span, overhang and load position multiplied by `factor`. */
+export function scaleEffects(effects: Effects, factor: number): Effects {
+  const once = factor;
+  const twice = factor * factor;
+  const fourTimes = twice * twice;
+  const groups = (from: readonly TermGroup[], power: number) =>
+    from.map((group) => scaleGroup(group, factor, power));
+  return {
+    ...effects,
+    shear: groups(effects.shear, once),
+    endShear: groups(effects.endShear, once),
+    sagging: groups(effects.sagging, twice),
+    hogging: groups(effects.hogging, twice),
+    bearing: groups(effects.bearing, once),
+    uplift: groups(effects.uplift, once),
+    deflectionLive: groups(effects.deflectionLive, fourTimes),
+    deflectionTotal: groups(effects.deflectionTotal, fourTimes),
+  };
+}
+
+function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup {
+  const terms = group.terms.map((term): Term => {
+    const { valueAt } = term;
+    return {
+      ...term,
+      base: term.base * power,
+      perWeight: term.perWeight * power,
+      valueAt: valueAt === null ? null : (w) => power * valueAt(w),
+      at: term.at * factor,
+    };
+  });
+  return { ...group, zeroMomentLength: group.zeroMomentLength * factor, terms };
+}

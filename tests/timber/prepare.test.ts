@@ -1,0 +1,51 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { scaleLengths } from '../../src/explore/scale.ts';
+import { prepare, prepareLike, prepareScaled, rate, woodOf } from '../../src/timber/index.ts';
+import type { Member } from '../../src/timber/member.ts';
+import { CHECK_IDS } from '../../src/timber/report.ts';
+import { member as arbitraryMember } from '../session/arbitrary-member.ts';
+
+function ratios(prepared: ReturnType<typeof prepare>, member: Member): number[] {
+  const out = new Float64Array(CHECK_IDS.length);
+  rate(prepared, woodOf(member), member.section, out);
+  return [...out];
+}
+
+function close(one: number[], other: number[]): void {
+  one.forEach((ratio, at) => {
+    if (Number.isFinite(ratio) && Math.abs(ratio) > 1e-9) expect(ratio / other[at]!, CHECK_IDS[at]).toBeCloseTo(1, 8);
+    else if (!Number.isFinite(ratio)) expect(other[at], CHECK_IDS[at]).toBe(ratio);
+  });
+}
+
+describe('preparing from what is known', () => {
+  it('gives the ratios of preparing anew for a member with all its lengths scaled', () => {
+    fc.assert(
+      fc.property(arbitraryMember, fc.double({ min: 0.3, max: 3, noNaN: true }), (member, factor) => {
+        const scaled = scaleLengths(member, factor);
+        close(ratios(prepareScaled(prepare(member), scaled, factor), scaled), ratios(prepare(scaled), scaled));
+      }),
+      { numRuns: 60 },
+    );
+  });
+
+  it('gives the ratios of preparing anew for a member that is like it', () => {
+    const changes: readonly ((member: Member) => Member)[] = [
+      (member) => ({ ...member, section: { ...member.section, depth: member.section.depth * 1.1 } }),
+      (member) => ({ ...member, beam: { ...member.beam, spans: member.beam.spans.map((span) => span * 1.3) } }),
+      (member) => ({ ...member, beam: { ...member.beam, fixed: { left: true, right: false } } }),
+      (member) => ({ ...member, tributary: member.tributary + 7 }),
+      (member) => ({ ...member, limits: { ...member.limits, live: 200 }, bracing: 'ends' }),
+      (member) => ({ ...member, seasoned: !member.seasoned }),
+      (member) => ({ ...member, creep: 'Kcr' }),
+    ];
+    fc.assert(
+      fc.property(arbitraryMember, fc.constantFrom(...changes), (member, change) => {
+        const like = change(member);
+        close(ratios(prepareLike(prepare(member), like), like), ratios(prepare(like), like));
+      }),
+      { numRuns: 100 },
+    );
+  });
+});
