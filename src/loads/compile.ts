@@ -42,7 +42,6 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
   const book = patternBook(parts);
   const every = table.strength.map((_, i) => i);
 
-  let endShear: TermGroup[] | null = null;
   const shear: TermGroup[] = [];
   const sagging: TermGroup[] = [];
   const hogging: TermGroup[] = [];
@@ -105,10 +104,7 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
     deflectionCombinations: table.deflection,
     patterns: book.names,
     shear,
-    get endShear() {
-      endShear ??= endShearOf(strength, book, heaviest);
-      return endShear;
-    },
+    endShear: endShearOf(strength, book, heaviest),
     sagging,
     hogging,
     bearing,

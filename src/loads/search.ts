@@ -86,8 +86,8 @@ export function searchPieces(
         const h = edges[p + 1]! - edges[p]!;
         const bulge0 = bulge(data, o, order, sign, h, dead, deadBy, null, 0);
         const bulgeH = ownBy === 0 ? bulge0 : bulge(data, o, order, sign, h, dead, deadBy, own, ownBy);
-        // The ends themselves have set the bar already.
-        if (bulge0 === 0 && bulgeH === 0) continue;
+        // The ends themselves have set the bar already, but only at no own weight and at the heaviest.
+        if (ownBy === 0 && bulge0 === 0) continue;
         let a = data[o + start]!;
         let b = data[o + end]!;
         if (deadBy !== 0) {
@@ -146,20 +146,32 @@ function bulge(
   own: readonly number[] | null,
   ownBy: number,
 ): number {
-  const at = (i: number): number => {
-    let value = data[o + i]!;
-    if (deadBy !== 0) value += deadBy * dead![o + i]!;
-    if (ownBy !== 0) value += ownBy * own![o + i]!;
-    return sign * value;
-  };
   if (order === SHEAR) {
-    const curve = at(Q1);
+    const curve = sign * blend(data, o + Q1, dead, deadBy, own, ownBy);
     return curve > 0 ? (curve * h * h) / 8 : 0;
   }
-  const load = Math.max(0, at(Q0), at(QE));
+  const q0 = sign * blend(data, o + Q0, dead, deadBy, own, ownBy);
+  const q1 = sign * blend(data, o + QE, dead, deadBy, own, ownBy);
+  const load = Math.max(0, q0, q1);
   if (order === MOMENT) return (load * h * h) / 8;
-  const moment = Math.max(at(M0), at(M1)) + (load * h * h) / 8;
+  const m0 = sign * blend(data, o + M0, dead, deadBy, own, ownBy);
+  const m1 = sign * blend(data, o + M1, dead, deadBy, own, ownBy);
+  const moment = Math.max(m0, m1) + (load * h * h) / 8;
   return moment > 0 ? (moment * h * h) / 8 : 0;
+}
+
+function blend(
+  data: readonly number[],
+  i: number,
+  dead: readonly number[] | null,
+  deadBy: number,
+  own: readonly number[] | null,
+  ownBy: number,
+): number {
+  let value = data[i]!;
+  if (deadBy !== 0) value += deadBy * dead![i]!;
+  if (ownBy !== 0) value += ownBy * own![i]!;
+  return value;
 }
 
 /** Sets the bar by the best end of a piece at no own weight and at the heaviest, and notes both as terms. */
@@ -178,6 +190,9 @@ function raiseByEnds(
   const own = e.parts.own?.data ?? null;
   const dead = e.dead?.data ?? null;
   const h = bar.heaviest;
+  // The end of one piece and the start of the next differ in shear, and in moment where a held support has an overhang.
+  const { fixed } = e.parts.loading.beam;
+  const jumps = order === SHEAR || fixed.left || fixed.right;
   let best0 = -1;
   let bestH = -1;
   let c0 = 0;
@@ -190,8 +205,7 @@ function raiseByEnds(
     for (const sign of signs) {
       const data = (sign > 0 ? e.hi[c]! : e.lo[c]!).data;
       for (let p = from; p < to; p++) {
-        // Only shear differs between the end of one piece and the start of the next.
-        const sides = order === SHEAR || p === to - 1 ? 2 : 1;
+        const sides = jumps || p === to - 1 ? 2 : 1;
         for (let side = 0; side < sides; side++) {
           const i = STRIDE * p + (side === 0 ? start : end);
           const base = sign * (deadBy === 0 ? data[i]! : data[i]! + deadBy * dead![i]!);

@@ -1,3 +1,4 @@
+import type { PointLoad } from '../statics/beam.ts';
 import { pieceAt } from '../statics/grid.ts';
 import { pieceValue, SHEAR, STRIDE, V0, V1 } from '../statics/piece.ts';
 import { planLoad } from './area-to-line.ts';
@@ -30,8 +31,8 @@ interface SidePoint {
   readonly at: number;
   /** lb, downward positive */
   readonly load: number;
-  /** Shear just inside the support from this load alone, lb. */
-  readonly shear: number;
+  /** Shear just inside the support from this load alone, lb; solved when first asked for. */
+  shear(): number;
 }
 
 /**
@@ -120,8 +121,9 @@ function readerAt(parts: LoadParts, side: Side, depth: number, at: number): Read
       const x = Math.max(0, side.toward * (point.at - side.face));
       if (x >= depth) continue;
       const passed = side.toward * (at - point.at) > grid.tolerance;
-      const here = point.shear - (passed ? side.toward * point.load : 0);
-      near.push({ kind: point.kind, change: (x / depth) * point.shear - here });
+      const shear = point.shear();
+      const here = shear - (passed ? side.toward * point.load : 0);
+      near.push({ kind: point.kind, change: (x / depth) * shear - here });
     }
   }
   return (states, kind, field) => {
@@ -178,7 +180,7 @@ function sidesOf(parts: LoadParts): Side[] {
 }
 
 function pointsOf(parts: LoadParts, f: number, toward: 1 | -1): SidePoint[] {
-  const { fields, grid, loading, solution } = parts;
+  const { fields, grid, loading } = parts;
   const field = fields[f]!;
   const end = field.start + field.length;
   const isLast = f === fields.length - 1;
@@ -190,15 +192,24 @@ function pointsOf(parts: LoadParts, f: number, toward: 1 | -1): SidePoint[] {
     const freeEnd = isLast && field.kind === 'overhang';
     // A load right over a support goes straight into it.
     if (load.at >= end - grid.tolerance && !freeEnd) continue;
-    const response = solution.respond([load]);
-    const { data } = response.states;
-    const { first } = response.grid;
-    const atStart = load.at <= field.start + grid.tolerance;
-    const shear =
-      toward > 0
-        ? data[STRIDE * first[f]! + V0]! + (atStart ? load.load : 0)
-        : data[STRIDE * (first[f + 1]! - 1) + V1]!;
-    points.push({ kind: typed.kind, at: load.at, load: load.load, shear });
+    let shear: number | null = null;
+    points.push({
+      kind: typed.kind,
+      at: load.at,
+      load: load.load,
+      shear: () => {
+        shear ??= shearInside(parts, f, toward, load);
+        return shear;
+      },
+    });
   }
   return points;
+}
+
+function shearInside(parts: LoadParts, f: number, toward: 1 | -1, load: PointLoad): number {
+  const { states, grid } = parts.solution.respond([load]);
+  if (toward < 0) return states.data[STRIDE * (grid.first[f + 1]! - 1) + V1]!;
+  // A load at the very start of the field stands outside the shear read there.
+  const atStart = load.at <= parts.fields[f]!.start + parts.grid.tolerance;
+  return states.data[STRIDE * grid.first[f]! + V0]! + (atStart ? load.load : 0);
 }

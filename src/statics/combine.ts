@@ -1,5 +1,6 @@
 import { type Response, responseOf } from './response.ts';
 import type { BeamSolution } from './solve.ts';
+import { zeros } from './zeros.ts';
 
 /** A response and how many times it counts. */
 export interface Share {
@@ -10,8 +11,8 @@ export interface Share {
 /** The response to loads that are so many times others: their numbers added up. All must stand on the same grid. */
 export function combine(solution: BeamSolution, shares: readonly [Share, ...Share[]]): Response {
   const { grid, states } = shares[0].response;
-  const data = new Float64Array(states.data.length);
-  const reactions = new Float64Array(states.reactions.length);
+  const data = zeros(states.data.length);
+  const reactions = zeros(states.reactions.length);
   for (const { response, factor } of shares) {
     if (response.grid.count !== grid.count)
       throw new RangeError('responses on different grids cannot be added');

@@ -1,10 +1,11 @@
 import { type Beam, type BeamLoad, beamFields, beamLength, type Field } from './beam.ts';
+import { zeros } from './zeros.ts';
 
 /** A member cut into pieces at its supports and wherever a load starts, ends or stands. */
 export interface Grid {
   readonly fields: readonly Field[];
   /** Left ends of the pieces, in from the member's left end, then the right end of the last. */
-  readonly edges: Float64Array;
+  readonly edges: number[];
   /** Index of the first piece of each field, then the number of pieces. */
   readonly first: readonly number[];
   /** Number of pieces. */
@@ -48,7 +49,7 @@ export function gridOf(
   first.push(edges.length);
   const count = edges.length;
   edges.push(length);
-  return { fields, edges: Float64Array.from(edges), first, count, tolerance };
+  return { fields, edges: edges, first, count, tolerance };
 }
 
 /** Index of the piece that starts at x or holds it; the last piece for the member's right end. */
@@ -73,17 +74,17 @@ export function fieldOfPiece(grid: Grid, piece: number): number {
 /** Loads as the pieces of a grid see them. */
 export interface PieceLoads {
   /** Line load at the start of each piece, lb/in, and its growth along it, lb/in². */
-  readonly q0: Float64Array;
-  readonly q1: Float64Array;
+  readonly q0: number[];
+  readonly q1: number[];
   /** Point load at the start of each piece, then at the member's right end, lb. */
-  readonly points: Float64Array;
+  readonly points: number[];
 }
 
 /** Spreads loads over the pieces of a grid that was cut at their places. Parts outside [from, to) are left out. */
 export function spread(grid: Grid, loads: readonly BeamLoad[], from = 0, to = grid.count): PieceLoads {
-  const q0 = new Float64Array(grid.count);
-  const q1 = new Float64Array(grid.count);
-  const points = new Float64Array(grid.count + 1);
+  const q0 = zeros(grid.count);
+  const q1 = zeros(grid.count);
+  const points = zeros(grid.count + 1);
   const { edges, tolerance } = grid;
   const right = edges[grid.count]!;
   for (const load of loads) {

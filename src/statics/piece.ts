@@ -1,3 +1,5 @@
+import { zeros } from './zeros.ts';
+
 /**
  * One piece of a beam between neighbouring places where anything changes, as numbers in a flat array.
  * With t from the start of the piece, at EI = 1, deflection and load positive downward, sagging moment positive:
@@ -31,7 +33,7 @@ export const DEFLECTION = 4;
 export type Order = 0 | 1 | 2 | 3 | 4;
 
 /** Numbers laid out as above, from index `o` on. */
-export type Numbers = Float64Array | readonly number[];
+export type Numbers = readonly number[];
 
 export function pieceValue(c: Numbers, o: number, order: Order, t: number): number {
   const q0 = c[o + Q0]!;
@@ -47,10 +49,10 @@ export function pieceValue(c: Numbers, o: number, order: Order, t: number): numb
 }
 
 /** Places found last, one list an order: each level of the recursion below has its own. */
-const FOUND = [0, 1, 2, 3, 4].map(() => new Float64Array(8));
+const FOUND = [0, 1, 2, 3, 4].map(() => zeros(8));
 
 /** The places that `signChanges` of this order found last; good until it is called again. */
-export function foundPlaces(order: Order): Float64Array {
+export function foundPlaces(order: Order): number[] {
   return FOUND[order]!;
 }
 
@@ -81,7 +83,7 @@ export function signChanges(c: Numbers, o: number, order: Order, lo: number, hi:
 }
 
 /** Sign changes of c0 + c1 t + c2 t² strictly between lo and hi, ascending. */
-function quadratic(c0: number, c1: number, c2: number, lo: number, hi: number, out: Float64Array): number {
+function quadratic(c0: number, c1: number, c2: number, lo: number, hi: number, out: number[]): number {
   let r1 = Number.NaN;
   let r2 = Number.NaN;
   if (c2 === 0) {

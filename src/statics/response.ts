@@ -48,11 +48,11 @@ export interface Response {
   /** Upward force of each support, lb. */
   readonly reactions: readonly number[];
   /** Moment in the beam over each support, in the span beside it (the one to the right, but for the last). */
-  readonly supportMoments: readonly number[];
+  supportMoments(): number[];
   /** What each fixed end adds to the beam's moment on passing it from left to right, lb.in; 0 where it is not held. */
-  readonly fixedMoments: { readonly left: number; readonly right: number };
+  fixedMoments(): { readonly left: number; readonly right: number };
   /** Piecewise polynomials, left to right. */
-  readonly segments: readonly Segment[];
+  segments(): Segment[];
   /** At a jump the value to the right of it, at the member's right end the value before it. */
   shearAt(x: number): number;
   momentAt(x: number): number;
@@ -75,7 +75,7 @@ export function responseOf(solution: BeamSolution, grid: Grid, states: States): 
     grid,
     states,
     reactions: Array.from(states.reactions),
-    get supportMoments() {
+    supportMoments() {
       const left = solution.beam.supports === 'bearings' && grid.fields[0]!.kind === 'overhang' ? 1 : 0;
       return solution.supports.map((_, i) => {
         if (i > 0 && i === solution.supports.length - 1) {
@@ -84,7 +84,7 @@ export function responseOf(solution: BeamSolution, grid: Grid, states: States): 
         return data[STRIDE * grid.first[left + i]! + M0]!;
       });
     },
-    get fixedMoments() {
+    fixedMoments() {
       const { beam, fields } = solution;
       const cantilever = beam.supports === 'cantilever';
       const leading = !cantilever && fields[0]!.kind === 'overhang' ? 1 : 0;
@@ -96,7 +96,7 @@ export function responseOf(solution: BeamSolution, grid: Grid, states: States): 
         right: beam.fixed.right ? atStart(last + 1) - atEnd(last) : 0,
       };
     },
-    get segments() {
+    segments() {
       return Array.from({ length: grid.count }, (_, p) => segmentOf(grid, data, p));
     },
     shearAt: read(SHEAR),
@@ -117,7 +117,7 @@ export function responseOf(solution: BeamSolution, grid: Grid, states: States): 
 
 function extremeIn(
   grid: Grid,
-  data: Float64Array,
+  data: number[],
   order: Order,
   sign: number,
   from: number,
@@ -137,7 +137,7 @@ function extremeIn(
   return { value: sign * value, at };
 }
 
-function segmentOf(grid: Grid, data: Float64Array, p: number): Segment {
+function segmentOf(grid: Grid, data: number[], p: number): Segment {
   const o = STRIDE * p;
   const q0 = data[o + Q0]!;
   const q1 = data[o + Q1]!;

@@ -2,6 +2,7 @@ import { type Beam, type BeamLoad, beamFields, type Field, supportPlaces } from 
 import { type Grid, gridOf, type PieceLoads, spread } from './grid.ts';
 import { M0, M1, Q0, Q1, QE, S0, S1, STRIDE, V0, V1, Y0, Y1 } from './piece.ts';
 import { type Response, responseOf } from './response.ts';
+import { zeros } from './zeros.ts';
 
 /** A beam made ready: the equations of its support moments factored, whatever it is to carry. */
 export interface BeamSolution {
@@ -13,17 +14,17 @@ export interface BeamSolution {
   respond(loads: readonly BeamLoad[], cuts?: readonly BeamLoad[]): Response;
   /** Multipliers of the elimination, one a support. */
   readonly factors: {
-    readonly lower: Float64Array;
-    readonly pivot: Float64Array;
-    readonly upper: Float64Array;
+    readonly lower: number[];
+    readonly pivot: number[];
+    readonly upper: number[];
   };
 }
 
 /** What a beam does under loads: the numbers of every piece (see piece.ts), and the forces of its supports. */
 export interface States {
-  readonly data: Float64Array;
+  readonly data: number[];
   /** Upward force of each support, lb. */
-  readonly reactions: Float64Array;
+  readonly reactions: number[];
 }
 
 /**
@@ -35,9 +36,9 @@ export function solveBeam(beam: Beam): BeamSolution {
   const fields = beamFields(beam);
   const supports = supportPlaces(beam);
   const n = beam.supports === 'cantilever' ? 0 : beam.spans.length;
-  const lower = new Float64Array(n + 1);
-  const pivot = new Float64Array(n + 1);
-  const upper = new Float64Array(n + 1);
+  const lower = zeros(n + 1);
+  const pivot = zeros(n + 1);
+  const upper = zeros(n + 1);
   for (let i = 0; i <= n; i++) {
     let diagonal = 1;
     let off = 0;
@@ -73,27 +74,27 @@ function isUnknown(beam: Beam, n: number, i: number): boolean {
 
 /** Space for what each field does by itself with nothing at its left end; beams have at most eight fields. */
 const OWN = {
-  v: new Float64Array(8),
-  m: new Float64Array(8),
-  s: new Float64Array(8),
-  y: new Float64Array(8),
+  v: zeros(8),
+  m: zeros(8),
+  s: zeros(8),
+  y: zeros(8),
 };
-const MOMENTS = new Float64Array(8);
+const MOMENTS = zeros(8);
 
 /** Exact states of all pieces and the reactions, at EI = 1, for loads spread over this grid. */
 export function statesOf(solution: BeamSolution, grid: Grid, loads: PieceLoads): States {
   const { beam, fields } = solution;
-  const data = new Float64Array(STRIDE * grid.count);
+  const data = zeros(STRIDE * grid.count);
   for (let f = 0; f < fields.length; f++) marchField(grid, loads, f, data);
   const endPoint = loads.points[grid.count]!;
   if (beam.supports === 'cantilever') {
     const length = fields[0]!.length;
     const shear = endPoint - OWN.v[0]!;
     start(grid, data, 0, shear, -OWN.m[0]! - shear * length, 0, 0);
-    return { data, reactions: Float64Array.of(shear) };
+    return { data, reactions: [shear] };
   }
   const n = beam.spans.length;
-  const reactions = new Float64Array(n + 1);
+  const reactions = zeros(n + 1);
   const left = fields[0]!.kind === 'overhang' ? 1 : 0;
   const right = fields.length - left - n;
   const last = fields.length - 1;
@@ -154,7 +155,7 @@ function slopeAfter(fields: readonly Field[], f: number): number {
 }
 
 /** States of a field under its own loads with no shear, moment, slope or deflection at its left end. */
-function marchField(grid: Grid, loads: PieceLoads, field: number, data: Float64Array): void {
+function marchField(grid: Grid, loads: PieceLoads, field: number, data: number[]): void {
   let v = 0;
   let m = 0;
   let s = 0;
@@ -189,15 +190,7 @@ function marchField(grid: Grid, loads: PieceLoads, field: number, data: Float64A
 }
 
 /** Adds to a field what the shear, moment, slope and deflection at its left end bring. */
-function start(
-  grid: Grid,
-  data: Float64Array,
-  field: number,
-  v: number,
-  m: number,
-  s: number,
-  y: number,
-): void {
+function start(grid: Grid, data: number[], field: number, v: number, m: number, s: number, y: number): void {
   const origin = grid.edges[grid.first[field]!]!;
   const end = grid.first[field + 1]!;
   for (let p = grid.first[field]!; p < end; p++) {

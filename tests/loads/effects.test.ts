@@ -116,6 +116,23 @@ describe('effects', () => {
     fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: 12, seed: 4 });
   });
 
+  test('keep a term that governs at middling own weights only, neither at none nor at the heaviest', () => {
+    // Shear governs left of the first support, then left of the second, then right of the first, as own weight grows.
+    const dead = (from: number, to: number, start: number, end: number) =>
+      ({ kind: 'dead', type: 'line', from, to, start, end }) as const;
+    const loading = member(
+      { spans: [215], overhangs: { left: 77, right: 64 }, fixed: { left: true, right: false } },
+      {
+        selfWeight: true,
+        loads: [dead(0, 81.524, 0, 15), dead(0, 324.672, 6, 9), dead(275.9, 336.064, 14, 16)],
+      },
+    );
+    checkAgainstBruteForce(loading);
+    const { shear } = compileEffects(loading, { heaviest: HEAVIEST, deadFactor: DEAD_FACTOR });
+    expect([0, 1.2, 3].map((w) => largest(shear[0], w).term!.at)).toEqual([77, 292, 77]);
+    expect(shear[0]!.terms.length).toBe(3);
+  });
+
   test('of a simple span under uniform loads hold one term a group, at mid-span or over a support', () => {
     const loading = member(
       {},

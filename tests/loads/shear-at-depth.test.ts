@@ -2,6 +2,9 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { compileEffects } from '../../src/loads/compile.ts';
 import type { Loading } from '../../src/loads/loading.ts';
+import { beamFields } from '../../src/statics/beam.ts';
+import type { Response } from '../../src/statics/response.ts';
+import { everyCase } from './brute-force.ts';
 import { anyMember, member } from './members.ts';
 
 // NDS 3.4.3.1: uniform loads within d of the face left out, point loads within d counted x/d (x from the face).
@@ -13,6 +16,35 @@ function shear(loading: Loading, depth: number, w = 0, duration?: number) {
 
 const l = 160;
 const uniform = member({ spans: [l] }, { area: { dead: 0.1 }, tributary: 60, bearing: [4, 4] });
+
+/** Largest |V| on [lo, hi]: at its ends, at the ends of segments, and where the load changes sign within one. */
+function largestShear(response: Response, lo: number, hi: number): number {
+  let most = 0;
+  const offer = (x: number) => {
+    most = Math.max(most, Math.abs(response.shearAt(x)));
+  };
+  for (const {
+    from,
+    to,
+    shear: [, v1, v2],
+  } of response.segments()) {
+    const a = Math.max(lo, from);
+    const b = Math.min(hi, to);
+    if (a > b || (a === b && lo !== hi)) continue;
+    // Just inside the segment, off the jump of a support at its end.
+    for (const x of [a, b]) most = Math.max(most, Math.abs(inside(response, from, x)));
+    const turn = from - v1! / (2 * v2!);
+    if (turn > a && turn < b) offer(turn);
+  }
+  return most;
+}
+
+/** Shear at x by the polynomial of the segment that starts at `from`. */
+function inside(response: Response, from: number, x: number): number {
+  const segment = response.segments().find((each) => each.from === from)!;
+  const t = x - from;
+  return segment.shear[0]! + t * (segment.shear[1]! + t * segment.shear[2]!);
+}
 
 describe('shear at d from the face', () => {
   test('of a simple span under a uniform load is w(l/2 - bearing/2 - d)', () => {
@@ -104,6 +136,45 @@ describe('shear at d from the face', () => {
         }
       }),
       { numRuns: 150, seed: 32 },
+    );
+  });
+
+  test('is the largest shear between the places at d over every combination and pattern, where there are no points', () => {
+    const lines = anyMember(2, 3).map(
+      (loading): Loading => ({
+        ...loading,
+        beam: { ...loading.beam, fixed: { left: false, right: false } },
+        loads: loading.loads.filter((load) => load.type === 'line'),
+      }),
+    );
+    const level = lines.filter((loading) => loading.beam.supports === 'bearings');
+    fc.assert(
+      fc.property(level, fc.integer({ min: 4, max: 20 }), (loading, depth) => {
+        const own = 1.5;
+        const fields = beamFields(loading.beam);
+        const cut = depth + 3.5 / 2;
+        const stretches = fields.map((field, f): [number, number] => {
+          const { start, length } = field;
+          const end = start + length;
+          const middle = start + length / 2;
+          if (field.kind === 'span') return [Math.min(start + cut, middle), Math.max(end - cut, middle)];
+          return f === 0 ? [start, Math.max(start, end - cut)] : [Math.min(end, start + cut), end];
+        });
+        const effects = compileEffects({ ...loading, shearAt: 'd' }, { heaviest: 3, deadFactor: 1 });
+        const found = effects.shearAtDepth!(depth, own);
+        const cases = everyCase(loading, own, null);
+        const force = Math.max(...cases.flatMap(({ response }) => response.reactions.map(Math.abs)));
+        for (const duration of new Set(cases.map((one) => one.duration))) {
+          let expected = 0;
+          for (const { response, duration: other } of cases) {
+            if (other !== duration) continue;
+            for (const [lo, hi] of stretches) expected = Math.max(expected, largestShear(response, lo, hi));
+          }
+          const value = found.find((one) => one.duration === duration)?.value ?? 0;
+          expect(Math.abs(value - expected)).toBeLessThanOrEqual(1e-9 * force);
+        }
+      }),
+      { numRuns: 60, seed: 33 },
     );
   });
 
