@@ -2,6 +2,7 @@ import { prepare, prepareScaled, rate, type Wood } from '../timber/index.ts';
 import type { Member, Section } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../timber/report.ts';
 import { judge } from './judge.ts';
+import { followsLaws, lengthByLaw } from './reach-by-law.ts';
 import { scaleLengths } from './scale.ts';
 
 const FOOT = 12;
@@ -24,30 +25,39 @@ const CLOSE = 1e-9;
 /**
  * Finds reaches of sections under the loads of one member. All spans, overhangs and load positions move by
  * one factor; bearings and typed unbraced lengths keep their size. Lengths already looked at are kept, so
- * that asking for a whole rack prepares each of them once.
+ * that asking for a whole rack prepares each of them once. Sections of another wood may be asked for too, where it
+ * takes the same part of dead load in the total deflection.
  */
 export function reachFinder(
   member: Member,
   wood: Wood,
   only: readonly CheckId[] | null = null,
-): (section: Section) => Reach {
+): (section: Section, of?: Wood) => Reach {
   const longest = Math.max(...member.beam.spans);
   const here = prepare(member);
   const preparedAt = new Map<number, ReturnType<typeof prepare>>();
   const ratios = new Float64Array(CHECK_IDS.length);
+  let asked = wood;
   const worstAt = (section: Section, span: number) => {
     let prepared = preparedAt.get(span);
     if (prepared === undefined) {
       prepared = prepareScaled(here, scaleLengths(member, span / longest), span / longest);
       if (preparedAt.size < 4096) preparedAt.set(span, prepared);
     }
-    rate(prepared, wood, section, ratios);
+    rate(prepared, asked, section, ratios);
     return judge(ratios, only);
   };
-  return (section) => {
+  return (section, of = wood) => {
+    asked = of;
     let from = REACH_FROM;
     let low = worstAt(section, from);
     if (!low.passes) return { span: 0, stops: low.governing };
+    if (followsLaws(here, member, of)) {
+      rate(here, of, section, ratios);
+      const { factor, stops } = lengthByLaw(ratios, only);
+      const span = factor * longest;
+      return span < REACH_TO ? { span, stops } : { span: REACH_TO, stops: null };
+    }
     const growth = (REACH_TO / REACH_FROM) ** (1 / (LENGTHS_TRIED - 1));
     for (let at = 1; at < LENGTHS_TRIED; at += 1) {
       const to = at === LENGTHS_TRIED - 1 ? REACH_TO : REACH_FROM * growth ** at;
