@@ -6,10 +6,12 @@ import { segmenter, standIns } from './stand-ins.mjs';
 const root = fileURLToPath(new URL('..', import.meta.url));
 const KILOBYTE = 1000;
 
-// Packages written as CommonJS ask for Node's own modules through `require`, which an ES module lacks.
+// Packages written as CommonJS ask for Node's own modules through `require`, and write-file-atomic for its own
+// file name: an ES module has neither.
 const BANNER = `#!/usr/bin/env node
 import { createRequire as __createRequire } from 'node:module';
-const require = __createRequire(import.meta.url);`;
+const require = __createRequire(import.meta.url);
+const __filename = import.meta.filename;`;
 
 /** Ink asks for the React developer tools only with DEV=true; the bundle has none. */
 const noDeveloperTools = {

@@ -18,7 +18,9 @@ export async function collectLicenses(metafile, root) {
     const about = JSON.parse(await readFile(join(folder, 'package.json'), 'utf8'));
     const files = (await readdir(folder)).filter((file) => LICENSE_FILE.test(file));
     const licenses = await Promise.all(files.map((file) => readFile(join(folder, file), 'utf8')));
-    texts.push([`${name} ${about.version} (${about.license})`, ...licenses.map((text) => text.trim())].join('\n\n'));
+    texts.push(
+      [`${name} ${about.version} (${about.license})`, ...licenses.map((text) => text.trim())].join('\n\n'),
+    );
   }
   return `${texts.join(`\n\n${'-'.repeat(72)}\n\n`)}\n`;
 }

@@ -35,7 +35,9 @@ export const standIns = {
     );
 
     if (installedInk() !== INK_VERSION) {
-      console.warn(`Ink is not ${INK_VERSION}: built without the stand-ins for its modules, which are quicker`);
+      console.warn(
+        `Ink is not ${INK_VERSION}: built without the stand-ins for its modules, which are quicker`,
+      );
       return;
     }
     build.onResolve({ filter: /^\.\/(line-update|output|sanitize-ansi)\.js$/ }, ({ path, importer }) =>

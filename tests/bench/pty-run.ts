@@ -31,7 +31,14 @@ export interface WatchedProgram {
 /** Starts `node` with these arguments; resolves at its first frame. */
 export async function watch(args: readonly string[]): Promise<WatchedProgram> {
   const { PATH = '', HOME = '' } = process.env;
-  const env = { PATH, HOME, TERM: 'xterm-256color', COLORTERM: 'truecolor', LANG: 'C.UTF-8', COLORFGBG: '15;0' };
+  const env = {
+    PATH,
+    HOME,
+    TERM: 'xterm-256color',
+    COLORTERM: 'truecolor',
+    LANG: 'C.UTF-8',
+    COLORFGBG: '15;0',
+  };
   const began = performance.now();
   const pty = spawn(process.execPath, [...args], { name: env.TERM, cols: COLUMNS, rows: ROWS, env });
   let written = '';

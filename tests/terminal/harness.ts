@@ -118,12 +118,14 @@ export function open(options: OpenOptions = {}): TerminalSession {
   let { columns, rows } = { ...DEFAULT_SIZE, ...options };
   const terminal = new xterm.Terminal({ cols: columns, rows, allowProposedApi: true, scrollback: 200 });
   const modes = watchModes(terminal);
+  const env = childEnv(options.env);
   const pty: IPty = spawn('/bin/sh', ['-c', WRAPPER, 'sh', ...program, ...args], {
-    name: 'xterm-256color',
+    // node-pty would set TERM to this, whatever env says.
+    name: env.TERM,
     cols: columns,
     rows,
     cwd: cwd ?? process.cwd(),
-    env: childEnv(options.env),
+    env,
   });
 
   let written = '';
@@ -149,11 +151,19 @@ export function open(options: OpenOptions = {}): TerminalSession {
     // After a narrowing xterm keeps the cells beyond its edge: they are not in sight.
     return Array.from(
       { length: rows },
-      (_, y) => active.getLine(active.viewportY + y)?.translateToString(true, 0, columns).trimEnd() ?? '',
+      (_, y) =>
+        active
+          .getLine(active.viewportY + y)
+          ?.translateToString(true, 0, columns)
+          .trimEnd() ?? '',
     );
   };
   const failure = (what: string): Error =>
-    new Error(`${what}; the screen is\n${screen().map((row) => `  |${row}`).join('\n')}`);
+    new Error(
+      `${what}; the screen is\n${screen()
+        .map((row) => `  |${row}`)
+        .join('\n')}`,
+    );
 
   return {
     press: (...keys) => pty.write(keys.map(keyBytes).join('')),
@@ -206,7 +216,9 @@ export function open(options: OpenOptions = {}): TerminalSession {
     },
     written: () => written,
     signal(name) {
-      const pids = execFileSync('pgrep', ['-P', String(pty.pid)], { encoding: 'utf8' }).trim().split('\n');
+      const pids = execFileSync('pgrep', ['-P', String(pty.pid)], { encoding: 'utf8' })
+        .trim()
+        .split('\n');
       process.kill(Number(pids[0]), name);
     },
     async exit(ms = PATIENCE_MS) {

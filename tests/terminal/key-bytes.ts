@@ -1,4 +1,11 @@
-const ARROWS: Readonly<Record<string, string>> = { up: 'A', down: 'B', right: 'C', left: 'D', home: 'H', end: 'F' };
+const ARROWS: Readonly<Record<string, string>> = {
+  up: 'A',
+  down: 'B',
+  right: 'C',
+  left: 'D',
+  home: 'H',
+  end: 'F',
+};
 const TILDE_KEYS: Readonly<Record<string, string>> = { delete: '3', 'page up': '5', 'page down': '6' };
 const BYTES: Readonly<Record<string, string>> = {
   enter: '\r',

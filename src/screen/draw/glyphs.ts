@@ -23,6 +23,8 @@ export interface Glyphs {
   /** The size at hand in the rack, and the lightest that passes. */
   readonly current: string;
   readonly lightest: string;
+  /** Where a curve is at its largest or smallest. */
+  readonly extreme: string;
   /** Points at now from below. */
   readonly pointer: string;
   /** A value lies off the scale, to the left or to the right. */
@@ -89,6 +91,7 @@ const UNICODE: Glyphs = {
   crossover: '┊',
   current: '●',
   lightest: '◆',
+  extreme: '•',
   pointer: '▲',
   offLeft: '«',
   offRight: '»',
@@ -134,6 +137,7 @@ const ASCII: Glyphs = {
   crossover: ':',
   current: '@',
   lightest: '*',
+  extreme: 'o',
   pointer: '^',
   offLeft: '<',
   offRight: '>',

@@ -170,15 +170,15 @@ export function reduceRow(row: string): string {
   let styles = PLAIN;
   let index = 0;
   while (index < row.length) {
-    const escape = row.indexOf('\x1b', index);
-    const stop = escape === -1 ? row.length : escape;
+    const next = row.indexOf('\x1b', index);
+    const stop = next === -1 ? row.length : next;
     if (stop > index) {
       text += stroke(written, styles) + row.slice(index, stop);
       written = styles;
     }
-    if (escape === -1) break;
-    index = sgrEnd(row, escape);
-    styles = styleList(reduceAnsiCodesIncremental(styles, codesOf(row.slice(escape, index))));
+    if (next === -1) break;
+    index = sgrEnd(row, next);
+    styles = styleList(reduceAnsiCodesIncremental(styles, codesOf(row.slice(next, index))));
   }
   return text + stroke(written, PLAIN);
 }

@@ -9,7 +9,6 @@ import InkOutput from '../../../node_modules/ink/build/output.js';
 import { reduceRow } from './ansi-tokenize.ts';
 import { createGenerations } from './generations.ts';
 import { isPlainRow } from './plain-row.ts';
-import stringWidth from './string-width.ts';
 
 type Transformer = (line: string, index: number) => string;
 
@@ -35,18 +34,14 @@ interface Size {
 /** A few frames of the largest screen. */
 const ROWS_KEPT = 512;
 
-interface Printed {
-  /** The row before the transformers of its Text. */
-  readonly text: string;
-  readonly width: number;
-}
-
-const printedRows = createGenerations<string, Printed | 'unknown'>(ROWS_KEPT);
-/** The reduced row and its cells, or 'unknown' when it holds more than single-width characters and styles. */
-function printed(row: string): Printed | 'unknown' {
+const printedRows = createGenerations<string, string | Foreign>(ROWS_KEPT);
+const FOREIGN = Symbol('more than single-width characters and styles');
+type Foreign = typeof FOREIGN;
+/** The row as Ink writes it, each change of style in its shortest form; or that it is Ink's to write. */
+function printed(row: string): string | Foreign {
   let known = printedRows.get(row);
   if (known === undefined) {
-    known = isPlainRow(row) ? { text: reduceRow(row), width: stringWidth(row) } : 'unknown';
+    known = isPlainRow(row) ? reduceRow(row) : FOREIGN;
     printedRows.set(row, known);
   }
   return known;
@@ -90,7 +85,7 @@ export default class Output {
   }
 
   #quick(): { output: string; height: number } | null {
-    const { width, height } = this.#size;
+    const { height } = this.#size;
     if (this.#clipped || !Number.isInteger(height)) return null;
     const rows = new Array<string>(height).fill('');
     const taken = new Uint8Array(height);
@@ -98,12 +93,12 @@ export default class Output {
       if (x !== 0 || taken[y] !== 0) return null;
       taken[y] = 1;
       const before = printed(text);
-      if (before === 'unknown') return null;
-      let line = before.text;
+      if (before === FOREIGN) return null;
+      let line = before;
       for (const transformer of transformers) line = transformer(line, 0);
       const after = printed(line);
-      if (after === 'unknown' || after.width > width) return null;
-      rows[y] = after.text.trimEnd();
+      if (after === FOREIGN) return null;
+      rows[y] = after.trimEnd();
     }
     return { output: rows.join('\n'), height };
   }

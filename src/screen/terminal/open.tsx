@@ -67,6 +67,8 @@ export async function openScreen(
   process.on('uncaughtException', onFailure);
   process.on('unhandledRejection', onFailure);
   const parted = joinFrames(stdout);
+  // Ink does so only after its first frame; keys typed before would be echoed over it, and held until Enter.
+  stdin.setRawMode(true);
   try {
     instance = render(tree(), {
       stdin,
@@ -87,6 +89,7 @@ export async function openScreen(
     return { kind: 'failed', error: failure ?? errorOf(thrown) };
   } finally {
     instance?.unmount();
+    stdin.setRawMode(false);
     parted();
     stdout.off('resize', onResize);
     process.off('uncaughtException', onFailure);

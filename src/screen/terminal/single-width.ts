@@ -18,6 +18,7 @@ const RANGES: readonly (readonly [number, number])[] = [
   [0x2200, 0x22ff], // mathematical operators
   [0x2500, 0x25fc], // box drawing, blocks, geometric shapes; the next two are wide
   [0x25ff, 0x25ff],
+  [0x2800, 0x28ff], // braille, for the diagrams
 ];
 
 const LIMIT = RANGES.at(-1)![1] + 1;

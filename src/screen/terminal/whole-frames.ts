@@ -2,11 +2,16 @@
 const FRAME_BEGIN = '\x1b[?2026h';
 const FRAME_END = '\x1b[?2026l';
 
+/** How Ink enters the alternate screen, where the cursor stays where the shell, or an echoed key, left it. */
+const ENTER_ALTERNATE = '\x1b[?1049h';
+const HOME = '\x1b[H';
+
 type Writable = Pick<NodeJS.WriteStream, 'write'>;
 
 /**
  * Makes a stream write each frame at once: Ink writes its beginning, its rows and its end apart, and each
- * write is a call of its own to the system, and on a slow line a packet of its own.
+ * write is a call of its own to the system, and on a slow line a packet of its own. Also lets the first
+ * frame on the alternate screen begin at its top left, which Ink takes for granted.
  * Returns what undoes it; held text is written then.
  */
 export function joinFrames(stream: Writable): () => void {
@@ -35,6 +40,7 @@ export function joinFrames(stream: Writable): () => void {
       }
     }
     flush();
+    if (chunk === ENTER_ALTERNATE) return original.call(stream, chunk + HOME);
     return (original as (...all: unknown[]) => boolean).call(stream, chunk, ...rest);
   }) as Writable['write'];
 

@@ -41,7 +41,8 @@ test('a row shows every cell of the canvas in its style, but for blanks that loo
         expect(char.value).toBe(canvas.glyphs[x]);
         const wanted = theme.codes[canvas.styles[x]!]!.map(({ open }) => open);
         const shown = char.styles.map(({ code }) => code);
-        const seen = (codes: string[]) => codes.filter((code) => char.value !== ' ' || SHOWN_ON_BLANK.has(code)).sort();
+        const seen = (codes: string[]) =>
+          codes.filter((code) => char.value !== ' ' || SHOWN_ON_BLANK.has(code)).sort();
         expect(seen(shown)).toEqual(seen(wanted));
       }
     }),

@@ -57,7 +57,9 @@ test('a dumb terminal is sent no codes at all', () => {
 
 test('on a ground nobody named, nothing but magenta is coloured, at any depth', () => {
   for (const depth of ['true', '256', '16'] as const) {
-    const colours = createTheme(depth, 'unknown').codes.flat().filter(({ close }) => close === '\x1b[39m');
+    const colours = createTheme(depth, 'unknown')
+      .codes.flat()
+      .filter(({ close }) => close === '\x1b[39m');
     expect(new Set(colours.map(({ open }) => open))).toEqual(new Set(['\x1b[35m']));
   }
 });
@@ -98,7 +100,10 @@ function indexedColour(index: number): number[] {
 
 test('accents and quiet text hold 4.5:1 on black and on white (WCAG 2.1, level AA)', () => {
   for (const depth of ['true', '256'] as const) {
-    for (const [ground, behind] of [['dark', [0, 0, 0]], ['light', [255, 255, 255]]] as const) {
+    for (const [ground, behind] of [
+      ['dark', [0, 0, 0]],
+      ['light', [255, 255, 255]],
+    ] as const) {
       const theme = createTheme(depth, ground);
       for (const style of ['now', 'governs', 'quiet'] as const) {
         const parameters = openOf(theme, style)[0]!.split(';').map(Number);

@@ -21,10 +21,13 @@ const asIs = (line: string): string => line;
 const bold = (line: string): string => `\x1b[1m${line}\x1b[22m`;
 const write = fc.record({
   // Mostly whole rows, as the program draws; at times a text beside or over another, or off the grid.
-  x: fc.oneof({ weight: 5, arbitrary: fc.constant(0) }, { weight: 1, arbitrary: fc.integer({ min: -2, max: 12 }) }),
+  x: fc.oneof(
+    { weight: 5, arbitrary: fc.constant(0) },
+    { weight: 1, arbitrary: fc.integer({ min: -2, max: 12 }) },
+  ),
   y: fc.integer({ min: -1, max: 6 }),
   text: fc.oneof({ weight: 5, arbitrary: ownRow }, { weight: 1, arbitrary: anyRow }),
-  transformers: fc.constantFrom([asIs], [bold], [bold, asIs], []),
+  transformers: fc.constantFrom<((line: string) => string)[]>([asIs], [bold], [bold, asIs], []),
 });
 const frame = fc.record({
   width: fc.integer({ min: 1, max: 60 }),
@@ -42,6 +45,23 @@ test('the stand-in for the output grid prints any frame as Ink does', () => {
         if (clip !== null) output.clip(clip);
         for (const { x, y, text, transformers } of writes) output.write(x, y, text, { transformers });
         if (clip !== null) output.unclip();
+      }
+      expect(ours.get()).toEqual(theirs.get());
+    }),
+    { numRuns: 500 },
+  );
+});
+
+test('a short text anywhere in the grid, alone or beside another, is printed as Ink prints it', () => {
+  const short = ownRow.filter((row) => row.length < 20);
+  const place = fc.record({ x: fc.nat(12), y: fc.nat(1), text: short });
+  fc.assert(
+    fc.property(fc.array(place, { minLength: 1, maxLength: 3 }), (writes) => {
+      const size = { width: 40, height: 2 };
+      const ours = new Output(size);
+      const theirs = new InkOutput(size);
+      for (const { x, y, text } of writes) {
+        for (const output of [ours, theirs]) output.write(x, y, text, { transformers: [asIs] });
       }
       expect(ours.get()).toEqual(theirs.get());
     }),
@@ -73,7 +93,9 @@ async function cellsAfter(...writes: readonly string[]): Promise<readonly string
   const line = terminal.buffer.active.getLine(0)!;
   const cells = Array.from({ length: COLUMNS }, (_, x) => {
     const cell = line.getCell(x)!;
-    const looks = [cell.isBold(), cell.isDim(), cell.isUnderline(), cell.isInverse()].map(Boolean).map(Number);
+    const looks = [cell.isBold(), cell.isDim(), cell.isUnderline(), cell.isInverse()]
+      .map(Boolean)
+      .map(Number);
     return `${cell.getChars() || ' '} ${cell.getFgColorMode()} ${cell.getFgColor()} ${cell.getBgColor()} ${looks.join('')}`;
   });
   terminal.dispose();
@@ -81,16 +103,14 @@ async function cellsAfter(...writes: readonly string[]): Promise<readonly string
 }
 
 /** Rows as Ink hands them to its line update: reduced, blanks at their end trimmed, within the terminal. */
-const printedRow = fc
-  .tuple(ownRow, fc.integer({ min: 1, max: COLUMNS }))
-  .map(([row, width]) => {
-    const output = new InkOutput({ width: 1000, height: 1 });
-    output.write(0, 0, row, { transformers: [] });
-    const clipped = new InkOutput({ width, height: 1 });
-    clipped.clip({ x1: 0, x2: width, y1: undefined, y2: undefined });
-    clipped.write(0, 0, output.get().output, { transformers: [] });
-    return clipped.get().output;
-  });
+const printedRow = fc.tuple(ownRow, fc.integer({ min: 1, max: COLUMNS })).map(([row, width]) => {
+  const output = new InkOutput({ width: 1000, height: 1 });
+  output.write(0, 0, row, { transformers: [] });
+  const clipped = new InkOutput({ width, height: 1 });
+  clipped.clip({ x1: 0, x2: width, y1: undefined, y2: undefined });
+  clipped.write(0, 0, output.get().output, { transformers: [] });
+  return clipped.get().output;
+});
 
 test('updating only the cells that changed leaves the row as writing it anew would', async () => {
   await fc.assert(
@@ -104,6 +124,7 @@ test('updating only the cells that changed leaves the row as writing it anew wou
 });
 
 test('a row whose bead moves by two cells is updated in a few bytes', () => {
-  const row = (bead: number): string => `\x1b[34m${'━'.repeat(bead)}●\x1b[39m${'─'.repeat(60 - bead)}  0.40  +0.03`;
+  const row = (bead: number): string =>
+    `\x1b[34m${'━'.repeat(bead)}●\x1b[39m${'─'.repeat(60 - bead)}  0.40  +0.03`;
   expect(lineUpdate(row(20), row(22), 120).length).toBeLessThan(30);
 });

@@ -33,7 +33,13 @@ const char = (letter: string, held: object = {}) => ({
   meta: false,
   ...held,
 });
-const named = (name: string, held: object = {}) => ({ name, shift: false, ctrl: false, meta: false, ...held });
+const named = (name: string, held: object = {}) => ({
+  name,
+  shift: false,
+  ctrl: false,
+  meta: false,
+  ...held,
+});
 
 test('keys written at once are as many key presses', () => {
   expect(press('uu')).toEqual([char('u'), char('u')]);

@@ -27,6 +27,8 @@ test('the stand-in for Intl.Segmenter finds the grapheme around a place as the e
 test('the stand-in for Intl.Segmenter leaves words and sentences to the engine', () => {
   const options = { granularity: 'word' } as const;
   const words = [...new Segmenter('en', options).segment('a beam')].map(({ segment }) => segment);
-  expect(words).toEqual([...new Intl.Segmenter('en', options).segment('a beam')].map(({ segment }) => segment));
+  expect(words).toEqual(
+    [...new Intl.Segmenter('en', options).segment('a beam')].map(({ segment }) => segment),
+  );
   expect(new Segmenter('en', options).resolvedOptions().granularity).toBe('word');
 });

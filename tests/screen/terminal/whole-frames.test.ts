@@ -48,3 +48,10 @@ test('undone, the stream writes what was held and is as it was', () => {
   stream.write(begin);
   expect(stream.chunks).toEqual([`${begin}row`, begin]);
 });
+
+test('the alternate screen is entered at its top left', () => {
+  const stream = recorder();
+  joinFrames(stream);
+  stream.write('\x1b[?1049h');
+  expect(stream.chunks).toEqual(['\x1b[?1049h\x1b[H']);
+});
