@@ -17,19 +17,30 @@ import { reportMember } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult, type MemberReport } from '../timber/report.ts';
 import { type Loaded, load, type SessionOptions } from './load.ts';
-import { closing, heading, notChecked, placeText, wrapped } from './prose.ts';
+import { beside, closing, heading, notChecked, placeText, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
+import { workingsJson, workingsTexts } from './workings.ts';
+
+export interface CheckOptions extends SessionOptions {
+  /** The calculation behind each check. */
+  readonly workings?: boolean;
+}
 
 /** `thrice check FILE`: each member's checks, what governs, pass or fail. Status 0 when every member passes. */
-export function check(file: string, options: SessionOptions, print: (text: string) => void): number {
+export function check(file: string, options: CheckOptions, print: (text: string) => void): number {
   const loaded = load(file, options);
-  const results = loaded.members.map(({ member }) => checkedMember(member, loaded.only));
-  if (options.json === true) {
-    const document = { thrice: 1, ...notChecked(loaded.only).json, members: results.map(memberJson) };
+  const json = options.json === true;
+  // JSON is the same whatever the units of the session.
+  const words = json ? 'us' : loaded.units;
+  const results = loaded.members.map(({ member }) => checkedMember(member, loaded.only, words));
+  const workings = options.workings === true;
+  if (json) {
+    const members = results.map((result) => memberJson(result, workings ? loaded.units : null));
+    const document = { thrice: 1, ...notChecked(loaded.only).json, members };
     print(`${JSON.stringify(document, null, 2)}\n`);
   } else {
-    print(`${memberTexts(loaded, results).join('\n')}\n`);
+    print(`${memberTexts(loaded, results, workings).join('\n')}\n`);
   }
   return results.every((result) => result.passes) ? STATUS.yes : STATUS.no;
 }
@@ -44,8 +55,8 @@ interface Checked {
   readonly ratios: Float64Array;
 }
 
-function checkedMember(member: Member, only: readonly CheckId[] | null): Checked {
-  const report = reportMember(member);
+function checkedMember(member: Member, only: readonly CheckId[] | null, units: Units): Checked {
+  const report = reportMember(member, units);
   const ratios = ratiosOf(member);
   const unloaded = report.cautions.some((caution) => caution.id === 'unloaded');
   const { passes, governing } = judge(ratios, only);
@@ -58,7 +69,8 @@ function finite(value: number): number | null {
   return Number.isFinite(value) ? value : null;
 }
 
-function memberJson({ member, report, checks, passes, governing, ratios }: Checked) {
+/** `workings`: the units to write the calculations in; null leaves them out. */
+function memberJson({ member, report, checks, passes, governing, ratios }: Checked, workings: Units | null) {
   const exponents = exponentsOf(member);
   const spanToDepth = spanToDepthOf(member);
   const [shear, bending, deflection] = powersOf(ratios).map((power) => power.ratio ?? 0);
@@ -88,6 +100,7 @@ function memberJson({ member, report, checks, passes, governing, ratios }: Check
       clause: each.clause,
       factors: Object.fromEntries(each.factors.map(({ symbol, value }) => [symbol, value])),
       exponents: exponents[each.id] ?? null,
+      ...(workings === null ? {} : { workings: workingsJson(member, each.id, workings) }),
     })),
     advice: report.advice,
     reactions: report.reactions.map(({ at, byKind, max, min }) => ({ at, byKind, max, min })),
@@ -99,9 +112,13 @@ function memberJson({ member, report, checks, passes, governing, ratios }: Check
 
 const SUPPORT_CHECKS: readonly CheckId[] = ['bearing', 'uplift', 'notch'];
 
-function memberTexts(loaded: Loaded, results: readonly Checked[]): string[] {
+function memberTexts(loaded: Loaded, results: readonly Checked[], workings: boolean): string[] {
   const lines = [...heading(loaded.session), ...notChecked(loaded.only).lines];
-  for (const result of results) lines.push('', ...memberText(result, loaded.units));
+  for (const result of results) {
+    lines.push('', ...memberText(result, loaded.units));
+    const ids = result.checks.map(({ id }) => id);
+    if (workings) lines.push(...workingsTexts(result.member, ids, loaded.units));
+  }
   const failing = results.filter((result) => !result.passes).length;
   if (results.length > 1)
     lines.push(
@@ -113,17 +130,16 @@ function memberTexts(loaded: Loaded, results: readonly Checked[]): string[] {
 
 function memberText({ member, report, checks, passes, governing }: Checked, units: Units): string[] {
   const spans = member.beam.spans.map((span) => showSpan(span, units)).join(', ');
-  const title = [
+  const title = beside([
     harmless(member.name),
     report.label,
     `${member.stock.species} ${member.stock.grade}`,
     spans,
-  ].join('  ');
+  ]);
   const rows = [...checks]
     .sort((a, b) => CHECK_IDS.indexOf(a.id) - CHECK_IDS.indexOf(b.id))
     .map((each) => [
-      each.id === governing ? '>' : '',
-      each.id,
+      `${each.id === governing ? '>' : ' '} ${each.id}`,
       measured(each, each.demand, units),
       measured(each, each.capacity, units),
       showRatio(each.ratio),
@@ -131,11 +147,10 @@ function memberText({ member, report, checks, passes, governing }: Checked, unit
       placeText(each, units),
     ]);
   return [
-    `${passes ? 'PASSES' : 'FAILS '}  ${title}`,
+    ...title.map((line, at) => `${at > 0 ? '      ' : passes ? 'PASSES' : 'FAILS '}  ${line}`),
     ...table(
       [
-        { head: '', align: 'left' },
-        { head: 'check', align: 'left' },
+        { head: '  check', align: 'left' },
         { head: 'demand', align: 'right' },
         { head: 'capacity', align: 'right' },
         { head: 'ratio', align: 'right' },
@@ -143,7 +158,7 @@ function memberText({ member, report, checks, passes, governing }: Checked, unit
         { head: 'at', align: 'left' },
       ],
       rows,
-    ).map((line) => `  ${line}`),
+    ),
     ...report.cautions.flatMap((caution) => wrapped(`beware: ${caution.text}`, '  ')),
     ...(report.assumptions.length > 0 ? wrapped(`assumed: ${report.assumptions.join('; ')}`, '  ') : []),
   ];

@@ -1,9 +1,11 @@
-import { readFileSync, statSync } from 'node:fs';
-import { harmless, type Units } from '../quantity/index.ts';
+import { closeSync, openSync, readSync, statSync } from 'node:fs';
+import { BESTS } from '../explore/best.ts';
+import { harmless, quoted, type Units } from '../quantity/index.ts';
 import { readSession, readSessionWithSets } from '../session/index.ts';
 import { MAX_BYTES, type Session, type SessionMember } from '../session/session.ts';
 import { CHECK_IDS, type CheckId } from '../timber/report.ts';
 import { BadInput } from './status.ts';
+import { withYard } from './yard-file.ts';
 
 /** Options that the commands on a session share. */
 export interface SessionOptions {
@@ -11,6 +13,7 @@ export interface SessionOptions {
   readonly set?: readonly string[];
   readonly units?: string;
   readonly only?: string;
+  readonly best?: string;
   readonly json?: boolean;
 }
 
@@ -26,17 +29,40 @@ export interface Loaded {
 
 /** Text of a file, or BadInput with one line that says why not. */
 export function readText(file: string): string {
+  if (file === '') throw new BadInput('a file name is needed, not an empty text');
   try {
-    const stat = statSync(file);
-    if (stat.isDirectory()) throw new BadInput(`${harmless(file)}: is a directory, not a session file`);
-    if (stat.size > MAX_BYTES)
+    if (statSync(file).isDirectory())
+      throw new BadInput(`${harmless(file)}: is a directory, not a session file`);
+    const bytes = readUpTo(file, MAX_BYTES + 1);
+    if (bytes.length > MAX_BYTES)
       throw new BadInput(`${harmless(file)}: is larger than 16 MiB, the most a session may be`);
-    return new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(readFileSync(file));
+    return new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes);
   } catch (error) {
     if (error instanceof BadInput) throw error;
     const code = (error as NodeJS.ErrnoException).code;
-    throw new BadInput(`${harmless(file)}: ${WHY[code ?? ''] ?? 'is not UTF-8 text'}`);
+    throw new BadInput(
+      `${harmless(file)}: ${WHY[code ?? ''] ?? `could not be read (${code ?? harmless(String(error))})`}`,
+    );
   }
+}
+
+/** A pipe or a device does not tell its size: the reading itself has to end. */
+function readUpTo(file: string, most: number): Uint8Array {
+  const PIECE = 64 * 1024;
+  const pieces: Uint8Array[] = [];
+  const from = openSync(file, 'r');
+  try {
+    for (let total = 0; total < most; ) {
+      const piece = new Uint8Array(Math.min(PIECE, most - total));
+      const read = readSync(from, piece);
+      if (read === 0) break;
+      pieces.push(piece.subarray(0, read));
+      total += read;
+    }
+  } finally {
+    closeSync(from);
+  }
+  return Buffer.concat(pieces);
 }
 
 const WHY: Readonly<Record<string, string>> = {
@@ -46,6 +72,7 @@ const WHY: Readonly<Record<string, string>> = {
   ENAMETOOLONG: 'no such file (the name is too long)',
   ELOOP: 'no such file (its links run in a circle)',
   ERR_INVALID_ARG_VALUE: 'is not a file name',
+  ERR_ENCODING_INVALID_ENCODED_DATA: 'is not UTF-8 text',
 };
 
 /** Reads a session for a command: values set, members chosen, units and checks as asked. */
@@ -57,7 +84,7 @@ export function load(file: string, options: SessionOptions): Loaded {
       ? readSession(text, harmless(file))
       : readSessionWithSets(text, harmless(file), options.member ?? null, set);
   if (!read.ok) throw new BadInput(read.fault);
-  const { session } = read;
+  const session = withBest(withYard(read.session, file, readText), options.best);
   const members = session.members.filter(
     ({ member }) => options.member === undefined || member.name === options.member,
   );
@@ -79,6 +106,15 @@ export function theMember(loaded: Loaded, file: string): SessionMember {
   return loaded.members[0]!;
 }
 
+/** The session with what counts as best as asked for. */
+function withBest(session: Session, asked: string | undefined): Session {
+  if (asked === undefined) return session;
+  const best = BESTS.find((each) => each === asked);
+  if (best === undefined)
+    throw new BadInput(`--best ${harmless(asked)}: is nothing to choose by; ${BESTS.join(', ')} would be`);
+  return { ...session, best };
+}
+
 const NAMES_SHOWN = 120;
 
 function shortened(text: string): string {
@@ -88,7 +124,7 @@ function shortened(text: string): string {
 function unitsOf(asked: string | undefined, own: Units): Units {
   if (asked === undefined) return own;
   if (asked === 'us' || asked === 'si') return asked;
-  throw new BadInput(`--units ${harmless(asked)}: is not a choice of units; us or si would be`);
+  throw new BadInput(`--units ${quoted(asked)}: is not a choice of units; us or si would be`);
 }
 
 function onlyOf(asked: string | undefined): readonly CheckId[] | null {
@@ -96,7 +132,7 @@ function onlyOf(asked: string | undefined): readonly CheckId[] | null {
   const ids = asked.split(',').map((id) => id.trim());
   for (const id of ids) {
     if (!(CHECK_IDS as readonly string[]).includes(id)) {
-      throw new BadInput(`--only ${harmless(id)}: is not a check; the checks are ${CHECK_IDS.join(', ')}`);
+      throw new BadInput(`--only ${quoted(id)}: is not a check; the checks are ${CHECK_IDS.join(', ')}`);
     }
   }
   return CHECK_IDS.filter((id) => ids.includes(id));

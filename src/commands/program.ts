@@ -1,15 +1,19 @@
 import { Command, CommanderError, Option } from 'commander';
-import { harmless } from '../quantity/index.ts';
-import { check } from './check.ts';
+import { harmless, quoted } from '../quantity/index.ts';
+import { nearestName } from '../timber/nearest-name.ts';
+import { type CheckOptions, check } from './check.ts';
 import { explore } from './explore.ts';
+import { type HandoverOptions, handovers } from './handovers.ts';
 import type { SessionOptions } from './load.ts';
+import { moves } from './moves.ts';
+import { order } from './order.ts';
+import { closing } from './prose.ts';
 import { rack } from './rack.ts';
 import { reach } from './reach.ts';
 import { schema } from './schema.ts';
+import { type SpansOptions, spans } from './spans.ts';
 import { BadInput, OutputFailed, STATUS } from './status.ts';
 import type { Streams } from './streams.ts';
-
-const CAUTION = 'Preliminary sizing for discussion. Local code and a licensed professional decide.';
 
 /** Runs the command that the arguments name and gives its exit status. */
 export async function run(args: readonly string[], version: string, streams: Streams): Promise<number> {
@@ -21,9 +25,10 @@ export async function run(args: readonly string[], version: string, streams: Str
     .argument('[file]', 'session to open in the explorer; without one it asks for a beam')
     .addHelpText(
       'after',
-      `\nExit status: 0 yes, 1 no, 2 bad input, 3 an output could not be written.\n\n${CAUTION}`,
+      `\nExit status: 0 yes, 1 no, 2 bad input, 3 an output could not be written.\n\n${closing().join('\n')}`,
     )
-    .action(async (file: string | undefined) => {
+    .action(async (file: string | undefined, _options: unknown, { args }: Command) => {
+      if (file !== undefined && args.length > 1) throw unknownCommand(file, program);
       status = await explore(file ?? null, streams);
     });
 
@@ -45,12 +50,14 @@ export async function run(args: readonly string[], version: string, streams: Str
       .option('--only <checks>', 'these checks alone, such as shear,bending')
       .option('--json', 'print JSON, in lb, in, psi');
 
-  onSession('check', 'the checks of each member, what governs, pass or fail', false).action(
-    (file: string, options: SessionOptions) => {
+  onSession('check', 'the checks of each member, what governs, pass or fail', false)
+    .option('--workings', 'the calculation behind each check, line by line')
+    .action((file: string, options: CheckOptions) => {
       status = check(file, options, streams.out);
-    },
-  );
-  onSession('rack', 'the stock sizes, lightest first, and what stops each', true).action(
+    });
+  const byBest = (command: Command) =>
+    command.option('--best <what>', "weight, depth, boardFeet or price, in place of the session's");
+  byBest(onSession('rack', 'the stock sizes, lightest first, and what stops each', true)).action(
     (file: string, options: SessionOptions) => {
       status = rack(file, options, streams.out);
     },
@@ -60,12 +67,38 @@ export async function run(args: readonly string[], version: string, streams: Str
       status = reach(file, options, streams.out);
     },
   );
+  byBest(onSession('moves', 'the changes that would help, best first, and what each takes', true)).action(
+    (file: string, options: SessionOptions) => {
+      status = moves(file, options, streams.out);
+    },
+  );
+  byBest(onSession('handovers', 'which size is the best that passes from where to where', true))
+    .requiredOption('--knob <key>', 'what to sweep, such as spans.0, area.live or maxDepth')
+    .requiredOption('--from <value>', 'where to begin, such as "8 ft"')
+    .requiredOption('--to <value>', 'where to end')
+    .action((file: string, options: HandoverOptions) => {
+      status = handovers(file, options, streams.out);
+    });
+  onSession('spans', 'the span table of the grade, to print', true)
+    .requiredOption('--spacings <list>', 'such as 12,16,24')
+    .action((file: string, options: SpansOptions) => {
+      status = spans(file, options, streams.out);
+    });
+  onSession('order', 'what to buy by the yard list: pieces, lengths, waste, price', false).action(
+    (file: string, options: SessionOptions) => {
+      status = order(file, options, streams.out);
+    },
+  );
   program
     .command('schema')
     .description('the JSON Schema of the session file')
     .action(() => {
       status = schema(streams.out);
     });
+
+  // More than a file without a command: the first word was meant as one. The commands themselves, which would
+  // have inherited this, take no word too many.
+  program.allowExcessArguments();
 
   for (const command of [program, ...program.commands]) {
     command
@@ -83,11 +116,28 @@ export async function run(args: readonly string[], version: string, streams: Str
   }
 }
 
+/** No wrong command is worth comparing further. */
+const LONGEST_COMMAND = 20;
+
+function unknownCommand(word: string, program: Command): BadInput {
+  const names = program.commands.map((command) => command.name());
+  const near = nearestName(word.slice(0, LONGEST_COMMAND), names);
+  return new BadInput(
+    `there is no command ${quoted(word)}; ${near === null ? `the commands are ${names.join(', ')}` : `the nearest is ${near}`}`,
+  );
+}
+
+/** Room for all that the parser says. */
+const LONGEST_MESSAGE = 200;
+
 function endedBy(error: unknown, streams: Streams): number {
   if (error instanceof CommanderError) {
     if (error.exitCode === 0) return STATUS.yes;
-    const what = error.message.replace(/^error: /, '').replace(/\s*\n\s*/g, ' ');
-    streams.error(`thrice: ${harmless(what)}; thrice --help lists the commands\n`);
+    const what = error.message
+      .replace(/^error: /, '')
+      .replace(/\s*\n\s*/g, ' ')
+      .replace(/\.$/, '');
+    streams.error(`thrice: ${harmless(what, LONGEST_MESSAGE)}; thrice --help lists the commands\n`);
     return STATUS.badInput;
   }
   if (error instanceof BadInput) {

@@ -1,15 +1,50 @@
 import { harmless, showSpan, type Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
+import { assumptionsOf } from '../timber/index.ts';
+import type { Member, Stock } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
+
+/** Columns that every terminal has. */
+const LINE = 80;
 
 /** First lines of an output for people: the job and the basis of design. */
 export function heading(session: Session): string[] {
-  return [`${harmless(session.title || 'untitled')}   ASD, NDS 2018, ${session.combinations}`];
+  const title = harmless(session.title || 'untitled');
+  const basis = `ASD, NDS 2018, ${session.combinations}`;
+  const line = `${title}   ${basis}`;
+  return line.length > LINE ? [title, basis] : [line];
 }
 
 /** Last lines of an output for people. */
 export function closing(): string[] {
-  return ['Preliminary sizing for discussion. Local code and a licensed professional decide.'];
+  return ['Preliminary sizing for discussion.', 'Local code and a licensed professional decide.'];
+}
+
+/** What an output takes for given: what nobody stated, and the factors that somebody typed. */
+export function given(
+  member: Member,
+  units: Units = 'us',
+): {
+  lines: string[];
+  json: { assumptions: readonly string[]; typedFactors?: Member['typedFactors'] };
+} {
+  const assumptions = assumptionsOf(member, units);
+  const typed = Object.entries(member.typedFactors ?? {});
+  return {
+    lines: [
+      ...typed.flatMap(([symbol, { value, reason }]) =>
+        wrapped(`beware: ${symbol} ${value} is typed: ${harmless(reason)}`),
+      ),
+      ...(assumptions.length > 0 ? wrapped(`assumed: ${assumptions.join('; ')}`) : []),
+    ],
+    json: { assumptions, ...(typed.length > 0 ? { typedFactors: member.typedFactors } : {}) },
+  };
+}
+
+/** A wood in full: "Douglas Fir-Larch No.2", "glulam 24F-1.8E", "LVL typical 2.0E". */
+export function woodName({ product, species, grade }: Stock): string {
+  const sawn = product !== 'glulam' && product !== 'LVL' && product !== 'custom';
+  return harmless([sawn ? '' : product, sawn ? species : '', grade].filter((part) => part !== '').join(' '));
 }
 
 /** What --only left out, said at the head of the output. */
@@ -23,8 +58,6 @@ export function notChecked(only: readonly CheckId[] | null): {
     ? { lines: [], json: {} }
     : { lines: wrapped(`NOT CHECKED: ${left.join(', ')}`), json: { notChecked: left } };
 }
-
-const LINE = 80;
 
 /** A text in lines of at most 80 columns, broken between words. */
 export function wrapped(text: string, indent = ''): string[] {
@@ -42,10 +75,32 @@ export function wrapped(text: string, indent = ''): string[] {
   return [...lines, indent + line];
 }
 
+/** Left of what names a member in an output. */
+const MEMBER_INDENT = 8;
+
+/** What names a member, two blanks apart, in lines that leave room for an indent of eight. */
+export function beside(parts: readonly string[]): string[] {
+  const lines: string[] = [];
+  let line = '';
+  for (const part of parts.flatMap((each) => wrapped(each, ' '.repeat(MEMBER_INDENT)).map((l) => l.trim()))) {
+    const longer = line === '' ? part : `${line}  ${part}`;
+    if (line !== '' && MEMBER_INDENT + longer.length > LINE) {
+      lines.push(line);
+      line = part;
+    } else {
+      line = longer;
+    }
+  }
+  return [...lines, line];
+}
+
+/** Places of extremes are shown to the half inch. */
+const PLACE_STEP = 0.5;
+
 /** Where a check is worst: "7'-0"" from the left end, "support 2". */
 export function placeText(each: CheckResult, units: Units): string {
   if (each.id === 'slenderness') return '';
   return each.id === 'bearing' || each.id === 'uplift' || each.id === 'notch'
     ? `support ${each.place + 1}`
-    : showSpan(each.at, units);
+    : showSpan(units === 'us' ? Math.round(each.at / PLACE_STEP) * PLACE_STEP : each.at, units);
 }

@@ -1,20 +1,33 @@
+import { BEST_WORD } from '../explore/best.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { powersOf } from '../explore/powers.ts';
-import { type Rack, type RackSize, rackOf } from '../explore/rack.ts';
-import { harmless, showRatio, showSpan, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
-import { standingDepth, standingWidth } from '../timber/index.ts';
-import type { Member } from '../timber/member.ts';
+import { type Rack, type RackSize, sizeName } from '../explore/rack.ts';
+import { type RankedRack, type RankedSize, rankedRack } from '../explore/ranked.ts';
+import { refusedWord } from '../explore/refused-word.ts';
+import {
+  harmless,
+  showInches,
+  showRatio,
+  showSpan,
+  type Units,
+  weightNumber,
+  weightUnit,
+} from '../quantity/index.ts';
+import { CHECK_WORD } from '../screen/words.ts';
+import { rankingOf } from '../session/index.ts';
+import { shortWood, standingDepth, standingWidth } from '../timber/index.ts';
+import type { Member, Stock } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { closing, heading, notChecked } from './prose.ts';
+import { beside, closing, given, heading, notChecked, woodName, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { type Column, table } from './table.ts';
 
-/** `thrice rack FILE --member NAME`: the stock sizes, lightest first. Status 0 when some size passes. */
+/** `thrice rack FILE --member NAME`: the stock sizes, best first. Status 0 when some size passes. */
 export function rack(file: string, options: SessionOptions, print: (text: string) => void): number {
   const loaded = load(file, options);
   const { member } = theMember(loaded, file);
-  const sizes = rackOf(member, loaded.only);
+  const sizes = rankedRack(member, rankingOf(loaded.session), loaded.only);
   if (options.json === true) {
     print(
       `${JSON.stringify({ thrice: 1, ...notChecked(loaded.only).json, ...rackJson(member, sizes, loaded.only) }, null, 2)}\n`,
@@ -25,6 +38,7 @@ export function rack(file: string, options: SessionOptions, print: (text: string
       ...notChecked(loaded.only).lines,
       '',
       ...rackText(member, sizes, loaded.units),
+      ...given(member, loaded.units).lines,
       '',
       ...closing(),
     ];
@@ -33,11 +47,35 @@ export function rack(file: string, options: SessionOptions, print: (text: string
   return sizes.lightest >= 0 ? STATUS.yes : STATUS.no;
 }
 
-function rackJson(member: Member, { sizes, lightest }: Rack, only: readonly CheckId[] | null) {
+function rackJson(
+  member: Member,
+  { sizes, lightest, lit, best }: RankedRack,
+  only: readonly CheckId[] | null,
+) {
   return {
     member: member.name,
     lightest: sizes[lightest]?.size.label ?? null,
-    sizes: sizes.map((each) => sizeJson(member, each, only)),
+    best,
+    lit: sizes[lit]?.size.label ?? null,
+    lightestWood: lightest < 0 ? null : woodJson(sizes[lightest]!.size.stock),
+    ...given(member).json,
+    sizes: sizes.map((each) => ({ ...sizeJson(member, each, only), ...choiceJson(each) })),
+  };
+}
+
+/** A wood as the session file names it. */
+export function woodJson({ product, species, grade }: Stock) {
+  return { product, species, grade };
+}
+
+/** What it takes to choose between sizes; of yard, prices and headroom only where the session has them. */
+function choiceJson({ nonDominated, inYard, price, clear, over }: RankedSize) {
+  return {
+    nonDominated,
+    ...(inYard === null ? {} : { inYard }),
+    ...(price === null ? {} : { price }),
+    ...(clear === null ? {} : { clear }),
+    ...(over === 0 ? {} : { over }),
   };
 }
 
@@ -53,9 +91,7 @@ export function sizeJson(member: Member, each: RackSize, only: readonly CheckId[
     width: standingWidth({ ...size, flat: member.section.flat }),
     depth: standingDepth({ ...size, flat: member.section.flat }),
     plies: size.plies,
-    product: member.stock.product,
-    species: member.stock.species,
-    grade: member.stock.grade,
+    ...woodJson(size.stock),
     weight: each.weight,
     boardFeet: size.boardFeet,
     passes: each.passes,
@@ -65,42 +101,92 @@ export function sizeJson(member: Member, each: RackSize, only: readonly CheckId[
   };
 }
 
-/** Heads of the columns that rack and reach share. */
-export function sizeColumns(units: Units): Column[] {
+/** Heads of the columns that rack and reach share; the wood's where several stand together. */
+export function sizeColumns(rack: Rack, units: Units): Column[] {
   return [
-    { head: '', align: 'left' },
-    { head: 'size', align: 'left' },
+    { head: '  size', align: 'left' },
+    ...(rack.woods.length > 1 ? [{ head: 'wood', align: 'left' } as const] : []),
     { head: weightUnit(units), align: 'right' },
-    { head: 'shear', align: 'right' },
-    { head: 'bending', align: 'right' },
-    { head: 'deflection', align: 'right' },
-    { head: 'stopped by', align: 'left' },
   ];
 }
 
 /** Cells of the columns that rack and reach share. */
-export function sizeCells(each: RackSize, lit: boolean, units: Units): string[] {
-  const powers = each.refused === null ? powersOf(each.ratios) : null;
-  const ratio = (at: 0 | 1 | 2) => (powers?.[at].ratio == null ? '' : showRatio(powers[at].ratio));
+export function sizeCells(rack: Rack, each: RackSize, lit: boolean, units: Units): string[] {
   return [
-    lit ? '*' : '',
-    each.size.label,
+    `${lit ? '*' : ' '} ${each.size.label}`,
+    ...(rack.woods.length > 1 ? [harmless(shortWood(each.size.stock))] : []),
     weightNumber(each.weight, units),
-    ratio(0),
-    ratio(1),
-    ratio(2),
-    lit ? 'lightest' : (each.refused ?? (each.passes ? '' : (each.governing ?? 'no load'))),
   ];
 }
 
-function rackText(member: Member, { sizes, lightest }: Rack, units: Units): string[] {
-  const { stock, beam } = member;
-  return [
-    `${harmless(member.name)}  ${stock.species} ${stock.grade}  ${beam.spans.map((span) => showSpan(span, units)).join(', ')}`,
-    ...table(
-      sizeColumns(units),
-      sizes.map((each, at) => sizeCells(each, at === lightest, units)),
-    ),
-    lightest < 0 ? 'no size passes' : `lightest that passes: ${sizes[lightest]!.size.label}`,
+const RATIO_COLUMNS: readonly Column[] = [
+  { head: 'shear', align: 'right' },
+  { head: 'bending', align: 'right' },
+  { head: 'defl.', align: 'right' },
+];
+
+function ratioCells(each: RackSize): string[] {
+  const powers = each.refused === null ? powersOf(each.ratios) : null;
+  const ratio = (at: 0 | 1 | 2) => (powers?.[at].ratio == null ? '' : showRatio(powers[at].ratio));
+  return [ratio(0), ratio(1), ratio(2)];
+}
+
+function stopsText({ refused, passes, governing }: RackSize): string {
+  if (refused !== null) return refusedWord(refused);
+  if (passes) return '';
+  return governing === null ? 'no load' : CHECK_WORD[governing];
+}
+
+function rackText(member: Member, rack: RankedRack, units: Units): string[] {
+  const { sizes, lit, best } = rack;
+  const priced = sizes.some((each) => each.price !== null);
+  const storey = member.headroom != null;
+  const columns: Column[] = [
+    ...sizeColumns(rack, units),
+    ...RATIO_COLUMNS,
+    ...(priced ? [{ head: 'price', align: 'right' } as const] : []),
+    ...(storey ? [{ head: 'clear', align: 'right' } as const] : []),
+    { head: 'stopped by', align: 'left' },
   ];
+  const rows = sizes.map((each, at) => {
+    const [first, ...rest] = sizeCells(rack, each, at === lit, units);
+    return [
+      at === lit ? first! : `${choiceMark(each)}${first!.slice(1)}`,
+      ...rest,
+      ...ratioCells(each),
+      ...(priced ? [each.price === null ? 'none' : moneyText(each.price)] : []),
+      ...(storey ? [each.clear === null ? '' : showSpan(each.clear, units)] : []),
+      at === lit ? BEST_WORD[best] : choiceText(each, units),
+    ];
+  });
+  const word = BEST_WORD[best];
+  return [
+    ...beside([
+      harmless(member.name),
+      ...rack.woods.map(woodName),
+      member.beam.spans.map((span) => showSpan(span, units)).join(', '),
+    ]),
+    ...table(columns, rows),
+    lit < 0 ? 'no size passes' : `${word} that passes: ${sizeName(rack, sizes[lit]!.size)}`,
+    ...(sizes.some((each, at) => each.nonDominated && at !== lit)
+      ? wrapped('+ passes, and none that passes is as light and as shallow')
+      : []),
+    ...(sizes.some((each) => each.inYard === false) ? ['- the yard lacks it, or has none so long'] : []),
+  ];
+}
+
+function choiceMark({ inYard, nonDominated }: RankedSize): string {
+  if (inYard === false) return '-';
+  return nonDominated ? '+' : ' ';
+}
+
+/** What stops a size, or keeps it from being a choice. */
+function choiceText(each: RankedSize, units: Units): string {
+  if (each.over > 0) return `over by ${showInches(each.over, units)}`;
+  return stopsText(each);
+}
+
+/** Money with two decimals; the list says in what. */
+export function moneyText(amount: number): string {
+  return amount.toFixed(2);
 }

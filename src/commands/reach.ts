@@ -1,11 +1,13 @@
-import { type Rack, rackOf, sectionOf } from '../explore/rack.ts';
-import { type Reach, reachFinder } from '../explore/reach.ts';
+import { type Rack, type RackSize, rackOf } from '../explore/rack.ts';
+import type { Reach } from '../explore/reach.ts';
+import { reachesOf } from '../explore/reaches.ts';
+import { refusedWord } from '../explore/refused-word.ts';
 import { harmless, showSpanDown, type Units } from '../quantity/index.ts';
-import { woodOf } from '../timber/index.ts';
+import { CHECK_WORD } from '../screen/words.ts';
 import type { Member } from '../timber/member.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { closing, heading, notChecked } from './prose.ts';
-import { sizeCells, sizeColumns, sizeJson } from './rack.ts';
+import { beside, closing, given, heading, notChecked, woodName } from './prose.ts';
+import { sizeCells, sizeColumns, sizeJson, woodJson } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
 
@@ -14,26 +16,31 @@ export function reach(file: string, options: SessionOptions, print: (text: strin
   const loaded = load(file, options);
   const { member } = theMember(loaded, file);
   const rack = rackOf(member, loaded.only);
-  const find = reachFinder(member, woodOf(member), loaded.only);
-  const reaches = rack.sizes.map(({ size, refused }) =>
-    refused === null ? find(sectionOf(member, size)) : null,
-  );
+  const reaches = reachesOf(member, rack, loaded.only);
   if (options.json === true) {
     const sizes = rack.sizes.map((each, at) => ({
       ...sizeJson(member, each, loaded.only),
       span: reaches[at]?.span ?? null,
       stops: reaches[at]?.stops ?? null,
     }));
-    const lightest = rack.sizes[rack.lightest]?.size.label ?? null;
-    print(
-      `${JSON.stringify({ thrice: 1, ...notChecked(loaded.only).json, member: member.name, lightest, sizes }, null, 2)}\n`,
-    );
+    const lit = rack.sizes[rack.lightest]?.size;
+    const document = {
+      thrice: 1,
+      ...notChecked(loaded.only).json,
+      member: member.name,
+      lightest: lit?.label ?? null,
+      lightestWood: lit === undefined ? null : woodJson(lit.stock),
+      ...given(member).json,
+      sizes,
+    };
+    print(`${JSON.stringify(document, null, 2)}\n`);
   } else {
     const lines = [
       ...heading(loaded.session),
       ...notChecked(loaded.only).lines,
       '',
       ...reachText(member, rack, reaches, loaded.units),
+      ...given(member, loaded.units).lines,
       '',
       ...closing(),
     ];
@@ -44,20 +51,25 @@ export function reach(file: string, options: SessionOptions, print: (text: strin
 
 function reachText(member: Member, rack: Rack, reaches: readonly (Reach | null)[], units: Units): string[] {
   return [
-    `${harmless(member.name)}  ${member.stock.species} ${member.stock.grade}`,
+    ...beside([harmless(member.name), ...rack.woods.map(woodName)]),
     ...table(
       [
-        ...sizeColumns(units).slice(0, -1),
+        ...sizeColumns(rack, units),
         { head: 'reach', align: 'right' },
         { head: 'stopped there by', align: 'left' },
       ],
       rack.sizes.map((each, at) => [
-        ...sizeCells(each, at === rack.lightest, units).slice(0, -1),
+        ...sizeCells(rack, each, at === rack.lightest, units),
         spanText(reaches[at] ?? null, units),
-        each.refused ?? reaches[at]?.stops ?? '',
+        stopsText(each, reaches[at] ?? null),
       ]),
     ),
   ];
+}
+
+function stopsText({ refused }: RackSize, reach: Reach | null): string {
+  if (refused !== null) return refusedWord(refused);
+  return reach === null || reach.stops === null ? '' : CHECK_WORD[reach.stops];
 }
 
 function spanText(reach: Reach | null, units: Units): string {

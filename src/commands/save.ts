@@ -16,8 +16,10 @@ export function saveSession(file: string, session: Session, fresh: boolean): str
     writeFileAtomic.sync(file, writeSession(session));
     return null;
   } catch (error) {
-    const code = (error as NodeJS.ErrnoException).code ?? '';
-    return `not kept: ${harmless(file)} ${WHY[code] ?? `could not be written (${code})`}`;
+    const { code, message } = error as NodeJS.ErrnoException;
+    // Without a code it is no answer of the system but a fault of this program's own.
+    const why = code === undefined ? message : code;
+    return `not kept: ${harmless(file)} ${WHY[why] ?? `could not be written (${harmless(why)})`}`;
   }
 }
 

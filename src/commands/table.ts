@@ -4,7 +4,10 @@ export interface Column {
   readonly align: 'left' | 'right';
 }
 
-/** Rows of text under their heads, two blanks apart, trailing blanks trimmed. */
+/** Columns of every terminal; wider tables move their columns together. */
+const LINE = 80;
+
+/** Rows of text under their heads, two blanks apart or one where two would not fit, trailing blanks trimmed. */
 export function table(
   columns: readonly Column[],
   rows: readonly (readonly string[])[],
@@ -13,6 +16,8 @@ export function table(
   const widths = columns.map((column, at) =>
     Math.max(column.head.length, ...rows.map((row) => row[at]!.length), 0),
   );
+  const wide = indent.length + widths.reduce((sum, width) => sum + width, 0) + 2 * (widths.length - 1) > LINE;
+  const gap = wide ? ' ' : '  ';
   const line = (cells: readonly string[]) =>
     (
       indent +
@@ -20,7 +25,7 @@ export function table(
         .map((cell, at) =>
           columns[at]!.align === 'right' ? cell.padStart(widths[at]!) : cell.padEnd(widths[at]!),
         )
-        .join('  ')
+        .join(gap)
     ).trimEnd();
   return [line(columns.map((column) => column.head)), ...rows.map(line)];
 }

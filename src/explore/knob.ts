@@ -25,6 +25,7 @@ export interface Knob {
 }
 
 export interface NumberKnob {
+  readonly kind: QuantityKind;
   get(member: Member): number;
   put(member: Member, value: number): Member;
   readonly least: number;
@@ -54,11 +55,13 @@ export interface MeasureOptions {
   readonly scale: Readonly<Record<Units, Scale>>;
   readonly least: number;
   readonly most: number;
+  /** What the range is said of; the label where absent. */
+  readonly name?: string;
   get(member: Member): number;
   put(member: Member, value: number): Member;
   show(value: number, units: Units): string;
   /** Why the changed member cannot be; null when it can. */
-  check?(member: Member): string | null;
+  check?(changed: Member, before: Member, units: Units): string | null;
 }
 
 const FOOT = 12;
@@ -202,12 +205,13 @@ export function stepped(value: number, by: number, unit: number): number {
 /** A knob on a measured quantity. */
 export function measureKnob(options: MeasureOptions): Knob {
   const { key, label, kind, scale, least, most, get, put, show, check } = options;
-  const turn = (member: Member, value: number): Turn => {
+  const turn = (member: Member, value: number, units: Units): Turn => {
     const changed = put(member, value);
-    const fault = check?.(changed) ?? null;
+    const fault = check?.(changed, member, units) ?? null;
     return fault === null ? { member: changed } : { fault };
   };
-  const range = (units: Units) => `${label} runs from ${show(least, units)} to ${show(most, units)}`;
+  const name = options.name ?? label;
+  const range = (units: Units) => `${name} runs from ${show(least, units)} to ${show(most, units)}`;
   return {
     key,
     label,
@@ -219,7 +223,7 @@ export function measureKnob(options: MeasureOptions): Knob {
       const next = Math.min(most, Math.max(least, moved));
       // A value outside the range may still be brought towards it, never further out.
       if (next === now || next > now !== direction > 0) return { fault: range(units) };
-      return turn(member, next);
+      return turn(member, next, units);
     },
     enter(member, text, units) {
       const parsed = parseQuantity(
@@ -229,11 +233,11 @@ export function measureKnob(options: MeasureOptions): Knob {
       );
       if (!parsed.ok) return { fault: parsed.fault };
       if (parsed.value < least || parsed.value > most) return { fault: range(units) };
-      return turn(member, parsed.value);
+      return turn(member, parsed.value, units);
     },
     hint: (units) => scale[units].hint,
     stepText: (units) => scale[units].stepText,
-    number: { get, put, least, most, axisUnit: (units) => scale[units].axis ?? scale[units].unit },
+    number: { kind, get, put, least, most, axisUnit: (units) => scale[units].axis ?? scale[units].unit },
   };
 }
 
@@ -247,7 +251,8 @@ export interface ChoiceOptions<T> {
   show(choice: T, units: Units): string;
   /** Reads a typed choice that is not on the list; null when it cannot be one. */
   read?(text: string, units: Units, member: Member): T | null;
-  check?(member: Member): string | null;
+  /** Why the changed member cannot be; null when it can. */
+  check?(changed: Member, before: Member): string | null;
   readonly stepText?: string;
 }
 
@@ -256,7 +261,7 @@ export function choiceKnob<T>(options: ChoiceOptions<T>): Knob {
   const { key, label, choices, get, put, show, read, check } = options;
   const turn = (member: Member, choice: T): Turn => {
     const changed = put(member, choice);
-    const fault = check?.(changed) ?? null;
+    const fault = check?.(changed, member) ?? null;
     return fault === null ? { member: changed } : { fault };
   };
   return {

@@ -48,16 +48,17 @@ export function reachFinder(
     return judge(ratios, only);
   };
   return (section, of = wood) => {
-    asked = of;
-    let from = REACH_FROM;
-    let low = worstAt(section, from);
-    if (!low.passes) return { span: 0, stops: low.governing };
     if (followsLaws(here, member, of)) {
       rate(here, of, section, ratios);
       const { factor, stops } = lengthByLaw(ratios, only);
       const span = factor * longest;
-      return span < REACH_TO ? { span, stops } : { span: REACH_TO, stops: null };
+      if (span >= REACH_TO) return { span: REACH_TO, stops: null };
+      return span >= REACH_FROM ? { span, stops } : { span: 0, stops };
     }
+    asked = of;
+    let from = REACH_FROM;
+    let low = worstAt(section, from);
+    if (!low.passes) return { span: 0, stops: low.governing };
     const growth = (REACH_TO / REACH_FROM) ** (1 / (LENGTHS_TRIED - 1));
     for (let at = 1; at < LENGTHS_TRIED; at += 1) {
       const to = at === LENGTHS_TRIED - 1 ? REACH_TO : REACH_FROM * growth ** at;

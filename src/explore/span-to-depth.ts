@@ -8,6 +8,15 @@ export function fieldSpan(member: Member, field: number): number {
   return kind === 'overhang' ? 2 * length : length;
 }
 
+/** Key of the knob of a field: "spans.1", "overhangs.left". */
+export function fieldKey(member: Member, field: number): string {
+  const { beam } = member;
+  const leading = beam.supports === 'bearings' && beam.overhangs.left > 0 ? 1 : 0;
+  const span = field - leading;
+  if (span < 0) return 'overhangs.left';
+  return span < beam.spans.length ? `spans.${span}` : 'overhangs.right';
+}
+
 /** l/h of a member: with several spans that of the span where the worst of the three powers stands. */
 export function spanToDepthOf(member: Member): number {
   const only =

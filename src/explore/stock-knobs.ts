@@ -1,6 +1,14 @@
 import { showInches } from '../quantity/index.ts';
-import { checkStock, gradesOf, shortSpecies, speciesOf, stockDepths, stockWidths } from '../timber/index.ts';
+import {
+  checkChange,
+  mostPlies,
+  shortSpecies,
+  speciesOf,
+  stockDepths,
+  stockWidths,
+} from '../timber/index.ts';
 import type { Member, Section } from '../timber/member.ts';
+import { changeStock, coversSize, gradesByStrength, withSpecies } from './choose-wood.ts';
 import { choiceKnob, type Knob, measureKnob, SCALES, type Turn } from './knob.ts';
 
 /** Stock values of one section dimension for the stock as it is, from the least to the most. */
@@ -21,7 +29,7 @@ function stockKnob(key: 'width' | 'depth', label: string, least: number, most: n
     get: (member) => member.section[key],
     put,
     show: showInches,
-    check: checkStock,
+    check: checkChange,
   });
   return {
     ...free,
@@ -37,80 +45,120 @@ function stockKnob(key: 'width' | 'depth', label: string, least: number, most: n
           fault: `${showInches(now, units)} is the ${direction > 0 ? 'largest' : 'smallest'} stock ${label} here; [ and ] go off stock`,
         };
       }
-      return checked(put(member, next));
+      return checked(member, fitted(member, put(member, next), key));
     },
     stepText: () => 'a size',
   };
+}
+
+/** A piece of another width: where that does not come in the depth at hand, in the nearest that it comes in. */
+function fitted(before: Member, member: Member, key: 'width' | 'depth'): Member {
+  if (key === 'depth') return member;
+  const { depth } = before.section;
+  const depths = stockDepths(member.stock, member.section.width);
+  const wasStock = stockDepths(before.stock, before.section.width).includes(depth);
+  if (!wasStock || depths.includes(depth) || depths.length === 0) return member;
+  const nearest = depths.reduce((best, each) =>
+    Math.abs(each - depth) < Math.abs(best - depth) ? each : best,
+  );
+  return withSection(member, { depth: nearest });
 }
 
 function withSection(member: Member, part: Partial<Section>): Member {
   return { ...member, section: { ...member.section, ...part } };
 }
 
-function checked(member: Member): Turn {
-  const fault = checkStock(member);
+function checked(before: Member, member: Member): Turn {
+  const fault = checkChange(member, before);
   return fault === null ? { member } : { fault };
 }
 
 export const sectionDepth = stockKnob('depth', 'depth', 1.5, 60);
 export const sectionWidth = stockKnob('width', 'width', 0.75, 24);
 
-/** Most plies side by side. */
-const MOST_PLIES = 4;
-
-export const plies: Knob = choiceKnob({
+/** Plies are of 2 in lumber and of LVL; what comes in one piece has one. */
+const pliesChoice = choiceKnob({
   key: 'section.plies',
   label: 'plies',
-  choices: () => Array.from({ length: MOST_PLIES }, (_, index) => index + 1),
+  choices: (member) =>
+    Array.from({ length: mostPlies(member.stock, member.section.width) }, (_, index) => index + 1),
   get: (member) => member.section.plies,
   put: (member, value) => withSection(member, { plies: value }),
   show: (value) => String(value),
-  check: checkStock,
+  check: checkChange,
   stepText: 'one',
 });
 
-/** The tables run from the best grade down; a nudge up is a better grade. */
-export const grade: Knob = choiceKnob({
+const alone = (knob: Knob, member: Member, turn: Turn): Turn =>
+  'fault' in turn && member.section.plies === 1 && mostPlies(member.stock, member.section.width) === 1
+    ? { fault: `${knob.label}: ${pieceWord(member)} comes in one piece` }
+    : turn;
+
+function pieceWord({ stock, section }: Member): string {
+  const { product } = stock;
+  return product === 'dimension lumber' ? `lumber ${showInches(section.width, 'us')} thick` : product;
+}
+
+export const plies: Knob = {
+  ...pliesChoice,
+  nudge: (member, direction, step, units) =>
+    alone(pliesChoice, member, pliesChoice.nudge(member, direction, step, units)),
+  enter: (member, text, units) => alone(pliesChoice, member, pliesChoice.enter(member, text, units)),
+};
+
+const gradeOptions = {
   key: 'stock.grade',
   label: 'grade',
-  choices: (member) => [...gradesOf(member.stock.product, member.stock.species)].reverse(),
-  get: (member) => member.stock.grade,
-  put: (member, value) => ({ ...member, stock: { ...member.stock, grade: value } }),
-  show: (value) => value,
-  check: checkStock,
+  get: (member: Member) => member.stock.grade,
+  put: (member: Member, value: string) => changeStock(member, { ...member.stock, grade: value }),
+  show: (value: string) => value,
+  check: checkChange,
   stepText: 'a grade',
+};
+
+/** By name any grade of the species; what is not made at this size is refused with its table. */
+const byName = choiceKnob({ ...gradeOptions, choices: gradesByStrength });
+/** By nudges those that are made at this size, from the weakest to the strongest. */
+const bySize = choiceKnob({
+  ...gradeOptions,
+  choices: (member) => gradesByStrength(member).filter((each) => coversSize(member, each)),
 });
 
-export const species: Knob = choiceKnob({
-  key: 'stock.species',
-  label: 'species',
-  choices: (member) => speciesOf(member.stock.product),
-  get: (member) => member.stock.species,
-  put: (member, value) => ({
-    ...member,
-    stock: { ...member.stock, species: value, grade: gradeIn(member, value) },
+/** A nudge up is a stronger grade. */
+export const grade: Knob = unlessTyped({ ...byName, nudge: bySize.nudge });
+
+export const species: Knob = unlessTyped(
+  choiceKnob({
+    key: 'stock.species',
+    label: 'species',
+    choices: (member) => speciesOf(member.stock.product),
+    get: (member) => member.stock.species,
+    put: withSpecies,
+    show: shortSpecies,
+    read: (text, _units, member) =>
+      speciesOf(member.stock.product).find((name) => startsAlike(name, text)) ?? null,
+    check: checkChange,
+    stepText: 'a species',
   }),
-  show: shortSpecies,
-  read: (text, _units, member) =>
-    speciesOf(member.stock.product).find((name) => startsAlike(name, text)) ?? null,
-  check: checkStock,
-  stepText: 'a species',
-});
+);
+
+/** Typed values are those of the wood they were read for: another name must not take them along. */
+function unlessTyped(knob: Knob): Knob {
+  const fault = ({ stock }: Member) =>
+    stock.values === null
+      ? null
+      : `the values are typed, from ${stock.valuesFrom}: another ${knob.label} would not have them (y clears them)`;
+  const guarded =
+    <Rest extends unknown[]>(turn: (member: Member, ...rest: Rest) => Turn) =>
+    (member: Member, ...rest: Rest): Turn => {
+      const reason = fault(member);
+      return reason === null ? turn(member, ...rest) : { fault: reason };
+    };
+  return { ...knob, nudge: guarded(knob.nudge), enter: guarded(knob.enter) };
+}
 
 /** True where a typed text begins a name, capitals and marks aside. */
 function startsAlike(name: string, text: string): boolean {
   const plain = (each: string) => each.toLowerCase().replace(/[^a-z0-9]/g, '');
   return plain(text) !== '' && plain(name).startsWith(plain(text));
-}
-
-/** The same grade in another species; where it has none, one that joins it ("No.1/No.2"), else its first. */
-function gradeIn(member: Member, into: string): string {
-  const { product, grade: now } = member.stock;
-  const grades = gradesOf(product, into);
-  const parts = (text: string) => text.split('/');
-  return (
-    grades.find((each) => each === now) ??
-    grades.find((each) => parts(each).some((part) => parts(now).includes(part))) ??
-    grades[0]!
-  );
 }

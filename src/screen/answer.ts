@@ -1,13 +1,15 @@
+import { BY_WEIGHT, type Ranking } from '../explore/best.ts';
 import { type Crossovers, crossovers } from '../explore/crossovers.ts';
 import { type Cure, curesOf } from '../explore/cures.ts';
 import { type Exponents, exponentsOf } from '../explore/exponents.ts';
 import { type Judgement, judge } from '../explore/judge.ts';
 import { OTHER_CHECKS, type PowerRatio, powersOf, standsTo } from '../explore/powers.ts';
-import { type Rack, rackOf, sectionOf } from '../explore/rack.ts';
+import { type RankedRack, rankedRack } from '../explore/ranked.ts';
 import { ratiosOf } from '../explore/ratios.ts';
-import { type Reach, reachFinder } from '../explore/reach.ts';
+import type { Reach } from '../explore/reach.ts';
+import { reachesOf } from '../explore/reaches.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
-import { reportMember, woodOf } from '../timber/index.ts';
+import { reportMember } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type MemberReport } from '../timber/report.ts';
 
@@ -21,21 +23,25 @@ export interface Answer extends Judgement {
   readonly crossovers: Crossovers;
   /** l/h up to which every check passes, by the power laws; null where none does. */
   readonly standsTo: number | null;
-  readonly rack: Rack;
+  /** In the order of what counts as best. */
+  readonly rack: RankedRack;
+  readonly ranking: Ranking;
   readonly cures: readonly Cure[];
   readonly exponents: Partial<Record<CheckId, Exponents>>;
   /** Reach of each size of the rack, in its order; null where the size is refused. */
   readonly reaches: readonly (Reach | null)[];
 }
 
-const KNOWN = new WeakMap<Member, Answer>();
+const KNOWN = new WeakMap<Ranking, WeakMap<Member, Answer>>();
 
-/** The answer for a member; the same object for the same member. */
-export function answerOf(member: Member): Answer {
-  const known = KNOWN.get(member);
+/** The answer for a member; the same object for the same member and the same of what counts as best. */
+export function answerOf(member: Member, ranking: Ranking = BY_WEIGHT): Answer {
+  const answers = KNOWN.get(ranking) ?? new WeakMap<Member, Answer>();
+  KNOWN.set(ranking, answers);
+  const known = answers.get(member);
   if (known !== undefined) return known;
-  const answer = new LazyAnswer(member);
-  KNOWN.set(member, answer);
+  const answer = new LazyAnswer(member, ranking);
+  answers.set(member, answer);
   return answer;
 }
 
@@ -54,7 +60,10 @@ class LazyAnswer implements Answer {
   readonly powers: Answer['powers'];
   readonly spanToDepth: number;
 
-  constructor(member: Member) {
+  constructor(
+    member: Member,
+    readonly ranking: Ranking,
+  ) {
     this.#member = member;
     this.#ratios = ratiosOf(member);
     const judgement = judge(this.#ratios);
@@ -93,12 +102,12 @@ class LazyAnswer implements Answer {
     return keep(this, 'standsTo', least > 0 && Number.isFinite(least) ? least : null);
   }
 
-  get rack(): Rack {
-    return keep(this, 'rack', rackOf(this.#member));
+  get rack(): RankedRack {
+    return keep(this, 'rack', rankedRack(this.#member, this.ranking));
   }
 
   get cures(): readonly Cure[] {
-    return keep(this, 'cures', curesOf(this.#member, this.rack));
+    return keep(this, 'cures', curesOf(this.#member, this.rack, this.ranking));
   }
 
   get exponents(): Answer['exponents'] {
@@ -106,13 +115,6 @@ class LazyAnswer implements Answer {
   }
 
   get reaches(): Answer['reaches'] {
-    const find = reachFinder(this.#member, woodOf(this.#member));
-    return keep(
-      this,
-      'reaches',
-      this.rack.sizes.map(({ size, refused }) =>
-        refused === null ? find(sectionOf(this.#member, size)) : null,
-      ),
-    );
+    return keep(this, 'reaches', reachesOf(this.#member, this.rack));
   }
 }

@@ -1,4 +1,4 @@
-import { BINDINGS, WORDS } from './keys.ts';
+import { BINDINGS, DIAGRAM_BINDINGS, WOOD_BINDINGS, WORDS } from './keys.ts';
 
 export interface HelpSection {
   readonly title: string;
@@ -10,6 +10,14 @@ export interface HelpSection {
 export function helpSections(): readonly HelpSection[] {
   return [
     { title: 'keys', lines: BINDINGS.map((binding) => [binding.keys, binding.help] as const) },
+    {
+      title: 'in the diagrams',
+      lines: DIAGRAM_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
+    },
+    {
+      title: 'in the wood view',
+      lines: WOOD_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
+    },
     { title: 'words', lines: WORDS },
     {
       title: 'cautions',

@@ -16,9 +16,14 @@ export type Action =
   | 'redo'
   | 'next-member'
   | 'previous-member'
+  | 'add'
+  | 'remove'
+  | 'diagrams'
+  | 'wood'
   | 'units'
   | 'save'
   | 'help'
+  | 'workings'
   | 'leave'
   | `jump:${string}`;
 
@@ -83,7 +88,7 @@ export const BINDINGS: readonly Binding[] = [
     help: 'type a value in any unit; a digit starts it too',
     foot: 'type',
   },
-  jump('l', 'spans.0', 'take the span in hand'),
+  jump('l', 'spans.0', 'take the span in hand; again: the next span'),
   jump('d', 'section.depth', 'take the depth in hand'),
   jump('b', 'section.width', 'take the width in hand'),
   jump('n', 'section.plies', 'take the plies in hand'),
@@ -95,6 +100,41 @@ export const BINDINGS: readonly Binding[] = [
     action: 'take-lit',
     help: 'put the lit size, the lightest that passes, in the beam',
     foot: 'take lit',
+  },
+  {
+    keys: 'a',
+    presses: ['a'],
+    action: 'add',
+    help: 'add a span, an overhang, a load, a fixed end: what the beam can take',
+    foot: 'add',
+  },
+  {
+    keys: 'Delete',
+    presses: ['delete', 'backspace'],
+    action: 'remove',
+    help: 'take out the load, span or overhang whose knob is in hand; Backspace too',
+    foot: 'take out',
+  },
+  {
+    keys: 'y',
+    presses: ['y'],
+    action: 'wood',
+    help: 'the wood: product, species, grade, conditions, values, factors, and the woods on the rack',
+    foot: 'wood',
+  },
+  {
+    keys: 'v',
+    presses: ['v'],
+    action: 'diagrams',
+    help: 'the beam with its loads, shear, moment and deflection',
+    foot: 'diagrams',
+  },
+  {
+    keys: 'w',
+    presses: ['w'],
+    action: 'workings',
+    help: 'workings: the calculation behind what governs, then behind every other number',
+    foot: 'workings',
   },
   { keys: 'u', presses: ['u'], action: 'undo', help: 'undo', foot: 'undo' },
   { keys: 'r', presses: ['r'], action: 'redo', help: 'redo', foot: '' },
@@ -152,6 +192,131 @@ export function actionOf(press: KeyPress): Action | null {
   return BY_PRESS.get(pressName(press)) ?? null;
 }
 
+/** What a key asks for in the diagrams. */
+export type DiagramAction =
+  | 'left'
+  | 'right'
+  | 'far-left'
+  | 'far-right'
+  | 'start'
+  | 'end'
+  | 'place-before'
+  | 'place-after'
+  | 'combination-before'
+  | 'combination-after'
+  | 'units'
+  | 'back';
+
+/** Every key of the diagrams view. */
+export const DIAGRAM_BINDINGS: readonly {
+  readonly keys: string;
+  readonly presses: Readonly<Record<string, DiagramAction>>;
+  readonly help: string;
+}[] = [
+  { keys: '← →', presses: { left: 'left', right: 'right' }, help: 'along the beam, a cell' },
+  {
+    keys: '{ } or Shift ← →',
+    presses: { '{': 'far-left', '}': 'far-right', 'shift-left': 'far-left', 'shift-right': 'far-right' },
+    help: 'ten cells',
+  },
+  {
+    keys: '[ ]',
+    presses: { '[': 'place-before', ']': 'place-after' },
+    help: 'to the next place of note: a support, a load, a largest value',
+  },
+  { keys: 'Home End', presses: { home: 'start', end: 'end' }, help: 'to the ends of the member' },
+  {
+    keys: '↑ ↓ or c',
+    presses: { up: 'combination-before', down: 'combination-after', c: 'combination-after' },
+    help: 'one combination at a time, and back to the envelope of all',
+  },
+  { keys: 'i', presses: { i: 'units' }, help: 'inches or SI' },
+  { keys: 'Esc, v or q', presses: { v: 'back', q: 'back', enter: 'back' }, help: 'back' },
+];
+
+const DIAGRAM_BY_PRESS = new Map(DIAGRAM_BINDINGS.flatMap((binding) => Object.entries(binding.presses)));
+
+/** What a press asks for in the diagrams; null where it is bound to nothing. */
+export function diagramActionOf(press: KeyPress): DiagramAction | null {
+  return DIAGRAM_BY_PRESS.get(pressName(press)) ?? null;
+}
+
+/** What a key asks for in the wood view; every other character begins to type. */
+export type WoodAction =
+  | 'line-up'
+  | 'line-down'
+  | 'less'
+  | 'more'
+  | 'least'
+  | 'most'
+  | 'rack'
+  | 'clear'
+  | 'page-up'
+  | 'page-down'
+  | 'take'
+  | 'back';
+
+/** Every key of the wood view. */
+export const WOOD_BINDINGS: readonly {
+  readonly keys: string;
+  readonly presses: Readonly<Record<string, WoodAction>>;
+  readonly help: string;
+  /** Word on the foot line; empty where it is not shown there. */
+  readonly foot: string;
+}[] = [
+  { keys: '↑↓', presses: { up: 'line-up', down: 'line-down' }, help: 'what is chosen', foot: 'line' },
+  {
+    keys: '←→',
+    presses: { left: 'less', right: 'more' },
+    help: 'the choice before, the next; nothing is taken yet',
+    foot: 'choose',
+  },
+  {
+    keys: 'Shift ←→',
+    presses: { 'shift-left': 'least', 'shift-right': 'most' },
+    help: 'the first, the last',
+    foot: '',
+  },
+  {
+    keys: 'Enter',
+    presses: { enter: 'take' },
+    help: 'take the wood as chosen; a rule that forbids it is told',
+    foot: 'take',
+  },
+  { keys: 'Esc', presses: { escape: 'back', 'ctrl-c': 'back' }, help: 'back, taking nothing', foot: 'back' },
+  {
+    keys: 'Space',
+    presses: { ' ': 'rack' },
+    help: 'put this wood on the rack together with others, or take it off',
+    foot: 'on the rack',
+  },
+  {
+    keys: 'Delete',
+    presses: { delete: 'clear', backspace: 'clear' },
+    help: 'clear what was typed over the table or the rule; take a wood off the rack',
+    foot: 'clear',
+  },
+  {
+    keys: 'PgUp PgDn',
+    presses: { pageup: 'page-up', pagedown: 'page-down' },
+    help: 'more of what the wood brings',
+    foot: 'more',
+  },
+  {
+    keys: '0-9 a-z',
+    presses: {},
+    help: 'type: a name, a value with its unit, a factor with its reason',
+    foot: 'type',
+  },
+];
+
+const WOOD_BY_PRESS = new Map(WOOD_BINDINGS.flatMap((binding) => Object.entries(binding.presses)));
+
+/** What a press asks for in the wood view; null where it is bound to nothing. */
+export function woodActionOf(press: KeyPress): WoodAction | null {
+  return WOOD_BY_PRESS.get(pressName(press)) ?? null;
+}
+
 /** Characters that start an entry on the knob in hand. */
 export function startsEntry(press: KeyPress): boolean {
   return press.name === 'char' && !press.ctrl && !press.meta && /^[0-9.]$/.test(press.char ?? '');
@@ -168,5 +333,6 @@ export const WORDS: readonly (readonly [string, string])[] = [
   ['rack', 'the stock sizes of the chosen wood, lightest first'],
   ['lit', 'the lightest size of the rack that passes'],
   ['reach', 'the longest span at which a size still passes'],
+  ['workings', 'the calculation behind a number, line by line, with clauses'],
   ['kept', 'what the file holds; s alone writes it'],
 ];

@@ -1,7 +1,9 @@
+import type { NewLoad } from '../explore/edit-beam.ts';
 import { knobsOf } from '../explore/knobs.ts';
+import type { CurvesOf } from '../loads/index.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
-import type { Member } from '../timber/member.ts';
+import type { Member, Product } from '../timber/member.ts';
 import type { Edit } from './edit.ts';
 
 /** Everything the explorer knows; one value, never changed in place. */
@@ -48,8 +50,47 @@ export type Mode =
       readonly thenLeave: boolean;
     }
   | { readonly name: 'help'; readonly scroll: number }
+  | { readonly name: 'workings'; readonly page: number; readonly scroll: number }
+  | DiagramsMode
+  | WoodMode
+  | AddMode
   | { readonly name: 'leaving' }
   | StartMode;
+
+/** Choosing the wood of the member in hand. */
+export interface WoodMode {
+  readonly name: 'wood';
+  /** The member as it would be; taken with Enter alone. */
+  readonly draft: Member;
+  /** What was chosen of each product so far, to come back to. */
+  readonly tried: Readonly<Partial<Record<Product, Pick<Member, 'stock' | 'section'>>>>;
+  /** Key of the knob in hand. */
+  readonly knob: string;
+  /** What is being typed on it; null while nothing is. */
+  readonly edit: Edit | null;
+  /** Why the last key did nothing. */
+  readonly fault: string | null;
+  /** First line shown of what the wood brings. */
+  readonly scroll: number;
+}
+
+/** The beam with its diagrams. */
+export interface DiagramsMode {
+  readonly name: 'diagrams';
+  /** The cursor, in from the member's left end. */
+  readonly at: number;
+  /** One combination by its index, or all. */
+  readonly which: CurvesOf;
+}
+
+/** The list of what can be added; a load asks for its kind next. */
+export interface AddMode {
+  readonly name: 'add';
+  /** Index of the line in hand. */
+  readonly line: number;
+  /** The load whose kind is asked for; null while it is asked what to add. */
+  readonly load: NewLoad | null;
+}
 
 /** The three questions of an empty start. */
 export interface StartMode {
@@ -117,17 +158,24 @@ export function momentOf(state: State): Moment {
   return { session: state.session, member: state.member, knob: state.knob };
 }
 
-/** Knob in hand, kept when the member has it and the first one otherwise. */
+/**
+ * Knob in hand, kept when the member has it. Otherwise the nearest by name ("loads.0" for "loads.0.line.1"), else the
+ * first span.
+ */
 export function knobInHand(state: State): {
   readonly knobs: ReturnType<typeof knobsOf>;
   readonly index: number;
 } {
   const knobs = knobsOf(memberOf(state));
+  for (let key = state.knob; key !== ''; key = key.slice(0, Math.max(0, key.lastIndexOf('.')))) {
+    const index = knobs.findIndex((knob) => knob.key === key || knob.key.startsWith(`${key}.`));
+    if (index >= 0) return { knobs, index };
+  }
   return {
     knobs,
     index: Math.max(
       0,
-      knobs.findIndex((knob) => knob.key === state.knob),
+      knobs.findIndex((knob) => knob.key === 'spans.0'),
     ),
   };
 }

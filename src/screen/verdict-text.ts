@@ -1,55 +1,99 @@
+import { BEST_WORD, type Best } from '../explore/best.ts';
 import type { Cure } from '../explore/cures.ts';
-import { showRatio, showSpanDown, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
+import { costOf } from '../explore/moves/index.ts';
+import { sizeName } from '../explore/rack.ts';
+import { measureOf } from '../explore/ranked.ts';
+import {
+  showInches,
+  showQuantity,
+  showRatio,
+  showSpanDown,
+  type Units,
+  weightNumber,
+  weightUnit,
+} from '../quantity/index.ts';
+import type { Size } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
+import { PASS_LIMIT } from '../timber/report.ts';
 import type { Answer } from './answer.ts';
+import { checkAndPlace, isPlain, patternText } from './place-words.ts';
 import type { VerdictView } from './view.ts';
-import { CHECK_SUBJECT, CHECK_WORD } from './words.ts';
+import { CHECK_SUBJECT } from './words.ts';
 
 /** The sentence of the meeting: what stops the member and the nearest cures, or what it still has in hand. */
 export function verdictOf(member: Member, answer: Answer, units: Units): VerdictView {
   const passes = answer.report.passes;
-  return {
-    passes,
-    reason: reasonOf(answer, passes),
-    cures: passes ? spareOf(answer, units) : curesText(member, answer, units),
-  };
+  const cures = () => (passes ? spareOf(member, answer, units) : curesText(member, answer, units));
+  return { passes, reason: reasonOf(member, answer, passes), cures: isUnloaded(answer) ? [] : cures() };
 }
 
-function reasonOf(answer: Answer, passes: boolean): string {
-  const unloaded = answer.report.cautions.find((each) => each.id === 'unloaded');
-  if (unloaded !== undefined) return 'It carries nothing but itself: give it a load.';
-  if (answer.governing === null) return 'Nothing could be checked.';
-  if (passes)
-    return `Everything passes; ${CHECK_WORD[answer.governing]} is nearest its limit at ${showRatio(answer.worst)}.`;
-  const subject = CHECK_SUBJECT[answer.governing];
-  return Number.isFinite(answer.worst)
-    ? `${subject} stops it at ${showRatio(answer.worst)}.`
-    : `${subject} stops it: no tie-down is stated.`;
+function reasonOf(member: Member, answer: Answer, passes: boolean): string {
+  if (isUnloaded(answer)) return 'It carries nothing but itself: give it a load.';
+  const { governing } = answer;
+  if (governing === null) return 'Nothing could be checked.';
+  const result = answer.report.checks.find((each) => each.id === governing);
+  const name = (begins: boolean) =>
+    result === undefined ? CHECK_SUBJECT[governing] : checkAndPlace(member, result, begins);
+  const ratio = showRatio(answer.worst);
+  if (passes) return `Everything passes; ${name(false)} is nearest its limit at ${ratio}.`;
+  if (!Number.isFinite(answer.worst)) return `${name(true)} stops it: no tie-down is stated.`;
+  const sentence = `${name(true)} stops it at ${ratio}`;
+  const pattern = result === undefined ? '' : patternText(result);
+  return `${sentence}${sentence.length + pattern.length <= MOST_REASON ? pattern : ''}.`;
+}
+
+/** Cells that the reason has on the smallest screen of two columns; which spans are loaded is told elsewhere too. */
+const MOST_REASON = 66;
+
+function isUnloaded(answer: Answer): boolean {
+  return answer.report.cautions.some((each) => each.id === 'unloaded');
+}
+
+/** An uplift that nothing holds is cured by holding it: a member heavy enough is no answer. Says what is next. */
+function tieText(member: Member, answer: Answer, units: Units): string[] {
+  const result = answer.report.checks.find((each) => each.id === 'uplift');
+  if (result === undefined) return [];
+  const rest = answer.report.checks.filter((each) => each !== result && each.ratio > PASS_LIMIT);
+  const next = rest.sort((a, b) => b.ratio - a.ratio)[0];
+  const then =
+    next && `Then ${lowered(checkAndPlace(member, next, true))} stops it at ${showRatio(next.ratio)}.`;
+  return [`Tie it down for ${showQuantity('pointLoad', result.demand, units)}.`, ...(then ? [then] : [])];
+}
+
+function raised(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}
+
+function lowered(text: string): string {
+  return text.charAt(0).toLowerCase() + text.slice(1);
 }
 
 function curesText(member: Member, answer: Answer, units: Units): string[] {
+  if (answer.governing === 'uplift' && !Number.isFinite(answer.worst)) return tieText(member, answer, units);
   const by = (kind: Cure['kind']) => answer.cures.find((cure) => cure.kind === kind && cure.passes);
-  const lightest = by('lightest');
+  const best = BEST_WORD[answer.rack.best];
+  const lightest = by(best);
   const shorten = by('shorten');
   const deepen = by('deepen');
   const ply = by('add a ply');
   const widen = by('widen');
-  const lit = lightest?.size?.label;
+  const name = (size: Size | null | undefined) => (size == null ? '' : sizeName(answer.rack, size));
+  const lit = name(lightest?.size);
   const sentences = [
     lightest === undefined
-      ? 'No stock size of this wood passes.'
-      : `Lightest cure: ${lit}, ${showRatio(lightest.worst)}.`,
+      ? noSizeText(answer)
+      : `${raised(best)} cure: ${lit}, ${showRatio(lightest.worst)}.`,
   ];
-  if (shorten?.span != null) sentences.push(`Or shorten to ${showSpanDown(shorten.span, units)}.`);
+  if (shorten?.span != null) sentences.push(shortenText(member, shorten.span, units));
   const others = [
-    deepen !== undefined && deepen.size?.label !== lit
-      ? `deepen: ${deepen.size!.label}, ${showRatio(deepen.worst)}`
+    deepen !== undefined && name(deepen.size) !== lit
+      ? `deepen: ${name(deepen.size)}, ${showRatio(deepen.worst)}`
       : '',
-    ply !== undefined && ply.size?.label !== lit
-      ? `a ply more: ${ply.size!.label}, ${showRatio(ply.worst)}`
+    ply !== undefined && name(ply.size) !== lit
+      ? `a ply more: ${name(ply.size)}, ${showRatio(ply.worst)}`
       : '',
-    widen !== undefined && widen.size?.label !== lit
-      ? `widen: ${widen.size!.label}, ${showRatio(widen.worst)}`
+    widen !== undefined && name(widen.size) !== lit
+      ? `widen: ${name(widen.size)}, ${showRatio(widen.worst)}`
       : '',
   ].filter((text) => text !== '');
   if (others.length > 0) sentences.push(`Or ${others.join('; ')}.`);
@@ -57,14 +101,49 @@ function curesText(member: Member, answer: Answer, units: Units): string[] {
   return sentences;
 }
 
-function spareOf(answer: Answer, units: Units): string[] {
-  const lightest = answer.cures.find((cure) => cure.kind === 'lightest');
-  const lit = answer.rack.sizes[answer.rack.lightest];
-  if (lightest === undefined || lit === undefined) return [];
-  const saving = answer.report.weight - lit.weight;
-  return saving > 1e-9 * lit.weight
-    ? [
-        `Lighter would do: ${lit.size.label}, ${showRatio(lit.worst)}, ${weightNumber(saving, units)} ${weightUnit(units)} less.`,
-      ]
-    : ['No lighter size does.'];
+/** With several lengths all shrink in step, and the longest span is named. */
+function shortenText(member: Member, span: number, units: Units): string {
+  const to = showSpanDown(span, units);
+  const arm = member.beam.supports === 'cantilever';
+  return isPlain(member) || arm ? `Or shorten to ${to}.` : `Or shorten all, the longest span to ${to}.`;
+}
+
+function noSizeText({ rack }: Answer): string {
+  if (rack.sizes.length === 0) return 'This wood has no stock sizes.';
+  return rack.woods.length > 1
+    ? 'No stock size of these woods passes.'
+    : 'No stock size of this wood passes.';
+}
+
+/** What the best size would spare of what the user wants least of. */
+function spareOf(member: Member, answer: Answer, units: Units): string[] {
+  const { rack, ranking } = answer;
+  const lit = rack.sizes[rack.lit];
+  if (lit === undefined) return [];
+  const [now, then] = [measureOf(rack.best, costOf(member, ranking)), measureOf(rack.best, lit)];
+  const [better, least] = SPARE[rack.best];
+  if (now === null || then === null) return [];
+  if (!(now - then > 1e-9 * then)) return [least];
+  const saving = `${spareText(rack.best, now - then, units)} less`;
+  return [`${better} would do: ${sizeName(rack, lit.size)}, ${showRatio(lit.worst)}, ${saving}.`];
+}
+
+const SPARE: Readonly<Record<Best, readonly [string, string]>> = {
+  weight: ['Lighter', 'No lighter size does.'],
+  depth: ['Shallower', 'No shallower size does.'],
+  boardFeet: ['Less wood', 'No size does with less wood.'],
+  price: ['Cheaper', 'No cheaper size does.'],
+};
+
+function spareText(best: Best, amount: number, units: Units): string {
+  switch (best) {
+    case 'weight':
+      return `${weightNumber(amount, units)} ${weightUnit(units)}`;
+    case 'depth':
+      return showInches(amount, units);
+    case 'boardFeet':
+      return `${amount.toFixed(1)} bd ft/ft`;
+    case 'price':
+      return amount.toFixed(2);
+  }
 }

@@ -1,12 +1,12 @@
 import type { Cure } from '../explore/cures.ts';
-import { chartRange, curveOf } from '../explore/curve.ts';
 import { whyNotWhole } from '../explore/exponents.ts';
 import type { Knob } from '../explore/knob.ts';
 import { lightestAlong } from '../explore/lightest-along.ts';
 import { powersOf, standsTo } from '../explore/powers.ts';
-import { hasSize } from '../explore/rack.ts';
+import { gradeWord, hasSize, type Rack, type RackSize, sizeName } from '../explore/rack.ts';
 import { ratiosOf } from '../explore/ratios.ts';
-import { spanToDepthOf } from '../explore/span-to-depth.ts';
+import { refusedWord } from '../explore/refused-word.ts';
+import { fieldKey, spanToDepthOf } from '../explore/span-to-depth.ts';
 import {
   showQuantity,
   showSmall,
@@ -17,15 +17,30 @@ import {
   weightNumber,
   weightUnit,
 } from '../quantity/index.ts';
-import { lineLoadOf, nominalOf, shortWood, standingDepth, stockDepths } from '../timber/index.ts';
-import type { Member } from '../timber/member.ts';
+import { rankingOf } from '../session/index.ts';
+import { beamFields } from '../statics/index.ts';
+import {
+  assumptionsOf,
+  governingField,
+  isSawn,
+  lineLoadOf,
+  nominalOf,
+  type Size,
+  sectionWeight,
+  shortWood,
+  standingDepth,
+  stockDepths,
+  timberNominalOf,
+} from '../timber/index.ts';
+import type { Member, Stock } from '../timber/member.ts';
 import type { CheckResult } from '../timber/report.ts';
 import { type Answer, answerOf } from './answer.ts';
+import { chartView } from './chart-view.ts';
 import { type Action, BINDINGS } from './keys.ts';
+import { measureName, patternText, placeOf } from './place-words.ts';
 import { isKept, knobInHand, memberOf, type State, unitsOf } from './state.ts';
 import { verdictOf } from './verdict-text.ts';
 import type {
-  ChartView,
   CureView,
   ExponentView,
   FootView,
@@ -45,18 +60,12 @@ export const WIDER = 120;
 export function viewOf(state: State): View {
   const member = memberOf(state);
   const units = unitsOf(state);
-  const answer = answerOf(member);
+  const answer = answerOf(member, rankingOf(state.session));
   const { knobs, index } = knobInHand(state);
   const wide = state.columns >= WIDE;
   const { mode } = state;
   return {
-    title: {
-      session: state.session.title || 'untitled',
-      member: member.note === '' ? member.name : `${member.name} ${member.note}`,
-      method: `ASD, NDS 2018, ${member.service}`,
-      position: `${state.member + 1} of ${state.session.members.length}`,
-      kept: isKept(state) ? 'kept' : 'not kept',
-    },
+    title: titleOf(state),
     verdict: verdictOf(member, answer, units),
     knobs: knobs.map(
       (knob): KnobView => ({ label: knob.label, value: knob.show(member, units), fault: null }),
@@ -73,9 +82,9 @@ export function viewOf(state: State): View {
     ruler: rulerOf(member, answer, state.ghost?.member ?? null),
     rack: rackView(member, answer, units),
     handover: lightestAlong(member, answer.rack, answer.reaches, (span) => showSpanDown(span, units)),
-    chart: wide ? chartOf(member, knobs[index]!, knobs[0]!, units) : null,
+    chart: wide ? chartView(member, knobs[index]!, spanKnob(member, knobs), units) : null,
     cures: answer.cures.map((cure) => cureView(member, answer, cure, units)),
-    remarks: remarksOf(answer),
+    remarks: remarksOf(member, answer, units, state.columns),
     foot: footOf(knobs[index]!, units),
     notice:
       state.notice === null
@@ -93,6 +102,24 @@ export function viewOf(state: State): View {
   };
 }
 
+/** The knob of the length that l/h goes by: what a chart is drawn against where the knob in hand is a choice. */
+function spanKnob(member: Member, knobs: readonly Knob[]): Knob {
+  const key = fieldKey(member, governingField(member));
+  return knobs.find((knob) => knob.key === key) ?? knobs[0]!;
+}
+
+/** The first row of every view of a member. */
+export function titleOf(state: State): View['title'] {
+  const member = memberOf(state);
+  return {
+    session: state.session.title || 'untitled',
+    member: member.note === '' ? member.name : `${member.name} ${member.note}`,
+    method: `ASD, NDS 2018, ${member.service}`,
+    position: `${state.member + 1} of ${state.session.members.length}`,
+    kept: isKept(state) ? 'kept' : 'not kept',
+  };
+}
+
 function gaugesOf(member: Member, answer: Answer, ghost: Member | null, units: Units): GaugeView[] {
   const before = ghost === null ? null : powersOf(ratiosOf(ghost));
   return answer.powers.map(({ name, exponent, ratio, check }, index): GaugeView => {
@@ -106,24 +133,32 @@ function gaugesOf(member: Member, answer: Answer, ghost: Member | null, units: U
       nudge: was === null || ratio === null ? null : ratio - was,
       governs: check !== null && check === answer.governing,
       demand: result === undefined ? '' : demandText(member, result, units),
+      brief: result === undefined ? '' : demandText(member, result, units, true),
       alone:
         ratio === null ? '' : `alone, to l/h ${standsTo(answer.spanToDepth, ratio, exponent).toFixed(1)}`,
     };
   });
 }
 
-/** "fb 1151 of 900 psi, D+L"; "0.32 of 0.50 in, live, l/360". */
-export function demandText(member: Member, result: CheckResult, units: Units): string {
-  const { id, demand, capacity, combination, pattern } = result;
-  const loads = pattern === '' || pattern === 'all spans' ? combination : `${combination}, ${pattern}`;
+/**
+ * "fb 1151 of 900 psi, D+L"; "0.32 of 0.50 in, live, l/360"; where there is more than one span with the place and the
+ * spans that are loaded, unless it shall be brief.
+ */
+export function demandText(member: Member, result: CheckResult, units: Units, brief = false): string {
+  const { id, demand, capacity, combination } = result;
+  const pattern = brief ? '' : patternText(result);
+  const place = brief ? '' : placeOf(member, result);
   if (result.unit === 'psi') {
     const symbol = id === 'shear' ? 'fv' : 'fb';
-    return `${symbol} ${numberOf(showStress(demand, units))} of ${showStress(capacity, units)}, ${loads}`;
+    const at = place === '' ? '' : ` ${place}`;
+    return `${symbol} ${numberOf(showStress(demand, units))} of ${showStress(capacity, units)}${at}, ${combination}${pattern}`;
   }
   const which = id === 'deflection-live' ? 'live' : 'total';
   const sized =
     id === 'deflection-live' && member.limits.liveMax !== null ? '' : `, l/${member.limits[which]}`;
-  return `${numberOf(showSmall(demand, units))} of ${showSmall(capacity, units)}, ${which}${sized}`;
+  const measure = place === '' ? null : measureName(member, result.place);
+  const of = measure === null ? '' : ` of ${measure}`;
+  return `${numberOf(showSmall(demand, units))} of ${showSmall(capacity, units)}, ${which}${sized}${of}${pattern}`;
 }
 
 function numberOf(text: string): string {
@@ -159,32 +194,52 @@ function rulerOf(member: Member, answer: Answer, ghost: Member | null): RulerVie
     shearToBending: bendingRules ? shearToBending : shearToDeflection,
     bendingToDeflection: bendingRules ? bendingToDeflection : shearToDeflection,
     stock: stockDepths(member.stock, member.section.width).map((depth) => ({
-      label: String(nominalOf(depth) ?? Math.round(depth * 10) / 10),
+      label: depthLabel(member.stock, depth),
       spanToDepth: span / depth,
     })),
   };
 }
 
+/** A stock depth by its nominal size, which sawn wood alone has. */
+function depthLabel({ product }: Stock, depth: number): string {
+  const nominal = product === 'timber' ? timberNominalOf(depth) : isSawn(product) ? nominalOf(depth) : null;
+  return String(nominal ?? Math.round(depth * 10) / 10);
+}
+
 function rackView(member: Member, answer: Answer, units: Units): RackView {
+  const { rack } = answer;
+  const mixed = rack.woods.length > 1;
   return {
-    wood: shortWood(member.stock),
+    wood: mixed ? `${rack.woods.length} woods` : shortWood(member.stock),
     weightUnit: weightUnit(units),
     current: answer.rack.sizes.findIndex(({ size }) => hasSize(member, size)),
-    lightest: answer.rack.lightest,
+    lightest: answer.rack.lit,
     rows: answer.rack.sizes.map((each, index) => {
       const [shear, bending, deflection] =
         each.refused === null ? powersOf(each.ratios).map((power) => power.ratio) : [null, null, null];
       const reach = answer.reaches[index];
       return {
         label: each.size.label,
+        ...(mixed ? woodOfRow(rack, each.size) : {}),
         weight: weightNumber(each.weight, units),
         ratios: [shear!, bending!, deflection!] as const,
         passes: each.passes,
-        stops: each.refused ?? (each.passes || each.governing === null ? '' : CHECK_WORD[each.governing]),
+        stops: stopsWord(each),
         reach: reach == null ? '' : reach.span === 0 ? 'none' : reachText(reach.span, units),
       };
     }),
   };
+}
+
+/** Glulam and LVL say so in their labels; sawn wood has to be named beside them. */
+function woodOfRow(rack: Rack, size: Size): { readonly wood: string; readonly named: string } {
+  const wood = gradeWord(size.stock);
+  return { wood, named: isSawn(size.product) ? `${size.label} ${wood}` : sizeName(rack, size) };
+}
+
+function stopsWord({ refused, passes, governing }: RackSize): string {
+  if (refused !== null) return refusedWord(refused);
+  return passes || governing === null ? '' : CHECK_WORD[governing];
 }
 
 /** To the inch below, which fits a column: `15'-10"`. */
@@ -192,44 +247,15 @@ function reachText(span: number, units: Units): string {
   return units === 'us' ? showSpan(Math.floor(span), units) : showSpanDown(span, units);
 }
 
-/** Samples along the chart's axis; the panel takes the nearest for each of its columns. */
-const CHART_SAMPLES = 64;
-const CHARTS = new WeakMap<Member, Map<string, ChartView | null>>();
-
-function chartOf(member: Member, inHand: Knob, span: Knob, units: Units): ChartView | null {
-  const knob = inHand.number === null ? span : inHand;
-  const known = CHARTS.get(member) ?? new Map<string, ChartView | null>();
-  CHARTS.set(member, known);
-  const key = `${knob.key} ${units}`;
-  if (!known.has(key)) known.set(key, chartAlong(member, knob, units));
-  return known.get(key)!;
-}
-
-function chartAlong(member: Member, knob: Knob, units: Units): ChartView | null {
-  const number = knob.number;
-  if (number === null) return null;
-  const value = number.get(member);
-  const { from, to } = chartRange(value, number.axisUnit(units));
-  if (!(to > from)) return null;
-  const curve = curveOf(member, number, from, to, CHART_SAMPLES);
-  const label = (share: number) => knob.show(number.put(member, from + (to - from) * share), units);
-  return {
-    title: `ratio against ${knob.label.trim()}`,
-    series: curve.ratios.map((ratios, index) => ({ power: (index + 1) as 1 | 2 | 3, ratios })),
-    now: (value - from) / (to - from),
-    labels: [0, 0.25, 0.5, 0.75, 1].map(label),
-  };
-}
-
 function cureView(member: Member, answer: Answer, cure: Cure, units: Units): CureView {
   const weightNow = answer.report.weight;
-  const weightThen = answerOf(cure.member).report.weight;
+  const weightThen = sectionWeight(cure.member, cure.member.section);
   const difference = weightThen - weightNow;
   const sign = difference < 0 ? '−' : '+';
   const longest = Math.max(...member.beam.spans);
   return {
     kind: cure.kind,
-    label: cure.size?.label ?? showSpan(cure.span ?? longest, units),
+    label: cure.size === null ? showSpan(cure.span ?? longest, units) : sizeName(answer.rack, cure.size),
     ratio: cure.worst,
     passes: cure.passes,
     cost:
@@ -239,20 +265,66 @@ function cureView(member: Member, answer: Answer, cure: Cure, units: Units): Cur
   };
 }
 
-function remarksOf(answer: Answer): string[] {
-  const { assumptions, cautions } = answer.report;
+function remarksOf(member: Member, answer: Answer, units: Units, columns: number): string[] {
+  const assumptions = assumptionsOf(member, units);
+  const { cautions, advice } = answer.report;
+  const slow = cautions.some((each) => each.id === 'frequency');
+  const measure = measureName(member, governingField(member));
   return [
-    ...cautions.map((each) => each.text),
+    ...typedRemark(member, columns - 2),
+    ...(measure === null ? [] : [measureText(member, measure)]),
+    ...cautions.filter((each) => !each.id.startsWith('typed-')).map((each) => each.text),
+    // Advice that warns of nothing is told too: the figure is asked for as often as the warning.
+    ...advice
+      .filter((each) => each.id === 'frequency' && !slow)
+      .map((each) => `first frequency ${each.value.toFixed(1)} ${each.unit} (advice, not code)`),
     ...(assumptions.length > 0 ? [`assumed: ${assumptions.join(', ')}`] : []),
     'preliminary sizing: local code and a licensed professional decide',
   ];
 }
 
+/** Factors typed over the rule with their reasons, on one line that fits; where the reasons do not, where they stand. */
+function typedRemark({ typedFactors }: Member, width: number): string[] {
+  const typed = Object.entries(typedFactors ?? {});
+  if (typed.length === 0) return [];
+  const whole = typed
+    .map(([symbol, { value, reason }]) => `${symbol} ${value} is typed: ${reason}`)
+    .join('; ');
+  if (whole.length <= width) return [whole];
+  const short = typed.map(([symbol, { value }]) => `${symbol} ${value}`).join(', ');
+  const told = `typed over the rule: ${short} (reasons under y)`;
+  return [told.length <= width ? told : `${typed.length} factors are typed over their rules (under y)`];
+}
+
+/** What l/h and reach are of, where that is not the one span. */
+function measureText(member: Member, measure: string): string {
+  const several = beamFields(member.beam).length > 1;
+  return `l/h goes by ${measure}${several ? '; reach moves all lengths in step and names the longest span' : ''}`;
+}
+
 /** The foot line, most worth first: what does not fit is dropped from its end. */
-const FOOT_ORDER: readonly Action[] = ['type', 'take-lit', 'undo', 'save', 'next-member', 'leave', 'help'];
+const FOOT_ORDER: readonly Action[] = [
+  'type',
+  'take-lit',
+  'add',
+  'workings',
+  'diagrams',
+  'wood',
+  'undo',
+  'save',
+  'next-member',
+  'leave',
+  'help',
+];
+
+/** Knobs whose object Delete takes out. */
+const REMOVABLE = /^(loads|overhangs)\./;
 
 function footOf(knob: Knob, units: Units): FootView[] {
-  const bound = FOOT_ORDER.map((action) => BINDINGS.find((binding) => binding.action === action)!);
+  const order: readonly Action[] = REMOVABLE.test(knob.key)
+    ? ['type', 'remove', ...FOOT_ORDER.slice(1)]
+    : FOOT_ORDER;
+  const bound = order.map((action) => BINDINGS.find((binding) => binding.action === action)!);
   return [
     { keys: '↑↓', does: 'knob' },
     { keys: '←→', does: `nudge ${knob.stepText(units)}` },

@@ -72,6 +72,8 @@ export interface GaugeView {
   readonly governs: boolean;
   /** "fb 1151 of 900 psi, D+L" */
   readonly demand: string;
+  /** The same without place and pattern, for where the whole does not fit. */
+  readonly brief?: string;
   /** "alone, to l/h 14.1" */
   readonly alone: string;
 }
@@ -112,6 +114,10 @@ export interface RackView {
 
 export interface RackRowView {
   readonly label: string;
+  /** The wood in short where several stand on the rack: "DF-L No.2", "24F-1.8E"; absent or empty where one does. */
+  readonly wood?: string;
+  /** The label as it stands without a column of woods: with the wood where another has the same label. */
+  readonly named?: string;
   /** lb/ft or kg/m with one decimal: "7.8" */
   readonly weight: string;
   /** Ratios of shear, bending, deflection; null when refused or not applicable. */

@@ -17,7 +17,7 @@ export const CHECK_WORD: Readonly<Record<CheckId, string>> = {
 export const CHECK_SUBJECT: Readonly<Record<CheckId, string>> = {
   shear: 'Shear',
   bending: 'Bending',
-  'bending-hogging': 'Bending over the supports',
+  'bending-hogging': 'Upward bending',
   'deflection-live': 'Live deflection',
   'deflection-total': 'Total deflection',
   bearing: 'Bearing',

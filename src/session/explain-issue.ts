@@ -6,7 +6,7 @@ import { childSchema, keysOf, schemaAt } from './schema-walk.ts';
 
 /** Keys of features that this version does not have; refused by that name, never ignored. */
 const LATER_KEYS: Readonly<Record<'top' | 'member', readonly string[]>> = {
-  top: ['best', 'prices', 'yard', 'sheet'],
+  top: ['sheet'],
   member: ['links', 'pins', 'trail'],
 };
 
@@ -97,6 +97,9 @@ const EXAMPLES: Readonly<Record<string, string>> = {
   plies: '"plies": 2',
   area: '"area": { "dead": "12 psf", "live": "40 psf" }',
   tributary: '"tributary": "6 ft"',
+  rack: '"rack": [ { "product": "LVL", "grade": "typical 2.0E" } ]',
+  factors: '"factors": { "CL": { "value": 0.95, "reason": "..." } }',
+  reason: '"reason": "why it has this value"',
   loads: '"loads": [ { "kind": "snow", "point": "850 lb", "at": "5 ft" } ]',
 };
 

@@ -1,4 +1,5 @@
 export { newMember, newSession } from './new-member.ts';
+export { rankingOf } from './ranking.ts';
 export { readSession } from './read.ts';
 export { schemaJson } from './schema-json.ts';
 export type { Session, SessionMember, SessionRead } from './session.ts';

@@ -36,6 +36,7 @@ export function newMember(use: Use, spans: readonly number[], tributary: number,
       values: null,
       valuesFrom: null,
     },
+    rack: null,
     section: { width: TWO_BY, depth: NOMINAL_TEN, plies: 1, flat: false },
     maxDepth: null,
     maxWidth: null,
@@ -51,7 +52,9 @@ export function newMember(use: Use, spans: readonly number[], tributary: number,
     tiedDown: null,
     limits: { ...LIMITS_BY_USE[use], liveMax: null },
     creep: 'half dead',
-    assumed: [...ASSUMED_KEYS],
+    typedFactors: null,
+    // The width was asked for.
+    assumed: ASSUMED_KEYS.filter((key) => key !== 'tributary'),
   };
 }
 

@@ -6,18 +6,23 @@ import {
   ASSUMED_KEYS,
   type AssumedKey,
   type Bracing,
+  FACTOR_SYMBOLS,
+  type FactorSymbol,
+  type Headroom,
   LIMITS_BY_USE,
   type Member,
   STOCK_VALUES,
   type Stock,
   type StockValue,
+  type TypedFactors,
 } from '../timber/member.ts';
+import { seasonedByDefault } from '../timber/with-stock.ts';
 import { type Path, SessionFault } from './fault.ts';
 import { type LoadFile, type MemberFile, readSlope } from './schema.ts';
 
 /** Defaults (contract, "Session file"); in. */
 export const DEFAULT_BEARING = 3.5;
-const DEFAULT_TRIBUTARY = 72;
+export const DEFAULT_TRIBUTARY = 72;
 /** Slack for positions that were summed in another unit, in. */
 const HAIR = 1e-6;
 
@@ -60,6 +65,7 @@ export function readMember(file: MemberFile, combinations: CombinationSet, path:
         : { area: read('area', file.liveReduction.area), KLL: file.liveReduction.KLL },
     slope: file.slope === undefined ? 0 : readSlope(file.slope),
     stock,
+    rack: file.rack?.map((one, i) => readRackWood(one, [...path, 'rack', i])) ?? null,
     section: {
       width: length(file.section.width),
       depth: length(file.section.depth),
@@ -68,6 +74,7 @@ export function readMember(file: MemberFile, combinations: CombinationSet, path:
     },
     maxDepth: file.maxDepth === undefined ? null : length(file.maxDepth),
     maxWidth: file.maxWidth === undefined ? null : length(file.maxWidth),
+    ...readHeadroom(file),
     service: file.service ?? 'dry',
     temperature: file.temperature ?? 'normal',
     incised: file.incised ?? false,
@@ -84,13 +91,9 @@ export function readMember(file: MemberFile, combinations: CombinationSet, path:
       liveMax: file.limits?.liveMax === undefined ? null : length(file.limits.liveMax),
     },
     creep: file.creep ?? 'half dead',
+    typedFactors: readFactors(file),
     assumed: assumedKeys(file),
   };
-}
-
-/** Timbers count as unseasoned unless stated. */
-export function seasonedByDefault(stock: Stock): boolean {
-  return stock.product !== 'timber';
 }
 
 /** A quantity that the schema has already accepted. */
@@ -234,6 +237,39 @@ function readStock(file: MemberFile['stock'], path: Path): Stock {
   };
 }
 
+/** A wood of the rack; one without stock sizes has nothing to show there. */
+function readRackWood(file: MemberFile['stock'], path: Path): Stock {
+  if (file.product === 'custom') {
+    throw new SessionFault([...path, 'product'], 'a custom product has no stock sizes to stand on the rack');
+  }
+  return readStock(file, path);
+}
+
+function readHeadroom({ headroom }: MemberFile): { headroom?: Headroom } {
+  if (headroom === undefined) return {};
+  const part = (text: string | undefined) => (text === undefined ? 0 : length(text));
+  return {
+    headroom: {
+      floorToFloor: length(headroom.floorToFloor),
+      clear: length(headroom.clear),
+      floor: part(headroom.floor),
+      joists: part(headroom.joists),
+      ceiling: part(headroom.ceiling),
+      beam: headroom.beam ?? 'dropped',
+    },
+  };
+}
+
+function readFactors({ factors }: MemberFile): TypedFactors | null {
+  if (factors === undefined) return null;
+  const typed: Partial<Record<FactorSymbol, { value: number; reason: string }>> = {};
+  for (const symbol of FACTOR_SYMBOLS) {
+    const given = factors[symbol];
+    if (given !== undefined) typed[symbol] = { value: given.value, reason: given.reason };
+  }
+  return Object.keys(typed).length === 0 ? null : typed;
+}
+
 function readValues(file: NonNullable<MemberFile['stock']['values']>): Stock['values'] {
   const values: Partial<Record<StockValue, number>> = {};
   for (const key of STOCK_VALUES) {
@@ -265,5 +301,7 @@ function readNotch(file: MemberFile, path: Path): Member['notch'] {
 
 function assumedKeys(file: MemberFile): AssumedKey[] {
   const given = file as Readonly<Record<string, unknown>>;
-  return ASSUMED_KEYS.filter((key) => given[key] === undefined);
+  return ASSUMED_KEYS.filter(
+    (key) => given[key] === undefined && !(key === 'tributary' && file.spacing !== undefined),
+  );
 }

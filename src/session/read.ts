@@ -1,8 +1,9 @@
 import type { CombinationSet } from '../loads/loading.ts';
 import { quoted } from '../quantity/index.ts';
-import { stockFault } from '../timber/refusal.ts';
+import { stockFault, stockNameFault } from '../timber/refusal.ts';
 import { explainIssues } from './explain-issue.ts';
 import { faultLine, type Path, SessionFault } from './fault.ts';
+import { readPrices, readYard } from './read-buying.ts';
 import { readJson } from './read-json.ts';
 import { readMember } from './read-member.ts';
 import { type SessionFile, sessionSchema } from './schema.ts';
@@ -56,6 +57,9 @@ export function readDocument(document: unknown): Session {
     title: file.title ?? '',
     units: file.units ?? 'us',
     combinations,
+    ...(file.best === undefined ? {} : { best: file.best }),
+    ...(file.yard === undefined ? {} : { yard: readYard(file.yard) }),
+    ...(file.prices === undefined ? {} : { prices: readPrices(file.prices) }),
     members: file.members.map((_, i) => readOne(file, raw.members[i], i, combinations)),
     written: top,
   };
@@ -76,6 +80,12 @@ function readOne(
       ? fault.reason.slice(fault.path.length + 2)
       : fault.reason;
     throw new SessionFault([...path, ...key.split('.')], reason);
+  }
+  for (const [at, stock] of (member.rack ?? []).entries()) {
+    const unknown = stockNameFault(stock);
+    if (unknown === null) continue;
+    const key = unknown.path.slice('stock.'.length);
+    throw new SessionFault([...path, 'rack', at, key], unknown.reason);
   }
   return { member, written };
 }

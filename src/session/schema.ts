@@ -1,21 +1,15 @@
 import * as z from 'zod/mini';
+import { BESTS } from '../explore/best.ts';
 import { LOAD_KINDS } from '../loads/kinds.ts';
 import { isHarmful, parseQuantity, type QuantityKind, quoted } from '../quantity/index.ts';
-import { STOCK_VALUES } from '../timber/member.ts';
-import { MAX_LOADS, MAX_MEMBERS, MAX_SPANS } from './session.ts';
+import { FACTOR_SYMBOLS, PRODUCTS, STOCK_VALUES } from '../timber/member.ts';
+import { prices, yard } from './schema-buying.ts';
+import { MAX_LOADS, MAX_MEMBERS, MAX_RACK, MAX_SPANS } from './session.ts';
 
 /** The format's version, the value of the key `thrice`. */
 export const FORMAT = 1;
 
 export const USES = ['floor', 'roof-plaster', 'roof-ceiling', 'roof'] as const;
-export const PRODUCTS = [
-  'dimension lumber',
-  'machine stress rated',
-  'timber',
-  'glulam',
-  'LVL',
-  'custom',
-] as const;
 export const TEMPERATURES = ['normal', '100-125 F', '125-150 F'] as const;
 
 /** Bounds that keep a slip of the finger out; no code clause. Lengths in, loads lb, lb/in, psi. */
@@ -29,6 +23,8 @@ const HEAVIEST_POINT = 1e7;
 const MAX_PLIES = 4;
 const MAX_COUNT = 10_000;
 const MAX_LIMIT = 10_000;
+const LEAST_FACTOR = 0.01;
+const MOST_FACTOR = 10;
 const NAME_LENGTH = 60;
 const NOTE_LENGTH = 500;
 const SLOPE = /^(\d+(?:\.\d+)?|\.\d+) ?: ?(\d+(?:\.\d+)?|\.\d+)$/;
@@ -58,9 +54,18 @@ function build() {
     title: z.optional(text(0, NOTE_LENGTH)),
     units: z.optional(z.enum(['us', 'si'])),
     combinations: z.optional(z.enum(['ASCE 7-16', 'ASCE 7-22'])),
+    best: z.optional(z.enum(BESTS)),
+    yard: z.optional(yard(PARTS)),
+    prices: z.optional(prices(PARTS)),
     members: z.array(member()).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
   });
 }
+
+/** What the schemas of other files are put together from. */
+export const PARTS = {
+  text,
+  length: (least: number, most: number, words: string) => quantity('length', least, most, words),
+};
 
 function member() {
   const span = quantity('length', 1, LONGEST, '1 in to 200 ft');
@@ -119,6 +124,11 @@ function member() {
     ),
     slope: z.optional(slope()),
     stock: stock(),
+    rack: z.optional(
+      z.array(stock()).check(z.minLength(1), z.maxLength(MAX_RACK)).register(z.globalRegistry, {
+        description: "woods that stand on the rack together; the member's own is always among them",
+      }),
+    ),
     section: z.strictObject({
       width: size,
       depth: size,
@@ -127,6 +137,7 @@ function member() {
     flat: flag,
     maxDepth: anySize,
     maxWidth: anySize,
+    headroom: z.optional(headroom()),
     service: z.optional(z.enum(['dry', 'wet'])),
     temperature: z.optional(z.enum(TEMPERATURES)),
     incised: flag,
@@ -145,7 +156,27 @@ function member() {
       }),
     ),
     creep: z.optional(z.enum(['half dead', 'Kcr'])),
+    factors: z.optional(factors()),
   });
+}
+
+/** What a storey is made up of, and so the depth that it leaves a beam. */
+function headroom() {
+  const height = quantity('length', 0, LONGEST, '0 ft to 200 ft');
+  const part = z.optional(height);
+  return z
+    .strictObject({
+      floorToFloor: height,
+      clear: height,
+      floor: part,
+      joists: part,
+      ceiling: part,
+      beam: z.optional(z.enum(['dropped', 'flush'])),
+    })
+    .register(z.globalRegistry, {
+      description:
+        'the storey: floor to floor, clear height wanted, deck and finishes above the joists, the joists that a dropped beam carries, the ceiling below it',
+    });
 }
 
 function stock() {
@@ -163,6 +194,20 @@ function stock() {
       }),
     ),
     valuesFrom: z.optional(text(1, NOTE_LENGTH)),
+  });
+}
+
+/** Adjustment factors typed over the standard's. */
+function factors() {
+  const typed = () =>
+    z.optional(
+      z.strictObject({
+        value: z.number().check(z.minimum(LEAST_FACTOR), z.maximum(MOST_FACTOR)),
+        reason: text(1, NOTE_LENGTH),
+      }),
+    );
+  return z.strictObject(each(FACTOR_SYMBOLS, typed)).register(z.globalRegistry, {
+    description: 'adjustment factors typed over those of the standard, each with the reason for its value',
   });
 }
 

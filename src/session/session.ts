@@ -1,3 +1,5 @@
+import type { Best } from '../explore/best.ts';
+import type { PriceRow, YardRow } from '../explore/yard.ts';
 import type { CombinationSet } from '../loads/loading.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
@@ -10,8 +12,21 @@ export interface Session {
   readonly combinations: CombinationSet;
   /** One or more, names unique. */
   readonly members: readonly SessionMember[];
+  /** What counts as best; absent: the lightest. */
+  readonly best?: Best;
+  /** What the yard has; absent or null: no list. */
+  readonly yard?: YardList | null;
+  /** What woods cost where the yard list does not say. */
+  readonly prices?: readonly PriceRow[];
   /** The raw top of the file it was read from, without its members; absent for a session that was never a file. */
   readonly written?: unknown;
+}
+
+export interface YardList {
+  /** Its file, from the folder of the session; null where its lines stand in the session. */
+  readonly file: string | null;
+  /** null: its file has not been read. */
+  readonly rows: readonly YardRow[] | null;
 }
 
 export interface SessionMember {
@@ -29,3 +44,7 @@ export const MAX_BYTES = 16 * 1024 * 1024;
 export const MAX_MEMBERS = 500;
 export const MAX_SPANS = 6;
 export const MAX_LOADS = 100;
+/** Lines of a yard list; a bound of this program's own. */
+export const MAX_YARD = 20_000;
+/** Woods on one rack; a bound of this program's own. */
+export const MAX_RACK = 16;

@@ -1,8 +1,15 @@
 import { LOAD_KINDS } from '../loads/kinds.ts';
 import { type QuantityKind, type Units, writeQuantity } from '../quantity/index.ts';
-import { type AssumedKey, type Bracing, LIMITS_BY_USE, type Member } from '../timber/member.ts';
+import {
+  type AssumedKey,
+  type Bracing,
+  FACTOR_SYMBOLS,
+  LIMITS_BY_USE,
+  type Member,
+} from '../timber/member.ts';
+import { seasonedByDefault } from '../timber/with-stock.ts';
 import { group, keep, keeper, keepList, present, type Raw, rawAt } from './keep.ts';
-import { DEFAULT_BEARING, seasonedByDefault } from './read-member.ts';
+import { DEFAULT_BEARING, DEFAULT_TRIBUTARY } from './read-member.ts';
 import { readSlope } from './schema.ts';
 import { writeLoads } from './write-loads.ts';
 import { writeStock } from './write-stock.ts';
@@ -55,6 +62,12 @@ export function writeMember(member: Member, raw: unknown, before: Member | undef
     liveReduction: writeLiveReduction(member, under('liveReduction'), before, text('area')),
     slope: of('slope', 0, slopeText),
     stock: writeStock(member.stock, under('stock'), before?.stock, text('stress')),
+    rack:
+      member.rack == null
+        ? undefined
+        : keepList(under('rack'), before?.rack, member.rack, (stock) =>
+            writeStock(stock, undefined, undefined, text('stress')),
+          ),
     section: present({
       width: ofSection('width', undefined, length),
       depth: ofSection('depth', undefined, length),
@@ -63,6 +76,7 @@ export function writeMember(member: Member, raw: unknown, before: Member | undef
     flat: keep(under('flat'), before?.section.flat, section.flat, false),
     maxDepth: of('maxDepth', null, lengthOrNone),
     maxWidth: of('maxWidth', null, lengthOrNone),
+    headroom: writeHeadroom(member, under('headroom'), before, length),
     service: stated('service', 'dry'),
     temperature: stated('temperature', 'normal'),
     incised: of('incised', false),
@@ -82,6 +96,7 @@ export function writeMember(member: Member, raw: unknown, before: Member | undef
       liveMax: limit('liveMax', null, lengthOrNone),
     }),
     creep: of('creep', 'half dead'),
+    factors: writeFactors(member, under('factors'), before),
   });
 }
 
@@ -112,9 +127,38 @@ function writeWidth(
   if (spacing !== null && spacing === tributary) {
     return { spacing: keep(rawAt(raw, 'spacing'), before?.spacing ?? undefined, spacing, undefined, length) };
   }
-  // Left out only where it was left out before: the default is a guess that a changed or new member must not rest on.
-  const otherwise = before?.spacing === null ? before.tributary : undefined;
-  return { tributary: keep(rawAt(raw, 'tributary'), before?.tributary, tributary, otherwise, length) };
+  if (member.assumed.includes('tributary') && tributary === DEFAULT_TRIBUTARY) return {};
+  return { tributary: keep(rawAt(raw, 'tributary'), before?.tributary, tributary, undefined, length) };
+}
+
+function writeHeadroom(
+  { headroom }: Member,
+  raw: unknown,
+  before: Member | undefined,
+  length: (value: number) => string,
+): unknown {
+  if (headroom == null) return undefined;
+  const of = keeper(raw, before?.headroom ?? undefined, headroom);
+  return present({
+    floorToFloor: of('floorToFloor', undefined, length),
+    clear: of('clear', undefined, length),
+    floor: of('floor', 0, length),
+    joists: of('joists', 0, length),
+    ceiling: of('ceiling', 0, length),
+    beam: of('beam', 'dropped'),
+  });
+}
+
+/** Typed factors in the order of NDS Table 4.3.1, each as the user wrote it while it is unchanged. */
+function writeFactors(member: Member, raw: unknown, before: Member | undefined): unknown {
+  const typed = member.typedFactors ?? null;
+  if (typed === null) return undefined;
+  const of = keeper(raw, before?.typedFactors ?? undefined, typed);
+  const entries = FACTOR_SYMBOLS.map((symbol) => [
+    symbol,
+    typed[symbol] === undefined ? undefined : of(symbol, undefined),
+  ]);
+  return present(Object.fromEntries(entries));
 }
 
 function writeLiveReduction(

@@ -4,6 +4,7 @@ import { present, rawAt } from './keep.ts';
 import { readMember } from './read-member.ts';
 import { FORMAT, type MemberFile } from './schema.ts';
 import type { Session, SessionMember } from './session.ts';
+import { writePrices, writeYard } from './write-buying.ts';
 import { writeJson } from './write-json.ts';
 import { writeMember } from './write-member.ts';
 
@@ -25,6 +26,9 @@ export function sessionDocument(session: Session): unknown {
     title: stated('title', title, ''),
     units: stated('units', units, 'us'),
     combinations: stated('combinations', combinations, 'ASCE 7-16'),
+    best: stated('best', session.best ?? 'weight', 'weight'),
+    yard: writeYard(session),
+    prices: writePrices(session),
     members: session.members.map((one) => writeMember(one.member, one.written, before(one), units)),
   });
 }

@@ -1,16 +1,23 @@
 import { liveReductionFactor } from '../loads/reduction.ts';
+import { showQuantity, type Units } from '../quantity/index.ts';
+import { temperatureIn } from './factors/temperature.ts';
+import { feetIn, inchesIn } from './factors/wording.ts';
 import type { AssumedKey, Bracing, Member } from './member.ts';
 
 /** Sentences on what the checks take for given: what nobody stated, and that the top edge is held. */
-export function assumptionsOf(member: Member): string[] {
+export function assumptionsOf(member: Member, units: Units = 'us'): string[] {
   const sentences: string[] = [];
   const { assumed } = member;
   // Stated or not, everything hangs on it: a floor that is not nailed down holds no edge.
   if (member.bracing === 'continuous' || assumed.includes('bracing'))
-    sentences.push(edge('top', member.bracing));
-  if (assumed.includes('bracingBottom')) sentences.push(edge('bottom', member.bracingBottom));
+    sentences.push(edge('top', member.bracing, units));
+  if (assumed.includes('bracingBottom')) sentences.push(edge('bottom', member.bracingBottom, units));
   for (const key of ['bearing', 'seasoned', 'service', 'temperature'] as const) {
-    if (assumed.includes(key)) sentences.push(SENTENCE[key](member));
+    if (assumed.includes(key)) sentences.push(SENTENCE[key](member, units));
+  }
+  // Without area loads the width carries nothing.
+  if (assumed.includes('tributary') && Object.values(member.area).some((load) => load > 0)) {
+    sentences.push(`tributary width ${feetIn(member.tributary, units)}`);
   }
   if (member.slope !== 0) {
     sentences.push(
@@ -20,32 +27,37 @@ export function assumptionsOf(member: Member): string[] {
   const reduced = liveReductionFactor(member.area.live, member.liveReduction);
   if (member.liveReduction !== null) {
     const { KLL, area } = member.liveReduction;
-    const served = Math.round(area / SQUARE_FOOT);
-    sentences.push(
-      `floor live load taken at ${round(reduced)} of it: KLL ${KLL}, AT ${served} ft2, ASCE 7 4.7`,
-    );
+    const served = showQuantity('area', area, units);
+    sentences.push(`floor live load taken at ${round(reduced)} of it: KLL ${KLL}, AT ${served}, ASCE 7 4.7`);
   }
   return sentences;
 }
-
-const SQUARE_FOOT = 144;
 
 function round(value: number): number {
   return Math.round(value * 1000) / 1000;
 }
 
 const SENTENCE: Readonly<
-  Record<Exclude<AssumedKey, 'bracing' | 'bracingBottom'>, (member: Member) => string>
+  Record<
+    Exclude<AssumedKey, 'bracing' | 'bracingBottom' | 'tributary'>,
+    (member: Member, units: Units) => string
+  >
 > = {
-  bearing: (member) => `bearings ${[...new Set(member.bearing)].join(', ')} in long`,
+  bearing: (member, units) => `bearings ${bearings(member, units)} long`,
   seasoned: (member) => (member.seasoned ? 'wood seasoned when built in' : 'wood not seasoned when built in'),
   service: (member) => (member.service === 'dry' ? 'dry in service' : 'wet in service'),
-  temperature: (member) =>
-    member.temperature === 'normal' ? 'at most 100 F in service' : `${member.temperature} in service`,
+  temperature: (member, units) => `${temperatureIn(member.temperature, units)} in service`,
 };
 
-function edge(name: string, bracing: Bracing): string {
+/** "3.5 in", "3.5, 5.5 in": each length once. */
+function bearings({ bearing }: Member, units: Units): string {
+  const texts = [...new Set(bearing.map((length) => inchesIn(length, units)))];
+  const unit = texts[0]?.slice(texts[0].indexOf(' ')) ?? '';
+  return texts.map((text) => text.slice(0, -unit.length)).join(', ') + unit;
+}
+
+function edge(name: string, bracing: Bracing, units: Units): string {
   if (bracing === 'continuous') return `${name} edge held throughout`;
   if (bracing === 'ends') return `${name} edge held at the supports only`;
-  return `${name} edge held every ${bracing} in`;
+  return `${name} edge held every ${inchesIn(bracing, units)}`;
 }

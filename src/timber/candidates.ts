@@ -267,7 +267,8 @@ function unknownName(stock: Stock, ofSpecies: readonly LumberRow[]): string {
     return `no ${stock.product} of species ${quote(stock.species)}: ${suggestion(stock.species, species)}`;
   }
   const grades = [...new Set(ofSpecies.map((row) => row.grade))];
-  return `${stock.species} has no grade ${quote(stock.grade)} as ${stock.product}: ${suggestion(stock.grade, grades)}`;
+  const asked = `${stock.species} has no grade ${quote(stock.grade)} as ${stock.product}`;
+  return `${asked}: ${suggestion(stock.grade, grades)} (${ofSpecies[0]!.source})`;
 }
 
 function suggestion(name: string, known: readonly string[]): string {

@@ -1,3 +1,4 @@
+import { isComplete } from './candidates.ts';
 import type { Member } from './member.ts';
 
 export interface Caution {
@@ -26,13 +27,16 @@ export function cautionsOf(member: Member, loaded: boolean, frequency: number | 
   const add = (id: string, text: string) => cautions.push({ id, text });
   const { section, stock, typedFactors } = member;
   if (!loaded) add('unloaded', 'The member carries nothing but itself: give it loads.');
+  for (const [symbol, typed] of Object.entries(typedFactors ?? {})) {
+    add(`typed-${symbol}`, `${symbol} ${typed.value} is typed: ${typed.reason}`);
+  }
   if (section.plies > 1) {
     add(
       'ply-fastening',
       `The ${section.plies} plies act as one only if fastened together to share load: fastening is not checked.`,
     );
   }
-  if (stock.product === 'LVL' && stock.values === null) {
+  if (stock.product === 'LVL' && !isComplete(stock)) {
     add(
       'typical-LVL',
       'LVL values are a typical set (common practice, no source): use the values of the maker’s report.',
@@ -41,7 +45,7 @@ export function cautionsOf(member: Member, loaded: boolean, frequency: number | 
   if (frequency !== null && frequency < SUGGESTED_FREQUENCY) {
     add(
       'frequency',
-      `First frequency under ${SUGGESTED_FREQUENCY} Hz: the floor may feel lively (advice, not code).`,
+      `First frequency ${frequency.toFixed(1)} Hz, under ${SUGGESTED_FREQUENCY}: the floor may feel lively (advice, not code).`,
     );
   }
   if (member.notch.left > 0 || member.notch.right > 0) {
@@ -49,9 +53,6 @@ export function cautionsOf(member: Member, loaded: boolean, frequency: number | 
       'notch',
       'Bending and deflection are those of the full depth; the notch is checked in shear at its end.',
     );
-  }
-  for (const [symbol, typed] of Object.entries(typedFactors ?? {})) {
-    add(`typed-${symbol}`, `${symbol} ${typed.value} is typed: ${typed.reason}`);
   }
   return cautions;
 }

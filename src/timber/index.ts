@@ -1,10 +1,18 @@
+export { assumptionsOf } from './assumptions.ts';
 export { candidatesOf, eMin, glulamGroup, isComplete } from './candidates.ts';
 export { CAUTIONS } from './cautions.ts';
 export { type AdjustedValues, adjusted } from './checks/adjusted.ts';
 export { explainChecks } from './checks/explain.ts';
 export { governingField } from './checks/governing-field.ts';
 export { lineLoadOf } from './checks/line-load.ts';
-export { deadFactorOf, type Prepared, type PrepareOptions, prepare, prepareLike, prepareScaled } from './checks/prepare.ts';
+export {
+  deadFactorOf,
+  type Prepared,
+  type PrepareOptions,
+  prepare,
+  prepareLike,
+  prepareScaled,
+} from './checks/prepare.ts';
 export { rate } from './checks/rate.ts';
 export { type Wood, type WoodConditions, woodOf } from './checks/wood.ts';
 export {
@@ -18,10 +26,18 @@ export {
   speciesOf,
 } from './design-values.ts';
 export { nominalOf, timberNominalOf } from './nominal.ts';
-export { checkStock, refusal, type StockFault, stockFault } from './refusal.ts';
+export {
+  checkChange,
+  checkStock,
+  refusal,
+  refuserOf,
+  type StockFault,
+  stockFault,
+  stockNameFault,
+} from './refusal.ts';
 export { reportMember } from './report-member.ts';
 export { sectionWeight } from './section-weight.ts';
-export { liesFlat, standingDepth, standingWidth } from './standing.ts';
+export { isSawn, liesFlat, standingDepth, standingWidth } from './standing.ts';
 export {
   boardFeet,
   mostPlies,
@@ -35,3 +51,4 @@ export {
   stockWidths,
 } from './stock-sizes.ts';
 export { density, ownWeight } from './weight.ts';
+export { sameStock, seasonedByDefault, withStock, woodsOf } from './with-stock.ts';

@@ -10,6 +10,10 @@ export interface Member extends Loading {
   /** Centre to centre, in; where given the tributary width equals it. */
   readonly spacing: number | null;
   readonly stock: Stock;
+  /**
+   * Woods that stand on the rack together; the member's own is always among them. Absent or null: its own alone.
+   */
+  readonly rack?: readonly Stock[] | null;
   readonly section: Section;
   readonly service: 'dry' | 'wet';
   readonly temperature: 'normal' | '100-125 F' | '125-150 F';
@@ -29,6 +33,8 @@ export interface Member extends Loading {
   /** Choices deeper or wider than these do not count, in. */
   readonly maxDepth: number | null;
   readonly maxWidth: number | null;
+  /** The storey it stands in, which leaves it so much depth. Absent or null: not stated. */
+  readonly headroom?: Headroom | null;
   /** Adjustment factors typed over the standard's, each with the reason that must be given. */
   readonly typedFactors?: TypedFactors | null;
   /** Keys whose value is a default that nobody stated; each is listed in every output. */
@@ -44,10 +50,33 @@ export type TypedFactors = Readonly<
 
 export type Use = 'floor' | 'roof-plaster' | 'roof-ceiling' | 'roof';
 
+/** What a storey is made up of, in. */
+export interface Headroom {
+  readonly floorToFloor: number;
+  /** Clear height wanted below. */
+  readonly clear: number;
+  /** Deck and finishes above the joists. */
+  readonly floor: number;
+  /** Depth of the joists. */
+  readonly joists: number;
+  /** Ceiling below the beam. */
+  readonly ceiling: number;
+  /** Dropped: the joists rest on it; flush: they hang between, their tops with its top. */
+  readonly beam: 'dropped' | 'flush';
+}
+
 /** `continuous`: held throughout; `ends`: held at the supports only; a number: unbraced length, in. */
 export type Bracing = 'continuous' | 'ends' | number;
 
-export type Product = 'dimension lumber' | 'machine stress rated' | 'timber' | 'glulam' | 'LVL' | 'custom';
+export const PRODUCTS = [
+  'dimension lumber',
+  'machine stress rated',
+  'timber',
+  'glulam',
+  'LVL',
+  'custom',
+] as const;
+export type Product = (typeof PRODUCTS)[number];
 
 export interface Stock {
   readonly product: Product;
@@ -87,6 +116,7 @@ export const ASSUMED_KEYS = [
   'seasoned',
   'service',
   'temperature',
+  'tributary',
 ] as const;
 export type AssumedKey = (typeof ASSUMED_KEYS)[number];
 

@@ -1,3 +1,4 @@
+import type { Units } from '../quantity/index.ts';
 import { assumptionsOf } from './assumptions.ts';
 import { cautionsOf, SUGGESTED_FREQUENCY } from './cautions.ts';
 import { explainChecks } from './checks/explain.ts';
@@ -13,8 +14,8 @@ import { sectionWeight } from './section-weight.ts';
 import { sizeLabel } from './size-label.ts';
 import { standingDepth, standingWidth } from './standing.ts';
 
-/** Every check of a member with its words: the same numbers as `rate`, to the last bit. */
-export function reportMember(member: Member): MemberReport {
+/** Every check of a member with its words, sizes in them in `units`: the same numbers as `rate`, to the last bit. */
+export function reportMember(member: Member, units: Units = 'us'): MemberReport {
   const { section, stock } = member;
   const refused = refusal(member);
   const values = lookUp(stock, section);
@@ -28,7 +29,7 @@ export function reportMember(member: Member): MemberReport {
     refused,
     source: isRefusal(values) ? '' : values.source,
     status: isRefusal(values) ? '' : values.status,
-    assumptions: assumptionsOf(member),
+    assumptions: assumptionsOf(member, units),
   };
   if (refused !== null || isRefusal(values)) {
     const cautions = cautionsOf(member, true, null);
@@ -45,7 +46,7 @@ export function reportMember(member: Member): MemberReport {
   }
   const prepared = prepare(member);
   const wood = woodOf(member);
-  const { checks, passes } = explainChecks(prepared, wood, section);
+  const { checks, passes } = explainChecks(prepared, wood, section, units);
   const EI = wood.at.E * wood.at.inertia;
   const w = member.selfWeight ? wood.at.weight : 0;
   // The advice is about floors that people walk on.
@@ -54,13 +55,24 @@ export function reportMember(member: Member): MemberReport {
     frequency === null
       ? []
       : [{ id: 'frequency', value: frequency, unit: 'Hz', suggested: SUGGESTED_FREQUENCY }];
+  // Only some readers ask for the analysis by kind, and none of them at every nudge.
+  let analysed: ReturnType<typeof analyse> | null = null;
+  const analysis = () => {
+    analysed ??= analyse(member, w, EI);
+    return analysed;
+  };
   return {
     ...base,
     passes,
     governing: governingOf(checks),
     checks,
     advice,
-    ...analyse(member, w, EI),
+    get reactions() {
+      return analysis().reactions;
+    },
+    get analysis() {
+      return analysis().analysis;
+    },
     cautions: cautionsOf(member, prepared.loaded, frequency),
   };
 }

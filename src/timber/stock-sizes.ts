@@ -12,6 +12,8 @@ export { sizeLabel } from './size-label.ts';
 export interface Size {
   readonly label: string;
   readonly product: Product;
+  /** The wood that the rack is of. */
+  readonly stock: Stock;
   /** Width of one ply, in. */
   readonly width: number;
   /** in */
@@ -89,8 +91,22 @@ function shelvesOf(stock: Stock): readonly Shelf[] {
   }
 }
 
-/** The rack of a stock: sizes that its table covers, lightest first, then shallower, then fewer plies. */
-export function rackSizesOf(stock: Stock): Size[] {
+const KNOWN = new WeakMap<Stock, readonly Size[]>();
+
+/**
+ * The rack of a stock: sizes that its table covers, lightest first, then shallower, then fewer plies. A stock is never
+ * changed: its rack is made once.
+ */
+export function rackSizesOf(stock: Stock): readonly Size[] {
+  let known = KNOWN.get(stock);
+  if (known === undefined) {
+    known = makeRackSizes(stock);
+    KNOWN.set(stock, known);
+  }
+  return known;
+}
+
+function makeRackSizes(stock: Stock): Size[] {
   const candidates = candidatesOf(stock);
   if (isRefusal(candidates)) return [];
   const { product } = stock;
@@ -103,6 +119,7 @@ export function rackSizesOf(stock: Stock): Size[] {
         sizes.push({
           label: sizeLabel(section, product),
           product,
+          stock,
           width,
           depth,
           plies,
@@ -115,7 +132,7 @@ export function rackSizesOf(stock: Stock): Size[] {
 }
 
 /** The rack of a grade whose values are all the table's. */
-export function rackSizes(product: Product, species: string, grade: string): Size[] {
+export function rackSizes(product: Product, species: string, grade: string): readonly Size[] {
   return rackSizesOf({ product, species, grade, values: null, valuesFrom: null });
 }
 
@@ -166,10 +183,10 @@ function nextOf(sizes: readonly number[], from: number, by: 1 | -1): number | nu
   return (by > 0 ? beyond[0] : beyond[beyond.length - 1]) ?? null;
 }
 
-/** Plies that a stock is built up of at most: 1 for what comes in one piece. */
+/** Plies that a stock is built up of at most: 1 for what comes in one piece; of a width off the stock the most of all. */
 export function mostPlies(stock: Stock, width: number): number {
   if (stock.product === 'custom') return MOST_PLIES;
-  return (
-    shelvesOf(stock).find((shelf) => Math.abs(shelf.width - width) <= SIZE_TOLERANCE)?.mostPlies ?? MOST_PLIES
-  );
+  const shelves = shelvesOf(stock);
+  const own = shelves.find((shelf) => Math.abs(shelf.width - width) <= SIZE_TOLERANCE);
+  return own?.mostPlies ?? Math.max(...shelves.map((shelf) => shelf.mostPlies));
 }

@@ -2,7 +2,13 @@ import fc from 'fast-check';
 import { LOAD_KINDS } from '../../src/loads/kinds.ts';
 import type { AppliedLoad } from '../../src/loads/loading.ts';
 import { type Beam, beamLength, supportPlaces } from '../../src/statics/beam.ts';
-import { ASSUMED_KEYS, LIMITS_BY_USE, type Member } from '../../src/timber/member.ts';
+import {
+  ASSUMED_KEYS,
+  FACTOR_SYMBOLS,
+  LIMITS_BY_USE,
+  type Member,
+  type Stock,
+} from '../../src/timber/member.ts';
 
 const double = (min: number, max: number) => fc.double({ min, max, noNaN: true }).map((value) => value + 0);
 /** Chosen values as well as any double. */
@@ -53,6 +59,31 @@ function loadOn(whole: number): fc.Arbitrary<AppliedLoad> {
   );
 }
 
+const table = (product: Stock['product'], species: string, grade: string): Stock => ({
+  product,
+  species,
+  grade,
+  values: null,
+  valuesFrom: null,
+});
+
+/** Woods that may stand on a rack beside the member's own. */
+const rackWood = fc.constantFrom(
+  table('dimension lumber', 'Hem-Fir', 'No.1'),
+  table('timber', 'Douglas Fir-Larch', 'No.1'),
+  table('glulam', 'Western species', '24F-1.8E'),
+  table('LVL', '', 'typical 2.0E'),
+  { ...table('LVL', '', 'typical 2.0E'), values: { Fb: 2850 }, valuesFrom: 'report in hand' },
+);
+
+const typedFactors = fc
+  .dictionary(
+    fc.constantFrom(...FACTOR_SYMBOLS),
+    fc.record({ value: double(0.01, 10), reason: fc.constantFrom('blocked at mid-span', 'by "test"') }),
+  )
+  // A plain object, as it is read.
+  .map((typed) => ({ ...typed }));
+
 /** Any member that a session may hold: dimension lumber of dressed sizes, whatever else. */
 export const member: fc.Arbitrary<Member> = beam.chain((beam) => {
   const supports = supportPlaces(beam).length;
@@ -78,6 +109,8 @@ export const member: fc.Arbitrary<Member> = beam.chain((beam) => {
       values: orNull(fc.record({ Fb: double(100, 5000), G: double(0.3, 0.8), E: double(5e5, 3e6) })),
       depth: fc.constantFrom(5.5, 7.25, 9.25, 11.25, 13.25),
       plies: fc.integer({ min: 1, max: 4 }),
+      rack: orNull(fc.array(rackWood, { minLength: 1, maxLength: 5 })),
+      factors: orNull(typedFactors.filter((typed) => Object.keys(typed).length > 0)),
       most: fc.tuple(orNull(length(4, 40)), orNull(length(2, 20))),
       service: fc.constantFrom('dry' as const, 'wet' as const),
       temperature: fc.constantFrom('normal' as const, '100-125 F' as const),
@@ -118,6 +151,7 @@ export const member: fc.Arbitrary<Member> = beam.chain((beam) => {
           values: r.values,
           valuesFrom: r.values === null ? null : 'report in hand',
         },
+        rack: r.rack,
         section: { width: 1.5, depth: r.depth, plies: r.plies, flat },
         maxDepth: r.most[0],
         maxWidth: r.most[1],
@@ -137,6 +171,7 @@ export const member: fc.Arbitrary<Member> = beam.chain((beam) => {
           liveMax: r.limits.liveMax,
         },
         creep: r.creep,
+        typedFactors: r.factors,
         assumed: ASSUMED_KEYS.filter((_, i) => r.assume[i]),
       };
       // What nobody stated has its default.
@@ -147,6 +182,7 @@ export const member: fc.Arbitrary<Member> = beam.chain((beam) => {
         seasoned: true,
         service: 'dry',
         temperature: 'normal',
+        ...(r.spacing === null ? { tributary: 72 } : {}),
       };
       const assumed = Object.fromEntries(
         stated.assumed

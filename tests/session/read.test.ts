@@ -54,6 +54,8 @@ describe('a session that is right', () => {
       tiedDown: null,
       limits: { live: 360, total: 240, liveMax: null },
       creep: 'half dead',
+      rack: null,
+      typedFactors: null,
       assumed: [...ASSUMED_KEYS],
     });
   });

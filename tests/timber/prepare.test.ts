@@ -14,7 +14,8 @@ function ratios(prepared: ReturnType<typeof prepare>, member: Member): number[] 
 
 function close(one: number[], other: number[]): void {
   one.forEach((ratio, at) => {
-    if (Number.isFinite(ratio) && Math.abs(ratio) > 1e-9) expect(ratio / other[at]!, CHECK_IDS[at]).toBeCloseTo(1, 8);
+    if (Number.isFinite(ratio) && Math.abs(ratio) > 1e-9)
+      expect(ratio / other[at]!, CHECK_IDS[at]).toBeCloseTo(1, 8);
     else if (!Number.isFinite(ratio)) expect(other[at], CHECK_IDS[at]).toBe(ratio);
   });
 }
@@ -24,7 +25,10 @@ describe('preparing from what is known', () => {
     fc.assert(
       fc.property(arbitraryMember, fc.double({ min: 0.3, max: 3, noNaN: true }), (member, factor) => {
         const scaled = scaleLengths(member, factor);
-        close(ratios(prepareScaled(prepare(member), scaled, factor), scaled), ratios(prepare(scaled), scaled));
+        close(
+          ratios(prepareScaled(prepare(member), scaled, factor), scaled),
+          ratios(prepare(scaled), scaled),
+        );
       }),
       { numRuns: 60 },
     );
@@ -33,7 +37,10 @@ describe('preparing from what is known', () => {
   it('gives the ratios of preparing anew for a member that is like it', () => {
     const changes: readonly ((member: Member) => Member)[] = [
       (member) => ({ ...member, section: { ...member.section, depth: member.section.depth * 1.1 } }),
-      (member) => ({ ...member, beam: { ...member.beam, spans: member.beam.spans.map((span) => span * 1.3) } }),
+      (member) => ({
+        ...member,
+        beam: { ...member.beam, spans: member.beam.spans.map((span) => span * 1.3) },
+      }),
       (member) => ({ ...member, beam: { ...member.beam, fixed: { left: true, right: false } } }),
       (member) => ({ ...member, tributary: member.tributary + 7 }),
       (member) => ({ ...member, limits: { ...member.limits, live: 200 }, bracing: 'ends' }),

@@ -1,3 +1,4 @@
+import { removeAt } from '../../explore/edit-beam.ts';
 import type { Step as NudgeSize } from '../../explore/knob.ts';
 import { lightestOf, takeSize } from '../../explore/rack.ts';
 import { editOf, inserted } from '../edit.ts';
@@ -18,9 +19,12 @@ import {
 } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
+import { openDiagrams } from './diagrams.ts';
 import { opened } from './entry.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { save } from './save-as.ts';
+import { openWood } from './wood.ts';
+import { openedWorkings } from './workings.ts';
 
 /** The one screen: knobs, powers, ruler, rack. */
 export const explore: ModeRules<ModeOf<'explore'>> = {
@@ -74,6 +78,16 @@ function act(state: State, action: Action): Step {
       const units = unitsOf(state) === 'us' ? 'si' : 'us';
       return still(withSession(state, { ...state.session, units }));
     }
+    case 'add':
+      return still({ ...state, mode: { name: 'add', line: 0, load: null }, notice: null });
+    case 'remove':
+      return still(remove(state));
+    case 'wood':
+      return still(openWood(state));
+    case 'diagrams':
+      return still(openDiagrams(state));
+    case 'workings':
+      return still(openedWorkings(state));
     case 'help':
       return still({ ...state, mode: { name: 'help', scroll: 0 } });
     case 'save':
@@ -95,7 +109,12 @@ function move(state: State, by: number): State {
 
 function jump(state: State, key: string): State {
   const { knobs } = knobInHand(state);
-  const wanted = key === 'tributary' && memberOf(state).spacing !== null ? 'spacing' : key;
+  const member = memberOf(state);
+  let wanted = key === 'tributary' && member.spacing !== null ? 'spacing' : key;
+  if (key === 'spans.0') {
+    const at = Number(/^spans\.(\d+)$/.exec(state.knob)?.[1] ?? -1);
+    wanted = `spans.${(at + 1) % member.beam.spans.length}`;
+  }
   return knobs.some((knob) => knob.key === wanted) ? { ...state, knob: wanted, notice: null } : state;
 }
 
@@ -109,6 +128,16 @@ function nudge(state: State, direction: 1 | -1, size: NudgeSize): State {
   const turn = knobs[index]!.nudge(memberOf(state), direction, size, unitsOf(state));
   if ('fault' in turn) return refused(state, turn.fault);
   return { ...withMember(state, turn.member), ghost: ghostOf(state) };
+}
+
+/** Takes out what the knob in hand stands for; undo brings it back. */
+function remove(state: State): State {
+  const { knobs, index } = knobInHand(state);
+  const knob = knobs[index]!;
+  const member = memberOf(state);
+  const edit = removeAt(member, knob.key, knob.label.trim());
+  if ('fault' in edit) return refused(state, edit.fault);
+  return { ...withMember(state, edit.member), knob: edit.knob, ghost: { knob: edit.knob, member } };
 }
 
 function takeLit(state: State): State {

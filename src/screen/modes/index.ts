@@ -1,4 +1,6 @@
 import type { Mode } from '../state.ts';
+import { add } from './add.ts';
+import { diagrams } from './diagrams.ts';
 import { entry } from './entry.ts';
 import { explore } from './explore.ts';
 import { help } from './help.ts';
@@ -6,6 +8,8 @@ import { leaving } from './leaving.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { saveAs } from './save-as.ts';
 import { start } from './start.ts';
+import { wood } from './wood.ts';
+import { workings } from './workings.ts';
 
 /** The rules of every mode, by its name. */
 const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
@@ -13,6 +17,10 @@ const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
   entry,
   'save-as': saveAs,
   help,
+  workings,
+  diagrams,
+  wood,
+  add,
   leaving,
   start,
 };

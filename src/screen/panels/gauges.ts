@@ -67,8 +67,9 @@ function drawGauge(
 
 /** "fb 1151 of 900 psi, D+L" below the bar, and at its end the l/h to which this check alone would stand. */
 function drawDemand(gauge: GaugeView, canvas: Canvas, line: GaugeLine, y: number): void {
-  const demand = safe(gauge.demand);
-  if (!write(canvas, line.bar, y, demand, line.changeEnd - line.bar + 1, 'quiet')) return;
+  const room = line.changeEnd - line.bar + 1;
+  const demand = [gauge.demand, gauge.brief ?? ''].map(safe).find((text) => text.length <= room) ?? '';
+  if (!write(canvas, line.bar, y, demand, room, 'quiet')) return;
   writeRight(canvas, line.bar + demand.length + 3, line.changeEnd, y, safe(gauge.alone), 'quiet');
 }
 

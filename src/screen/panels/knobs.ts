@@ -21,14 +21,19 @@ const LEAST_FIELD = 9;
 /** The part of a row that a value may take before it is shortened. */
 const VALUE_SHARE = 0.65;
 /** Rows that a fault and a hint may take below the knob in hand. */
-const FAULT_ROWS = 4;
+const FAULT_ROWS = 6;
 const HINT_ROWS = 2;
 
 /**
  * The knobs, one a row, under a heading. Where there are more than rows, the list scrolls so that the one
  * in hand is seen, with what is wrong with it, or how to type it, right below.
  */
-export function drawKnobs(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): EntryPlace | null {
+export function drawKnobs(
+  view: Pick<View, 'knobs' | 'knob' | 'entry'>,
+  canvas: Canvas,
+  region: Region,
+  glyphs: Glyphs,
+): EntryPlace | null {
   rule(canvas, region, glyphs);
   heading(canvas, region, region.x + 4, 'knobs');
   const rows = region.rows - 1;

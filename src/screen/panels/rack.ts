@@ -1,5 +1,5 @@
 import type { Canvas, Style } from '../draw/canvas.ts';
-import { cells, shorten } from '../draw/cells.ts';
+import { cells, clip, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { RackRowView, RackView, View } from '../view.ts';
 import { PASS, showRatio } from './figures.ts';
@@ -9,8 +9,15 @@ import { heading, type Region, rule, write, writeRight } from './region.ts';
 const MARGIN = 4;
 const LABEL_LEAST = 9;
 const LABEL_MOST = 22;
+/** With the wood behind it: what leaves room for what stops a size on 80 columns. */
+const NAMED_MOST = 20;
+/** Longest name of a wood, and the blank before it. */
+const WOOD_MOST = 14;
+const GAP = 1;
 const WEIGHT = 5;
 const STOPS = 11;
+/** Beside a column of woods: "stopped by" and no blank more. */
+const STOPS_MIXED = 10;
 const STOPS_LEAST = 8;
 const STOPS_MOST = 24;
 const REACH = 10;
@@ -20,6 +27,8 @@ const NAMES = ['shear', 'bend', 'defl'] as const;
 
 interface Columns {
   readonly label: number;
+  /** 0 where the wood has no column of its own: then a label names it where it must. */
+  readonly wood: number;
   /** Cells of one ratio: 7 with its name above, less with its power only. */
   readonly ratio: number;
   /** 0 when there is no room for what stops a size. */
@@ -29,35 +38,51 @@ interface Columns {
 
 /** The cells the whole rack takes, so that a layout can give it no more. */
 export function rackColumns(rack: RackView, reach: boolean): number {
-  const { label, stops } = widths(rack);
-  return MARGIN + label + WEIGHT + 3 * 7 + 2 + stops + (reach ? REACH : 0) + 2;
+  const { label, wood, stops } = widths(rack);
+  return MARGIN + label + (wood > 0 ? wood + GAP : 0) + WEIGHT + 3 * 7 + 2 + stops + (reach ? REACH : 0) + 2;
 }
 
 /** Cells that labels and what stops them want: of all sizes, so that scrolling moves no column. */
-function widths(rack: RackView): { label: number; stops: number } {
+function widths(rack: RackView): { label: number; named: number; wood: number; stops: number } {
   let label = LABEL_LEAST;
+  let named = LABEL_LEAST;
+  let wood = 0;
   let stops = STOPS;
   for (const row of rack.rows) {
     label = Math.max(label, row.label.length);
+    named = Math.max(named, (row.named ?? row.label).length);
+    wood = Math.max(wood, (row.wood ?? '').length);
     stops = Math.max(stops, row.stops.length);
   }
-  return { label: Math.min(label, LABEL_MOST), stops: Math.min(stops, STOPS_MOST) };
+  return {
+    label: Math.min(label, LABEL_MOST),
+    named: wood > 0 ? Math.min(Math.max(named, label), NAMED_MOST) : Math.min(label, LABEL_MOST),
+    wood: Math.min(wood, WOOD_MOST),
+    stops: Math.min(stops, STOPS_MOST),
+  };
 }
 
-/** The columns that fit: ratios move closer first, then reach goes, then what stops a size, then the label is shortened. */
+/**
+ * The columns that fit: ratios move closer first, then reach goes, then the woods go into the labels, then what stops
+ * a size, then the label is shortened.
+ */
 function fitColumns(rack: RackView, width: number, wantsReach: boolean): Columns {
-  const { label, stops } = widths(rack);
-  const fixed = MARGIN + label + WEIGHT;
-  for (const reach of wantsReach ? [true, false] : [false]) {
-    for (const ratio of [7, 6, 5]) {
-      const rest = width - fixed - 3 * ratio - (reach ? REACH : 0) - 2;
-      if (rest >= STOPS) return { label, ratio, stops: Math.min(rest, stops), reach };
+  const { label, named, wood, stops } = widths(rack);
+  for (const woods of wood > 0 ? [wood, 0] : [0]) {
+    const first = woods > 0 ? label + GAP + woods : named;
+    const least = wood > 0 ? STOPS_MIXED : STOPS;
+    for (const reach of wantsReach ? [true, false] : [false]) {
+      for (const ratio of [7, 6, 5]) {
+        const rest = width - MARGIN - first - WEIGHT - 3 * ratio - (reach ? REACH : 0) - 2;
+        if (rest < least) continue;
+        return { label: first, wood: woods, ratio, stops: Math.min(rest, stops), reach };
+      }
     }
   }
-  const tight = width - fixed - 3 * 5 - 2;
-  if (tight >= STOPS_LEAST) return { label, ratio: 5, stops: tight, reach: false };
-  const short = Math.min(label, width - MARGIN - WEIGHT - 3 * 5 - 1);
-  return { label: short, ratio: 5, stops: 0, reach: false };
+  const tight = width - MARGIN - named - WEIGHT - 3 * 5 - 2;
+  if (tight >= STOPS_LEAST) return { label: named, wood: 0, ratio: 5, stops: tight, reach: false };
+  const short = Math.min(named, width - MARGIN - WEIGHT - 3 * 5 - 1);
+  return { label: short, wood: 0, ratio: 5, stops: 0, reach: false };
 }
 
 /**
@@ -131,7 +156,7 @@ function drawHeading(
     put(weightEnd + (power + 1) * columns.ratio, text);
   }
   const stopsAt = weightEnd + 3 * columns.ratio + 3;
-  const stops = columns.stops < STOPS ? 'stops' : 'stopped by';
+  const stops = columns.stops < STOPS_MIXED ? 'stops' : 'stopped by';
   if (columns.stops > 0) put(stopsAt + stops.length - 1, stops);
   if (columns.reach) put(stopsAt + columns.stops + REACH - 2, 'reach');
 }
@@ -154,7 +179,11 @@ function drawRow(
   canvas.put(x, y, further, 'quiet');
   if (isCurrent) canvas.put(x + 1, y, glyphs.current, 'nowStrong');
   if (isLit) canvas.put(x + 2, y, glyphs.lightest, 'strong');
-  canvas.put(x + MARGIN, y, shorten(cells(row.label), columns.label, glyphs), style);
+  const own = columns.wood > 0 ? columns.label - GAP - columns.wood : columns.label;
+  const label = columns.wood > 0 ? row.label : (row.named ?? row.label);
+  canvas.put(x + MARGIN, y, clip(cells(label), own, glyphs), style);
+  const wood = shorten(cells(row.wood ?? ''), columns.wood, glyphs);
+  if (columns.wood > 0) canvas.put(x + MARGIN + own + GAP, y, wood, style);
 
   const weightEnd = x + MARGIN + columns.label + WEIGHT - 1;
   writeRight(canvas, x + MARGIN + columns.label, weightEnd, y, cells(row.weight), style);
@@ -166,13 +195,24 @@ function drawRow(
   }
   const stopsAt = weightEnd + 3 * columns.ratio + 3;
   if (columns.stops > 0) {
-    const stops = isLit ? 'lightest' : cells(row.stops);
-    canvas.put(stopsAt, y, shorten(stops, columns.stops, glyphs), style);
+    const stops = isLit ? 'lightest' : narrowed(cells(row.stops), columns.stops);
+    canvas.put(stopsAt, y, clip(stops, columns.stops, glyphs), style);
   }
   if (columns.reach) {
     const end = stopsAt + columns.stops + REACH - 2;
     write(canvas, end - row.reach.length + 1, y, cells(row.reach), REACH - 2, style);
   }
+}
+
+/** Words for a column too narrow for the usual ones, so that none is cut. */
+const NARROW: Readonly<Record<string, string>> = {
+  deflection: 'defl.',
+  'total defl.': 'total',
+  slenderness: 'slender',
+};
+
+function narrowed(stops: string, width: number): string {
+  return stops.length <= width ? stops : (NARROW[stops] ?? stops);
 }
 
 /** The size at hand in the accent of now, the lit one strong, those that fail dimmed. */

@@ -12,7 +12,7 @@ const LEAST_SESSION = 12;
 const WIDE = 100;
 
 /** One row: the program, the session and member at hand, the method, the place in the list, kept or not. */
-export function drawTitle(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): void {
+export function drawTitle(view: Pick<View, 'title'>, canvas: Canvas, region: Region, glyphs: Glyphs): void {
   const { title } = view;
   const y = region.y;
   const left = region.x + 1;

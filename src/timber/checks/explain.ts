@@ -1,3 +1,4 @@
+import type { Units } from '../../quantity/index.ts';
 import { beamLength, supportPlaces } from '../../statics/beam.ts';
 import { MOST_SLENDER } from '../factors/beam-stability.ts';
 import { bearingAreaReason, bearingNeeded } from '../factors/bearing-area.ts';
@@ -30,42 +31,53 @@ export function explainChecks(
   prepared: Prepared,
   wood: Wood,
   section: Section,
+  units: Units = 'us',
 ): { readonly checks: CheckResult[]; readonly passes: boolean } {
   const ratios = new Float64Array(CHECK_IDS.length);
   const groups = new Int32Array(CHECK_IDS.length);
   const passes = rate(prepared, wood, section, ratios, groups);
   const checks: CheckResult[] = [];
   ratios.forEach((ratio, id) => {
-    if (!Number.isNaN(ratio)) checks.push(explain(prepared, wood, id, ratio, groups[id]!));
+    if (!Number.isNaN(ratio)) checks.push(explain(prepared, wood, id, ratio, groups[id]!, units));
   });
   return { checks, passes };
 }
 
-/** The words of one check: what `rate` found, `g` the group that it named, the wood still at the section rated. */
-export function explain(prepared: Prepared, wood: Wood, id: number, ratio: number, g: number): CheckResult {
+/**
+ * The words of one check: what `rate` found, `g` the group that it named, the wood still at the section rated.
+ * Only the reasons for the factors are in `units`.
+ */
+export function explain(
+  prepared: Prepared,
+  wood: Wood,
+  id: number,
+  ratio: number,
+  g: number,
+  units: Units = 'us',
+): CheckResult {
   const p = heavyEnough(prepared, wood);
   if (id === SLENDERNESS) return slenderness(p, wood, ratio, g);
   const found = governingTerm(p, wood, id, g);
   const name = { id: CHECK_IDS[id]!, ratio, place: found.place, at: found.at, pattern: patternOf(p, found) };
   switch (id) {
     case SHEAR:
-      return { ...name, ...shear(p, wood, found) };
+      return { ...name, ...shear(p, wood, found, units) };
     case BENDING:
-      return { ...name, ...bending(p, wood, found, g, false) };
+      return { ...name, ...bending(p, wood, found, g, false, units) };
     case HOGGING:
-      return { ...name, ...bending(p, wood, found, g, true) };
+      return { ...name, ...bending(p, wood, found, g, true, units) };
     case LIVE:
-      return { ...name, ...deflection(p, wood, found, p.liveLimit, 'IBC Table 1604.3') };
+      return { ...name, ...deflection(p, wood, found, p.liveLimit, 'IBC Table 1604.3', units) };
     case TOTAL: {
       const clause = p.member.creep === 'Kcr' ? 'NDS 3.5.2, IBC Table 1604.3' : 'IBC Table 1604.3 note';
-      return { ...name, ...deflection(p, wood, found, p.totalLimit, clause) };
+      return { ...name, ...deflection(p, wood, found, p.totalLimit, clause, units) };
     }
     case BEARING:
-      return { ...name, ...bearing(p, wood, found) };
+      return { ...name, ...bearing(p, wood, found, units) };
     case UPLIFT:
       return { ...name, ...uplift(p, found) };
     case NOTCH:
-      return { ...name, ...notch(p, wood, found, p.notch[g]!) };
+      return { ...name, ...notch(p, wood, found, p.notch[g]!, units) };
     default:
       throw new Error(`no check ${id}`);
   }
@@ -84,7 +96,7 @@ function strengthOf(p: Prepared, { term }: Governing) {
   return p.effects.combinations[term.combination]!;
 }
 
-function shear(p: Prepared, wood: Wood, found: Governing): Part {
+function shear(p: Prepared, wood: Wood, found: Governing, units: Units): Part {
   const combination = strengthOf(p, found);
   return {
     demand: (1.5 * found.demand) / wood.at.area,
@@ -92,11 +104,11 @@ function shear(p: Prepared, wood: Wood, found: Governing): Part {
     unit: 'psi',
     combination: combination.label,
     clause: p.effects.shearAtDepth === null ? 'NDS 3.4.2' : 'NDS 3.4.2, 3.4.3.1',
-    factors: [durationFactor(wood, found.duration, combination), ...serviceFactorList(wood, 'Fv', 0)],
+    factors: [durationFactor(wood, found.duration, combination), ...serviceFactorList(wood, 'Fv', 0, units)],
   };
 }
 
-function bending(p: Prepared, wood: Wood, found: Governing, g: number, hogging: boolean): Part {
+function bending(p: Prepared, wood: Wood, found: Governing, g: number, hogging: boolean, units: Units): Part {
   const set = hogging ? p.hogging : p.sagging;
   const Fb = hogging ? wood.at.FbHogging : wood.at.FbSagging;
   const combination = strengthOf(p, found);
@@ -106,36 +118,47 @@ function bending(p: Prepared, wood: Wood, found: Governing, g: number, hogging: 
     unit: 'psi',
     combination: combination.label,
     clause: 'NDS 3.3',
-    factors: bendingFactors(wood, set, g, Fb, hogging, combination),
+    factors: bendingFactors(wood, set, g, Fb, hogging, combination, units),
   };
 }
 
-function deflection(p: Prepared, wood: Wood, found: Governing, limits: readonly number[], clause: string): Part {
+function deflection(
+  p: Prepared,
+  wood: Wood,
+  found: Governing,
+  limits: readonly number[],
+  clause: string,
+  units: Units,
+): Part {
   return {
     demand: found.demand / (wood.at.E * wood.at.inertia),
     capacity: limits[found.place]!,
     unit: 'in',
     combination: p.effects.deflectionCombinations[found.term.combination]!.label,
     clause,
-    factors: serviceFactorList(wood, 'E', 0),
+    factors: serviceFactorList(wood, 'E', 0, units),
   };
 }
 
-function bearing(p: Prepared, wood: Wood, found: Governing): Part {
+function bearing(p: Prepared, wood: Wood, found: Governing, units: Units): Part {
   const s = found.place;
   const { b, Fcperp } = wood.at;
   const length = p.bearingLength[s]!;
   const at = supportPlaces(p.member.beam)[s]!;
   const whole = beamLength(p.member.beam);
-  const Cb: Factor = factor(wood, 'Cb', p.Cb[s]!, bearingAreaReason(length, at, whole));
+  const typed = p.member.typedFactors?.Cb !== undefined;
+  const Cb: Factor = factor(wood, 'Cb', p.Cb[s]!, bearingAreaReason(length, at, whole, units));
   return {
     demand: found.demand / (b * length),
     capacity: Fcperp * p.Cb[s]!,
     unit: 'psi',
     combination: strengthOf(p, found).label,
     clause: 'NDS 3.10.2',
-    factors: [...serviceFactorList(wood, 'Fcperp', 0), Cb],
-    bearingNeeded: bearingNeeded(found.demand / (b * Fcperp), at, whole),
+    factors: [...serviceFactorList(wood, 'Fcperp', 0, units), Cb],
+    // A typed Cb holds whatever the length.
+    bearingNeeded: typed
+      ? found.demand / (b * Fcperp * Cb.value)
+      : bearingNeeded(found.demand / (b * Fcperp), at, whole),
   };
 }
 
@@ -150,12 +173,15 @@ function uplift(p: Prepared, found: Governing): Part {
   };
 }
 
-function notch(p: Prepared, wood: Wood, found: Governing, depth: number): Part {
+function notch(p: Prepared, wood: Wood, found: Governing, depth: number, units: Units): Part {
   const { product } = wood.conditions.stock;
   const combination = strengthOf(p, found);
   const rule = isSawn(product) ? '4.4.3' : product === 'glulam' ? '5.4.5' : '8.4.1';
   const struck = wood.rules.notchedShear;
-  const factors = [durationFactor(wood, found.duration, combination), ...serviceFactorList(wood, 'Fv', 0)];
+  const factors = [
+    durationFactor(wood, found.duration, combination),
+    ...serviceFactorList(wood, 'Fv', 0, units),
+  ];
   if (struck !== 1)
     factors.push({ symbol: 'notched', value: struck, reason: 'Fvx of a notched member, Table 5A note' });
   return {

@@ -4,7 +4,7 @@ import { beamFields } from '../../statics/beam.ts';
 import type { Member } from '../member.ts';
 
 /** Acceleration of gravity, in/s². */
-const GRAVITY = 386.1;
+export const GRAVITY = 386.1;
 /** (βl)²/2π of the first mode: simple span π²/2π, cantilever 1.8751²/2π. */
 const MODE = { span: Math.PI / 2, overhang: 1.875104 ** 2 / (2 * Math.PI) } as const;
 
@@ -13,6 +13,17 @@ const MODE = { span: Math.PI / 2, overhang: 1.875104 ** 2 / (2 * Math.PI) } as c
  * Line and point loads count as spread over the span. Null where there is no dead load. Advice, not code.
  */
 export function firstFrequency(member: Member, w: number, EI: number): number | null {
+  const parts = frequencyParts(member, w);
+  if (parts === null) return null;
+  const { mode, dead, length } = parts;
+  return mode * Math.sqrt((EI * GRAVITY) / (dead * length ** 4));
+}
+
+/** What it comes from: the number of the mode, dead load, lb/in, and length, in, of the longest span. */
+export function frequencyParts(
+  member: Member,
+  w: number,
+): { readonly mode: number; readonly dead: number; readonly length: number } | null {
   const fields = beamFields(member.beam);
   const spans = fields.some(({ kind }) => kind === 'span')
     ? fields.filter(({ kind }) => kind === 'span')
@@ -28,8 +39,7 @@ export function firstFrequency(member: Member, w: number, EI: number): number | 
   }
   const dead = areaToLine(member, 'dead') + typed / longest.length + (member.selfWeight ? w : 0);
   if (dead <= 0) return null;
-  const length = slopedLength(member.slope, longest.length);
-  return MODE[longest.kind] * Math.sqrt((EI * GRAVITY) / (dead * length ** 4));
+  return { mode: MODE[longest.kind], dead, length: slopedLength(member.slope, longest.length) };
 }
 
 /** The part of a linearly varying load, lb, between two places. */

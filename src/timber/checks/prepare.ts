@@ -1,4 +1,11 @@
-import { compileEffects, type Effects, isSelfSimilar, type Loading, scaleEffects, slopedLength } from '../../loads/index.ts';
+import {
+  compileEffects,
+  type Effects,
+  isSelfSimilar,
+  type Loading,
+  scaleEffects,
+  slopedLength,
+} from '../../loads/index.ts';
 import { type Beam, beamFields, beamLength, type Field, supportPlaces } from '../../statics/beam.ts';
 import { bearingArea } from '../factors/bearing-area.ts';
 import type { Bracing, Member } from '../member.ts';
@@ -44,12 +51,26 @@ export interface PrepareOptions {
 }
 
 /** A wet 10 3/4 x 48 in glulam of Southern Pine weighs 11.6 lb/in: the heaviest on the racks, rounded up. */
-const HEAVIEST = 16;
+export const HEAVIEST = 16;
 
-/** Searches combinations and patterns of a member once, for all sizes of section. */
+const KNOWN = new WeakMap<Member, Prepared>();
+
+/** Searches combinations and patterns of a member once, for all sizes of section; the same object for the same member. */
 export function prepare(member: Member, options: PrepareOptions = {}): Prepared {
   const heaviest = options.heaviest ?? HEAVIEST;
-  return withEffects(member, compileEffects(member, { heaviest, deadFactor: deadFactorOf(member) }), heaviest);
+  const known = KNOWN.get(member);
+  if (known !== undefined && known.heaviest === heaviest) return known;
+  const prepared = searched(member, heaviest);
+  KNOWN.set(member, prepared);
+  return prepared;
+}
+
+function searched(member: Member, heaviest: number): Prepared {
+  return withEffects(
+    member,
+    compileEffects(member, { heaviest, deadFactor: deadFactorOf(member) }),
+    heaviest,
+  );
 }
 
 /**
@@ -58,7 +79,9 @@ export function prepare(member: Member, options: PrepareOptions = {}): Prepared 
  */
 export function prepareScaled(prepared: Prepared, member: Member, factor: number): Prepared {
   const { heaviest, effects } = prepared;
-  return isSelfSimilar(member) ? withEffects(member, scaleEffects(effects, factor), heaviest) : prepare(member, { heaviest });
+  return isSelfSimilar(member)
+    ? withEffects(member, scaleEffects(effects, factor), heaviest)
+    : prepare(member, { heaviest });
 }
 
 /**
@@ -69,7 +92,10 @@ export function prepareScaled(prepared: Prepared, member: Member, factor: number
 export function prepareLike(prepared: Prepared, member: Member): Prepared {
   const { member: like, heaviest, effects } = prepared;
   if (deadFactorOf(member) === deadFactorOf(like) && LOADING_KEYS.every((key) => member[key] === like[key])) {
-    if (member.beam === like.beam) return withEffects(member, effects, heaviest);
+    if (member.beam === like.beam) {
+      const alike = JUDGING_KEYS.every((key) => member[key] === like[key]);
+      return alike ? prepared : withEffects(member, effects, heaviest);
+    }
     if (member.loads.length === 0 && isOneSpan(member.beam) && isOneSpan(like.beam)) {
       return prepareScaled(prepared, member, member.beam.spans[0]! / like.beam.spans[0]!);
     }
@@ -90,13 +116,25 @@ const LOADING_KEYS = [
   'shearAt',
 ] as const satisfies readonly (keyof Loading)[];
 
+/** What capacities and limits are laid out from; the section is none of it. */
+const JUDGING_KEYS = [
+  'limits',
+  'bracing',
+  'bracingBottom',
+  'notch',
+  'tiedDown',
+  'typedFactors',
+  'stock',
+] as const satisfies readonly (keyof Member)[];
+
 /** A single span between bearings that turn freely. */
 function isOneSpan({ spans, overhangs, supports, fixed }: Beam): boolean {
   const whole = spans.length === 1 && overhangs.left === 0 && overhangs.right === 0;
   return whole && supports === 'bearings' && !fixed.left && !fixed.right;
 }
 
-function withEffects(member: Member, effects: Effects, heaviest: number): Prepared {
+/** A member prepared from demands that are searched already, up to own weights of `heaviest`, lb/in. */
+export function withEffects(member: Member, effects: Effects, heaviest: number): Prepared {
   const fields = beamFields(member.beam);
   const { typedFactors: typed, limits, notch, slope } = member;
   const lengths = fields.map((field) => slopedLength(slope, field.length));

@@ -1,4 +1,6 @@
 import type { LateralCase } from '../../loads/effects.ts';
+import type { Units } from '../../quantity/index.ts';
+import { inchesIn } from './wording.ts';
 
 /** RB above this is not allowed (NDS 3.3.3.7). */
 export const MOST_SLENDER = 50;
@@ -38,14 +40,17 @@ export function beamStability(FbStar: number, EyMin: number, RB: number): number
 }
 
 /** Why CL has its value, where the edge is not held throughout. */
-export function stabilityReason(load: LateralCase, lu: number, d: number, RB: number): string {
+export function stabilityReason(load: LateralCase, lu: number, d: number, RB: number, units: Units): string {
+  const le = effectiveLengthRule(load, lu, d);
+  return `lu ${inchesIn(lu, units, 2)}, lu/d ${round(lu / d)}, le = ${le}, RB ${round(RB)}, NDS 3.3.3`;
+}
+
+/** The row of Table 3.3.3 that gives Le: "1.63 lu + 3d". */
+export function effectiveLengthRule(load: LateralCase, lu: number, d: number): string {
   const slenderness = lu / d;
-  let le: string;
-  if (load === 'point at mid-span') le = slenderness < SHORT ? '1.80 lu' : '1.37 lu + 3d';
-  else if (slenderness < SHORT) le = '2.06 lu';
-  else if (load === 'uniform' || slenderness <= LONG) le = '1.63 lu + 3d';
-  else le = '1.84 lu';
-  return `lu ${round(lu)} in, lu/d ${round(slenderness)}, le = ${le}, RB ${round(RB)}, NDS 3.3.3`;
+  if (load === 'point at mid-span') return slenderness < SHORT ? '1.80 lu' : '1.37 lu + 3d';
+  if (slenderness < SHORT) return '2.06 lu';
+  return load === 'uniform' || slenderness <= LONG ? '1.63 lu + 3d' : '1.84 lu';
 }
 
 function round(value: number): number {

@@ -1,4 +1,6 @@
+import type { Units } from '../../quantity/index.ts';
 import { nominalDown } from '../nominal.ts';
+import { nominalIn } from './wording.ts';
 
 /** `lumber`: Supplement 4A; `timber`: 4D, beams & stringers, by grade; `none`: typed values, posts & timbers. */
 export type FlatRule = 'lumber' | 'timber' | 'none';
@@ -42,9 +44,17 @@ export function flatUseStiffness(rule: FlatRule, flat: boolean, grade: string): 
 const THREE_THICK = 2.52;
 
 /** Why Cfu has its value. */
-export function flatUseReason(rule: FlatRule, flat: boolean, thick: number, wide: number): string {
+export function flatUseReason(
+  rule: FlatRule,
+  flat: boolean,
+  thick: number,
+  wide: number,
+  units: Units,
+): string {
   if (!flat) return 'on edge, NDS 4.3.7';
   if (rule === 'none') return 'no flat-use factor here, NDS 4.3.7';
   if (rule === 'timber') return 'beams & stringers loaded on the wide face, Table 4D';
-  return `laid flat, nominal ${nominalDown(wide)} in wide, ${thick > THREE_THICK ? '4' : '2 and 3'} in thick, Table 4A`;
+  const thickness = units === 'us' ? ' in thick' : ' in nominal thick';
+  const size = nominalIn(nominalDown(wide), wide, units);
+  return `laid flat, ${size} wide, ${thick > THREE_THICK ? '4' : '2 and 3'}${thickness}, Table 4A`;
 }

@@ -1,4 +1,6 @@
+import type { Units } from '../../quantity/index.ts';
 import { nominalDown, nominalUp } from '../nominal.ts';
+import { inchesIn, nominalIn } from './wording.ts';
 
 /**
  * How CF is found. `lumber`: SS to No.3; `stud`, `light framing` (Construction, Standard) and `utility` have
@@ -8,7 +10,7 @@ import { nominalDown, nominalUp } from '../nominal.ts';
 export type SizeRule = 'lumber' | 'stud' | 'light framing' | 'utility' | 'southern pine' | 'timber' | 'none';
 
 /** Depth, in, above which timbers have a size factor, and its exponent (NDS 4.3.6.3). */
-const TIMBER_DEPTH = 12;
+export const TIMBER_DEPTH = 12;
 const TIMBER_EXPONENT = 1 / 9;
 
 /** Table 4A: CF on Fb by nominal depth; a second value where 4 in thick lumber has its own. */
@@ -45,26 +47,26 @@ export function sizeFactor(rule: SizeRule, thick: number, wide: number): number 
 }
 
 /** Why CF has its value. */
-export function sizeReason(rule: SizeRule, thick: number, wide: number): string {
+export function sizeReason(rule: SizeRule, thick: number, wide: number, units: Units): string {
   if (rule === 'none') return 'no size factor for this product, NDS 4.3.6, 5.3.6';
-  if (rule === 'light framing') return 'Construction and Standard, 4 in and less deep, Table 4A';
+  if (rule === 'light framing')
+    return `Construction and Standard, ${units === 'us' ? '4 in' : 'nominal 4 in'} and less deep, Table 4A`;
   if (rule === 'timber') {
+    const limit = inchesIn(TIMBER_DEPTH, units);
     return wide > TIMBER_DEPTH
-      ? `(12/d)^(1/9) for d ${round(wide)} in over 12 in, NDS 4.3.6.3`
-      : 'not over 12 in deep, NDS 4.3.6.3';
+      ? `(${units === 'us' ? '12' : limit}/d)^(1/9) for d ${inchesIn(wide, units)} over ${limit}, NDS 4.3.6.3`
+      : `not over ${limit} deep, NDS 4.3.6.3`;
   }
   const depth = nominalUp(wide);
-  const thickness = nominalDown(thick) >= 4 ? ', 4 in thick' : '';
+  const thickness = nominalDown(thick) >= 4 ? `, ${units === 'us' ? '4 in' : 'nominal 4 in'} thick` : '';
+  const size = `${nominalIn(depth, wide, units)} deep`;
   if (rule === 'southern pine') {
-    if (depth > 12) return `nominal ${depth} in deep${thickness}, over the 12 in row, Table 4B`;
+    if (depth > 12)
+      return `${size}${thickness}, over the ${units === 'us' ? '' : 'nominal '}12 in row, Table 4B`;
     return thickness && depth >= 8
-      ? `nominal ${depth} in deep${thickness}, Table 4B`
+      ? `${size}${thickness}, Table 4B`
       : 'the size effect is in the table, Table 4B';
   }
   const grade = rule === 'stud' ? 'Stud, ' : rule === 'utility' ? 'Utility, ' : '';
-  return `${grade}nominal ${depth} in deep${thickness}, Table 4A`;
-}
-
-function round(value: number): number {
-  return Math.round(value * 1000) / 1000;
+  return `${grade}${size}${thickness}, Table 4A`;
 }

@@ -1,3 +1,4 @@
+import type { Units } from '../../quantity/index.ts';
 import type { Member } from '../member.ts';
 import type { Property } from './wet-service.ts';
 
@@ -19,8 +20,21 @@ export function temperatureFactor(temperature: Temperature, wet: boolean, proper
 }
 
 /** Why Ct has its value. */
-export function temperatureReason(temperature: Temperature, wet: boolean): string {
+export function temperatureReason(temperature: Temperature, wet: boolean, units: Units): string {
+  const range = temperatureIn(temperature, units);
   return temperature === 'normal'
-    ? 'at most 100 F, NDS 2.3.3'
-    : `sustained ${temperature.replace('-', ' to ')}, ${wet ? 'wet' : 'dry'}, NDS Table 2.3.3`;
+    ? `${range}, NDS 2.3.3`
+    : `sustained ${range.replace('-', ' to ')}, ${wet ? 'wet' : 'dry'}, NDS Table 2.3.3`;
+}
+
+/** The ranges of NDS Table 2.3.3, and the same in whole degrees Celsius. */
+const RANGE: Readonly<Record<Temperature, Readonly<Record<Units, string>>>> = {
+  normal: { us: 'at most 100 F', si: 'at most 38 C' },
+  '100-125 F': { us: '100-125 F', si: '38-52 C' },
+  '125-150 F': { us: '125-150 F', si: '52-66 C' },
+};
+
+/** "at most 100 F", "38-52 C". */
+export function temperatureIn(temperature: Temperature, units: Units): string {
+  return RANGE[temperature][units];
 }

@@ -1,3 +1,5 @@
+import { showStress, type Units } from '../../quantity/index.ts';
+
 /** Properties that service, temperature and incising change. Emin goes with E. */
 export type Property = 'Fb' | 'Fv' | 'Fcperp' | 'E';
 
@@ -24,7 +26,13 @@ export function wetService(wet: boolean, rule: WetRule, property: Property, FbCF
 }
 
 /** Why CM has its value. */
-export function wetServiceReason(wet: boolean, rule: WetRule, property: Property, FbCF: number): string {
+export function wetServiceReason(
+  wet: boolean,
+  rule: WetRule,
+  property: Property,
+  FbCF: number,
+  units: Units,
+): string {
   const clause = rule === 'glulam' ? 'NDS 5.3.3' : 'NDS 4.3.3';
   if (!wet)
     return rule === 'glulam'
@@ -33,7 +41,8 @@ export function wetServiceReason(wet: boolean, rule: WetRule, property: Property
   if (rule === 'as typed') return 'the typed values are taken as those for wet service';
   if (rule === 'southern pine timber') return 'wet, values are tabulated wet, Table 4D';
   if (rule === 'lumber' && property === 'Fb' && FbCF <= WET_EXEMPT) {
-    return `wet, but Fb x CF ${Math.round(FbCF)} is at most 1150 psi, Table 4A`;
+    const value = units === 'us' ? String(Math.round(FbCF)) : showStress(FbCF, units);
+    return `wet, but Fb x CF ${value} is at most ${showStress(WET_EXEMPT, units)}, Table 4A`;
   }
   const table = rule === 'glulam' ? 'Table 5A' : rule === 'timber' ? 'Table 4D' : 'Table 4A';
   return `wet service, ${table}, ${clause}`;

@@ -63,6 +63,6 @@ describe('the rack', () => {
       drawRack(longNames, canvas, region, glyphs, plain),
     ).rows;
     expect(rows[0]).toBe(' LVL 2.0E typical set…  lb/ft    ¹    ²    ³  stops');
-    expect(rows[1]).toContain('(3) LVL 1-3/4x11-7/8  7.8 0.40 1.28 0.64  slender…');
+    expect(rows[1]).toContain('(3) LVL 1-3/4x11-7/8  7.8 0.40 1.28 0.64  slender');
   });
 });

@@ -1,0 +1,115 @@
+import { areaToLine, KIND_LETTER, LOAD_KINDS, type LoadKind } from '../loads/index.ts';
+import { showQuantity, showSpan, type Units } from '../quantity/index.ts';
+import { beamFields, beamLength, supportPlaces } from '../statics/index.ts';
+import { sectionWeight } from '../timber/index.ts';
+import type { Member } from '../timber/member.ts';
+
+/** A member as it is sketched: all places from 0 at its left end to 1 at its right. */
+export interface SketchView {
+  readonly loads: readonly SketchLoad[];
+  readonly supports: readonly SketchSupport[];
+  readonly fields: readonly { readonly from: number; readonly to: number; readonly label: string }[];
+}
+
+export interface SketchLoad {
+  readonly from: number;
+  /** As `from` for a point load. */
+  readonly to: number;
+  readonly type: 'line' | 'point';
+  readonly up: boolean;
+  /** Size at either end against the larger of the two, 0 to 1. */
+  readonly rise: readonly [number, number];
+  /** "D 72 + L 240 plf", "2: S 850 lb" */
+  readonly label: string;
+}
+
+export interface SketchSupport {
+  readonly at: number;
+  /** "1" */
+  readonly label: string;
+  /** Held against rotation: at which end of the member. */
+  readonly held: 'left' | 'right' | null;
+  /** "2239 lb", with uplift "-320 to 900 lb"; empty where it is not known. */
+  readonly reaction: string;
+}
+
+/** What a sketch needs of the reactions. */
+export type ReactionRange = { readonly max: number; readonly min: number };
+
+export function sketchOf(member: Member, reactions: readonly ReactionRange[], units: Units): SketchView {
+  const { beam } = member;
+  const length = beamLength(beam);
+  const last = supportPlaces(beam).length - 1;
+  const held = (support: number) => {
+    if (support === 0 && (beam.supports === 'cantilever' || beam.fixed.left)) return 'left';
+    return support === last && beam.fixed.right ? 'right' : null;
+  };
+  return {
+    loads: [...areaLoads(member, units), ...typedLoads(member, length, units)],
+    supports: supportPlaces(beam).map((at, support) => ({
+      at: at / length,
+      label: String(support + 1),
+      held: held(support),
+      reaction: reactionText(reactions[support], units),
+    })),
+    fields: beamFields(beam).map((field) => ({
+      from: field.start / length,
+      to: (field.start + field.length) / length,
+      label: showSpan(field.length, units),
+    })),
+  };
+}
+
+function reactionText(range: ReactionRange | undefined, units: Units): string {
+  if (range === undefined) return '';
+  const most = showQuantity('pointLoad', range.max, units);
+  return range.min < 0 ? `${numberOf(showQuantity('pointLoad', range.min, units))} to ${most}` : most;
+}
+
+/** Area loads and own weight as what they come to along the member: one row of all that press down, one of wind up. */
+function areaLoads(member: Member, units: Units): SketchLoad[] {
+  const own = member.selfWeight ? sectionWeight(member, member.section) : 0;
+  const lines: (readonly [string, number])[] = LOAD_KINDS.filter((kind) => kind !== 'windUp').map(
+    (kind) => [KIND_LETTER[kind], areaToLine(member, kind)] as const,
+  );
+  const down = [['own', Number.isFinite(own) ? own : 0] as const, ...lines].filter(([, line]) => line > 0);
+  const up = areaToLine(member, 'windUp');
+  const row = (label: string, isUp: boolean): SketchLoad => {
+    return { from: 0, to: 1, type: 'line', up: isUp, rise: [1, 1], label };
+  };
+  const text = down.map(([name, line]) => `${name} ${numberOf(showQuantity('lineLoad', line, units))}`);
+  return [
+    ...(down.length > 0 ? [row(`${text.join(' + ')} ${units === 'us' ? 'plf' : 'kN/m'}`, false)] : []),
+    ...(up > 0 ? [row(`${KIND_LETTER.windUp} ${showQuantity('lineLoad', up, units)}`, true)] : []),
+  ];
+}
+
+function numberOf(text: string): string {
+  return text.slice(0, text.indexOf(' '));
+}
+
+function isUp(kind: LoadKind, size: number): boolean {
+  return (kind === 'windUp') !== size < 0;
+}
+
+function typedLoads(member: Member, length: number, units: Units): SketchLoad[] {
+  return member.loads.map((load, index): SketchLoad => {
+    const name = `${index + 1}: ${KIND_LETTER[load.kind]}`;
+    if (load.type === 'point') {
+      const at = load.at / length;
+      const label = `${name} ${showQuantity('pointLoad', load.load, units)}`;
+      return { from: at, to: at, type: 'point', up: isUp(load.kind, load.load), rise: [1, 1], label };
+    }
+    const { start, end } = load;
+    const most = Math.max(Math.abs(start), Math.abs(end)) || 1;
+    const size = showQuantity('lineLoad', end, units);
+    return {
+      from: load.from / length,
+      to: load.to / length,
+      type: 'line',
+      up: isUp(load.kind, start + end),
+      rise: [Math.abs(start) / most, Math.abs(end) / most],
+      label: `${name} ${start === end ? size : `${numberOf(showQuantity('lineLoad', start, units))} to ${size}`}`,
+    };
+  });
+}

@@ -1,0 +1,32 @@
+import { describe, expect, test } from 'vitest';
+import { answerOf } from '../../src/screen/answer.ts';
+import { verdictOf } from '../../src/screen/verdict-text.ts';
+import { memberOf } from '../support/session.ts';
+
+const verdict = (part: Readonly<Record<string, unknown>>) => {
+  const member = memberOf(part);
+  return verdictOf(member, answerOf(member), 'us');
+};
+
+describe('the verdict', () => {
+  test('of a member that carries nothing asks for a load and offers no cures', () => {
+    expect(verdict({ area: {} })).toEqual({
+      passes: false,
+      reason: 'It carries nothing but itself: give it a load.',
+      cures: [],
+    });
+  });
+
+  test('of one that fails says what stops it and a size that would do', () => {
+    const { passes, reason, cures } = verdict({ spans: ['14 ft'] });
+    expect(passes).toBe(false);
+    expect(reason).toMatch(/^Bending stops it at \d+\.\d\d\.$/);
+    expect(cures[0]).toMatch(/^Lightest cure: .*, 0\.\d\d\.$/);
+  });
+
+  test('of one that passes says what is nearest its limit', () => {
+    const { passes, reason } = verdict({ spans: ['8 ft'] });
+    expect(passes).toBe(true);
+    expect(reason).toMatch(/^Everything passes; bending is nearest its limit at 0\.\d\d\.$/);
+  });
+});
