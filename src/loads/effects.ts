@@ -11,6 +11,8 @@ export interface Term {
   readonly base: number;
   readonly perWeight: number;
   readonly valueAt: ((w: number) => number) | null;
+  /** The place at own weight w, given with `valueAt`. */
+  readonly placeAt: ((w: number) => number) | null;
   /** Index into `Effects.combinations` (strength) or `Effects.deflectionCombinations`. */
   readonly combination: number;
   /** Index into `Effects.patterns`. */

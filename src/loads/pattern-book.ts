@@ -36,10 +36,11 @@ export function patternBook(parts: LoadParts): PatternBook {
   return {
     names,
     index,
-    term: ({ base, perWeight, valueAt, combination, pattern, at, place }) => ({
+    term: ({ base, perWeight, valueAt, placeAt, combination, pattern, at, place }) => ({
       base,
       perWeight,
       valueAt,
+      placeAt,
       combination,
       pattern: index(pattern),
       at,

@@ -101,14 +101,20 @@ function consider(
   const start = e.parts.grid.edges[p]!;
   const moves = Math.abs(tH - t0) > SAME_PLACE * (e.parts.grid.edges[p + 1]! - start);
   let valueAt: Term['valueAt'] = null;
+  let placeAt: Term['placeAt'] = null;
   let raised = bar.raise(v0, perWeight);
   if (moves) {
     const base = NUMBERS.slice();
     const weight = own!.slice(ownAt, ownAt + 6);
-    valueAt = (w) => {
+    const largestAt = (w: number) => {
       for (let i = 0; i < 6; i++) SUMMED[i] = base[i]! + w * scale * weight[i]!;
-      return sign * pieceValue(SUMMED, 0, order, largestPlace(SUMMED, 0, order, sign, lo, hi));
+      return largestPlace(SUMMED, 0, order, sign, lo, hi);
     };
+    valueAt = (w) => {
+      const t = largestAt(w);
+      return sign * pieceValue(SUMMED, 0, order, t);
+    };
+    placeAt = (w) => start + largestAt(w);
     const slopeH = sign * scale * pieceValue(own!, ownAt, order, tH);
     raised |= bar.raise(vH - heaviest * slopeH, slopeH);
   }
@@ -116,6 +122,7 @@ function consider(
     base: v0,
     perWeight,
     valueAt,
+    placeAt,
     combination: c,
     pattern,
     at: start + t0,

@@ -32,12 +32,13 @@ export function scaleEffects(effects: Effects, factor: number): Effects {
 
 function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup {
   const terms = group.terms.map((term): Term => {
-    const { valueAt } = term;
+    const { valueAt, placeAt } = term;
     return {
       ...term,
       base: term.base * power,
       perWeight: term.perWeight * power,
       valueAt: valueAt === null ? null : (w) => power * valueAt(w),
+      placeAt: placeAt === null ? null : (w) => factor * placeAt(w),
       at: term.at * factor,
     };
   });

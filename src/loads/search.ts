@@ -45,7 +45,17 @@ export function searchNumber(
       if (bar.covers(base, base + heaviest * perWeight)) continue;
       const pattern = worstPattern(e, c, sign, read);
       const { at, place, piece } = where;
-      const term: Found = { base, perWeight, valueAt: null, combination: c, pattern, at, place, piece };
+      const term: Found = {
+        base,
+        perWeight,
+        valueAt: null,
+        placeAt: null,
+        combination: c,
+        pattern,
+        at,
+        place,
+        piece,
+      };
       bar.owned(bar.raise(base, perWeight), term);
       found.push(term);
     }
@@ -248,6 +258,7 @@ function endTerm(e: Envelope, i: number, start: number, c: number, sign: number)
       sign * ((sign > 0 ? e.hi[c]! : e.lo[c]!).data[i]! + (e.dead ? e.deadScale[c]! * e.dead.data[i]! : 0)),
     perWeight: e.parts.own ? sign * e.deadScale[c]! * e.parts.own.data[i]! : 0,
     valueAt: null,
+    placeAt: null,
     combination: c,
     pattern: worstPattern(e, c, sign, (states) => states.data[i]!),
     at: e.parts.grid.edges[atStart ? piece : piece + 1]!,

@@ -98,6 +98,7 @@ function shearUnder(e: Envelope, c: number, sign: number, side: Side, at: number
     base: sign * numberUnder(e, c, pattern, read),
     perWeight: sign * e.deadScale[c]! * own,
     valueAt: null,
+    placeAt: null,
     combination: c,
     pattern,
     at,

@@ -25,7 +25,8 @@ export function governingTerm(prepared: Prepared, wood: Wood, id: number, g: num
   }
   const set = setOf(p, id);
   const term = set.groups[g]!.terms[worstTerm(set, g, w)]!;
-  return { demand: groupDemand(set, g, w), duration: set.duration[g]!, term, place: term.place, at: term.at };
+  const at = term.placeAt === null ? term.at : term.placeAt(w);
+  return { demand: groupDemand(set, g, w), duration: set.duration[g]!, term, place: term.place, at };
 }
 
 /** The groups of a check, by its index in CHECK_IDS. */
