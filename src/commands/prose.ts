@@ -5,7 +5,7 @@ import type { Member, Stock } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
 
 /** Columns that every terminal has. */
-const LINE = 80;
+export const LINE = 80;
 
 /** First lines of an output for people: the job and the basis of design. */
 export function heading(session: Session): string[] {

@@ -1,7 +1,7 @@
 import { BEST_WORD } from '../explore/best.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { powersOf } from '../explore/powers.ts';
-import { type Rack, type RackSize, sizeName } from '../explore/rack.ts';
+import { gradeWord, type Rack, type RackSize, sizeName } from '../explore/rack.ts';
 import { type RankedRack, type RankedSize, rankedRack } from '../explore/ranked.ts';
 import { refusedWord } from '../explore/refused-word.ts';
 import {
@@ -15,11 +15,11 @@ import {
 } from '../quantity/index.ts';
 import { CHECK_WORD } from '../screen/words.ts';
 import { rankingOf } from '../session/index.ts';
-import { shortWood, standingDepth, standingWidth } from '../timber/index.ts';
+import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Member, Stock } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, notChecked, woodName, wrapped } from './prose.ts';
+import { beside, closing, given, heading, LINE, notChecked, woodName, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { type Column, table } from './table.ts';
 
@@ -114,7 +114,7 @@ export function sizeColumns(rack: Rack, units: Units): Column[] {
 export function sizeCells(rack: Rack, each: RackSize, lit: boolean, units: Units): string[] {
   return [
     `${lit ? '*' : ' '} ${each.size.label}`,
-    ...(rack.woods.length > 1 ? [harmless(shortWood(each.size.stock))] : []),
+    ...(rack.woods.length > 1 ? [harmless(gradeWord(each.size.stock))] : []),
     weightNumber(each.weight, units),
   ];
 }
@@ -141,24 +141,30 @@ function rackText(member: Member, rack: RankedRack, units: Units): string[] {
   const { sizes, lit, best } = rack;
   const priced = sizes.some((each) => each.price !== null);
   const storey = member.headroom != null;
-  const columns: Column[] = [
-    ...sizeColumns(rack, units),
-    ...RATIO_COLUMNS,
-    ...(priced ? [{ head: 'price', align: 'right' } as const] : []),
-    ...(storey ? [{ head: 'clear', align: 'right' } as const] : []),
-    { head: 'stopped by', align: 'left' },
-  ];
-  const rows = sizes.map((each, at) => {
-    const [first, ...rest] = sizeCells(rack, each, at === lit, units);
-    return [
-      at === lit ? first! : `${choiceMark(each)}${first!.slice(1)}`,
-      ...rest,
-      ...ratioCells(each),
-      ...(priced ? [each.price === null ? 'none' : moneyText(each.price)] : []),
-      ...(storey ? [each.clear === null ? '' : showSpan(each.clear, units)] : []),
-      at === lit ? BEST_WORD[best] : choiceText(each, units),
-    ];
-  });
+  const tableOf = (short: boolean) =>
+    table(
+      [
+        ...sizeColumns(rack, units),
+        ...(short ? [{ head: 'ratio', align: 'right' } as const] : RATIO_COLUMNS),
+        ...(priced ? [{ head: 'price', align: 'right' } as const] : []),
+        ...(storey ? [{ head: 'clear', align: 'right' } as const] : []),
+        { head: 'stopped by', align: 'left' },
+      ],
+      sizes.map((each, at) => {
+        const [first, ...rest] = sizeCells(rack, each, at === lit, units);
+        return [
+          at === lit ? first! : `${choiceMark(each)}${first!.slice(1)}`,
+          ...rest,
+          ...(short ? [each.refused === null ? showRatio(each.worst) : ''] : ratioCells(each)),
+          ...(priced ? [each.price === null ? 'none' : moneyText(each.price)] : []),
+          ...(storey ? [each.clear === null ? '' : showSpan(each.clear, units)] : []),
+          at === lit ? BEST_WORD[best] : choiceText(each, units),
+        ];
+      }),
+    );
+  const full = tableOf(false);
+  // Prices, heights and several woods together leave no room for each power.
+  const rows = full.every((line) => line.length <= LINE) ? full : tableOf(true);
   const word = BEST_WORD[best];
   return [
     ...beside([
@@ -166,7 +172,7 @@ function rackText(member: Member, rack: RankedRack, units: Units): string[] {
       ...rack.woods.map(woodName),
       member.beam.spans.map((span) => showSpan(span, units)).join(', '),
     ]),
-    ...table(columns, rows),
+    ...rows,
     lit < 0 ? 'no size passes' : `${word} that passes: ${sizeName(rack, sizes[lit]!.size)}`,
     ...(sizes.some((each, at) => each.nonDominated && at !== lit)
       ? wrapped('+ passes, and none that passes is as light and as shallow')

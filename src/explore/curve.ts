@@ -1,3 +1,4 @@
+import { beamFault } from '../statics/index.ts';
 import type { Member } from '../timber/member.ts';
 import type { NumberKnob } from './knob.ts';
 import { powersOf } from './powers.ts';
@@ -7,7 +8,7 @@ import { ratiosLike } from './ratios.ts';
 export interface Curve {
   readonly from: number;
   readonly to: number;
-  /** One list a power, exponents 1, 2, 3; NaN where a check does not apply. */
+  /** One list a power, exponents 1, 2, 3; NaN where a check does not apply or a load would be off the member. */
   readonly ratios: readonly [readonly number[], readonly number[], readonly number[]];
 }
 
@@ -16,8 +17,11 @@ export function curveOf(member: Member, knob: NumberKnob, from: number, to: numb
   const ratios = ratiosLike(member);
   for (let at = 0; at < samples; at += 1) {
     const value = from + ((to - from) * at) / (samples - 1);
-    const powers = powersOf(ratios(knob.put(member, value)));
-    for (const [index, power] of powers.entries()) along[index]!.push(power.ratio ?? Number.NaN);
+    const turned = knob.put(member, value);
+    // At lengths that leave a load off the member there is nothing to draw.
+    const fits = beamFault(turned.beam, turned.loads) === null;
+    const powers = fits ? powersOf(ratios(turned)) : null;
+    for (const [index, list] of along.entries()) list.push(powers?.[index]?.ratio ?? Number.NaN);
   }
   return { from, to, ratios: along };
 }

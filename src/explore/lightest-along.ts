@@ -4,7 +4,7 @@ import { BEST_WORD } from './best.ts';
 import type { Around, Neighbour } from './handovers.ts';
 import { type Rack, sizeName } from './rack.ts';
 import type { RankedRack } from './ranked.ts';
-import type { Reach } from './reach.ts';
+import type { Reaches } from './reaches.ts';
 
 /**
  * From which span to which the lit size is the best that passes, and its neighbours on either side, as a sentence;
@@ -15,27 +15,33 @@ import type { Reach } from './reach.ts';
 export function lightestAlong(
   member: Member,
   rack: RankedRack,
-  reaches: readonly (Reach | null)[],
+  reaches: Reaches,
   show: (span: number) => string,
 ): string | null {
   const lit = rack.sizes[rack.lit];
-  const reach = reaches[rack.lit];
-  if (lit === undefined || reach == null || rack.best === 'price') return null;
+  if (lit === undefined || rack.best === 'price') return null;
   if (beamFields(member.beam).length !== 1) return null;
-  const spanOf = (at: number) => (rack.sizes[at]!.inYard === false ? 0 : (reaches[at]?.span ?? 0));
+  const reach = reaches.at(rack.lit);
+  if (reach === null) return null;
+  const beyond = (at: number, span: number) =>
+    rack.sizes[at]!.inYard === false ? null : reaches.beyond(at, span);
   let from = 0;
   let below: string | null = null;
-  for (let at = 0; at < rack.lit; at += 1) {
-    if (spanOf(at) > from) {
-      from = spanOf(at);
-      below = sizeName(rack, rack.sizes[at]!.size);
-    }
+  // From the heaviest of the lighter ones, which are likely to reach the furthest; of equal reaches the lightest tells.
+  for (let at = rack.lit - 1; at >= 0; at -= 1) {
+    const further = beyond(at, from * JUST_BELOW)?.span ?? 0;
+    if (further === 0 || further < from) continue;
+    from = further;
+    below = sizeName(rack, rack.sizes[at]!.size);
   }
-  const next = rack.sizes.find((_, at) => at > rack.lit && spanOf(at) > reach.span);
+  const next = rack.sizes.find((_, at) => at > rack.lit && beyond(at, reach.span) !== null);
   const above = next === undefined ? null : sizeName(rack, next.size);
   const range = below === null ? `up to ${show(reach.span)}` : `from ${show(from)} to ${show(reach.span)}`;
   return sentence(`${sizeName(rack, lit.size)} is ${BEST_WORD[rack.best]} ${range}`, below, above ?? 'none');
 }
+
+/** So that a size of just the same reach is looked at too. */
+const JUST_BELOW = 1 - 1e-7;
 
 /** The same for any knob, from its neighbours; null where nothing is lit. `show` writes a value of the knob. */
 export function aroundText(

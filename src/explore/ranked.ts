@@ -44,6 +44,12 @@ export function rankedRack(
   return rank(member, rackOf(member, only), ranking);
 }
 
+/** The best size that passes and can be had; null where there is none. */
+export function bestOf(member: Member, ranking: Ranking): Size | null {
+  const { sizes, lit } = rankedRack(member, ranking);
+  return sizes[lit]?.size ?? null;
+}
+
 /** The same of a rack that has been rated. */
 export function rank(member: Member, rack: Rack, ranking: Ranking): RankedRack {
   const { best, shop } = ranking;

@@ -22,17 +22,20 @@ const LENGTHS_TRIED = 25;
 /** The answer is within this share of the true length, on the safe side. */
 const CLOSE = 1e-9;
 
+/** The reach of a section, of the finder's wood or another. */
+export interface ReachFinder {
+  (section: Section, of?: Wood): Reach;
+  /** Whether the section passes at one longest span, in: where it does not, its reach is shorter. */
+  passes(section: Section, span: number, of?: Wood): boolean;
+}
+
 /**
  * Finds reaches of sections under the loads of one member. All spans, overhangs and load positions move by
  * one factor; bearings and typed unbraced lengths keep their size. Lengths already looked at are kept, so
  * that asking for a whole rack prepares each of them once. Sections of another wood may be asked for too, where it
  * takes the same part of dead load in the total deflection.
  */
-export function reachFinder(
-  member: Member,
-  wood: Wood,
-  only: readonly CheckId[] | null = null,
-): (section: Section, of?: Wood) => Reach {
+export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[] | null = null): ReachFinder {
   const longest = Math.max(...member.beam.spans);
   const here = prepare(member);
   const preparedAt = new Map<number, ReturnType<typeof prepare>>();
@@ -47,7 +50,7 @@ export function reachFinder(
     rate(prepared, asked, section, ratios);
     return judge(ratios, only);
   };
-  return (section, of = wood) => {
+  const find = (section: Section, of: Wood = wood): Reach => {
     if (followsLaws(here, member, of)) {
       rate(here, of, section, ratios);
       const { factor, stops } = lengthByLaw(ratios, only);
@@ -69,6 +72,11 @@ export function reachFinder(
     }
     return { span: REACH_TO, stops: null };
   };
+  const passes = (section: Section, span: number, of: Wood = wood): boolean => {
+    asked = of;
+    return worstAt(section, span).passes;
+  };
+  return Object.assign(find, { passes });
 
   /** Between a length that passes and one that fails: the ratio is nearly a power law, so its logarithm is a line. */
   function narrowed(

@@ -37,7 +37,7 @@ const BEARING: Knob = {
   ...all,
   show: ({ bearing }, units) => {
     const [least, most] = [Math.min(...bearing), Math.max(...bearing)];
-    return least === most ? showInches(least, units) : `${showInches(least, units)} up`;
+    return least === most ? showInches(least, units) : 'by support';
   },
   enter(member, text, units) {
     const list = text

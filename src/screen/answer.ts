@@ -6,8 +6,7 @@ import { type Judgement, judge } from '../explore/judge.ts';
 import { OTHER_CHECKS, type PowerRatio, powersOf, standsTo } from '../explore/powers.ts';
 import { type RankedRack, rankedRack } from '../explore/ranked.ts';
 import { ratiosOf } from '../explore/ratios.ts';
-import type { Reach } from '../explore/reach.ts';
-import { reachesOf } from '../explore/reaches.ts';
+import { lazyReaches, type Reaches } from '../explore/reaches.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
 import { reportMember } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
@@ -29,7 +28,7 @@ export interface Answer extends Judgement {
   readonly cures: readonly Cure[];
   readonly exponents: Partial<Record<CheckId, Exponents>>;
   /** Reach of each size of the rack, in its order; null where the size is refused. */
-  readonly reaches: readonly (Reach | null)[];
+  readonly reaches: Reaches;
 }
 
 const KNOWN = new WeakMap<Ranking, WeakMap<Member, Answer>>();
@@ -115,6 +114,6 @@ class LazyAnswer implements Answer {
   }
 
   get reaches(): Answer['reaches'] {
-    return keep(this, 'reaches', reachesOf(this.#member, this.rack));
+    return keep(this, 'reaches', lazyReaches(this.#member, this.rack));
   }
 }

@@ -172,7 +172,8 @@ function plotOf(
 
 /** A combination without load patterns has no band of its own: the envelope of all stands behind it. */
 function bandOf(curve: Curve, all: Curve): Curve {
-  return curve.whole !== null && curve.whole.every((value, at) => value === curve.max[at]) ? all : curve;
+  const { whole, max, min } = curve;
+  return whole?.every((value, at) => value === max[at] && value === min[at]) ? all : curve;
 }
 
 function linesOf(curve: Curve, band: Curve, down: boolean): PlotLines {

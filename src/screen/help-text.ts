@@ -1,4 +1,6 @@
-import { BINDINGS, DIAGRAM_BINDINGS, WOOD_BINDINGS, WORDS } from './keys.ts';
+import { DIAGRAM_BINDINGS } from './diagram-keys.ts';
+import { BINDINGS, WORDS } from './keys.ts';
+import { WOOD_BINDINGS } from './wood-keys.ts';
 
 export interface HelpSection {
   readonly title: string;

@@ -1,4 +1,4 @@
-import { areaToLine, KIND_LETTER, LOAD_KINDS, type LoadKind } from '../loads/index.ts';
+import { type AppliedLoad, areaToLine, KIND_LETTER, LOAD_KINDS, type LoadKind } from '../loads/index.ts';
 import { showQuantity, showSpan, type Units } from '../quantity/index.ts';
 import { beamFields, beamLength, supportPlaces } from '../statics/index.ts';
 import { sectionWeight } from '../timber/index.ts';
@@ -92,24 +92,44 @@ function isUp(kind: LoadKind, size: number): boolean {
   return (kind === 'windUp') !== size < 0;
 }
 
+/** Typed loads; point loads that stand at one place and push one way share an arrow: "1: D 700 + 2: S 1500 lb". */
 function typedLoads(member: Member, length: number, units: Units): SketchLoad[] {
-  return member.loads.map((load, index): SketchLoad => {
+  const list: SketchLoad[] = [];
+  const arrows = new Map<string, { readonly at: number; readonly up: boolean; readonly parts: string[] }>();
+  for (const [index, load] of member.loads.entries()) {
     const name = `${index + 1}: ${KIND_LETTER[load.kind]}`;
-    if (load.type === 'point') {
-      const at = load.at / length;
-      const label = `${name} ${showQuantity('pointLoad', load.load, units)}`;
-      return { from: at, to: at, type: 'point', up: isUp(load.kind, load.load), rise: [1, 1], label };
+    if (load.type === 'line') {
+      list.push(lineLoad(load, name, length, units));
+      continue;
     }
-    const { start, end } = load;
-    const most = Math.max(Math.abs(start), Math.abs(end)) || 1;
-    const size = showQuantity('lineLoad', end, units);
-    return {
-      from: load.from / length,
-      to: load.to / length,
-      type: 'line',
-      up: isUp(load.kind, start + end),
-      rise: [Math.abs(start) / most, Math.abs(end) / most],
-      label: `${name} ${start === end ? size : `${numberOf(showQuantity('lineLoad', start, units))} to ${size}`}`,
-    };
-  });
+    const up = isUp(load.kind, load.load);
+    const key = `${up} ${load.at}`;
+    const arrow = arrows.get(key) ?? { at: load.at / length, up, parts: [] };
+    arrow.parts.push(`${name} ${numberOf(showQuantity('pointLoad', load.load, units))}`);
+    arrows.set(key, arrow);
+  }
+  const unit = units === 'us' ? 'lb' : 'kN';
+  for (const { at, up, parts } of arrows.values()) {
+    list.push({ from: at, to: at, type: 'point', up, rise: [1, 1], label: `${parts.join(' + ')} ${unit}` });
+  }
+  return list;
+}
+
+function lineLoad(
+  load: AppliedLoad & { readonly type: 'line' },
+  name: string,
+  length: number,
+  units: Units,
+): SketchLoad {
+  const { kind, start, end } = load;
+  const most = Math.max(Math.abs(start), Math.abs(end)) || 1;
+  const size = showQuantity('lineLoad', end, units);
+  return {
+    from: load.from / length,
+    to: load.to / length,
+    type: 'line',
+    up: isUp(kind, start + end),
+    rise: [Math.abs(start) / most, Math.abs(end) / most],
+    label: `${name} ${start === end ? size : `${numberOf(showQuantity('lineLoad', start, units))} to ${size}`}`,
+  };
 }

@@ -5,6 +5,7 @@ import { lightestAlong } from '../explore/lightest-along.ts';
 import { powersOf, standsTo } from '../explore/powers.ts';
 import { gradeWord, hasSize, type Rack, type RackSize, sizeName } from '../explore/rack.ts';
 import { ratiosOf } from '../explore/ratios.ts';
+import type { Reach } from '../explore/reach.ts';
 import { refusedWord } from '../explore/refused-word.ts';
 import { fieldKey, spanToDepthOf } from '../explore/span-to-depth.ts';
 import {
@@ -217,7 +218,6 @@ function rackView(member: Member, answer: Answer, units: Units): RackView {
     rows: answer.rack.sizes.map((each, index) => {
       const [shear, bending, deflection] =
         each.refused === null ? powersOf(each.ratios).map((power) => power.ratio) : [null, null, null];
-      const reach = answer.reaches[index];
       return {
         label: each.size.label,
         ...(mixed ? woodOfRow(rack, each.size) : {}),
@@ -225,7 +225,10 @@ function rackView(member: Member, answer: Answer, units: Units): RackView {
         ratios: [shear!, bending!, deflection!] as const,
         passes: each.passes,
         stops: stopsWord(each),
-        reach: reach == null ? '' : reach.span === 0 ? 'none' : reachText(reach.span, units),
+        // Found for the rows that are drawn alone: a long rack holds many that are not.
+        get reach() {
+          return reachText(answer.reaches.at(index), units);
+        },
       };
     }),
   };
@@ -243,8 +246,10 @@ function stopsWord({ refused, passes, governing }: RackSize): string {
 }
 
 /** To the inch below, which fits a column: `15'-10"`. */
-function reachText(span: number, units: Units): string {
-  return units === 'us' ? showSpan(Math.floor(span), units) : showSpanDown(span, units);
+function reachText(reach: Reach | null, units: Units): string {
+  if (reach === null) return '';
+  if (reach.span === 0) return 'none';
+  return units === 'us' ? showSpan(Math.floor(reach.span), units) : showSpanDown(reach.span, units);
 }
 
 function cureView(member: Member, answer: Answer, cure: Cure, units: Units): CureView {
@@ -306,12 +311,12 @@ function measureText(member: Member, measure: string): string {
 const FOOT_ORDER: readonly Action[] = [
   'type',
   'take-lit',
+  'undo',
+  'save',
   'add',
   'workings',
   'diagrams',
   'wood',
-  'undo',
-  'save',
   'next-member',
   'leave',
   'help',

@@ -18,9 +18,9 @@ import { type Member, PRODUCTS, type Section, type Stock } from '../timber/membe
 import type { CheckResult } from '../timber/report.ts';
 import { answerOf } from './answer.ts';
 import type { Style } from './draw/canvas.ts';
-import { WOOD_BINDINGS } from './keys.ts';
 import { memberOf, type State, unitsOf, type WoodMode } from './state.ts';
 import type { FootView, View } from './view.ts';
+import { WOOD_BINDINGS } from './wood-keys.ts';
 import { CHECK_WORD } from './words.ts';
 
 /** Everything one frame of the wood view shows. */

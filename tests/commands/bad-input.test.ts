@@ -189,7 +189,7 @@ describe('on the command line', () => {
   test('an unknown command is refused with the nearest one', async () => {
     const { file } = folderWith('job.json', sessionText({}));
     expectRefusal(await command('chekc', file), 'no command "chekc"; the nearest is check');
-    expectRefusal(await command('zzzzzzzz', file), 'the commands are check, rack, reach, schema');
+    expectRefusal(await command('zzzzzzzz', file), 'the commands are check, rack, reach');
     expectRefusal(await command(ESCAPE, file), '\\u{1b}[31m');
   });
 

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { curveOf } from '../../src/explore/curve.ts';
 import {
   addLoad,
   addOverhang,
@@ -277,6 +278,15 @@ describe('the knobs of a beam', () => {
     expect(slope('level')).toMatchObject({ member: { slope: 0 } });
     expect(slope('30:12')).toHaveProperty('fault');
     expect(slope('x:12')).toHaveProperty('fault');
+  });
+});
+
+describe('a curve along a span', () => {
+  it('has no value where a load would be left off the member', () => {
+    const member = memberOf({ loads: [{ ...POST, at: '12 ft' }] });
+    const span = knobsOf(member).find(({ key }) => key === 'spans.0')!.number!;
+    const { ratios } = curveOf(member, span, 10 * FOOT, 14 * FOOT, 5);
+    expect(ratios[1].map(Number.isNaN)).toEqual([true, true, false, false, false]);
   });
 });
 

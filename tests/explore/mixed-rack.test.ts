@@ -5,7 +5,7 @@ import { judge } from '../../src/explore/judge.ts';
 import { hasSize, lightestOf, rackOf, sizeName, takeSize } from '../../src/explore/rack.ts';
 import { ratiosOf } from '../../src/explore/ratios.ts';
 import { reachFinder } from '../../src/explore/reach.ts';
-import { reachesOf } from '../../src/explore/reaches.ts';
+import { lazyReaches, reachesOf } from '../../src/explore/reaches.ts';
 import { refusedWord } from '../../src/explore/refused-word.ts';
 import { readSessionWithSets } from '../../src/session/index.ts';
 import { rackSizesOf, refusal, withStock, woodOf } from '../../src/timber/index.ts';
@@ -138,6 +138,19 @@ describe('a rack of several woods', () => {
       const own = takeSize(member, size);
       const alone = refused === null ? reachFinder(own, woodOf(own))(own.section) : null;
       expect(reaches[at]).toEqual(alone);
+    }
+  });
+
+  it('tells of each size whether it reaches beyond a span, as its reach says', () => {
+    const member = memberOf({ rack: [TIMBER, GLULAM, LVL], bracing: 'ends' });
+    const rack = rackOf(member);
+    const reaches = reachesOf(member, rack);
+    const lazy = lazyReaches(member, rack);
+    for (let at = 0; at < rack.sizes.length; at += 5) {
+      const { span } = reaches[at]!;
+      for (const than of [0, span / 2, span * 0.999, span * 1.001, span * 2]) {
+        expect(lazy.beyond(at, than)).toEqual(span > than ? reaches[at] : null);
+      }
     }
   });
 

@@ -75,7 +75,9 @@ describe('keeping', () => {
     const screen = await session.settle();
     expect(screen.join('\n')).toMatch(/► span +15'-3"/);
     expect(screen[0]).toMatch(/not kept$/);
-    session.press('q', 's');
+    session.press('q');
+    await session.until('Not everything is kept');
+    session.press('s');
     await session.until(/not kept: the folder/);
     mkdirSync(dirname(file));
     session.press('s');

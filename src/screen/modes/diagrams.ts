@@ -2,10 +2,10 @@ import type { CurvesOf } from '../../loads/index.ts';
 import { beamLength } from '../../statics/index.ts';
 import { answerOf } from '../answer.ts';
 import { isTooSmall } from '../arrange.ts';
+import { diagramActionOf } from '../diagram-keys.ts';
 import { basisOf, diagramsOf, placesAlong, placesOfNote } from '../diagram-model.ts';
 import { beamCells, diagramsView } from '../diagrams-view.ts';
 import { DOTS_ACROSS } from '../draw/braille.ts';
-import { diagramActionOf } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
 import { drawDiagrams } from '../panels/diagrams.ts';
 import { EXPLORE, memberOf, type State, still, unitsOf, withSession } from '../state.ts';
@@ -36,7 +36,13 @@ export function openDiagrams(state: State): State {
   const member = memberOf(state);
   const { report } = answerOf(member);
   const worst = report.checks.find((check) => check.id === report.governing);
-  const at = worst?.at ?? beamLength(member.beam) / 2;
+  const wanted = worst?.at ?? beamLength(member.beam) / 2;
+  // A check's place is where its own term is largest: the extreme of the curve itself lies a hair beside it.
+  const stops = stopsOf(state, 'envelope');
+  const near = stops.reduce((best, stop) =>
+    Math.abs(stop - wanted) < Math.abs(best - wanted) ? stop : best,
+  );
+  const at = Math.abs(near - wanted) <= SNAP ? near : wanted;
   return { ...state, mode: { name: 'diagrams', at, which: 'envelope' }, notice: null };
 }
 
@@ -90,13 +96,21 @@ const HAIR = 1e-6;
 
 /** To the next place worth reading: an end, a support, where a load stands or a curve is largest. */
 function toPlace(state: State, mode: Diagrams, direction: 1 | -1): Diagrams {
-  const member = memberOf(state);
-  const places = placesAlong(member, beamCells(state.columns) * DOTS_ACROSS);
-  const stops = placesOfNote(member, mode.which, diagramsOf(member, mode.which, places));
+  const stops = stopsOf(state, mode.which);
   const ahead = stops.filter((at) => (direction > 0 ? at > mode.at + NEXT : at < mode.at - NEXT));
   const at = direction > 0 ? ahead[0] : ahead.at(-1);
   return at === undefined ? mode : { ...mode, at };
 }
+
+/** Places worth reading on the member in hand, ascending, in. */
+function stopsOf(state: State, which: CurvesOf): number[] {
+  const member = memberOf(state);
+  const places = placesAlong(member, beamCells(state.columns) * DOTS_ACROSS);
+  return placesOfNote(member, which, diagramsOf(member, which, places));
+}
+
+/** The cursor begins on a place of note that is nearer than this, in. */
+const SNAP = 3;
 
 /** A place nearer than this is where the cursor stands already, in. */
 const NEXT = 1 / 32;

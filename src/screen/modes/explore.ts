@@ -1,6 +1,8 @@
 import { removeAt } from '../../explore/edit-beam.ts';
 import type { Step as NudgeSize } from '../../explore/knob.ts';
-import { lightestOf, takeSize } from '../../explore/rack.ts';
+import { takeSize } from '../../explore/rack.ts';
+import { bestOf } from '../../explore/ranked.ts';
+import { rankingOf } from '../../session/index.ts';
 import { editOf, inserted } from '../edit.ts';
 import { type Action, actionOf, startsEntry } from '../keys.ts';
 import { drawExplorer } from '../layout.ts';
@@ -142,7 +144,7 @@ function remove(state: State): State {
 
 function takeLit(state: State): State {
   const member = memberOf(state);
-  const lit = lightestOf(member);
+  const lit = bestOf(member, rankingOf(state.session));
   if (lit === null)
     return refused(state, 'no size of this wood passes: try another grade, a shorter span or less load');
   return { ...withMember(state, takeSize(member, lit)), ghost: { knob: 'rack', member } };

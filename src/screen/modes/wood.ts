@@ -5,10 +5,10 @@ import { woodKnobs } from '../../explore/wood-knobs.ts';
 import { checkStock } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { edited, editOf, inserted } from '../edit.ts';
-import { type WoodAction, woodActionOf } from '../keys.ts';
 import { drawWood, lastWoodScroll } from '../panels/wood.ts';
 import { EXPLORE, memberOf, type State, still, unitsOf, type WoodMode, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
+import { type WoodAction, woodActionOf } from '../wood-keys.ts';
 import { woodViewOf } from '../wood-view.ts';
 import { isCancel, type ModeRules } from './mode.ts';
 

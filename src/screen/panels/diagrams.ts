@@ -6,13 +6,15 @@ import type { TitleView } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { drawPlot } from './plot.ts';
 import { heading, type Region, rule } from './region.ts';
-import { columnAt, drawSketch, sketchRows, WITH_REACTIONS } from './sketch.ts';
+import { columnAt, drawSketch, sketchRows } from './sketch.ts';
 import { drawTitle } from './title.ts';
 
 /** Rows that are neither sketch nor diagrams: title, rule, the cursor's place, foot. */
 const AROUND = 4;
-/** The most rows of the sketch on a low screen and on a tall one. */
-const SKETCH = { low: 5, high: 10 } as const;
+/** The most rows of the sketch: on the lowest screens, on a usual one, on a tall one. */
+const SKETCH = { low: 5, usual: 7, high: 10 } as const;
+/** Rows of a usual screen. */
+const USUAL = 24;
 /** From this many rows a blank row parts the diagrams, and the reactions are shown. */
 const PARTED = 30;
 const PLOTS = 3;
@@ -28,12 +30,13 @@ export function drawDiagrams(title: TitleView, view: DiagramsView, canvas: Canva
   const parted = rows >= PARTED ? 1 : 0;
   const free = rows - AROUND;
   const across = { x: GUTTER, columns: columns - GUTTER - 1 };
-  const most = rows >= PARTED ? SKETCH.high : SKETCH.low;
-  const needed = sketchRows(view.sketch, across.columns, most, glyphs);
+  const reactions = rows >= PARTED;
+  const most = reactions ? SKETCH.high : rows >= USUAL ? SKETCH.usual : SKETCH.low;
+  const needed = sketchRows(view.sketch, across.columns, most, reactions, glyphs);
   const each = Math.floor((free - needed) / PLOTS);
   // What the diagrams cannot share evenly stands above the loads.
   const sketch = free - each * PLOTS;
-  drawSketchBeside(view, canvas, { ...across, y: 2, rows: sketch }, most >= WITH_REACTIONS, glyphs);
+  drawSketchBeside(view, canvas, { ...across, y: 2, rows: sketch }, reactions, glyphs);
   for (const [index, plot] of view.plots.entries()) {
     const region = { y: 2 + sketch + index * each + parted, rows: each - parted };
     const gutter = { ...region, x: 1, columns: GUTTER - 2 };

@@ -6,7 +6,7 @@ import { isFree, type Region } from './region.ts';
 
 /** Rows below the loads: the beam, its supports with the lengths. */
 const BEAM_ROWS = 2;
-/** From this many rows to be had the reactions have a row of their own. */
+/** From this many rows there is one for the reactions. */
 export const WITH_REACTIONS = 7;
 /** Cells of a line load that its label leaves to the arrows. */
 const LEAST_ARROWS = 6;
@@ -19,11 +19,17 @@ export function columnAt(place: number, region: Region): number {
 }
 
 /** The rows that a sketch needs for every load with its label, `most` at the utmost. */
-export function sketchRows(sketch: SketchView, columns: number, most: number, glyphs: Glyphs): number {
-  const withReactions = most >= WITH_REACTIONS ? 1 : 0;
-  const least = BEAM_ROWS + withReactions + 1;
+export function sketchRows(
+  sketch: SketchView,
+  columns: number,
+  most: number,
+  withReactions: boolean,
+  glyphs: Glyphs,
+): number {
+  const below = BEAM_ROWS + (withReactions ? 1 : 0);
+  const least = below + 1;
   for (let rows = least; rows < most; rows += 1) {
-    const region = { x: 0, y: 0, columns, rows: rows - BEAM_ROWS - withReactions };
+    const region = { x: 0, y: 0, columns, rows: rows - below };
     const tried = drawLoads(sketch.loads, new Canvas(columns, rows), region, glyphs);
     if (tried.hidden === 0 && tried.unnamed === 0) return rows;
   }
