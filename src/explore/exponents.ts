@@ -1,3 +1,4 @@
+import { prepareLoaded, prepareScaled } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
 import { ratiosLike } from './ratios.ts';
@@ -31,14 +32,21 @@ const STEP_APART = 0.05;
 /** Local exponents of every check that applies. */
 export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>> {
   const ratios = ratiosLike(member);
+  const here = ratios(member);
   const grown = (key: 'width' | 'depth') => (by: number) =>
     ratios({ ...member, section: { ...member.section, [key]: member.section[key] * by } });
   const upright = !member.section.flat;
   const slopes = {
-    span: slopesOf((by) => ratios(scaleLengths(member, by))),
-    depth: slopesOf(grown(upright ? 'depth' : 'width')),
-    width: slopesOf(grown(upright ? 'width' : 'depth')),
-    load: slopesOf((by) => ratios(scaleLoads(member, by))),
+    span: slopesOf(here, (by) => {
+      const scaled = scaleLengths(member, by);
+      return ratios(scaled, (prepared) => prepareScaled(prepared, scaled, by));
+    }),
+    depth: slopesOf(here, grown(upright ? 'depth' : 'width')),
+    width: slopesOf(here, grown(upright ? 'width' : 'depth')),
+    load: slopesOf(here, (by) => {
+      const scaled = scaleLoads(member, by);
+      return ratios(scaled, (prepared) => prepareLoaded(prepared, scaled, by));
+    }),
   };
   const exponents: Partial<Record<CheckId, Exponents>> = {};
   CHECK_IDS.forEach((id, at) => {
@@ -54,9 +62,8 @@ export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>>
 }
 
 /** Slopes on logarithmic axes; where a factor steps the slope of the side that does not step. */
-function slopesOf(at: (factor: number) => Float64Array): number[] {
+function slopesOf(here: Float64Array, at: (factor: number) => Float64Array): number[] {
   const below = at(1 - STEP);
-  const here = at(1);
   const above = at(1 + STEP);
   return Array.from(here, (ratio, index) => {
     const left = Math.log(ratio / below[index]!) / -Math.log1p(-STEP);

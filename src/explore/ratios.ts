@@ -9,14 +9,16 @@ export function ratiosOf(member: Member): Float64Array {
 
 /**
  * The same for members that are like this one (another section, load or span): what need not be worked out again
- * for them is kept.
+ * for them is kept. `how` prepares the like member where the caller knows better.
  */
-export function ratiosLike(member: Member): (like: Member) => Float64Array {
+export function ratiosLike(
+  member: Member,
+): (like: Member, how?: (prepared: Prepared) => Prepared) => Float64Array {
   const prepared: Prepared = prepare(member);
   const wood: Wood = woodOf(member);
-  return (like) => {
+  return (like, how) => {
     const ratios = new Float64Array(CHECK_IDS.length);
-    const own = like === member ? prepared : prepareLike(prepared, like);
+    const own = like === member ? prepared : how === undefined ? prepareLike(prepared, like) : how(prepared);
     rate(own, sameWood(member, like) ? wood : woodOf(like), like.section, ratios);
     return ratios;
   };

@@ -7,6 +7,6 @@ export type { Effects, LateralCase, ShearAtDepth, Term, TermGroup } from './effe
 export { KIND_LETTER, KIND_WORD, LOAD_DURATION, LOAD_KINDS, type LoadKind } from './kinds.ts';
 export type { AppliedLoad, CombinationSet, LiveReduction, Loading } from './loading.ts';
 export { liveReductionFactor } from './reduction.ts';
-export { isSelfSimilar, scaleEffects } from './scale-effects.ts';
+export { isSelfSimilar, scaleEffects, scaleLoadEffects } from './scale-effects.ts';
 export { slopedLength, slopeStretch } from './slope.ts';
 export { termValue } from './term-value.ts';

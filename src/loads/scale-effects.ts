@@ -44,3 +44,44 @@ function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup 
   });
   return { ...group, zeroMomentLength: group.zeroMomentLength * factor, terms };
 }
+
+/**
+ * The effects of the same loading with every load multiplied by `factor` and own weight as it was: a demand goes with
+ * loads and own weight together, so it is the factor times that of the loading as it is under an own weight of w over
+ * the factor.
+ */
+export function scaleLoadEffects(effects: Effects, factor: number): Effects {
+  const groups = (from: readonly TermGroup[]) =>
+    from.map((group): TermGroup => ({ ...group, terms: group.terms.map((term) => scaleLoad(term, factor)) }));
+  const { shearAtDepth } = effects;
+  return {
+    ...effects,
+    shear: groups(effects.shear),
+    endShear: groups(effects.endShear),
+    sagging: groups(effects.sagging),
+    hogging: groups(effects.hogging),
+    bearing: groups(effects.bearing),
+    uplift: groups(effects.uplift),
+    deflectionLive: groups(effects.deflectionLive),
+    deflectionTotal: groups(effects.deflectionTotal),
+    shearAtDepth:
+      shearAtDepth === null
+        ? null
+        : (depth, w) =>
+            shearAtDepth(depth, w / factor).map((found) => ({
+              ...found,
+              value: found.value * factor,
+              term: scaleLoad(found.term, factor),
+            })),
+  };
+}
+
+function scaleLoad(term: Term, factor: number): Term {
+  const { valueAt, placeAt } = term;
+  return {
+    ...term,
+    base: term.base * factor,
+    valueAt: valueAt === null ? null : (w) => factor * valueAt(w / factor),
+    placeAt: placeAt === null ? null : (w) => placeAt(w / factor),
+  };
+}

@@ -11,6 +11,7 @@ export {
   type PrepareOptions,
   prepare,
   prepareLike,
+  prepareLoaded,
   prepareScaled,
 } from './checks/prepare.ts';
 export { rate } from './checks/rate.ts';

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { scaleLengths } from '../../src/explore/scale.ts';
-import { prepare, prepareLike, prepareScaled, rate, woodOf } from '../../src/timber/index.ts';
+import { scaleLengths, scaleLoads } from '../../src/explore/scale.ts';
+import { prepare, prepareLike, prepareLoaded, prepareScaled, rate, woodOf } from '../../src/timber/index.ts';
 import type { Member } from '../../src/timber/member.ts';
 import { CHECK_IDS } from '../../src/timber/report.ts';
 import { member as arbitraryMember } from '../session/arbitrary-member.ts';
@@ -27,6 +27,19 @@ describe('preparing from what is known', () => {
         const scaled = scaleLengths(member, factor);
         close(
           ratios(prepareScaled(prepare(member), scaled, factor), scaled),
+          ratios(prepare(scaled), scaled),
+        );
+      }),
+      { numRuns: 60 },
+    );
+  });
+
+  it('gives the ratios of preparing anew for a member with all its loads scaled', () => {
+    fc.assert(
+      fc.property(arbitraryMember, fc.double({ min: 0.5, max: 2, noNaN: true }), (member, factor) => {
+        const scaled = scaleLoads(member, factor);
+        close(
+          ratios(prepareLoaded(prepare(member), scaled, factor), scaled),
           ratios(prepare(scaled), scaled),
         );
       }),

@@ -4,6 +4,7 @@ import {
   isSelfSimilar,
   type Loading,
   scaleEffects,
+  scaleLoadEffects,
   slopedLength,
 } from '../../loads/index.ts';
 import { type Beam, beamFields, beamLength, type Field, supportPlaces } from '../../statics/beam.ts';
@@ -84,6 +85,11 @@ export function prepareScaled(prepared: Prepared, member: Member, factor: number
     : prepare(member, { heaviest });
 }
 
+/** The same for `member`, which is the prepared one with all its applied loads multiplied by `factor`, near 1. */
+export function prepareLoaded(prepared: Prepared, member: Member, factor: number): Prepared {
+  return withEffects(member, scaleLoadEffects(prepared.effects, factor), prepared.heaviest);
+}
+
 /**
  * The same for a member that is like the prepared one: its search is done again only where its loads, its beam or
  * the part of dead load in the total deflection differ, and not where one span alone became longer or shorter
@@ -91,7 +97,7 @@ export function prepareScaled(prepared: Prepared, member: Member, factor: number
  */
 export function prepareLike(prepared: Prepared, member: Member): Prepared {
   const { member: like, heaviest, effects } = prepared;
-  if (deadFactorOf(member) === deadFactorOf(like) && LOADING_KEYS.every((key) => member[key] === like[key])) {
+  if (deadFactorOf(member) === deadFactorOf(like) && sameLoading(member, like)) {
     if (member.beam === like.beam) {
       const alike = JUDGING_KEYS.every((key) => member[key] === like[key]);
       return alike ? prepared : withEffects(member, effects, heaviest);
@@ -107,7 +113,6 @@ export function prepareLike(prepared: Prepared, member: Member): Prepared {
 const LOADING_KEYS = [
   'tributary',
   'area',
-  'loads',
   'selfWeight',
   'combinations',
   'liveReduction',
@@ -115,6 +120,11 @@ const LOADING_KEYS = [
   'bearing',
   'shearAt',
 ] as const satisfies readonly (keyof Loading)[];
+
+function sameLoading(one: Member, other: Member): boolean {
+  const loads = one.loads === other.loads || (one.loads.length === 0 && other.loads.length === 0);
+  return loads && LOADING_KEYS.every((key) => one[key] === other[key]);
+}
 
 /** What capacities and limits are laid out from; the section is none of it. */
 const JUDGING_KEYS = [
