@@ -1,4 +1,5 @@
 import { beamFault } from '../statics/index.ts';
+import { prepareResized } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import type { NumberKnob } from './knob.ts';
 import { powersOf } from './powers.ts';
@@ -20,7 +21,7 @@ export function curveOf(member: Member, knob: NumberKnob, from: number, to: numb
     const turned = knob.put(member, value);
     // At lengths that leave a load off the member there is nothing to draw.
     const fits = beamFault(turned.beam, turned.loads) === null;
-    const powers = fits ? powersOf(ratios(turned)) : null;
+    const powers = fits ? powersOf(ratios(turned, (prepared) => prepareResized(prepared, turned))) : null;
     for (const [index, list] of along.entries()) list.push(powers?.[index]?.ratio ?? Number.NaN);
   }
   return { from, to, ratios: along };

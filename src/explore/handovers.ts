@@ -20,11 +20,11 @@ export interface HandoverOptions {
 }
 
 /** Readings spread over the range before places are closed in on. */
-const READINGS = 25;
+const READINGS = 17;
 
 /**
  * Which size is the best passing one from where to where as a knob goes from one value to another (base units,
- * from < to); places are found to a billionth. Throws RangeError where the range is empty.
+ * from < to); places are found to a ten-millionth. Throws RangeError where the range is empty.
  */
 export function handoversOf(
   member: Member,

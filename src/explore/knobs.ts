@@ -3,6 +3,7 @@ import { showInches, showQuantity, showSpan } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
 import { endKnobs, LONGEST, lengthKnobs } from './beam-knobs.ts';
 import { CONDITION_KNOBS } from './condition-knobs.ts';
+import { headroomKnobs } from './headroom-knobs.ts';
 import { type Knob, measureKnob, SCALES } from './knob.ts';
 import { limitKnobs } from './limit-knobs.ts';
 import { loadKnobs } from './load-knobs.ts';
@@ -38,6 +39,7 @@ export function knobsOf(member: Member): Knob[] {
     UNBRACED_BOTTOM,
     ...CONDITION_KNOBS,
     ...limitKnobs(member),
+    ...headroomKnobs(member),
   ];
 }
 

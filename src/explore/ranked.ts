@@ -101,7 +101,7 @@ export function measureOf(
     case 'depth':
       return of.depth;
     case 'boardFeet':
-      return 'size' in of ? of.size.boardFeet : of.boardFeet;
+      return 'boardFeet' in of ? of.boardFeet : of.size.boardFeet;
     case 'price':
       return of.price;
   }

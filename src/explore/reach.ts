@@ -50,8 +50,14 @@ export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[]
     rate(prepared, asked, section, ratios);
     return judge(ratios, only);
   };
+  const lawful = new Map<Wood, boolean>();
+  const byLaw = (of: Wood): boolean => {
+    const known = lawful.get(of) ?? followsLaws(here, member, of);
+    lawful.set(of, known);
+    return known;
+  };
   const find = (section: Section, of: Wood = wood): Reach => {
-    if (followsLaws(here, member, of)) {
+    if (byLaw(of)) {
       rate(here, of, section, ratios);
       const { factor, stops } = lengthByLaw(ratios, only);
       const span = factor * longest;
@@ -73,6 +79,7 @@ export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[]
     return { span: REACH_TO, stops: null };
   };
   const passes = (section: Section, span: number, of: Wood = wood): boolean => {
+    if (byLaw(of)) return find(section, of).span >= span;
     asked = of;
     return worstAt(section, span).passes;
   };

@@ -12,6 +12,7 @@ export {
   prepare,
   prepareLike,
   prepareLoaded,
+  prepareResized,
   prepareScaled,
 } from './checks/prepare.ts';
 export { rate } from './checks/rate.ts';

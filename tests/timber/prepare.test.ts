@@ -1,7 +1,15 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { scaleLengths, scaleLoads } from '../../src/explore/scale.ts';
-import { prepare, prepareLike, prepareLoaded, prepareScaled, rate, woodOf } from '../../src/timber/index.ts';
+import {
+  prepare,
+  prepareLike,
+  prepareLoaded,
+  prepareResized,
+  prepareScaled,
+  rate,
+  woodOf,
+} from '../../src/timber/index.ts';
 import type { Member } from '../../src/timber/member.ts';
 import { CHECK_IDS } from '../../src/timber/report.ts';
 import { member as arbitraryMember } from '../session/arbitrary-member.ts';
@@ -63,7 +71,8 @@ describe('preparing from what is known', () => {
     fc.assert(
       fc.property(arbitraryMember, fc.constantFrom(...changes), (member, change) => {
         const like = change(member);
-        close(ratios(prepareLike(prepare(member), like), like), ratios(prepare(like), like));
+        expect(ratios(prepareLike(prepare(member), like), like)).toEqual(ratios(prepare({ ...like }), like));
+        close(ratios(prepareResized(prepare(member), like), like), ratios(prepare({ ...like }), like));
       }),
       { numRuns: 100 },
     );

@@ -91,22 +91,29 @@ export function prepareLoaded(prepared: Prepared, member: Member, factor: number
 }
 
 /**
- * The same for a member that is like the prepared one: its search is done again only where its loads, its beam or
- * the part of dead load in the total deflection differ, and not where one span alone became longer or shorter
- * under loads that go along.
+ * The same for a member that is like the prepared one, to the last bit: the search is done again only where its
+ * loads, its beam or the part of dead load in the total deflection differ.
  */
 export function prepareLike(prepared: Prepared, member: Member): Prepared {
   const { member: like, heaviest, effects } = prepared;
-  if (deadFactorOf(member) === deadFactorOf(like) && sameLoading(member, like)) {
-    if (member.beam === like.beam) {
-      const alike = JUDGING_KEYS.every((key) => member[key] === like[key]);
-      return alike ? prepared : withEffects(member, effects, heaviest);
-    }
-    if (member.loads.length === 0 && isOneSpan(member.beam) && isOneSpan(like.beam)) {
-      return prepareScaled(prepared, member, member.beam.spans[0]! / like.beam.spans[0]!);
-    }
-  }
-  return prepare(member, { heaviest });
+  const same =
+    member.beam === like.beam && deadFactorOf(member) === deadFactorOf(like) && sameLoading(member, like);
+  if (!same) return prepare(member, { heaviest });
+  const alike = JUDGING_KEYS.every((key) => member[key] === like[key]);
+  return alike ? prepared : withEffects(member, effects, heaviest);
+}
+
+/**
+ * The same for a member whose single span alone is another, without a new search where the loads go along; the
+ * ratios are those of a new search but for rounding.
+ */
+export function prepareResized(prepared: Prepared, member: Member): Prepared {
+  const { member: like } = prepared;
+  const scaled =
+    member.loads.length === 0 && isOneSpan(member.beam) && isOneSpan(like.beam) && sameLoading(member, like);
+  return scaled && deadFactorOf(member) === deadFactorOf(like)
+    ? prepareScaled(prepared, member, member.beam.spans[0]! / like.beam.spans[0]!)
+    : prepareLike(prepared, member);
 }
 
 /** What the effects depend on beside the beam and the part of dead load that counts. */
