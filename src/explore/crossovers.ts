@@ -5,6 +5,9 @@ export interface Crossovers {
   readonly shearToDeflection: number | null;
 }
 
+/** A ratio this small is rounding: the check asks nothing of the member. */
+const NOTHING = 1e-12;
+
 /**
  * The l/h at which the power laws cross, from the ratios of shear, bending and deflection at one l/h.
  * With r1·(x/λ), r2·(x/λ)² and r3·(x/λ)³ the first two meet at λ·r1/r2, which for a uniform load on a
@@ -17,7 +20,7 @@ export function crossovers(
   deflection: number,
 ): Crossovers {
   const meet = (lower: number, upper: number, apart: number) =>
-    lower > 0 && upper > 0 && Number.isFinite(lower) && Number.isFinite(upper)
+    lower > NOTHING && upper > NOTHING && Number.isFinite(lower) && Number.isFinite(upper)
       ? spanToDepth * (lower / upper) ** (1 / apart)
       : null;
   return {
