@@ -14,7 +14,7 @@ import { sizeLabel } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, notChecked, woodName } from './prose.ts';
+import { beside, closing, given, heading, LINE, notChecked, woodName, wrapped } from './prose.ts';
 import { moneyText } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -99,14 +99,14 @@ function movesText(member: Member, { deepenOrWiden, moves, best }: Moves, units:
       member.beam.spans.map((span) => showSpan(span, units)).join(', '),
     ]),
     'deepen or widen: 10 % more wood either way, then the next stock size',
-    ...moveTable(sides, false, units).map((line) => `  ${line}`),
+    ...moveTable(sides, false, units),
     '',
     `moves, ${best === 'boardFeet' ? 'least board feet' : `least ${best}`} first`,
   ];
   if (moves.length === 0) return [...lines, '  none'];
   return [
     ...lines,
-    ...moveTable(moves, priced, units).map((line) => `  ${line}`),
+    ...moveTable(moves, priced, units),
     '',
     // Not broken into lines, so that it can be copied.
     ...moves.map((move, at) => `${at + 1}. ${move.set.map(setText).join(' ')}`),
@@ -118,33 +118,42 @@ function setText(set: string): string {
   return `--set '${set.replaceAll("'", `'\\''`)}'`;
 }
 
+/** What the table stands indented by. */
+const INDENT = '  ';
+
 function moveTable(moves: readonly Move[], priced: boolean, units: Units): string[] {
-  return table(
+  const rows = table(
     [
       { head: '', align: 'right' },
       { head: 'move', align: 'left' },
-      { head: 'to', align: 'left' },
       { head: 'ratio', align: 'right' },
       { head: weightUnit(units), align: 'right' },
       { head: 'depth', align: 'right' },
       ...(priced ? [{ head: 'price', align: 'right' } as const] : []),
-      { head: '', align: 'left' },
     ],
     moves.map((move, at) => [
       `${at + 1}.`,
       move.kind,
-      move.label,
       showRatio(move.worst),
       signed(move.change.weight, (value) => weightNumber(value, units)),
       signed(move.change.depth, (value) => showInches(value, units)),
       ...(priced ? [signed(move.change.price, moneyText)] : []),
-      move.passes ? timesText(move) : (move.refused ?? 'fails'),
     ]),
+    INDENT,
   );
+  const width = Math.max(...rows.map((row) => row.length));
+  return rows.flatMap((row, at) => {
+    const move = moves[at - 1];
+    const to = move === undefined ? 'to' : toText(move);
+    const beside = `${row.padEnd(width)}  ${to}`;
+    // What it leads to stands below where there is no room beside.
+    return beside.length <= LINE ? [beside] : [row, ...wrapped(to, `${INDENT}${INDENT}   to `)];
+  });
 }
 
-function timesText({ times }: Move): string {
-  return times > 1 ? `${times.toFixed(2)} x as many` : '';
+function toText({ label, times, passes, refused }: Move): string {
+  const to = times > 1 ? `${label}, ${times.toFixed(2)} x as many` : label;
+  return passes ? to : `${to}: ${refused ?? 'fails'}`;
 }
 
 /** What a move adds or spares: "+1.4", "-2.1", "0" where it is the same, blank where it is not known. */

@@ -1,4 +1,5 @@
 import { type Order, type OrderLine, orderOf } from '../explore/order.ts';
+import { gradeWord } from '../explore/rack.ts';
 import { harmless, showSpan, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import type { Session } from '../session/session.ts';
@@ -61,10 +62,9 @@ function orderText(order: Order, { yard }: Session, units: Units): string[] {
   const rows = order.lines.map((line) => [
     harmless(line.member, NAME),
     String(line.pieces),
-    `${line.size} ${woodName(line.stock)}`,
-    showSpan(line.needed, units),
+    harmless(`${line.size} ${gradeWord(line.stock)}`, WOOD),
     line.length === null ? 'none' : showSpan(line.length, units),
-    line.length === null ? '' : showSpan(line.waste, units),
+    line.length === null ? '' : `${((100 * line.waste) / line.length).toFixed(0)} %`,
     weightText(line.weight, units),
     line.price === null ? 'none' : moneyText(line.price),
     line.price === null ? '' : moneyText(line.price * line.pieces),
@@ -77,7 +77,6 @@ function orderText(order: Order, { yard }: Session, units: Units): string[] {
         { head: 'for', align: 'left' },
         { head: 'pcs', align: 'right' },
         { head: 'size', align: 'left' },
-        { head: 'needed', align: 'right' },
         { head: 'order', align: 'right' },
         { head: 'waste', align: 'right' },
         { head: units === 'us' ? 'lb each' : 'kg each', align: 'right' },
@@ -96,7 +95,9 @@ function orderText(order: Order, { yard }: Session, units: Units): string[] {
   ];
 }
 
+/** Widest texts that leave room for the figures. */
 const NAME = 12;
+const WOOD = 26;
 /** Exact. */
 const KG_PER_LB = 0.45359237;
 

@@ -125,7 +125,7 @@ export const SCALES = {
       normal: 0.5,
       coarse: 5,
       bare: 'in',
-      hint: `11.25, 11 1/4", 285mm`,
+      hint: `11.25, 11-1/4", 285mm`,
       stepText: '1/2"',
     },
     si: {
@@ -134,7 +134,7 @@ export const SCALES = {
       normal: 10,
       coarse: 100,
       bare: 'mm',
-      hint: `285, 285mm, 11 1/4"`,
+      hint: `285, 285mm, 11-1/4"`,
       stepText: '10 mm',
     },
   },

@@ -7,19 +7,28 @@ import type { ChartView } from './view.ts';
 /** Samples along the chart's axis; the panel draws lines between them. */
 const SAMPLES = 48;
 
-/** The three powers against the knob in hand, or against the span where that is a choice; null where nothing can be drawn. */
-export function chartView(member: Member, inHand: Knob, span: Knob, units: Units): ChartView | null {
+/**
+ * The three powers against the knob in hand, or against the span where that is a choice; its axes alone until it is
+ * `settled`; null where nothing can be drawn.
+ */
+export function chartView(
+  member: Member,
+  inHand: Knob,
+  span: Knob,
+  units: Units,
+  settled: boolean,
+): ChartView | null {
   const knob = inHand.number === null ? span : inHand;
   const number = knob.number;
   if (number === null) return null;
   const value = number.get(member);
   const { from, to } = chartRange(value, number.axisUnit(units));
   if (!(to > from)) return null;
-  const curve = curveAlong(member, knob.key, number, from, to);
+  const curve = settled ? curveAlong(member, knob.key, number, from, to) : null;
   const label = (share: number) => knob.show(number.put(member, from + (to - from) * share), units);
   return {
     title: `ratio against ${knob.label.trim()}`,
-    series: curve.ratios.map((ratios, index) => ({ power: (index + 1) as 1 | 2 | 3, ratios })),
+    series: (curve?.ratios ?? []).map((ratios, index) => ({ power: (index + 1) as 1 | 2 | 3, ratios })),
     now: (value - from) / (to - from),
     labels: [0, 0.25, 0.5, 0.75, 1].map(label),
   };

@@ -1,5 +1,5 @@
 import { useApp } from 'ink';
-import { type ReactElement, useRef, useState } from 'react';
+import { type ReactElement, useEffect, useRef, useState } from 'react';
 import type { Glyphs } from './draw/glyphs.ts';
 import { Screen } from './draw/screen.tsx';
 import type { Theme } from './draw/theme.ts';
@@ -45,6 +45,13 @@ export function Explorer({ initial, columns, rows, theme, glyphs, perform }: Exp
   useKeys({
     onKeys: (keys) => happen(keys.map((press) => ({ type: 'key', press }))),
     onPaste: (text) => happen([{ type: 'paste', text }]),
+  });
+
+  const { settled } = state.current;
+  useEffect(() => {
+    if (settled) return;
+    const rest = setTimeout(() => happen([{ type: 'settle' }]), 0);
+    return () => clearTimeout(rest);
   });
 
   // The size is told from outside, so that a resize draws once, in the new size.

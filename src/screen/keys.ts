@@ -18,6 +18,15 @@ export type Action =
   | 'previous-member'
   | 'add'
   | 'remove'
+  | 'moves'
+  | 'pin'
+  | 'headroom'
+  | 'proportions'
+  | 'scatter'
+  | 'compare'
+  | 'began'
+  | 'mark-began'
+  | 'copy'
   | 'diagrams'
   | 'wood'
   | 'units'
@@ -100,6 +109,63 @@ export const BINDINGS: readonly Binding[] = [
     action: 'take-lit',
     help: 'put the lit size, the lightest that passes, in the beam',
     foot: 'take lit',
+  },
+  {
+    keys: 'm',
+    presses: ['m'],
+    action: 'moves',
+    help: 'the moves that would help, best first, with what each does and takes; Enter applies one, u undoes it',
+    foot: 'moves',
+  },
+  { keys: 'p', presses: ['p'], action: 'pin', help: 'pin: set this design aside to compare', foot: 'pin' },
+  {
+    keys: 'c',
+    presses: ['c'],
+    action: 'compare',
+    help: 'compare the pins side by side, what differs marked: go back to one, note one, drop one',
+    foot: 'compare',
+  },
+  {
+    keys: '=',
+    presses: ['='],
+    action: 'proportions',
+    help: 'the three laws over l/h, both logarithmic: crossovers, stock depths, pins, what is usual',
+    foot: 'proportions',
+  },
+  {
+    keys: 'z',
+    presses: ['z'],
+    action: 'scatter',
+    help: 'scatter: the share of members that would deflect more than the limit, and what it assumes; again: no more',
+    foot: 'scatter',
+  },
+  {
+    keys: 'h',
+    presses: ['h'],
+    action: 'headroom',
+    help: 'headroom: the storey to scale, the depth it leaves, the clear height below every size',
+    foot: 'headroom',
+  },
+  {
+    keys: 'o',
+    presses: ['o'],
+    action: 'began',
+    help: 'back to where we began: as it was opened, or where O set the mark',
+    foot: 'where we began',
+  },
+  {
+    keys: 'O',
+    presses: ['O'],
+    action: 'mark-began',
+    help: 'mark this as where we began: a second ghost on the gauges',
+    foot: '',
+  },
+  {
+    keys: 'k',
+    presses: ['k'],
+    action: 'copy',
+    help: 'the answer in three lines for a message: to the clipboard, or to copy by hand',
+    foot: 'copy',
   },
   {
     keys: 'a',
@@ -203,11 +269,14 @@ export const WORDS: readonly (readonly [string, string])[] = [
   ['nudge', 'one step of a knob'],
   ['powers', 'shear on (l/h)¹, bending on (l/h)², deflection on (l/h)³; demand over capacity, limit at 1'],
   ['ghost', 'where a gauge stood before this run of nudges'],
+  ['[ ] on a gauge', 'the deflection of the stiffest and the softest twentieth of such members'],
   ['ruler', 'the l/h axis, zoned by the power that governs, with the stock depths at this span'],
   ['stands to', 'the l/h up to which every check passes, by the power laws'],
   ['rack', 'the stock sizes of the chosen wood, lightest first'],
   ['lit', 'the lightest size of the rack that passes'],
   ['reach', 'the longest span at which a size still passes'],
   ['workings', 'the calculation behind a number, line by line, with clauses'],
+  ['pin', 'a design set aside to compare; kept in the session file'],
+  ['where we began', 'a second ghost, set with O'],
   ['kept', 'what the file holds; s alone writes it'],
 ];

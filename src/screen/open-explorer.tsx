@@ -13,12 +13,20 @@ export interface ExplorerOptions {
   /** null: ask for a beam first. */
   readonly session: Session | null;
   readonly env: Readonly<Record<string, string | undefined>>;
+  /** Sends text to the clipboard, where the terminal takes that. */
+  readonly copy: (text: string) => void;
   /** Writes a session; null when kept, else the reason why not. */
   readonly save: (file: string, session: Session, fresh: boolean) => string | null;
 }
 
 /** What `openScreen` draws for the explorer at each size. */
-export function openExplorer({ file, session, env, save }: ExplorerOptions): (size: Size) => ReactElement {
+export function openExplorer({
+  file,
+  session,
+  env,
+  copy,
+  save,
+}: ExplorerOptions): (size: Size) => ReactElement {
   const theme = chooseTheme(env);
   const glyphs = chooseGlyphs(env);
   const initial = (size: Size): State => ({
@@ -32,10 +40,12 @@ export function openExplorer({ file, session, env, save }: ExplorerOptions): (si
     ghost: null,
     mode: session === null ? START : { name: 'explore' },
     notice: null,
+    settled: false,
     ...size,
   });
   let first: State | null = null;
   const perform = (effect: Effect): Event | null => {
+    if (effect.do === 'copy') copy(effect.text);
     if (effect.do !== 'save') return null;
     const reason = save(effect.file, effect.session, effect.fresh);
     return reason === null

@@ -21,10 +21,19 @@ export interface State {
   readonly future: readonly Moment[];
   /** Where the run of nudges on one knob began. */
   readonly ghost: { readonly knob: string; readonly member: Member } | null;
+  /** By member's name, where the user said that we began; a name that is absent began as it was opened. */
+  readonly began?: Readonly<Record<string, Member>>;
+  /** What the scatter of stiffness comes to is told among the remarks. */
+  readonly scatter?: boolean;
   readonly mode: Mode;
   readonly notice: Notice | null;
   readonly columns: number;
   readonly rows: number;
+  /**
+   * False for the first frame of a member that takes long to work out: it shows what the nudge did at once, and
+   * the rest (cures, reach, exponents, chart) with the next frame, which follows as soon as no key waits.
+   */
+  readonly settled: boolean;
 }
 
 /** A point to come back to. */
@@ -54,6 +63,11 @@ export type Mode =
   | DiagramsMode
   | WoodMode
   | AddMode
+  | MovesMode
+  | CompareMode
+  | HeadroomMode
+  | { readonly name: 'copy' }
+  | { readonly name: 'proportions' }
   | { readonly name: 'leaving' }
   | StartMode;
 
@@ -92,6 +106,36 @@ export interface AddMode {
   readonly load: NewLoad | null;
 }
 
+/** The storey of the member in hand. */
+export interface HeadroomMode {
+  readonly name: 'headroom';
+  /** Key of the knob in hand. */
+  readonly knob: string;
+  /** What is being typed on it; null while nothing is. */
+  readonly edit: Edit | null;
+  /** Why the last key did nothing. */
+  readonly fault: string | null;
+}
+
+/** Designs side by side. */
+export interface CompareMode {
+  readonly name: 'compare';
+  /** 0: the one at hand, then the pins. */
+  readonly design: number;
+  readonly scroll: number;
+  /** The note of the pin in hand being typed; null while none is. */
+  readonly edit: Edit | null;
+}
+
+/** The list of moves. */
+export interface MovesMode {
+  readonly name: 'moves';
+  /** 0: 10 % more wood, 1: the next stock size, then the moves, best first. */
+  readonly line: number;
+  /** Of the first two lines. */
+  readonly way: 'deepen' | 'widen';
+}
+
 /** The three questions of an empty start. */
 export interface StartMode {
   readonly name: 'start';
@@ -127,6 +171,8 @@ export type Effect =
       readonly fresh: boolean;
       readonly thenLeave: boolean;
     }
+  /** Put text on the clipboard, where the terminal takes that. */
+  | { readonly do: 'copy'; readonly text: string }
   | { readonly do: 'leave' };
 
 export function memberOf(state: State): Member {

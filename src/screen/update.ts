@@ -1,5 +1,6 @@
+import { isQuick } from '../explore/is-quick.ts';
 import { rulesOf } from './modes/index.ts';
-import { refused, type State, type Step, still } from './state.ts';
+import { memberOf, refused, type State, type Step, still } from './state.ts';
 import type { KeyPress } from './terminal/key-press.ts';
 
 /** What can happen to the explorer. */
@@ -13,10 +14,24 @@ export type Event =
       readonly session: State['session'];
       readonly thenLeave: boolean;
     }
-  | { readonly type: 'save-failed'; readonly reason: string };
+  | { readonly type: 'save-failed'; readonly reason: string }
+  /** The frame is on the screen and no key waits: the rest may be worked out. */
+  | { readonly type: 'settle' };
 
 /** The next state and what is to be done; the only place where the state changes. */
 export function update(state: State, event: Event): Step {
+  const step = next(state, event);
+  const after = step.state;
+  if (
+    after.session.members.length === 0 ||
+    after.session.members[after.member] === state.session.members[state.member]
+  ) {
+    return step;
+  }
+  return { ...step, state: { ...after, settled: isQuick(memberOf(after)) } };
+}
+
+function next(state: State, event: Event): Step {
   switch (event.type) {
     case 'key':
       return rulesOf(state.mode).press(state, state.mode, event.press);
@@ -24,6 +39,8 @@ export function update(state: State, event: Event): Step {
       return still(rulesOf(state.mode).paste?.(state, state.mode, event.text) ?? state);
     case 'resize':
       return still({ ...state, columns: event.columns, rows: event.rows });
+    case 'settle':
+      return still({ ...state, settled: true });
     case 'save-failed':
       return still(refused(state, event.reason));
     case 'saved': {

@@ -20,10 +20,13 @@ import { checkAndPlace, isPlain, patternText } from './place-words.ts';
 import type { VerdictView } from './view.ts';
 import { CHECK_SUBJECT } from './words.ts';
 
-/** The sentence of the meeting: what stops the member and the nearest cures, or what it still has in hand. */
-export function verdictOf(member: Member, answer: Answer, units: Units): VerdictView {
+/**
+ * The sentence of the meeting: what stops the member and the nearest cures, or what it still has in hand. Where it is
+ * not `settled` the best size alone is named, and the other cures follow.
+ */
+export function verdictOf(member: Member, answer: Answer, units: Units, settled = true): VerdictView {
   const passes = answer.report.passes;
-  const cures = () => (passes ? spareOf(member, answer, units) : curesText(member, answer, units));
+  const cures = () => (passes ? spareOf(member, answer, units) : curesText(member, answer, units, settled));
   return { passes, reason: reasonOf(member, answer, passes), cures: isUnloaded(answer) ? [] : cures() };
 }
 
@@ -68,22 +71,22 @@ function lowered(text: string): string {
   return text.charAt(0).toLowerCase() + text.slice(1);
 }
 
-function curesText(member: Member, answer: Answer, units: Units): string[] {
+function curesText(member: Member, answer: Answer, units: Units, settled: boolean): string[] {
   if (answer.governing === 'uplift' && !Number.isFinite(answer.worst)) return tieText(member, answer, units);
-  const by = (kind: Cure['kind']) => answer.cures.find((cure) => cure.kind === kind && cure.passes);
-  const best = BEST_WORD[answer.rack.best];
-  const lightest = by(best);
-  const shorten = by('shorten');
-  const deepen = by('deepen');
-  const ply = by('add a ply');
-  const widen = by('widen');
+  const lightest = answer.rack.sizes[answer.rack.lit];
   const name = (size: Size | null | undefined) => (size == null ? '' : sizeName(answer.rack, size));
   const lit = name(lightest?.size);
   const sentences = [
     lightest === undefined
       ? noSizeText(answer)
-      : `${raised(best)} cure: ${lit}, ${showRatio(lightest.worst)}.`,
+      : `${raised(BEST_WORD[answer.rack.best])} cure: ${lit}, ${showRatio(lightest.worst)}.`,
   ];
+  if (!settled) return sentences;
+  const by = (kind: Cure['kind']) => answer.cures.find((cure) => cure.kind === kind && cure.passes);
+  const shorten = by('shorten');
+  const deepen = by('deepen');
+  const ply = by('add a ply');
+  const widen = by('widen');
   if (shorten?.span != null) sentences.push(shortenText(member, shorten.span, units));
   const others = [
     deepen !== undefined && name(deepen.size) !== lit
@@ -97,7 +100,6 @@ function curesText(member: Member, answer: Answer, units: Units): string[] {
       : '',
   ].filter((text) => text !== '');
   if (others.length > 0) sentences.push(`Or ${others.join('; ')}.`);
-  if (member.beam.spans.length === 0) return [];
   return sentences;
 }
 

@@ -1,14 +1,17 @@
+import { BEST_WORD } from '../explore/best.ts';
 import type { Cure } from '../explore/cures.ts';
 import { whyNotWhole } from '../explore/exponents.ts';
 import type { Knob } from '../explore/knob.ts';
 import { lightestAlong } from '../explore/lightest-along.ts';
 import { powersOf, standsTo } from '../explore/powers.ts';
-import { gradeWord, hasSize, type Rack, type RackSize, sizeName } from '../explore/rack.ts';
+import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack.ts';
+import type { RankedSize } from '../explore/ranked.ts';
 import { ratiosOf } from '../explore/ratios.ts';
 import type { Reach } from '../explore/reach.ts';
 import { refusedWord } from '../explore/refused-word.ts';
 import { fieldKey, spanToDepthOf } from '../explore/span-to-depth.ts';
 import {
+  showInches,
   showQuantity,
   showSmall,
   showSpan,
@@ -36,9 +39,11 @@ import {
 import type { Member, Stock } from '../timber/member.ts';
 import type { CheckResult } from '../timber/report.ts';
 import { type Answer, answerOf } from './answer.ts';
+import { beganMark } from './began.ts';
 import { chartView } from './chart-view.ts';
 import { type Action, BINDINGS } from './keys.ts';
 import { measureName, patternText, placeOf } from './place-words.ts';
+import { bandOf, scatterRemarks } from './scatter-text.ts';
 import { isKept, knobInHand, memberOf, type State, unitsOf } from './state.ts';
 import { verdictOf } from './verdict-text.ts';
 import type {
@@ -64,28 +69,34 @@ export function viewOf(state: State): View {
   const answer = answerOf(member, rankingOf(state.session));
   const { knobs, index } = knobInHand(state);
   const wide = state.columns >= WIDE;
-  const { mode } = state;
+  const { mode, settled } = state;
+  const cures = settled ? answer.cures : [];
   return {
     title: titleOf(state),
-    verdict: verdictOf(member, answer, units),
+    verdict: verdictOf(member, answer, units, settled),
     knobs: knobs.map(
       (knob): KnobView => ({ label: knob.label, value: knob.show(member, units), fault: null }),
     ),
     knob: index,
-    gauges: gaugesOf(member, answer, state.ghost?.member ?? null, units),
+    gauges: gaugesOf(member, answer, state.ghost?.member ?? null, beganMark(state), units),
     others: answer.others.map(({ id, ratio }) => ({
       label: CHECK_WORD[id],
       ratio,
       governs: id === answer.governing,
     })),
     load: showQuantity('lineLoad', lineLoadOf(member), units),
-    exponents: wide ? exponentsView(member, answer) : [],
+    exponents: wide ? exponentsView(member, answer, settled) : [],
     ruler: rulerOf(member, answer, state.ghost?.member ?? null),
-    rack: rackView(member, answer, units),
-    handover: lightestAlong(member, answer.rack, answer.reaches, (span) => showSpanDown(span, units)),
-    chart: wide ? chartView(member, knobs[index]!, spanKnob(member, knobs), units) : null,
-    cures: answer.cures.map((cure) => cureView(member, answer, cure, units)),
-    remarks: remarksOf(member, answer, units, state.columns),
+    rack: rackView(member, answer, units, settled),
+    handover: settled
+      ? lightestAlong(member, answer.rack, answer.reaches, (span) => showSpanDown(span, units))
+      : null,
+    chart: wide ? chartView(member, knobs[index]!, spanKnob(member, knobs), units, settled) : null,
+    cures: cures.map((cure) => cureView(member, answer, cure, units)),
+    remarks: [
+      ...(state.scatter ? scatterRemarks(member, answer.powers[2].ratio) : []),
+      ...remarksOf(member, answer, units, state.columns),
+    ],
     foot: footOf(knobs[index]!, units),
     notice:
       state.notice === null
@@ -121,8 +132,15 @@ export function titleOf(state: State): View['title'] {
   };
 }
 
-function gaugesOf(member: Member, answer: Answer, ghost: Member | null, units: Units): GaugeView[] {
+function gaugesOf(
+  member: Member,
+  answer: Answer,
+  ghost: Member | null,
+  began: Member | null,
+  units: Units,
+): GaugeView[] {
   const before = ghost === null ? null : powersOf(ratiosOf(ghost));
+  const first = began === null ? null : powersOf(ratiosOf(began));
   return answer.powers.map(({ name, exponent, ratio, check }, index): GaugeView => {
     const was = before?.[index]?.ratio ?? null;
     const result = answer.report.checks.find((each) => each.id === check);
@@ -131,6 +149,8 @@ function gaugesOf(member: Member, answer: Answer, ghost: Member | null, units: U
       power: exponent,
       ratio,
       ghost: was,
+      began: first?.[index]?.ratio ?? null,
+      band: name === 'deflection' && ratio !== null ? bandOf(member, ratio) : null,
       nudge: was === null || ratio === null ? null : ratio - was,
       governs: check !== null && check === answer.governing,
       demand: result === undefined ? '' : demandText(member, result, units),
@@ -166,8 +186,12 @@ function numberOf(text: string): string {
   return text.slice(0, text.indexOf(' '));
 }
 
-function exponentsView(member: Member, answer: Answer): ExponentView[] {
+/** Keeps the place of exponents that are still being worked out. */
+const NOT_YET = [Number.NaN, Number.NaN, Number.NaN, Number.NaN] as const;
+
+function exponentsView(member: Member, answer: Answer, settled: boolean): ExponentView[] {
   return answer.powers.flatMap(({ name, exponent, check }) => {
+    if (!settled) return [{ label: name, power: exponent, local: NOT_YET, why: '' }];
     const own = check === null ? undefined : answer.exponents[check];
     const result = answer.report.checks.find((each) => each.id === check);
     if (own === undefined || result === undefined) return [];
@@ -207,7 +231,7 @@ function depthLabel({ product }: Stock, depth: number): string {
   return String(nominal ?? Math.round(depth * 10) / 10);
 }
 
-function rackView(member: Member, answer: Answer, units: Units): RackView {
+function rackView(member: Member, answer: Answer, units: Units, settled: boolean): RackView {
   const { rack } = answer;
   const mixed = rack.woods.length > 1;
   return {
@@ -215,6 +239,7 @@ function rackView(member: Member, answer: Answer, units: Units): RackView {
     weightUnit: weightUnit(units),
     current: answer.rack.sizes.findIndex(({ size }) => hasSize(member, size)),
     lightest: answer.rack.lit,
+    litWord: BEST_WORD[answer.rack.best],
     rows: answer.rack.sizes.map((each, index) => {
       const [shear, bending, deflection] =
         each.refused === null ? powersOf(each.ratios).map((power) => power.ratio) : [null, null, null];
@@ -224,10 +249,10 @@ function rackView(member: Member, answer: Answer, units: Units): RackView {
         weight: weightNumber(each.weight, units),
         ratios: [shear!, bending!, deflection!] as const,
         passes: each.passes,
-        stops: stopsWord(each),
+        stops: stopsWord(each, units),
         // Found for the rows that are drawn alone: a long rack holds many that are not.
         get reach() {
-          return reachText(answer.reaches.at(index), units);
+          return settled ? reachText(answer.reaches.at(index), units) : '';
         },
       };
     }),
@@ -240,7 +265,8 @@ function woodOfRow(rack: Rack, size: Size): { readonly wood: string; readonly na
   return { wood, named: isSawn(size.product) ? `${size.label} ${wood}` : sizeName(rack, size) };
 }
 
-function stopsWord({ refused, passes, governing }: RackSize): string {
+function stopsWord({ refused, passes, governing, over }: RankedSize, units: Units): string {
+  if (over > 0) return `over by ${showInches(over, units)}`;
   if (refused !== null) return refusedWord(refused);
   return passes || governing === null ? '' : CHECK_WORD[governing];
 }
@@ -310,14 +336,22 @@ function measureText(member: Member, measure: string): string {
 /** The foot line, most worth first: what does not fit is dropped from its end. */
 const FOOT_ORDER: readonly Action[] = [
   'type',
+  'moves',
   'take-lit',
   'undo',
   'save',
-  'add',
+  'pin',
+  'compare',
   'workings',
+  'add',
   'diagrams',
   'wood',
   'next-member',
+  'headroom',
+  'proportions',
+  'scatter',
+  'copy',
+  'began',
   'leave',
   'help',
 ];

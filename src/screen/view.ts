@@ -67,6 +67,10 @@ export interface GaugeView {
   readonly ratio: number | null;
   /** Where it stood before the run of nudges; null when nothing was nudged. */
   readonly ghost: number | null;
+  /** Where we began, when that was marked; absent or null: nowhere. */
+  readonly began?: number | null;
+  /** Ratios at the stiff and the soft end of what the wood's stiffness scatters over; absent or null: no band. */
+  readonly band?: readonly [number, number] | null;
   /** Change since the ghost; null when nothing was nudged. */
   readonly nudge: number | null;
   readonly governs: boolean;
@@ -110,6 +114,8 @@ export interface RackView {
   readonly current: number;
   /** Index of the lit size; -1 when nothing passes. */
   readonly lightest: number;
+  /** What the lit size is called where it is not the lightest: "cheapest". */
+  readonly litWord?: string;
 }
 
 export interface RackRowView {

@@ -7,7 +7,7 @@ import { childSchema, keysOf, schemaAt } from './schema-walk.ts';
 /** Keys of features that this version does not have; refused by that name, never ignored. */
 const LATER_KEYS: Readonly<Record<'top' | 'member', readonly string[]>> = {
   top: ['sheet'],
-  member: ['links', 'pins', 'trail'],
+  member: ['links', 'trail'],
 };
 
 /** No known name is longer; more of a wrong one need not be compared. */
@@ -65,7 +65,7 @@ export function unknownKey(path: Path, key: string, root: z.core.$ZodType): Sess
 }
 
 const TYPE_NAMES: Readonly<Record<string, string>> = {
-  string: 'a text in double quotes',
+  string: 'a text in double quotes (a quantity with its unit, such as "14 ft")',
   number: 'a number without quotes',
   int: 'a whole number without quotes',
   boolean: 'true or false, without quotes',

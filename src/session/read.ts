@@ -3,6 +3,7 @@ import { quoted } from '../quantity/index.ts';
 import { stockFault, stockNameFault } from '../timber/refusal.ts';
 import { explainIssues } from './explain-issue.ts';
 import { faultLine, type Path, SessionFault } from './fault.ts';
+import { readPins } from './pins.ts';
 import { readPrices, readYard } from './read-buying.ts';
 import { readJson } from './read-json.ts';
 import { readMember } from './read-member.ts';
@@ -87,7 +88,8 @@ function readOne(
     const key = unknown.path.slice('stock.'.length);
     throw new SessionFault([...path, 'rack', at, key], unknown.reason);
   }
-  return { member, written };
+  const pins = readPins(file.members[index]!, written, combinations, path);
+  return { member, written, ...(pins === undefined ? {} : { pins }) };
 }
 
 function checkNames(file: SessionFile): void {

@@ -4,7 +4,7 @@ import { LOAD_KINDS } from '../loads/kinds.ts';
 import { isHarmful, parseQuantity, type QuantityKind, quoted } from '../quantity/index.ts';
 import { FACTOR_SYMBOLS, PRODUCTS, STOCK_VALUES } from '../timber/member.ts';
 import { prices, yard } from './schema-buying.ts';
-import { MAX_LOADS, MAX_MEMBERS, MAX_RACK, MAX_SPANS } from './session.ts';
+import { MAX_LOADS, MAX_MEMBERS, MAX_PINS, MAX_RACK, MAX_SPANS } from './session.ts';
 
 /** The format's version, the value of the key `thrice`. */
 export const FORMAT = 1;
@@ -32,6 +32,8 @@ const STEEPEST = 2;
 
 export type SessionFile = z.infer<ReturnType<typeof build>>;
 export type MemberFile = SessionFile['members'][number];
+/** A member's record without what it is called. */
+export type DesignFile = NonNullable<MemberFile['pins']>[number]['design'];
 export type LoadFile = NonNullable<MemberFile['loads']>[number];
 
 let built: ReturnType<typeof build> | undefined;
@@ -57,7 +59,7 @@ function build() {
     best: z.optional(z.enum(BESTS)),
     yard: z.optional(yard(PARTS)),
     prices: z.optional(prices(PARTS)),
-    members: z.array(member()).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
+    members: z.array(memberWithPins()).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
   });
 }
 
@@ -66,6 +68,24 @@ export const PARTS = {
   text,
   length: (least: number, most: number, words: string) => quantity('length', least, most, words),
 };
+
+function memberWithPins() {
+  return z.extend(member(), {
+    pins: z.optional(
+      z
+        .array(
+          z.strictObject({
+            note: z.optional(text(0, NOTE_LENGTH)),
+            design: z.omit(member(), { name: true, note: true, count: true }),
+          }),
+        )
+        .check(z.maxLength(MAX_PINS))
+        .register(z.globalRegistry, {
+          description: 'designs of this member that were set aside to compare, each with a note',
+        }),
+    ),
+  });
+}
 
 function member() {
   const span = quantity('length', 1, LONGEST, '1 in to 200 ft');

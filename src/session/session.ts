@@ -33,6 +33,17 @@ export interface SessionMember {
   readonly member: Member;
   /** The raw record it was read from, so that the user's own text can be kept; undefined for a new member. */
   readonly written: unknown;
+  /** Designs set aside, in the order they were; absent: none. */
+  readonly pins?: readonly Pin[];
+}
+
+/** A design set aside to compare with others. */
+export interface Pin {
+  /** Empty where nobody wrote one. */
+  readonly note: string;
+  readonly member: Member;
+  /** The raw record it was read from; undefined for a new one. */
+  readonly written: unknown;
 }
 
 export type SessionRead =
@@ -46,5 +57,7 @@ export const MAX_SPANS = 6;
 export const MAX_LOADS = 100;
 /** Lines of a yard list; a bound of this program's own. */
 export const MAX_YARD = 20_000;
+/** Designs set aside of one member: as many as can be looked at side by side. */
+export const MAX_PINS = 6;
 /** Woods on one rack; a bound of this program's own. */
 export const MAX_RACK = 16;

@@ -1,6 +1,7 @@
 import type { Member } from '../timber/member.ts';
 import { SessionFault } from './fault.ts';
 import { present, rawAt } from './keep.ts';
+import { writePins } from './pins.ts';
 import { readMember } from './read-member.ts';
 import { FORMAT, type MemberFile } from './schema.ts';
 import type { Session, SessionMember } from './session.ts';
@@ -29,7 +30,12 @@ export function sessionDocument(session: Session): unknown {
     best: stated('best', session.best ?? 'weight', 'weight'),
     yard: writeYard(session),
     prices: writePrices(session),
-    members: session.members.map((one) => writeMember(one.member, one.written, before(one), units)),
+    members: session.members.map((one) =>
+      present({
+        ...writeMember(one.member, one.written, before(one), units),
+        pins: writePins(one.pins, one.member, one.written, units),
+      }),
+    ),
   });
 }
 

@@ -24,6 +24,7 @@ export function stateOf(members: readonly Part[] = [{}], part: Partial<State> = 
     notice: null,
     columns: 120,
     rows: 36,
+    settled: true,
     ...part,
   };
 }

@@ -1,6 +1,12 @@
 /** What this program draws with. Every glyph is one cell wide in every terminal that can draw it. */
 export interface Glyphs {
   readonly kind: 'unicode' | 'ascii';
+  /** A stretch that is usual. */
+  readonly band: string;
+  /** Where we began, when that was marked. */
+  readonly began: string;
+  /** What the designs compared do not agree in. */
+  readonly differs: string;
   /** The knob in hand. */
   readonly hand: string;
   /** A gauge filled to now, and its head. */
@@ -78,6 +84,9 @@ export interface ChartGlyphs {
 
 const UNICODE: Glyphs = {
   kind: 'unicode',
+  band: '░',
+  began: '◇',
+  differs: '≠',
   hand: '►',
   fill: '━',
   now: '●',
@@ -124,6 +133,9 @@ const line = (level: string): LineSymbols => [level, level, level, level, level,
 
 const ASCII: Glyphs = {
   kind: 'ascii',
+  band: ':',
+  began: '+',
+  differs: '!',
   hand: '>',
   fill: '=',
   now: '@',

@@ -3,9 +3,11 @@ import type { Step as NudgeSize } from '../../explore/knob.ts';
 import { takeSize } from '../../explore/rack.ts';
 import { bestOf } from '../../explore/ranked.ts';
 import { rankingOf } from '../../session/index.ts';
+import { backToBegan, markBegan } from '../began.ts';
 import { editOf, inserted } from '../edit.ts';
 import { type Action, actionOf, startsEntry } from '../keys.ts';
 import { drawExplorer } from '../layout.ts';
+import { pinned } from '../pins.ts';
 import {
   isKept,
   knobInHand,
@@ -21,9 +23,13 @@ import {
 } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
+import { openCompare } from './compare.ts';
+import { copied } from './copy.ts';
 import { openDiagrams } from './diagrams.ts';
 import { opened } from './entry.ts';
+import { openHeadroom } from './headroom.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
+import { openMoves } from './moves.ts';
 import { save } from './save-as.ts';
 import { openWood } from './wood.ts';
 import { openedWorkings } from './workings.ts';
@@ -88,6 +94,24 @@ function act(state: State, action: Action): Step {
       return still(openWood(state));
     case 'diagrams':
       return still(openDiagrams(state));
+    case 'scatter':
+      return still({ ...state, scatter: !state.scatter, notice: null });
+    case 'proportions':
+      return still({ ...state, mode: { name: 'proportions' }, notice: null });
+    case 'headroom':
+      return still(openHeadroom(state));
+    case 'pin':
+      return still(pinned(state));
+    case 'compare':
+      return still(openCompare(state));
+    case 'began':
+      return still(backToBegan(state));
+    case 'mark-began':
+      return still(markBegan(state));
+    case 'copy':
+      return copied(state);
+    case 'moves':
+      return still(openMoves(state));
     case 'workings':
       return still(openedWorkings(state));
     case 'help':

@@ -1,11 +1,16 @@
 import type { Mode } from '../state.ts';
 import { add } from './add.ts';
+import { compare } from './compare.ts';
+import { copy } from './copy.ts';
 import { diagrams } from './diagrams.ts';
 import { entry } from './entry.ts';
 import { explore } from './explore.ts';
+import { headroom } from './headroom.ts';
 import { help } from './help.ts';
 import { leaving } from './leaving.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
+import { moves } from './moves.ts';
+import { proportions } from './proportions.ts';
 import { saveAs } from './save-as.ts';
 import { start } from './start.ts';
 import { wood } from './wood.ts';
@@ -21,6 +26,11 @@ const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
   diagrams,
   wood,
   add,
+  moves,
+  headroom,
+  proportions,
+  compare,
+  copy,
   leaving,
   start,
 };

@@ -77,6 +77,8 @@ function drawDemand(gauge: GaugeView, canvas: Canvas, line: GaugeLine, y: number
 export interface BarView {
   readonly ratio: number | null;
   readonly ghost: number | null;
+  readonly began?: number | null;
+  readonly band?: readonly [number, number] | null;
   readonly governs: boolean;
 }
 
@@ -90,7 +92,7 @@ export function drawBar(
   line: GaugeLine,
   glyphs: Glyphs,
 ): void {
-  const { ratio, ghost, governs } = view;
+  const { ratio, ghost, governs, began = null, band = null } = view;
   const known = ratio !== null && !Number.isNaN(ratio);
   const fails = known && ratio > PASS;
   const named: Style = governs ? (fails ? 'governsStrong' : 'governs') : 'plain';
@@ -104,17 +106,36 @@ export function drawBar(
   if (now > 0) canvas.put(bar, y, glyphs.fill.repeat(Math.min(now, limit)));
   if (now > limit) canvas.put(bar + limit + 1, y, glyphs.beyond.repeat(now - limit - 1), 'governs');
   canvas.put(bar + now + 1, y, glyphs.empty.repeat(cells - now - 1), 'quiet');
+  if (known && band !== null) drawBand(band, canvas, bar, cells, y);
   canvas.put(
     bar + limit,
     y,
     now > limit ? glyphs.limitCrossed : glyphs.limit,
     fails ? 'governsStrong' : 'strong',
   );
+  if (began !== null && !Number.isNaN(began))
+    canvas.put(bar + cellOf(began, cells), y, glyphs.began, 'strong');
   if (ghost !== null && !Number.isNaN(ghost)) {
     canvas.put(bar + cellOf(ghost, cells), y, glyphs.ghost, 'plain');
   }
   if (known) canvas.put(bar + now, y, bead(ratio, glyphs), 'nowStrong');
 }
+
+/** The ends of a band that lie on the scale. */
+function drawBand(
+  band: readonly [number, number],
+  canvas: Canvas,
+  bar: number,
+  cells: number,
+  y: number,
+): void {
+  for (const [end, ratio] of band.entries()) {
+    if (ratio >= LOWEST && ratio <= HIGHEST)
+      canvas.put(bar + cellOf(ratio, cells), y, BAND_ENDS[end]!, 'now');
+  }
+}
+
+const BAND_ENDS = ['[', ']'] as const;
 
 /** The bead, or the mark that the ratio lies off the scale. */
 function bead(ratio: number, glyphs: Glyphs): string {

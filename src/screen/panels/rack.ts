@@ -195,7 +195,7 @@ function drawRow(
   }
   const stopsAt = weightEnd + 3 * columns.ratio + 3;
   if (columns.stops > 0) {
-    const stops = isLit ? 'lightest' : narrowed(cells(row.stops), columns.stops);
+    const stops = narrowed(cells(isLit ? (rack.litWord ?? 'lightest') : row.stops), columns.stops);
     canvas.put(stopsAt, y, clip(stops, columns.stops, glyphs), style);
   }
   if (columns.reach) {
@@ -212,7 +212,7 @@ const NARROW: Readonly<Record<string, string>> = {
 };
 
 function narrowed(stops: string, width: number): string {
-  return stops.length <= width ? stops : (NARROW[stops] ?? stops);
+  return stops.length <= width ? stops : (NARROW[stops] ?? stops.replace(/^over by /, 'over '));
 }
 
 /** The size at hand in the accent of now, the lit one strong, those that fail dimmed. */
