@@ -51,7 +51,7 @@ export function run(): void {
   ] as const) {
     const member = beam(spans, loads);
     const wood = woodOf(member);
-    const time = millis(() => rate(prepare(member), wood, member.section, ratios));
+    const time = millis(() => rate(prepare({ ...member }), wood, member.section, ratios));
     const size = spans * loads;
     const growth =
       before === null

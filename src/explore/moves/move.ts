@@ -65,6 +65,7 @@ export function moveTo(
     const [one, other] = [cost[key], table.cost[key]];
     return one === null || other === null ? null : one - other;
   };
+  let set: readonly string[] | null = null;
   return {
     kind,
     label,
@@ -73,7 +74,11 @@ export function moveTo(
     ...cost,
     size: resized ? (rackSizesOf(member.stock).find((size) => hasSize(member, size)) ?? null) : null,
     span: was === is ? null : is,
-    set: setsBetween(before, member),
+    // Written out only for those who read it: the screen does not, at every nudge.
+    get set() {
+      set ??= setsBetween(before, member);
+      return set;
+    },
     change: {
       weight: less('weight'),
       boardFeet: less('boardFeet'),

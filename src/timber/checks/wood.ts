@@ -46,14 +46,16 @@ interface RowConstants {
   readonly EyMin: number;
 }
 
-/** Stock and conditions, ready to be taken at any size. It keeps the size it was last taken at. */
+/** Stock and conditions, ready to be taken at any size. It keeps the sizes it was taken at: racks are gone through at every nudge. */
 export interface Wood {
   readonly conditions: WoodConditions;
   readonly rules: WoodRules;
   readonly candidates: readonly Candidate[];
   readonly rows: readonly RowConstants[];
-  /** The size it stands at, filled by `sizeWood`. */
-  readonly at: SizedWood;
+  /** The size it stands at, set by `sizeWood`. */
+  at: SizedWood;
+  /** Sizes it was taken at, by `sizeKey`. */
+  readonly sizes: Map<number, SizedWood>;
 }
 
 /** Everything of a wood at one size that needs no load: in, in², psi, lb/in. */
@@ -89,15 +91,34 @@ export interface SizedWood {
 /** The shear value of glulam with a notch (NDS Supplement Table 5A, note on Fvx). */
 const NOTCHED_GLULAM = 0.72;
 
-/** The wood of a member, or of another stock under the member's conditions. Throws where the stock has no values. */
+const KNOWN = new WeakMap<Stock, readonly Wood[]>();
+/** Conditions kept of one stock: those of a session's members, and of the choices a user tries. */
+const MOST_CONDITIONS = 32;
+const CONDITION_KEYS = [
+  'service',
+  'temperature',
+  'incised',
+  'repetitive',
+  'typedFactors',
+] as const satisfies readonly (keyof WoodConditions)[];
+
+/**
+ * The wood of a member, or of another stock under the member's conditions; the same object for the same ones. Throws
+ * where the stock has no values.
+ */
 export function woodOf(member: WoodConditions, stock: Stock = member.stock): Wood {
+  const known = KNOWN.get(stock) ?? [];
+  const same = known.find(({ conditions }) => CONDITION_KEYS.every((key) => conditions[key] === member[key]));
+  if (same !== undefined) return same;
   const candidates = candidatesOf(stock);
   if (isRefusal(candidates)) throw new Error(candidates.refused);
   const { service, temperature, incised, repetitive, typedFactors } = member;
   const conditions = { stock, service, temperature, incised, repetitive, typedFactors };
   const rules = rulesOf(stock);
   const rows = candidates.map((candidate) => rowConstants(conditions, rules, candidate));
-  return { conditions, rules, candidates, rows, at: { ...NOWHERE } };
+  const wood: Wood = { conditions, rules, candidates, rows, at: { ...NOWHERE }, sizes: new Map() };
+  KNOWN.set(stock, [...known.slice(1 - MOST_CONDITIONS), wood]);
+  return wood;
 }
 
 function rowConstants(
@@ -201,24 +222,39 @@ export function flatRule(stock: Stock, thick: number, wide: number): FlatRule {
   return stock.product === 'dimension lumber' || stock.product === 'machine stress rated' ? 'lumber' : 'none';
 }
 
-/** Takes the wood at a size; false where its table does not cover it. Costs little when the size is the last one. */
+/** Sizes kept by one wood: some racks, and the free sizes tried between. */
+const MOST_SIZES = 4096;
+
+/** A number by which a size is found again; sizes that share one are told apart by looking. */
+function sizeKey({ width, depth, plies, flat }: Section): number {
+  return width + depth * 128 + plies * 16384 + (flat ? 131072 : 0);
+}
+
+/** Takes the wood at a size; false where its table does not cover it. Costs little for a size it was taken at before. */
 export function sizeWood(wood: Wood, section: Section): boolean {
-  const { at } = wood;
-  if (
-    at.width === section.width &&
-    at.depth === section.depth &&
-    at.plies === section.plies &&
-    at.flat === section.flat
-  ) {
-    return at.row >= 0;
+  if (!isAt(wood.at, section)) {
+    const key = sizeKey(section);
+    const known = wood.sizes.get(key);
+    if (known !== undefined && isAt(known, section)) wood.at = known;
+    else {
+      wood.at = sized(wood, section);
+      if (wood.sizes.size >= MOST_SIZES) wood.sizes.clear();
+      wood.sizes.set(key, wood.at);
+    }
   }
-  at.width = section.width;
-  at.depth = section.depth;
-  at.plies = section.plies;
-  at.flat = section.flat;
+  return wood.at.row >= 0;
+}
+
+function isAt(at: SizedWood, { width, depth, plies, flat }: Section): boolean {
+  return at.width === width && at.depth === depth && at.plies === plies && at.flat === flat;
+}
+
+function sized(wood: Wood, section: Section): SizedWood {
+  const { width, depth, plies, flat } = section;
+  const at: SizedWood = { ...NOWHERE, width, depth, plies, flat };
   const { stock, repetitive, typedFactors } = wood.conditions;
   at.row = candidateAt(wood.candidates, stock.product, section);
-  if (at.row < 0) return false;
+  if (at.row < 0) return at;
 
   const row = wood.rows[at.row]!;
   const b = standingWidth(section);
@@ -250,5 +286,5 @@ export function sizeWood(wood: Wood, section: Section): boolean {
   at.E = row.E * stiffness;
   at.Emin = row.Emin * stiffness;
   at.EyMin = row.EyMin * stiffness;
-  return true;
+  return at;
 }
