@@ -3,6 +3,7 @@ import { defineConfig } from 'vitest/config';
 export default defineConfig({
   test: {
     include: ['tests/**/*.test.{ts,tsx}'],
-    testTimeout: 20_000,
+    // Generous: property tests and pseudo-terminals share slow machines.
+    testTimeout: 60_000,
   },
 });

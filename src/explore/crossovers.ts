@@ -1,12 +1,11 @@
+import { ASKS_NOTHING } from './powers.ts';
+
 /** Where the laws of two checks meet, as span-to-depth ratios; null where one of them is absent. */
 export interface Crossovers {
   readonly shearToBending: number | null;
   readonly bendingToDeflection: number | null;
   readonly shearToDeflection: number | null;
 }
-
-/** A ratio this small is rounding: the check asks nothing of the member. */
-const NOTHING = 1e-12;
 
 /**
  * The l/h at which the power laws cross, from the ratios of shear, bending and deflection at one l/h.
@@ -20,7 +19,7 @@ export function crossovers(
   deflection: number,
 ): Crossovers {
   const meet = (lower: number, upper: number, apart: number) =>
-    lower > NOTHING && upper > NOTHING && Number.isFinite(lower) && Number.isFinite(upper)
+    lower > ASKS_NOTHING && upper > ASKS_NOTHING && Number.isFinite(lower) && Number.isFinite(upper)
       ? spanToDepth * (lower / upper) ** (1 / apart)
       : null;
   return {

@@ -39,6 +39,9 @@ export const OTHER_CHECKS: readonly CheckId[] = CHECK_IDS.filter(
   (id) => !POWERS.some((power) => (power.checks as readonly CheckId[]).includes(id)),
 );
 
+/** A ratio this small is rounding: the check asks nothing of the member. */
+export const ASKS_NOTHING = 1e-12;
+
 /**
  * l/h up to which one check alone would pass, by its power law: ratio ∝ (l/h)ⁿ.
  * Infinity where nothing is demanded.

@@ -8,7 +8,7 @@ export interface Turn {
 }
 
 /** Places are found to this share of the larger end. */
-export const CLOSE = 1e-7;
+export const CLOSE = 1e-9;
 const ROUNDS = 200;
 
 /**

@@ -5,7 +5,7 @@ import type { Member } from '../../timber/member.ts';
 import { CHECK_IDS } from '../../timber/report.ts';
 import { fieldName, figuresOf, plain, WORKINGS_WORD, type WorkingLine } from '../../timber/workings/index.ts';
 import { crossovers } from '../crossovers.ts';
-import { OTHER_CHECKS, type PowerRatio, powersOf, standsTo } from '../powers.ts';
+import { ASKS_NOTHING, OTHER_CHECKS, type PowerRatio, powersOf, standsTo } from '../powers.ts';
 import { ratiosOf } from '../ratios.ts';
 import { fieldSpan, spanToDepthOf } from '../span-to-depth.ts';
 
@@ -93,7 +93,7 @@ function standsLines(lambda: number, ratios: Float64Array, powers: readonly Powe
   const lines: WorkingLine[] = [{ heading: 'stands to' }];
   let least = Number.POSITIVE_INFINITY;
   for (const { name, ratio, exponent } of each) {
-    if (!(ratio > 0) || !Number.isFinite(ratio)) continue;
+    if (!(ratio > ASKS_NOTHING) || !Number.isFinite(ratio)) continue;
     const to = standsTo(lambda, ratio, exponent);
     least = Math.min(least, to);
     lines.push({
@@ -103,7 +103,8 @@ function standsLines(lambda: number, ratios: Float64Array, powers: readonly Powe
       result: plain(to),
     });
   }
-  if (each.some(({ ratio }) => ratio === Number.POSITIVE_INFINITY)) least = Number.POSITIVE_INFINITY;
+  const unmet = each.some(({ ratio }) => ratio === Number.POSITIVE_INFINITY);
+  if (unmet) least = Number.POSITIVE_INFINITY;
   lines.push(
     Number.isFinite(least)
       ? {
@@ -111,7 +112,7 @@ function standsLines(lambda: number, ratios: Float64Array, powers: readonly Powe
           result: plain(least),
           note: 'the least of them; checks beside the powers are taken to go with l/h once',
         }
-      : { note: 'one check can be met at no l/h' },
+      : { note: unmet ? 'one check can be met at no l/h' : 'no check asks anything of it' },
   );
   return lines;
 }

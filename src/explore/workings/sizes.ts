@@ -3,7 +3,7 @@ import { sizeLabel, woodOf } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { figuresOf, plain, ratioText, WORKINGS_WORD, type WorkingLine } from '../../timber/workings/index.ts';
 import { judge } from '../judge.ts';
-import { POWERS } from '../powers.ts';
+import { ASKS_NOTHING, POWERS } from '../powers.ts';
 import { rackOf } from '../rack.ts';
 import { ratiosOf } from '../ratios.ts';
 import { REACH_TO, reachFinder } from '../reach.ts';
@@ -26,7 +26,7 @@ export function reachLines(member: Member, units: Units): WorkingLine[] {
     { symbol: 'l', result: f.span(longest), note: spans.length === 1 ? 'the span' : 'the longest span' },
   ];
   const power = POWERS.find((each) => (each.checks as readonly string[]).includes(governing ?? ''));
-  if (power !== undefined && worst > 0 && Number.isFinite(worst)) {
+  if (power !== undefined && worst > ASKS_NOTHING && Number.isFinite(worst)) {
     const n = power.exponent;
     lines.push({
       symbol: 'by the power law alone',
