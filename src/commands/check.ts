@@ -4,20 +4,12 @@ import { judge } from '../explore/judge.ts';
 import { powersOf } from '../explore/powers.ts';
 import { ratiosOf } from '../explore/ratios.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
-import {
-  harmless,
-  showQuantity,
-  showRatio,
-  showSmall,
-  showSpan,
-  showStress,
-  type Units,
-} from '../quantity/index.ts';
+import { harmless, showQuantity, showRatio, showSmall, showStress, type Units } from '../quantity/index.ts';
 import { reportMember } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult, type MemberReport } from '../timber/report.ts';
 import { type Loaded, load, type SessionOptions } from './load.ts';
-import { beside, closing, heading, notChecked, placeText, wrapped } from './prose.ts';
+import { beside, closing, heading, lengthsText, notChecked, placeText, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
 import { workingsJson, workingsTexts } from './workings.ts';
@@ -129,12 +121,11 @@ function memberTexts(loaded: Loaded, results: readonly Checked[], workings: bool
 }
 
 function memberText({ member, report, checks, passes, governing }: Checked, units: Units): string[] {
-  const spans = member.beam.spans.map((span) => showSpan(span, units)).join(', ');
   const title = beside([
     harmless(member.name),
     report.label,
     `${member.stock.species} ${member.stock.grade}`,
-    spans,
+    lengthsText(member, units),
   ]);
   const rows = [...checks]
     .sort((a, b) => CHECK_IDS.indexOf(a.id) - CHECK_IDS.indexOf(b.id))

@@ -1,20 +1,22 @@
 import { ratiosById } from '../explore/judge.ts';
 import { type Move, type Moves, movesOf } from '../explore/moves/index.ts';
-import {
-  harmless,
-  showInches,
-  showRatio,
-  showSpan,
-  type Units,
-  weightNumber,
-  weightUnit,
-} from '../quantity/index.ts';
+import { harmless, showInches, showRatio, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { sizeLabel } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, LINE, notChecked, woodName, wrapped } from './prose.ts';
+import {
+  beside,
+  closing,
+  given,
+  heading,
+  LINE,
+  lengthsText,
+  notChecked,
+  woodName,
+  wrapped,
+} from './prose.ts';
 import { moneyText } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -96,7 +98,7 @@ function movesText(member: Member, { deepenOrWiden, moves, best }: Moves, units:
       harmless(member.name),
       sizeLabel(member.section, member.stock.product),
       woodName(member.stock),
-      member.beam.spans.map((span) => showSpan(span, units)).join(', '),
+      lengthsText(member, units),
     ]),
     'deepen or widen: 10 % more wood either way, then the next stock size',
     ...moveTable(sides, false, units),

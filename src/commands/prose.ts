@@ -41,6 +41,17 @@ export function given(
   };
 }
 
+/** The member's lengths, left to right: "12'-0\", 14'-0\", overhang 4'-0\"", "cantilever 5'-0\"". */
+export function lengthsText({ beam }: Member, units: Units): string {
+  const overhang = (length: number) => (length > 0 ? [`overhang ${showSpan(length, units)}`] : []);
+  const arm = beam.supports === 'cantilever' ? 'cantilever ' : '';
+  return [
+    ...overhang(beam.overhangs.left),
+    ...beam.spans.map((span) => arm + showSpan(span, units)),
+    ...overhang(beam.overhangs.right),
+  ].join(', ');
+}
+
 /** A wood in full: "Douglas Fir-Larch No.2", "glulam 24F-1.8E", "LVL typical 2.0E". */
 export function woodName({ product, species, grade }: Stock): string {
   const sawn = product !== 'glulam' && product !== 'LVL' && product !== 'custom';

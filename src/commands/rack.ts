@@ -19,7 +19,17 @@ import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Member, Stock } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, LINE, notChecked, woodName, wrapped } from './prose.ts';
+import {
+  beside,
+  closing,
+  given,
+  heading,
+  LINE,
+  lengthsText,
+  notChecked,
+  woodName,
+  wrapped,
+} from './prose.ts';
 import { STATUS } from './status.ts';
 import { type Column, table } from './table.ts';
 
@@ -167,11 +177,7 @@ function rackText(member: Member, rack: RankedRack, units: Units): string[] {
   const rows = full.every((line) => line.length <= LINE) ? full : tableOf(true);
   const word = BEST_WORD[best];
   return [
-    ...beside([
-      harmless(member.name),
-      ...rack.woods.map(woodName),
-      member.beam.spans.map((span) => showSpan(span, units)).join(', '),
-    ]),
+    ...beside([harmless(member.name), ...rack.woods.map(woodName), lengthsText(member, units)]),
     ...rows,
     lit < 0 ? 'no size passes' : `${word} that passes: ${sizeName(rack, sizes[lit]!.size)}`,
     ...(sizes.some((each, at) => each.nonDominated && at !== lit)

@@ -60,7 +60,7 @@ const OVERHANG_STEP: Readonly<Record<Units, number>> = { us: 3, si: fromUnit('le
 export function addOverhang(member: Member, side: Side, units: Units): Edit {
   const { beam } = member;
   if (beam.supports === 'cantilever') {
-    return { fault: 'a cantilever has no overhangs: its span is the free arm' };
+    return { fault: 'a cantilever has no overhangs: lengthen its span, which is free' };
   }
   if (beam.overhangs[side] > 0) return { fault: `there is an overhang at the ${side} already` };
   const step = OVERHANG_STEP[units];
@@ -115,7 +115,8 @@ export type NewLoad = 'point' | 'whole line' | 'partial line' | 'tapered line';
  * overhang or a cantilever at its free end; a partial line covers that field, half of it where there is no other.
  */
 export function addLoad(member: Member, what: NewLoad, kind: LoadKind, inHand: string, units: Units): Edit {
-  if (member.loads.length >= MOST_LOADS) return { fault: `a member carries at most ${MOST_LOADS} loads` };
+  if (member.loads.length >= MOST_LOADS)
+    return { fault: `a member carries at most ${MOST_LOADS} loads: take one out first` };
   const { beam } = member;
   const fields = beamFields(beam);
   const field = fields[fieldInHand(member, inHand)]!;
@@ -187,7 +188,7 @@ export function removeAt(member: Member, knob: string, label: string): Edit {
     case 'area':
       return removeArea(member, part as LoadKind);
     default:
-      return { fault: `Delete takes out a span, an overhang or a load; ${label} can only be changed` };
+      return { fault: `Delete takes out a span, overhang or load; ${label} can only be changed` };
   }
 }
 

@@ -42,7 +42,13 @@ function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup 
       at: term.at * factor,
     };
   });
-  return { ...group, zeroMomentLength: group.zeroMomentLength * factor, terms };
+  return {
+    ...group,
+    get zeroMomentLength() {
+      return group.zeroMomentLength * factor;
+    },
+    terms,
+  };
 }
 
 /**
@@ -52,7 +58,16 @@ function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup 
  */
 export function scaleLoadEffects(effects: Effects, factor: number): Effects {
   const groups = (from: readonly TermGroup[]) =>
-    from.map((group): TermGroup => ({ ...group, terms: group.terms.map((term) => scaleLoad(term, factor)) }));
+    from.map(
+      (group): TermGroup => ({
+        ...group,
+        // A getter of its class, which the copy above leaves behind; asked for by glulam only.
+        get zeroMomentLength() {
+          return group.zeroMomentLength;
+        },
+        terms: group.terms.map((term) => scaleLoad(term, factor)),
+      }),
+    );
   const { shearAtDepth } = effects;
   return {
     ...effects,

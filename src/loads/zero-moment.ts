@@ -1,16 +1,22 @@
 import { foundPlaces, MOMENT, pieceValue, STRIDE, signChanges } from '../statics/piece.ts';
+import type { States } from '../statics/solve.ts';
 import { zeros } from '../statics/zeros.ts';
 import type { Found } from './bar.ts';
-import { type Envelope, pieceUnder } from './envelope.ts';
+import { type Envelope, numberUnder, pieceUnder } from './envelope.ts';
+import type { Pattern } from './patterns.ts';
 
 /** Moments this near to zero against the extreme are zero. */
 const ZERO = 1e-9;
 const NUMBERS = zeros(6);
 
+/** Moments of two patterns this near to each other are the same. */
+const SAME = 1e-9;
+
 /**
  * Length between the points of zero moment on either side of an extreme, in (NDS 5.3.6), under the term's own
- * combination and pattern: the longer of those without own weight and with the heaviest. It ends at a fixed support
- * and at the member's ends.
+ * combination: the longest of its own pattern and those that come to the same moment (live load on the span beside an
+ * overhang adds nothing over the support, but draws the zero nearer), without own weight and with the heaviest. It
+ * ends at a fixed support and at the member's ends.
  */
 export function zeroMomentLength(e: Envelope, term: Found, heaviest: number): number {
   const { beam } = e.parts.loading;
@@ -19,8 +25,40 @@ export function zeroMomentLength(e: Envelope, term: Found, heaviest: number): nu
     const oneWay = beam.supports === 'bearings' && !beam.fixed.left && !beam.fixed.right;
     if (oneWay) return beam.spans[0]!;
   }
-  const light = lengthAt(e, term, 0);
-  return heaviest > 0 && e.parts.own ? Math.max(light, lengthAt(e, term, heaviest)) : light;
+  let longest = 0;
+  for (const pattern of equals(e, term)) {
+    const same = { ...term, pattern };
+    longest = Math.max(longest, lengthAt(e, same, 0));
+    if (heaviest > 0 && e.parts.own) longest = Math.max(longest, lengthAt(e, same, heaviest));
+  }
+  return longest;
+}
+
+/** The term's pattern, and those without what adds nothing or with another case of snow that come to its moment. */
+function equals(e: Envelope, term: Found): Pattern[] {
+  const { combination: c, pattern, piece, at } = term;
+  if (e.plain[c]) return [pattern];
+  const x = at - e.parts.grid.edges[piece]!;
+  const read = (states: States) => pieceValue(states.data, STRIDE * piece, MOMENT, x);
+  const moment = numberUnder(e, c, pattern, read);
+  const nothing = SAME * Math.abs(moment);
+  const busy = { live: pattern.live, roofLive: pattern.roofLive };
+  let snow = false;
+  for (const { kind, parts } of e.parts.kinds) {
+    if (!parts || !e.list[c]!.factors[kind]) continue;
+    if (kind === 'snow') snow = true;
+    else {
+      parts.forEach((part, f) => {
+        if (part && Math.abs(read(part)) <= nothing) busy[kind as keyof typeof busy] &= ~(1 << f);
+      });
+    }
+  }
+  const found = [pattern];
+  for (const full of snow ? e.parts.snow.map((one) => one.full) : [pattern.snow]) {
+    const other = { ...busy, snow: full };
+    if (Math.abs(numberUnder(e, c, other, read) - moment) <= nothing) found.push(other);
+  }
+  return found;
 }
 
 function lengthAt(e: Envelope, term: Found, w: number): number {

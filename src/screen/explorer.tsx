@@ -4,6 +4,7 @@ import type { Glyphs } from './draw/glyphs.ts';
 import { Screen } from './draw/screen.tsx';
 import type { Theme } from './draw/theme.ts';
 import { drawState } from './draw-state.ts';
+import { restOf } from './rest.ts';
 import type { Effect, State } from './state.ts';
 import { useKeys } from './terminal/use-keys.ts';
 import { type Event, update } from './update.ts';
@@ -47,11 +48,11 @@ export function Explorer({ initial, columns, rows, theme, glyphs, perform }: Exp
     onPaste: (text) => happen([{ type: 'paste', text }]),
   });
 
-  const { settled } = state.current;
   useEffect(() => {
-    if (settled) return;
-    const rest = setTimeout(() => happen([{ type: 'settle' }]), 0);
-    return () => clearTimeout(rest);
+    const rest = restOf(state.current);
+    if (rest === null) return;
+    const timer = setTimeout(() => happen([{ type: 'settle' }]), rest.ms);
+    return () => clearTimeout(timer);
   });
 
   // The size is told from outside, so that a resize draws once, in the new size.

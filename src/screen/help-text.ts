@@ -8,6 +8,54 @@ export interface HelpSection {
   readonly lines: readonly (readonly [string, string])[];
 }
 
+/** Keys that the other views and the fields have, beside those they share with the explorer. */
+const OTHER_VIEWS: readonly HelpSection[] = [
+  {
+    title: 'in every view',
+    lines: [
+      ['Esc', 'back; the key that opened it leaves it too'],
+      ['↑↓ PgUp PgDn', 'scroll, or choose a line; Home and End go to its ends'],
+      ['i', 'inches or SI, where figures are shown'],
+    ],
+  },
+  {
+    title: 'while typing',
+    lines: [
+      ['Enter', 'take it; where it may not be, the reason is told and the old value stays'],
+      ['Esc', 'leave the old value'],
+    ],
+  },
+  {
+    title: 'adding',
+    lines: [['↑↓ Enter', 'what to add, then of which kind; the key beside a line takes it at once']],
+  },
+  { title: 'in the workings', lines: [['←→ or Tab', 'the number after, the number before']] },
+  {
+    title: 'in the moves',
+    lines: [
+      ['←→', 'deepen or widen, where the two stand side by side'],
+      ['Enter', 'apply it; u undoes it'],
+    ],
+  },
+  {
+    title: 'comparing pins',
+    lines: [
+      ['←→', 'the design in hand'],
+      ['Enter', 'go back to it'],
+      ['n', 'write a note on it'],
+      ['Delete', 'drop it'],
+    ],
+  },
+  {
+    title: 'in the headroom view',
+    lines: [
+      ['↑↓ ←→ [ ] { }', 'choose a height and nudge it, as the knobs'],
+      ['Enter', 'type it; a digit starts it too'],
+      ['Delete', 'no storey any more'],
+    ],
+  },
+];
+
 /** Every key and every word of the program, and the cautions. */
 export function helpSections(): readonly HelpSection[] {
   return [
@@ -20,6 +68,7 @@ export function helpSections(): readonly HelpSection[] {
       title: 'in the wood view',
       lines: WOOD_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
     },
+    ...OTHER_VIEWS,
     { title: 'words', lines: WORDS },
     {
       title: 'cautions',

@@ -21,8 +21,12 @@ export type Action =
   | 'moves'
   | 'pin'
   | 'headroom'
+  | 'reach'
+  | 'handovers'
+  | 'best'
   | 'proportions'
   | 'scatter'
+  | 'chart-scale'
   | 'compare'
   | 'began'
   | 'mark-began'
@@ -138,6 +142,34 @@ export const BINDINGS: readonly Binding[] = [
     action: 'scatter',
     help: 'scatter: the share of members that would deflect more than the limit, and what it assumes; again: no more',
     foot: 'scatter',
+  },
+  {
+    keys: 'L',
+    presses: ['L'],
+    action: 'chart-scale',
+    help: 'the chart logarithmic, where powers are evenly steep, or even from 0',
+    foot: '',
+  },
+  {
+    keys: 'f',
+    presses: ['f'],
+    action: 'best',
+    help: 'for what: what counts as best, the lightest, the shallowest, the least wood, the cheapest',
+    foot: 'best',
+  },
+  {
+    keys: 'e',
+    presses: ['e'],
+    action: 'reach',
+    help: 'reach: the longest span of every size, what stops it there, its price where there is one',
+    foot: 'reach',
+  },
+  {
+    keys: 'H',
+    presses: ['H'],
+    action: 'handovers',
+    help: 'handovers: along the knob in hand, which size is best from where to where',
+    foot: 'handovers',
   },
   {
     keys: 'h',
@@ -274,6 +306,8 @@ export const WORDS: readonly (readonly [string, string])[] = [
   ['stands to', 'the l/h up to which every check passes, by the power laws'],
   ['rack', 'the stock sizes of the chosen wood, lightest first'],
   ['lit', 'the lightest size of the rack that passes'],
+  ['◊ on the rack', 'it passes, and none that passes is as light and as shallow'],
+  ['handover', 'the value of a knob at which the best size changes to the next'],
   ['reach', 'the longest span at which a size still passes'],
   ['workings', 'the calculation behind a number, line by line, with clauses'],
   ['pin', 'a design set aside to compare; kept in the session file'],

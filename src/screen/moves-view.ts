@@ -5,7 +5,7 @@ import { powersOf } from '../explore/powers.ts';
 import { refusedWord } from '../explore/refused-word.ts';
 import { showInches, showRatio, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
-import { standingDepth, standingWidth } from '../timber/index.ts';
+import { prepare, standingDepth, standingWidth } from '../timber/index.ts';
 import type { CheckId } from '../timber/report.ts';
 import { type Answer, answerOf } from './answer.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
@@ -90,7 +90,7 @@ export function movesView(state: State, mode: MovesMode): MovesView {
     rows: moves.moves.map((move) => rowOf(move, units)),
     none: 'No change of this member helps.',
     after: inHand === null ? [] : afterText(inHand),
-    note: inHand === null ? '' : noteText(inHand),
+    note: inHand === null ? '' : noteText(inHand, prepare(memberOf(state)).loaded),
     takes: inHand === null ? '' : takesText(inHand, units),
   };
 }
@@ -157,10 +157,10 @@ function afterText(move: Move): string[] {
   return byId.map(([id, ratio]) => `${CHECK_WORD[id]} ${showRatio(ratio)}`);
 }
 
-function noteText({ kind, label, times, refused, passes }: Move): string {
+function noteText({ kind, label, times, refused, passes }: Move, loaded: boolean): string {
   if (refused !== null) return `${kind}, ${label}: not allowed, ${refusedWord(refused)}`;
   const many = times > MANY ? `, with ${times.toFixed(2)} x as many members` : '';
-  return `${kind}, ${label}: ${passes ? 'passes' : 'does not do it alone'}${many}`;
+  return `${kind}, ${label}: ${loaded ? (passes ? 'passes' : 'does not do it alone') : 'carries nothing'}${many}`;
 }
 
 function takesText({ change }: Move, units: Units): string {

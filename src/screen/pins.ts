@@ -20,7 +20,7 @@ export function pinned(state: State): State {
   const same = pins.findIndex((pin) => isSame(pin.member, member));
   if (same >= 0) return refused(state, `this design is pin ${same + 1} already; c compares`);
   if (pins.length >= MAX_PINS)
-    return refused(state, `${MAX_PINS} designs are pinned, the most there is room for; drop one under c`);
+    return refused(state, `${MAX_PINS} designs are pinned, which is all: drop one under c`);
   const next = withPins(state, [...pins, { note: '', member, written: undefined }]);
   const text = `pinned as ${pins.length + 1}; c compares, and takes a note`;
   return { ...next, notice: { text, refusal: false } };

@@ -17,7 +17,7 @@ export function scatterRemarks(member: Member, ratio: number | null): string[] {
   if (COV === null) return ['scatter: nobody has stated a COV of E for this wood; it can be typed under y'];
   const { over, stiff, soft } = scatterOf(ratio, COV);
   return [
-    `scatter: ${shareText(over)} deflect over the limit; E normal, COV ${COV} (NDS App. F)`,
+    `${shareText(over)} over the deflection limit: E normal, COV ${COV} (NDS App. F)`,
     `deflection ${showRatio(stiff)} to ${showRatio(soft)}, 5th to 95th percentile; ${SCATTER_ASSUMES}`,
   ];
 }
@@ -29,11 +29,11 @@ function shareText(share: number): string {
   const percent = share * PERCENT;
   const text =
     percent < 0.1
-      ? 'under 0.1'
+      ? '<0.1'
       : percent > 99.9
-        ? 'over 99.9'
+        ? '>99.9'
         : percent < 10 || percent > 90
           ? percent.toFixed(1)
           : percent.toFixed(0);
-  return `${text} % of such members`;
+  return `${text} % of members`;
 }

@@ -5,6 +5,7 @@ import type { Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
 import type { Member, Product } from '../timber/member.ts';
 import type { Edit } from './edit.ts';
+import type { FoundAround, Strip } from './handover-now.ts';
 
 /** Everything the explorer knows; one value, never changed in place. */
 export interface State {
@@ -25,6 +26,8 @@ export interface State {
   readonly began?: Readonly<Record<string, Member>>;
   /** What the scatter of stiffness comes to is told among the remarks. */
   readonly scatter?: boolean;
+  /** The chart's ratio axis is even; absent or false: logarithmic. */
+  readonly linear?: boolean;
   readonly mode: Mode;
   readonly notice: Notice | null;
   readonly columns: number;
@@ -34,6 +37,8 @@ export interface State {
    * the rest (cures, reach, exponents, chart) with the next frame, which follows as soon as no key waits.
    */
   readonly settled: boolean;
+  /** The handovers that were found last; they hold for their own member and knob alone. */
+  readonly found?: FoundAround;
 }
 
 /** A point to come back to. */
@@ -65,9 +70,11 @@ export type Mode =
   | AddMode
   | MovesMode
   | CompareMode
+  | HandoversMode
   | HeadroomMode
   | { readonly name: 'copy' }
   | { readonly name: 'proportions' }
+  | { readonly name: 'reach'; readonly scroll: number }
   | { readonly name: 'leaving' }
   | StartMode;
 
@@ -115,6 +122,14 @@ export interface HeadroomMode {
   readonly edit: Edit | null;
   /** Why the last key did nothing. */
   readonly fault: string | null;
+}
+
+/** The handovers along the knob in hand. */
+export interface HandoversMode {
+  readonly name: 'handovers';
+  /** null: still being found. */
+  readonly strip: Strip | null;
+  readonly scroll: number;
 }
 
 /** Designs side by side. */

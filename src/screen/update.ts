@@ -1,5 +1,6 @@
 import { isQuick } from '../explore/is-quick.ts';
 import { rulesOf } from './modes/index.ts';
+import { rested } from './rest.ts';
 import { memberOf, refused, type State, type Step, still } from './state.ts';
 import type { KeyPress } from './terminal/key-press.ts';
 
@@ -40,7 +41,7 @@ function next(state: State, event: Event): Step {
     case 'resize':
       return still({ ...state, columns: event.columns, rows: event.rows });
     case 'settle':
-      return still({ ...state, settled: true });
+      return still(rested(state));
     case 'save-failed':
       return still(refused(state, event.reason));
     case 'saved': {

@@ -38,7 +38,12 @@ function reasonOf(member: Member, answer: Answer, passes: boolean): string {
   const name = (begins: boolean) =>
     result === undefined ? CHECK_SUBJECT[governing] : checkAndPlace(member, result, begins);
   const ratio = showRatio(answer.worst);
-  if (passes) return `Everything passes; ${name(false)} is nearest its limit at ${ratio}.`;
+  if (passes) {
+    const nearest = `is nearest its limit at ${ratio}.`;
+    const sentence = `Everything passes; ${name(false)} ${nearest}`;
+    // The word before it says that everything passes.
+    return sentence.length <= MOST_REASON ? sentence : `${name(true)} ${nearest}`;
+  }
   if (!Number.isFinite(answer.worst)) return `${name(true)} stops it: no tie-down is stated.`;
   const sentence = `${name(true)} stops it at ${ratio}`;
   const pattern = result === undefined ? '' : patternText(result);

@@ -2,8 +2,7 @@ import { BEST_WORD } from '../explore/best.ts';
 import type { Cure } from '../explore/cures.ts';
 import { whyNotWhole } from '../explore/exponents.ts';
 import type { Knob } from '../explore/knob.ts';
-import { lightestAlong } from '../explore/lightest-along.ts';
-import { powersOf, standsTo } from '../explore/powers.ts';
+import { ASKS_NOTHING, powersOf, standsTo } from '../explore/powers.ts';
 import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack.ts';
 import type { RankedSize } from '../explore/ranked.ts';
 import { ratiosOf } from '../explore/ratios.ts';
@@ -41,6 +40,7 @@ import type { CheckResult } from '../timber/report.ts';
 import { type Answer, answerOf } from './answer.ts';
 import { beganMark } from './began.ts';
 import { chartView } from './chart-view.ts';
+import { handoverText } from './handover-now.ts';
 import { type Action, BINDINGS } from './keys.ts';
 import { measureName, patternText, placeOf } from './place-words.ts';
 import { bandOf, scatterRemarks } from './scatter-text.ts';
@@ -88,10 +88,8 @@ export function viewOf(state: State): View {
     exponents: wide ? exponentsView(member, answer, settled) : [],
     ruler: rulerOf(member, answer, state.ghost?.member ?? null),
     rack: rackView(member, answer, units, settled),
-    handover: settled
-      ? lightestAlong(member, answer.rack, answer.reaches, (span) => showSpanDown(span, units))
-      : null,
-    chart: wide ? chartView(member, knobs[index]!, spanKnob(member, knobs), units, settled) : null,
+    handover: settled ? handoverText(state) : null,
+    chart: wide ? chartOf(state, member, knobs, index) : null,
     cures: cures.map((cure) => cureView(member, answer, cure, units)),
     remarks: [
       ...(state.scatter ? scatterRemarks(member, answer.powers[2].ratio) : []),
@@ -112,6 +110,11 @@ export function viewOf(state: State): View {
           }
         : null,
   };
+}
+
+function chartOf(state: State, member: Member, knobs: readonly Knob[], index: number): View['chart'] {
+  const chart = chartView(member, knobs[index]!, spanKnob(member, knobs), unitsOf(state), state.settled);
+  return chart === null || !state.linear ? chart : { ...chart, linear: true };
 }
 
 /** The knob of the length that l/h goes by: what a chart is drawn against where the knob in hand is a choice. */
@@ -156,7 +159,9 @@ function gaugesOf(
       demand: result === undefined ? '' : demandText(member, result, units),
       brief: result === undefined ? '' : demandText(member, result, units, true),
       alone:
-        ratio === null ? '' : `alone, to l/h ${standsTo(answer.spanToDepth, ratio, exponent).toFixed(1)}`,
+        ratio === null || ratio <= ASKS_NOTHING
+          ? ''
+          : `alone, to l/h ${standsTo(answer.spanToDepth, ratio, exponent).toFixed(1)}`,
     };
   });
 }
@@ -249,6 +254,8 @@ function rackView(member: Member, answer: Answer, units: Units, settled: boolean
         weight: weightNumber(each.weight, units),
         ratios: [shear!, bending!, deflection!] as const,
         passes: each.passes,
+        nonDominated: each.nonDominated,
+        lacking: each.inYard === false,
         stops: stopsWord(each, units),
         // Found for the rows that are drawn alone: a long rack holds many that are not.
         get reach() {
@@ -265,8 +272,9 @@ function woodOfRow(rack: Rack, size: Size): { readonly wood: string; readonly na
   return { wood, named: isSawn(size.product) ? `${size.label} ${wood}` : sizeName(rack, size) };
 }
 
-function stopsWord({ refused, passes, governing, over }: RankedSize, units: Units): string {
+function stopsWord({ refused, passes, governing, over, inYard }: RankedSize, units: Units): string {
   if (over > 0) return `over by ${showInches(over, units)}`;
+  if (passes && inYard === false) return 'not in yard';
   if (refused !== null) return refusedWord(refused);
   return passes || governing === null ? '' : CHECK_WORD[governing];
 }
@@ -347,6 +355,9 @@ const FOOT_ORDER: readonly Action[] = [
   'diagrams',
   'wood',
   'next-member',
+  'best',
+  'reach',
+  'handovers',
   'headroom',
   'proportions',
   'scatter',

@@ -129,6 +129,10 @@ export interface RackRowView {
   /** Ratios of shear, bending, deflection; null when refused or not applicable. */
   readonly ratios: readonly [number | null, number | null, number | null];
   readonly passes: boolean;
+  /** It passes, and none that passes is as light and as shallow. */
+  readonly nonDominated?: boolean;
+  /** The yard does not have it, or none so long. */
+  readonly lacking?: boolean;
   /** What stops it: "bending", "uplift", or the clause that refuses the size. Empty when it passes. */
   readonly stops: string;
   /** Longest span at which it passes: "13'-3"". */
@@ -140,6 +144,8 @@ export interface ChartView {
   readonly title: string;
   /** Sampled at equal steps of the knob: one series a power; NaN where there is no value. */
   readonly series: readonly { readonly power: 1 | 2 | 3; readonly ratios: readonly number[] }[];
+  /** The ratio axis is even from 0 to twice the limit; absent: logarithmic, as the gauges are. */
+  readonly linear?: boolean;
   /** Where the knob stands now, 0 to 1 along the axis. */
   readonly now: number;
   /** Labels at 0, 1/4, 1/2, 3/4, 1 of the axis. */

@@ -7,6 +7,7 @@ import {
   type DesignValues,
   isRefusal,
   lookUp,
+  reportMember,
   sameStock,
   shortSpecies,
   shortWood,
@@ -178,7 +179,8 @@ const CAPACITY: Readonly<Partial<Record<CheckResult['id'], string>>> = {
 };
 
 function reportLines(draft: Member, units: Units): WoodLine[] {
-  const { report } = answerOf(draft);
+  // The answer's own report has its sizes in feet and inches.
+  const report = units === 'us' ? answerOf(draft).report : reportMember(draft, units);
   const lines: WoodLine[] = [];
   for (const id of Object.keys(CAPACITY) as CheckResult['id'][]) {
     const check = report.checks.find((each) => each.id === id);

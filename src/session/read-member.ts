@@ -1,6 +1,6 @@
 import { LOAD_KINDS } from '../loads/kinds.ts';
 import type { AppliedLoad, CombinationSet } from '../loads/loading.ts';
-import { parseQuantity, type QuantityKind } from '../quantity/index.ts';
+import { parseQuantity, type QuantityKind, showSpan } from '../quantity/index.ts';
 import { type Beam, beamLength, supportPlaces } from '../statics/beam.ts';
 import {
   ASSUMED_KEYS,
@@ -174,7 +174,10 @@ function readLoad(load: LoadFile, whole: number, path: Path): AppliedLoad {
     if (text === undefined) return otherwise;
     const at = length(text);
     if (at > whole + HAIR) {
-      throw new SessionFault([...path, key], `${text} is off the member, which is ${inches(whole)} long`);
+      throw new SessionFault(
+        [...path, key],
+        `${text} is off the member, which is ${showSpan(whole, 'us')} long`,
+      );
     }
     return Math.min(at, whole);
   };
@@ -202,10 +205,6 @@ function readLoad(load: LoadFile, whole: number, path: Path): AppliedLoad {
     throw new SessionFault([...path, stray], 'a point load takes at instead of from and to');
   if (load.at === undefined) throw new SessionFault([...path, 'at'], 'missing; write "at": "5 ft"');
   return { type: 'point', kind, at: place('at', 0), load: read('pointLoad', load.point) };
-}
-
-function inches(value: number): string {
-  return `${Number(value.toFixed(3))} in`;
 }
 
 function readStock(file: MemberFile['stock'], path: Path): Stock {

@@ -1,4 +1,11 @@
-import { liveReductionFactor } from '../loads/reduction.ts';
+import type { LiveReduction } from '../loads/loading.ts';
+import {
+  HEAVY_LIVE_LOAD,
+  LEAST_INFLUENCE_AREA,
+  liveReductionFactor,
+  reductionBar,
+  SQ_IN_PER_SQ_FT,
+} from '../loads/reduction.ts';
 import { showQuantity, type Units } from '../quantity/index.ts';
 import { temperatureIn } from './factors/temperature.ts';
 import { feetIn, inchesIn } from './factors/wording.ts';
@@ -24,13 +31,28 @@ export function assumptionsOf(member: Member, units: Units = 'us'): string[] {
       'spans, live, snow and wind on plan; dead load along the slope; deflection square to it, over its length',
     );
   }
-  const reduced = liveReductionFactor(member.area.live, member.liveReduction);
-  if (member.liveReduction !== null) {
-    const { KLL, area } = member.liveReduction;
-    const served = showQuantity('area', area, units);
-    sentences.push(`floor live load taken at ${round(reduced)} of it: KLL ${KLL}, AT ${served}, ASCE 7 4.7`);
-  }
+  if (member.liveReduction !== null) sentences.push(reduction(member.area.live, member.liveReduction, units));
   return sentences;
+}
+
+/** What became of the floor live-load reduction that was asked for. */
+function reduction(live: number, asked: LiveReduction, units: Units): string {
+  const { KLL, area } = asked;
+  const served = `KLL ${KLL}, AT ${showQuantity('area', area, units)}`;
+  switch (reductionBar(live, asked)) {
+    case 'heavy': {
+      const most = showQuantity('areaLoad', HEAVY_LIVE_LOAD / SQ_IN_PER_SQ_FT, units);
+      return `floor live load not reduced: over ${most}, ASCE 7 4.7.3`;
+    }
+    case 'small': {
+      const least = showQuantity('area', LEAST_INFLUENCE_AREA * SQ_IN_PER_SQ_FT, units);
+      return `floor live load not reduced: ${served}, KLL AT under ${least}, ASCE 7 4.7.2`;
+    }
+    case null: {
+      const part = round(liveReductionFactor(live, asked));
+      return `floor live load taken at ${part} of it: ${served}, ASCE 7 4.7`;
+    }
+  }
 }
 
 function round(value: number): number {

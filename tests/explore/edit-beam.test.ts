@@ -74,7 +74,7 @@ describe('adding', () => {
     expect(addSpan(six)).toEqual({ fault: 'a member has at most 6 spans' });
     const full = memberOf({ loads: Array(100).fill(POST) });
     expect(addLoad(full, 'point', 'dead', 'spans.0', 'us')).toEqual({
-      fault: 'a member carries at most 100 loads',
+      fault: 'a member carries at most 100 loads: take one out first',
     });
     expect(addOverhang(memberOf({ overhangs: { left: '2 ft' } }), 'left', 'us')).toHaveProperty('fault');
     expect(addOverhang(memberOf({ supports: 'cantilever' }), 'left', 'us')).toHaveProperty('fault');

@@ -198,6 +198,19 @@ describe('effects', () => {
     expect(effects.hogging[0]!.zeroMomentLength).toBeCloseTo(40, 8);
   });
 
+  test('give the longest length between points of zero moment of the patterns that come to the same moment', () => {
+    const beam = { spans: [288], overhangs: { left: 0, right: 96 } };
+    const [dead, live] = [10, 80 / 3];
+    const loading = member(beam, { tributary: 1, area: { dead, live } });
+    const effects = compileEffects(loading, { heaviest: 0, deadFactor: 1 });
+    // Over the support w a²/2 whether the span is loaded or not; with dead load alone on it, RA = (D l² - (D + L) a²)/2l
+    // and the moment passes zero at 2 RA/D.
+    const group = effects.hogging.find(({ duration }) => duration === 1)!;
+    expect(group.terms[0]!.base).toBeCloseTo(((dead + live) * 96 ** 2) / 2, 6);
+    const reaction = (dead * 288 ** 2 - (dead + live) * 96 ** 2) / (2 * 288);
+    expect(group.zeroMomentLength).toBeCloseTo(288 - (2 * reaction) / dead + 96, 6);
+  });
+
   test('sort their bending groups by the cases of NDS Table 3.3.3', () => {
     const options = { heaviest: 0, deadFactor: 1 };
     const cases = (loading: Loading) =>

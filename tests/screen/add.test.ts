@@ -133,7 +133,7 @@ describe('taking out', () => {
       refusal: true,
     });
     expect(pressing(stateOf([{}], { knob: 'section.depth' }), 'delete').state.notice?.text).toMatch(
-      /takes out a span, an overhang or a load; depth can only be changed/,
+      /takes out a span, overhang or load; depth can only be changed/,
     );
   });
 

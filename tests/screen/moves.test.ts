@@ -92,7 +92,9 @@ describe('the moves view', () => {
   it('applies nothing where nothing helps', () => {
     const state = pressing(open(UNLOADED), 'end', 'home', 'escape').state;
     expect(state.past).toEqual([]);
-    expect(shown(open(UNLOADED), 80, 24).join('\n')).toContain('No change of this member helps.');
+    const text = shown(open(UNLOADED), 80, 24).join('\n');
+    expect(text).toContain('No change of this member helps.');
+    expect(text).toContain('deepen, (2) 2x14: carries nothing');
   });
 
   it('stands at 60 x 18, in ASCII and on a wide screen with nothing beyond the edge', () => {

@@ -50,14 +50,14 @@ describe('the scatter of stiffness', () => {
     const on = pressing(stateOf(), 'z').state;
     const text = shown(on, 80, 24).join('\n');
     expect(text).toMatch(
-      /scatter: \d+(\.\d)? % of such members deflect over the limit; E normal, COV 0\.25 \(NDS App\. F\)/,
+      / \d+(\.\d)? % of members over the deflection limit: E normal, COV 0\.25 \(NDS App\. F\)/,
     );
-    expect(shown(pressing(on, 'z').state, 80, 24).join('\n')).not.toContain('scatter:');
+    expect(shown(pressing(on, 'z').state, 80, 24).join('\n')).not.toContain('% of members');
     expect(on.past).toEqual([]);
   });
 
   it('is half of the members where the mean is just at the limit', () => {
-    expect(scatterRemarks(memberOf(stateOf()), 1)[0]).toContain('scatter: 50 % of such members');
+    expect(scatterRemarks(memberOf(stateOf()), 1)[0]).toContain('50 % of members over');
   });
 
   it('is said to be unknown where nobody has stated it', () => {

@@ -175,6 +175,16 @@ describe('keeping and leaving', () => {
   });
 });
 
+describe('the keys of the meeting', () => {
+  it('are two for the best move, one to pin, one to compare, one for the workings of what governs', () => {
+    const start = stateOf([{ spans: ['16 ft'] }]);
+    expect(memberOf(pressing(start, 'm', 'enter').state)).not.toBe(memberOf(start));
+    expect(pressing(start, 'p').state.session.members[0]!.pins).toHaveLength(1);
+    expect(pressing(start, 'c').state.mode.name).toBe('compare');
+    expect(pressing(start, 'w').state.mode).toMatchObject({ name: 'workings', page: 0 });
+  });
+});
+
 describe('members', () => {
   it('are gone through with one key, round and round', () => {
     const three = stateOf([{}, {}, {}]);

@@ -29,4 +29,15 @@ describe('the verdict', () => {
     expect(passes).toBe(true);
     expect(reason).toMatch(/^Everything passes; bending is nearest its limit at 0\.\d\d\.$/);
   });
+
+  test('of one that passes keeps its ratio where the place is long: a narrow screen has no room for more', () => {
+    const { reason } = verdict({
+      spans: ['12 ft'],
+      overhangs: { left: '0 ft', right: '6 ft' },
+      bracingBottom: 'continuous',
+      area: { dead: '5 psf', live: '30 psf' },
+    });
+    expect(reason).toMatch(/ of the right overhang is nearest its limit at 0\.\d\d\.$/);
+    expect(reason.length).toBeLessThanOrEqual(69);
+  });
 });

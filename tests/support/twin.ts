@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { chooseGlyphs, type Glyphs } from '../../src/screen/draw/glyphs.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
+import { restOf } from '../../src/screen/rest.ts';
 import type { State } from '../../src/screen/state.ts';
 import { readSession } from '../../src/session/index.ts';
 import { afterEvents, pressing, stateOf } from './state.ts';
@@ -34,6 +35,8 @@ export function twinOf(
       state = afterEvents(state, { type: 'resize', columns: toColumns, rows: toRows }).state;
     },
     screen() {
+      // The explorer works out the rest as soon as no key waits.
+      while (restOf(state) !== null) state = afterEvents(state, { type: 'settle' }).state;
       const { canvas } = drawState(state, glyphs);
       return Array.from({ length: canvas.rows }, (_, y) => canvas.text(y));
     },

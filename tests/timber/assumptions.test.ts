@@ -37,3 +37,18 @@ test('reasons for factors follow the units of the report, the numbers do not', (
   expect(reason(us)).toBe('sustained 100 to 125 F, dry, NDS Table 2.3.3');
   expect(reason(si)).toBe('sustained 38 to 52 C, dry, NDS Table 2.3.3');
 });
+
+test('a live-load reduction says what stays of the load, or why nothing is taken off', () => {
+  const last = (live: number, area: number, units: 'us' | 'si' = 'us') =>
+    assumptionsOf(
+      memberOf({ area: { ...assumed.area, live: live / 144 }, liveReduction: { area: area * 144, KLL: 2 } }),
+      units,
+    ).at(-1);
+  // 0.25 + 15/sqrt(1200) = 0.683
+  expect(last(50, 600)).toBe('floor live load taken at 0.683 of it: KLL 2, AT 600 ft2, ASCE 7 4.7');
+  expect(last(50, 199)).toBe(
+    'floor live load not reduced: KLL 2, AT 199 ft2, KLL AT under 400 ft2, ASCE 7 4.7.2',
+  );
+  expect(last(101, 600)).toBe('floor live load not reduced: over 100 psf, ASCE 7 4.7.3');
+  expect(last(101, 600, 'si')).toBe('floor live load not reduced: over 4.79 kPa, ASCE 7 4.7.3');
+});

@@ -29,6 +29,8 @@ export interface Glyphs {
   /** The size at hand in the rack, and the lightest that passes. */
   readonly current: string;
   readonly lightest: string;
+  /** A size that passes where none is as light and as shallow. */
+  readonly nonDominated: string;
   /** Where a curve is at its largest or smallest. */
   readonly extreme: string;
   /** Points at now from below. */
@@ -100,6 +102,7 @@ const UNICODE: Glyphs = {
   crossover: '┊',
   current: '●',
   lightest: '◆',
+  nonDominated: '◊',
   extreme: '•',
   pointer: '▲',
   offLeft: '«',
@@ -149,6 +152,7 @@ const ASCII: Glyphs = {
   crossover: ':',
   current: '@',
   lightest: '*',
+  nonDominated: '+',
   extreme: 'o',
   pointer: '^',
   offLeft: '<',

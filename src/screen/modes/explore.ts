@@ -4,6 +4,7 @@ import { takeSize } from '../../explore/rack.ts';
 import { bestOf } from '../../explore/ranked.ts';
 import { rankingOf } from '../../session/index.ts';
 import { backToBegan, markBegan } from '../began.ts';
+import { nextBest } from '../best-choice.ts';
 import { editOf, inserted } from '../edit.ts';
 import { type Action, actionOf, startsEntry } from '../keys.ts';
 import { drawExplorer } from '../layout.ts';
@@ -22,14 +23,16 @@ import {
   withSession,
 } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { viewOf } from '../view-model.ts';
+import { viewOf, WIDE } from '../view-model.ts';
 import { openCompare } from './compare.ts';
 import { copied } from './copy.ts';
 import { openDiagrams } from './diagrams.ts';
 import { opened } from './entry.ts';
+import { openHandovers } from './handovers.ts';
 import { openHeadroom } from './headroom.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { openMoves } from './moves.ts';
+import { openReach } from './reach.ts';
 import { save } from './save-as.ts';
 import { openWood } from './wood.ts';
 import { openedWorkings } from './workings.ts';
@@ -94,8 +97,16 @@ function act(state: State, action: Action): Step {
       return still(openWood(state));
     case 'diagrams':
       return still(openDiagrams(state));
+    case 'chart-scale':
+      return still(otherScale(state));
     case 'scatter':
       return still({ ...state, scatter: !state.scatter, notice: null });
+    case 'handovers':
+      return still(openHandovers(state));
+    case 'reach':
+      return still(openReach(state));
+    case 'best':
+      return still(nextBest(state));
     case 'proportions':
       return still({ ...state, mode: { name: 'proportions' }, notice: null });
     case 'headroom':
@@ -170,7 +181,7 @@ function takeLit(state: State): State {
   const member = memberOf(state);
   const lit = bestOf(member, rankingOf(state.session));
   if (lit === null)
-    return refused(state, 'no size of this wood passes: try another grade, a shorter span or less load');
+    return refused(state, 'no size on the rack passes: m shows what would help, y other woods');
   return { ...withMember(state, takeSize(member, lit)), ghost: { knob: 'rack', member } };
 }
 
@@ -191,6 +202,13 @@ function redo(state: State): State {
   const [next, ...future] = state.future;
   if (next === undefined) return refused(state, 'nothing to redo');
   return { ...state, ...next, past: [...state.past, momentOf(state)], future, ghost: null, notice: null };
+}
+
+/** The chart logarithmic or even; said where no chart is in sight. */
+function otherScale(state: State): State {
+  const linear = !state.linear;
+  const text = `the chart is ${linear ? 'even from 0' : 'logarithmic'}${state.columns < WIDE ? `; it is shown from ${WIDE} columns` : ''}`;
+  return { ...state, linear, notice: { text, refusal: false } };
 }
 
 function turnTo(state: State, by: number): State {

@@ -5,12 +5,14 @@ import { copy } from './copy.ts';
 import { diagrams } from './diagrams.ts';
 import { entry } from './entry.ts';
 import { explore } from './explore.ts';
+import { handovers } from './handovers.ts';
 import { headroom } from './headroom.ts';
 import { help } from './help.ts';
 import { leaving } from './leaving.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { moves } from './moves.ts';
 import { proportions } from './proportions.ts';
+import { reach } from './reach.ts';
 import { saveAs } from './save-as.ts';
 import { start } from './start.ts';
 import { wood } from './wood.ts';
@@ -29,6 +31,8 @@ const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
   moves,
   headroom,
   proportions,
+  reach,
+  handovers,
   compare,
   copy,
   leaving,

@@ -4,7 +4,7 @@ import type { Glyphs } from '../draw/glyphs.ts';
 import { curveRows, heightAt, resample } from '../draw/plot.ts';
 import type { ChartView, View } from '../view.ts';
 import { heading, isFree, type Region, rule } from './region.ts';
-import { along, SCALE_LABELS } from './scale.ts';
+import { along, HIGHEST, SCALE_LABELS } from './scale.ts';
 
 /** Cells left of the plot: a blank, the ratio's figures, the axis. */
 const BEFORE = 7;
@@ -12,6 +12,24 @@ const BEFORE = 7;
 const AFTER = 2;
 /** Rows that are not the plot: heading, axis, labels. */
 const AROUND = 3;
+
+/** How ratios stand along the axis: 0 at its foot, 1 at its head. */
+interface RatioScale {
+  along(ratio: number): number;
+  readonly labels: readonly (readonly [number, string])[];
+}
+
+const LOGARITHMIC: RatioScale = { along, labels: SCALE_LABELS };
+const EVEN: RatioScale = {
+  along: (ratio) => ratio / HIGHEST,
+  labels: [
+    [0, '0'],
+    [0.5, '.5'],
+    [1, '1'],
+    [1.5, '1.5'],
+    [2, '2'],
+  ],
+};
 
 /** Fewer rows of plot are noise: a layout that has only less shows reach in the rack instead. */
 export const LEAST_CHART_ROWS = 9 + AROUND;
@@ -41,12 +59,13 @@ export function drawChart(
   if (options.ruled) heading(canvas, region, plot.x, title);
   else if (title.length <= plot.columns) canvas.put(plot.x, region.y, title, 'quiet');
 
-  drawRatioAxis(canvas, plot, glyphs);
+  const scale = chart.linear === true ? EVEN : LOGARITHMIC;
+  drawRatioAxis(scale, canvas, plot, glyphs);
   drawKnobAxis(chart, canvas, plot, region, glyphs);
   const now = plot.x + Math.floor(Math.max(0, Math.min(1, chart.now)) * (plot.columns - 1));
   const beads: number[] = [];
   for (const { power, ratios } of chart.series) {
-    const heights = ratios.map(along);
+    const heights = ratios.map(scale.along);
     const places = resample(heights, plot.columns, plot.rows);
     const curve = curveRows(places, plot.rows, glyphs.chart.lines[power - 1]!);
     for (const { column, row, text } of curve) overlay(canvas, plot.x + column, plot.y + row, text);
@@ -58,16 +77,17 @@ export function drawChart(
   canvas.put(now, plot.y + plot.rows, glyphs.pointer, 'nowStrong');
 }
 
-function rowOf(ratio: number, plot: Region): number {
-  return plot.y + plot.rows - 1 - Math.round(along(ratio) * (plot.rows - 1));
+function rowOf(ratio: number, scale: RatioScale, plot: Region): number {
+  return plot.y + plot.rows - 1 - Math.round(scale.along(ratio) * (plot.rows - 1));
 }
 
 /** The ratio's figures at the left and the line at the limit. */
-function drawRatioAxis(canvas: Canvas, plot: Region, glyphs: Glyphs): void {
+function drawRatioAxis(scale: RatioScale, canvas: Canvas, plot: Region, glyphs: Glyphs): void {
   const axis = plot.x - 1;
   for (let y = plot.y; y < plot.y + plot.rows; y += 1) canvas.put(axis, y, glyphs.chart.upright, 'quiet');
-  for (const [ratio, label] of SCALE_LABELS) canvas.putRight(axis - 1, rowOf(ratio, plot), label, 'quiet');
-  canvas.put(plot.x, rowOf(1, plot), glyphs.chart.limit.repeat(plot.columns), 'quiet');
+  for (const [ratio, label] of scale.labels)
+    canvas.putRight(axis - 1, rowOf(ratio, scale, plot), label, 'quiet');
+  canvas.put(plot.x, rowOf(1, scale, plot), glyphs.chart.limit.repeat(plot.columns), 'quiet');
 }
 
 /** The knob's axis below the plot, with a tick and a label at each quarter as far as there is room. */

@@ -2,6 +2,7 @@ import type { Canvas } from '../draw/canvas.ts';
 import { cells, shorten, wrap } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { EntryView, KnobView, View } from '../view.ts';
+import { fitted } from './knob-text.ts';
 import { heading, type Region, rule } from './region.ts';
 
 /** Where the field being typed stands on the screen, in cells. */
@@ -18,8 +19,6 @@ const MARGIN = 3;
 /** Cells the field being typed takes where its label leaves them, and those the label must leave. */
 const FIELD = 14;
 const LEAST_FIELD = 9;
-/** The part of a row that a value may take before it is shortened. */
-const VALUE_SHARE = 0.65;
 /** Rows that a fault and a hint may take below the knob in hand. */
 const FAULT_ROWS = 6;
 const HINT_ROWS = 2;
@@ -86,8 +85,7 @@ function drawKnob(
   const end = region.x + Math.min(region.columns, MOST_COLUMNS) - 4;
   const left = region.x + MARGIN;
   const room = end - left + 1;
-  const value = shorten(cells(knob.value), Math.floor(room * VALUE_SHARE), glyphs);
-  const label = shorten(cells(knob.label), room - value.length - 1, glyphs);
+  const { label, value } = fitted(cells(knob.label), cells(knob.value), room, glyphs);
   canvas.put(left, y, label, style);
   canvas.putRight(end, y, value, style);
   if (knob.fault !== null) canvas.put(end + 1, y, '!', 'governsStrong');

@@ -179,6 +179,7 @@ function drawRow(
   canvas.put(x, y, further, 'quiet');
   if (isCurrent) canvas.put(x + 1, y, glyphs.current, 'nowStrong');
   if (isLit) canvas.put(x + 2, y, glyphs.lightest, 'strong');
+  else if (row.nonDominated) canvas.put(x + 2, y, glyphs.nonDominated, row.lacking ? 'quiet' : 'plain');
   const own = columns.wood > 0 ? columns.label - GAP - columns.wood : columns.label;
   const label = columns.wood > 0 ? row.label : (row.named ?? row.label);
   canvas.put(x + MARGIN, y, clip(cells(label), own, glyphs), style);
@@ -209,6 +210,7 @@ const NARROW: Readonly<Record<string, string>> = {
   deflection: 'defl.',
   'total defl.': 'total',
   slenderness: 'slender',
+  'not in yard': 'no yard',
 };
 
 function narrowed(stops: string, width: number): string {
@@ -219,5 +221,5 @@ function narrowed(stops: string, width: number): string {
 function rowStyle(row: RackRowView, isCurrent: boolean, isLit: boolean): Style {
   if (isCurrent) return 'nowStrong';
   if (isLit) return 'strong';
-  return row.passes ? 'plain' : 'quiet';
+  return row.passes && !row.lacking ? 'plain' : 'quiet';
 }

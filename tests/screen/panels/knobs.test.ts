@@ -66,4 +66,15 @@ describe('the knobs', () => {
       '    100 ft',
     ]);
   });
+
+  it('shorten a label as draughtsmen do before anything is cut, and cut after a whole word', () => {
+    const row = (label: string, value: string) =>
+      knobs({ ...failing, knob: 0, knobs: [{ ...failing.knobs[0]!, label, value }] }, 3).rows[1];
+    expect(row('tributary', `10'-11 1/2"`)).toBe(` ► trib.    10'-11 1/2"`);
+    expect(row('overhang left', `3'-11 1/2"`)).toBe(` ► ovhg L    3'-11 1/2"`);
+    expect(row('overhang left', `4'-0"`)).toBe(` ► overhang left  4'-0"`);
+    expect(row('point load 11', 'roof live')).toBe(' ► point 11   roof live');
+    expect(row('grade', 'Select Structural')).toBe(' ► grade      Sel. Str.');
+    expect(row('grade', '2.1E of the report')).toBe(' ► grade  2.1E of the …');
+  });
 });

@@ -1,0 +1,19 @@
+import { BEST_WORD, BESTS } from '../explore/best.ts';
+import { rankingOf } from '../session/index.ts';
+import { refused, type State, withSession } from './state.ts';
+
+/** The state with the next measure counting as best; price alone is passed over where nothing has one. */
+export function nextBest(state: State): State {
+  const { best, shop } = rankingOf(state.session);
+  const choices = BESTS.filter((each) => each !== 'price' || shop !== null);
+  const next = choices[(choices.indexOf(best) + 1) % choices.length]!;
+  if (next === best) return refused(state, 'there is nothing else to choose by');
+  const text = `best is now the ${WORD[next]}; rack, lit size, moves and handovers follow`;
+  return {
+    ...withSession(state, { ...state.session, best: next }),
+    ghost: state.ghost,
+    notice: { text, refusal: false },
+  };
+}
+
+const WORD = { ...BEST_WORD, boardFeet: 'least wood (board feet)' } as const;
