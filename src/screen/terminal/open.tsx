@@ -29,6 +29,8 @@ export type ScreenEnd =
 
 /** Ink's own default of 30 would drop every second frame of a held key. */
 const FRAMES_PER_SECOND = 60;
+/** Erases the whole screen and puts the cursor at its top left. */
+const EMPTY_SCREEN = '\x1b[2J\x1b[H';
 /** What a terminal that does not tell its size is taken for. */
 const UNKNOWN_SIZE: Size = { columns: 80, rows: 24 };
 
@@ -56,8 +58,13 @@ export async function openScreen(
   let instance: Instance | null = null;
   let failure: Error | null = null;
 
-  // Runs before Ink's own listener, which would first draw the old tree in the new size.
-  const onResize = (): void => instance?.rerender(tree());
+  // Runs before Ink's own listener, which would first draw the old tree in the new size. A frame that was on its way
+  // while the size changed may have wrapped or been cut where nobody keeps account of it: begin on an empty screen.
+  const onResize = (): void => {
+    instance?.clear();
+    if (env.TERM !== 'dumb') stdout.write(EMPTY_SCREEN);
+    instance?.rerender(tree());
+  };
   // Left to Node, the error would be printed on the alternate screen and vanish with it.
   const onFailure = (thrown: unknown): void => {
     failure ??= errorOf(thrown);
