@@ -52,6 +52,22 @@ describe('the three powers of a uniform load on a simple span', () => {
     );
   });
 
+  it('have a tenth of CV in the bending of a glulam: its length, depth and width each by the tenth root', () => {
+    // NDS 5.3.6: CV = (21/L)^(1/10) (12/d)^(1/10) (5.125/b)^(1/10), under 1 here, on the integers of the law.
+    const glulam = memberOf({
+      spans: ['24 ft'],
+      tributary: '8 ft',
+      stock: { product: 'glulam', species: 'Western species', grade: '24F-1.8E' },
+      section: { width: '6.75 in', depth: '18 in' },
+      selfWeight: false,
+    });
+    const bending = exponentsOf(glulam).bending!;
+    expect(bending.span).toBeCloseTo(2.1, 6);
+    expect(bending.depth).toBeCloseTo(-1.9, 6);
+    expect(bending.width).toBeCloseTo(-0.9, 6);
+    expect(bending.load).toBeCloseTo(1, 6);
+  });
+
   it('have the integers for local exponents where own weight is off', () => {
     fc.assert(
       fc.property(simple, (of) => {

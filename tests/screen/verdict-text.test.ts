@@ -33,9 +33,11 @@ describe('the verdict', () => {
   test('of one that passes keeps its ratio where the place is long: a narrow screen has no room for more', () => {
     const { reason } = verdict({
       spans: ['12 ft'],
-      overhangs: { left: '0 ft', right: '6 ft' },
+      overhangs: { left: '0 ft', right: '4 ft' },
       bracingBottom: 'continuous',
-      area: { dead: '5 psf', live: '30 psf' },
+      area: { dead: '10 psf', live: '40 psf' },
+      section: { width: '1.5 in', depth: '9.25 in', plies: 3 },
+      tributary: '4 ft',
     });
     expect(reason).toMatch(/ of the right overhang is nearest its limit at 0\.\d\d\.$/);
     expect(reason.length).toBeLessThanOrEqual(69);
