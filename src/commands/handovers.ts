@@ -1,7 +1,7 @@
-import { BEST_WORD } from '../explore/best.ts';
-import { handoversOf, type Segment } from '../explore/handovers.ts';
-import { rackOf, sizeName } from '../explore/rack.ts';
-import { type Sweep, sweepsOf } from '../explore/sweep.ts';
+import { handoversOf, type Segment } from '../explore/handovers/handovers.ts';
+import { type Sweep, sweepsOf } from '../explore/handovers/sweep.ts';
+import { BEST_WORD } from '../explore/rack/best.ts';
+import { rackOf, sizeName } from '../explore/rack/rack.ts';
 import type { QuantityKind } from '../quantity/index.ts';
 import { harmless, quoted, showSpanDown, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';

@@ -1,5 +1,5 @@
 import { closeSync, openSync, readSync, statSync } from 'node:fs';
-import { BESTS } from '../explore/best.ts';
+import { BESTS } from '../explore/rack/best.ts';
 import { harmless, quoted, type Units } from '../quantity/index.ts';
 import { readSession, readSessionWithSets } from '../session/index.ts';
 import { MAX_BYTES, type Session, type SessionMember } from '../session/session.ts';

@@ -1,5 +1,5 @@
-import { type Order, type OrderLine, orderOf } from '../explore/order.ts';
-import { gradeWord } from '../explore/rack.ts';
+import { type Order, type OrderLine, orderOf } from '../explore/buying/order.ts';
+import { gradeWord } from '../explore/rack/rack.ts';
 import { harmless, showSpan, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import type { Session } from '../session/session.ts';

@@ -1,9 +1,9 @@
-import { BEST_WORD } from '../explore/best.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { powersOf } from '../explore/powers.ts';
-import { gradeWord, type Rack, type RackSize, sizeName } from '../explore/rack.ts';
-import { type RankedRack, type RankedSize, rankedRack } from '../explore/ranked.ts';
-import { refusedWord } from '../explore/refused-word.ts';
+import { BEST_WORD } from '../explore/rack/best.ts';
+import { gradeWord, type Rack, type RackSize, sizeName } from '../explore/rack/rack.ts';
+import { type RankedRack, type RankedSize, rankedRack } from '../explore/rack/ranked.ts';
+import { refusedWord } from '../explore/rack/refused-word.ts';
 import {
   harmless,
   showInches,

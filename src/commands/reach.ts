@@ -1,7 +1,7 @@
-import { type Rack, type RackSize, rackOf } from '../explore/rack.ts';
-import type { Reach } from '../explore/reach.ts';
-import { reachesOf } from '../explore/reaches.ts';
-import { refusedWord } from '../explore/refused-word.ts';
+import { type Rack, type RackSize, rackOf } from '../explore/rack/rack.ts';
+import { refusedWord } from '../explore/rack/refused-word.ts';
+import type { Reach } from '../explore/reach/reach.ts';
+import { reachesOf } from '../explore/reach/reaches.ts';
 import { harmless, showSpanDown, type Units } from '../quantity/index.ts';
 import { CHECK_WORD } from '../screen/words.ts';
 import type { Member } from '../timber/member.ts';

@@ -1,5 +1,5 @@
-import type { Reach } from '../explore/reach.ts';
-import { type SpanTable, spanTable } from '../explore/span-table.ts';
+import type { Reach } from '../explore/reach/reach.ts';
+import { type SpanTable, spanTable } from '../explore/reach/span-table.ts';
 import { KIND_WORD, LOAD_KINDS } from '../loads/kinds.ts';
 import {
   harmless,

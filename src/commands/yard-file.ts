@@ -1,6 +1,6 @@
 import { dirname, resolve } from 'node:path';
 import { CsvError, parse } from 'csv-parse/sync';
-import type { YardRow } from '../explore/yard.ts';
+import type { YardRow } from '../explore/buying/yard.ts';
 import { harmless } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
 import { readYardTable, type TableLine } from '../session/yard-table.ts';

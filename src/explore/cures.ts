@@ -1,8 +1,8 @@
 import type { Member } from '../timber/member.ts';
-import { BY_WEIGHT, type Ranking } from './best.ts';
 import { type Move, nearestMoves } from './moves/index.ts';
-import type { Rack } from './rack.ts';
-import { type RankedRack, rank } from './ranked.ts';
+import { BY_WEIGHT, type Ranking } from './rack/best.ts';
+import type { Rack } from './rack/rack.ts';
+import { type RankedRack, rank } from './rack/ranked.ts';
 
 /** One change that would help, with what it does. */
 export type Cure = Move;

@@ -1,7 +1,7 @@
 import { beamFault } from '../statics/index.ts';
 import { prepareResized } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
-import type { NumberKnob } from './knob.ts';
+import type { NumberKnob } from './knobs/knob.ts';
 import { powersOf } from './powers.ts';
 import { ratiosLike } from './ratios.ts';
 

@@ -8,7 +8,7 @@ import {
   type NewLoad,
   setFixed,
   setSupports,
-} from '../explore/edit-beam.ts';
+} from '../explore/beam-edits/edit-beam.ts';
 import { KIND_WORD, LOAD_KINDS, type LoadKind } from '../loads/index.ts';
 import { showQuantity, showSpan, type Units } from '../quantity/index.ts';
 import { beamFields, MOST_LOADS, MOST_SPANS } from '../statics/index.ts';

@@ -1,12 +1,12 @@
-import { BY_WEIGHT, type Ranking } from '../explore/best.ts';
 import { type Crossovers, crossovers } from '../explore/crossovers.ts';
 import { type Cure, curesOf } from '../explore/cures.ts';
 import { type Exponents, exponentsOf } from '../explore/exponents.ts';
 import { type Judgement, judge } from '../explore/judge.ts';
 import { OTHER_CHECKS, type PowerRatio, powersOf, standsTo } from '../explore/powers.ts';
-import { type RankedRack, rankedRack } from '../explore/ranked.ts';
+import { BY_WEIGHT, type Ranking } from '../explore/rack/best.ts';
+import { type RankedRack, rankedRack } from '../explore/rack/ranked.ts';
 import { ratiosOf } from '../explore/ratios.ts';
-import { lazyReaches, type Reaches } from '../explore/reaches.ts';
+import { lazyReaches, type Reaches } from '../explore/reach/reaches.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
 import { reportMember } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';

@@ -1,4 +1,4 @@
-import { BEST_WORD, BESTS } from '../explore/best.ts';
+import { BEST_WORD, BESTS } from '../explore/rack/best.ts';
 import { rankingOf } from '../session/index.ts';
 import { refused, type State, withSession } from './state.ts';
 

@@ -1,5 +1,5 @@
 import { type Curve, chartRange, curveOf } from '../explore/curve.ts';
-import type { Knob, NumberKnob } from '../explore/knob.ts';
+import type { Knob, NumberKnob } from '../explore/knobs/knob.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
 import type { ChartView } from './view.ts';

@@ -1,8 +1,8 @@
-import type { Ranking } from '../explore/best.ts';
-import { knobsOf } from '../explore/knobs.ts';
+import { knobsOf } from '../explore/knobs/knobs.ts';
 import { costOf } from '../explore/moves/index.ts';
+import type { Ranking } from '../explore/rack/best.ts';
 import { ratiosOf } from '../explore/ratios.ts';
-import { reachFinder } from '../explore/reach.ts';
+import { reachFinder } from '../explore/reach/reach.ts';
 import {
   showInches,
   showRatio,

@@ -1,9 +1,9 @@
-import type { Ranking } from '../explore/best.ts';
 import { chartRange } from '../explore/curve.ts';
-import { type Around, aroundOf, handoversOf, type Segment } from '../explore/handovers.ts';
-import type { Knob } from '../explore/knob.ts';
-import { aroundText, lightestAlong } from '../explore/lightest-along.ts';
-import { type Sweep, sweepsOf } from '../explore/sweep.ts';
+import { type Around, aroundOf, handoversOf, type Segment } from '../explore/handovers/handovers.ts';
+import { aroundText, lightestAlong } from '../explore/handovers/lightest-along.ts';
+import { type Sweep, sweepsOf } from '../explore/handovers/sweep.ts';
+import type { Knob } from '../explore/knobs/knob.ts';
+import type { Ranking } from '../explore/rack/best.ts';
 import { showSpanDown } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import type { Member } from '../timber/member.ts';

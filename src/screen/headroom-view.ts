@@ -1,9 +1,9 @@
 import { clearHeight, depthLeft } from '../explore/headroom.ts';
-import { headroomKnobs, withHeadroom } from '../explore/headroom-knobs.ts';
-import type { Knob } from '../explore/knob.ts';
-import { hasSize, sizeName } from '../explore/rack.ts';
-import type { RankedSize } from '../explore/ranked.ts';
-import { refusedWord } from '../explore/refused-word.ts';
+import { headroomKnobs, withHeadroom } from '../explore/knobs/headroom.ts';
+import type { Knob } from '../explore/knobs/knob.ts';
+import { hasSize, sizeName } from '../explore/rack/rack.ts';
+import type { RankedSize } from '../explore/rack/ranked.ts';
+import { refusedWord } from '../explore/rack/refused-word.ts';
 import { showInches, showSpan, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { standingDepth, standingWidth } from '../timber/index.ts';

@@ -1,8 +1,8 @@
-import { BEST_WORD, type Best } from '../explore/best.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { type Move, type Moves, movesOf } from '../explore/moves/index.ts';
 import { powersOf } from '../explore/powers.ts';
-import { refusedWord } from '../explore/refused-word.ts';
+import { BEST_WORD, type Best } from '../explore/rack/best.ts';
+import { refusedWord } from '../explore/rack/refused-word.ts';
 import { showInches, showRatio, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { prepare, standingDepth, standingWidth } from '../timber/index.ts';

@@ -1,7 +1,7 @@
-import { gradeWord, hasSize } from '../explore/rack.ts';
-import type { RankedSize } from '../explore/ranked.ts';
-import type { Reach } from '../explore/reach.ts';
-import { refusedWord } from '../explore/refused-word.ts';
+import { gradeWord, hasSize } from '../explore/rack/rack.ts';
+import type { RankedSize } from '../explore/rack/ranked.ts';
+import { refusedWord } from '../explore/rack/refused-word.ts';
+import type { Reach } from '../explore/reach/reach.ts';
 import {
   showInches,
   showRatio,

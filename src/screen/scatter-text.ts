@@ -1,4 +1,4 @@
-import { SCATTER_ASSUMES, scatterCOV, scatterOf } from '../explore/scatter.ts';
+import { SCATTER_ASSUMES, scatterCOV, scatterOf } from '../explore/scatter/scatter.ts';
 import { showRatio } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
 

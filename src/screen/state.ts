@@ -1,5 +1,5 @@
-import type { NewLoad } from '../explore/edit-beam.ts';
-import { knobsOf } from '../explore/knobs.ts';
+import type { NewLoad } from '../explore/beam-edits/edit-beam.ts';
+import { knobsOf } from '../explore/knobs/knobs.ts';
 import type { CurvesOf } from '../loads/index.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';

@@ -1,8 +1,8 @@
-import { BEST_WORD, type Best } from '../explore/best.ts';
 import type { Cure } from '../explore/cures.ts';
 import { costOf } from '../explore/moves/index.ts';
-import { sizeName } from '../explore/rack.ts';
-import { measureOf } from '../explore/ranked.ts';
+import { BEST_WORD, type Best } from '../explore/rack/best.ts';
+import { sizeName } from '../explore/rack/rack.ts';
+import { measureOf } from '../explore/rack/ranked.ts';
 import {
   showInches,
   showQuantity,

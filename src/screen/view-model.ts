@@ -1,13 +1,13 @@
-import { BEST_WORD } from '../explore/best.ts';
 import type { Cure } from '../explore/cures.ts';
 import { whyNotWhole } from '../explore/exponents.ts';
-import type { Knob } from '../explore/knob.ts';
+import type { Knob } from '../explore/knobs/knob.ts';
 import { ASKS_NOTHING, powersOf, standsTo } from '../explore/powers.ts';
-import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack.ts';
-import type { RankedSize } from '../explore/ranked.ts';
+import { BEST_WORD } from '../explore/rack/best.ts';
+import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack/rack.ts';
+import type { RankedSize } from '../explore/rack/ranked.ts';
+import { refusedWord } from '../explore/rack/refused-word.ts';
 import { ratiosOf } from '../explore/ratios.ts';
-import type { Reach } from '../explore/reach.ts';
-import { refusedWord } from '../explore/refused-word.ts';
+import type { Reach } from '../explore/reach/reach.ts';
 import { fieldKey, spanToDepthOf } from '../explore/span-to-depth.ts';
 import {
   showInches,

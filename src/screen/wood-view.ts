@@ -1,6 +1,6 @@
-import { gradesByStrength, valuesOf, withProduct, withSpecies } from '../explore/choose-wood.ts';
-import { sizeName } from '../explore/rack.ts';
-import { PRODUCT_WORD, shortGrade, woodKnobs } from '../explore/wood-knobs.ts';
+import { PRODUCT_WORD, shortGrade, woodKnobs } from '../explore/knobs/wood.ts';
+import { gradesByStrength, valuesOf, withProduct, withSpecies } from '../explore/rack/choose-wood.ts';
+import { sizeName } from '../explore/rack/rack.ts';
 import { showRatio, showStress, toUnit, type Units } from '../quantity/index.ts';
 import {
   checkStock,

@@ -1,5 +1,5 @@
-import { type Best, BY_WEIGHT, type Ranking } from '../explore/best.ts';
-import type { Shop } from '../explore/yard.ts';
+import type { Shop } from '../explore/buying/yard.ts';
+import { type Best, BY_WEIGHT, type Ranking } from '../explore/rack/best.ts';
 import type { Session, YardList } from './session.ts';
 
 const SHOPS = new WeakMap<object, { readonly prices: Session['prices']; readonly shop: Shop }>();

@@ -1,4 +1,4 @@
-import type { Price, PriceRow, YardRow } from '../explore/yard.ts';
+import type { Price, PriceRow, YardRow } from '../explore/buying/yard.ts';
 import { parseQuantity } from '../quantity/index.ts';
 import { type Path, SessionFault } from './fault.ts';
 import type { SessionFile } from './schema.ts';

@@ -1,5 +1,5 @@
 import * as z from 'zod/mini';
-import { BESTS } from '../explore/best.ts';
+import { BESTS } from '../explore/rack/best.ts';
 import { LOAD_KINDS } from '../loads/kinds.ts';
 import { isHarmful, parseQuantity, type QuantityKind, quoted } from '../quantity/index.ts';
 import { FACTOR_SYMBOLS, PRODUCTS, STOCK_VALUES } from '../timber/member.ts';

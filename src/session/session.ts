@@ -1,5 +1,5 @@
-import type { Best } from '../explore/best.ts';
-import type { PriceRow, YardRow } from '../explore/yard.ts';
+import type { PriceRow, YardRow } from '../explore/buying/yard.ts';
+import type { Best } from '../explore/rack/best.ts';
 import type { CombinationSet } from '../loads/loading.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';

@@ -1,4 +1,4 @@
-import type { Price, PriceRow, YardRow } from '../explore/yard.ts';
+import type { Price, PriceRow, YardRow } from '../explore/buying/yard.ts';
 import { type Units, writeQuantity } from '../quantity/index.ts';
 import { SessionFault } from './fault.ts';
 import { keepList, present, rawAt } from './keep.ts';

@@ -1,4 +1,4 @@
-import type { YardRow } from '../explore/yard.ts';
+import type { YardRow } from '../explore/buying/yard.ts';
 import { harmless, parseQuantity, quoted } from '../quantity/index.ts';
 import { nearestName } from '../timber/nearest-name.ts';
 import { explainIssues } from './explain-issue.ts';

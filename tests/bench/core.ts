@@ -1,4 +1,4 @@
-import { rackOf } from '../../src/explore/rack.ts';
+import { rackOf } from '../../src/explore/rack/rack.ts';
 import { prepare, rackSizesOf, rate, type Size, woodOf } from '../../src/timber/index.ts';
 import type { Member } from '../../src/timber/member.ts';
 import { CHECK_IDS } from '../../src/timber/report.ts';

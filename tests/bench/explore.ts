@@ -1,8 +1,8 @@
-import { BY_WEIGHT } from '../../src/explore/best.ts';
-import { aroundOf, handoversOf } from '../../src/explore/handovers.ts';
-import { knobsOf } from '../../src/explore/knobs.ts';
+import { aroundOf, handoversOf } from '../../src/explore/handovers/handovers.ts';
+import { knobsOf } from '../../src/explore/knobs/knobs.ts';
 import { movesOf } from '../../src/explore/moves/index.ts';
-import { rankedRack } from '../../src/explore/ranked.ts';
+import { BY_WEIGHT } from '../../src/explore/rack/best.ts';
+import { rankedRack } from '../../src/explore/rack/ranked.ts';
 import { gradesOf, speciesOf } from '../../src/timber/index.ts';
 import type { Member, Product, Stock } from '../../src/timber/member.ts';
 import { memberOf } from '../support/session.ts';

@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { handoversOf } from '../../src/explore/handovers.ts';
+import { handoversOf } from '../../src/explore/handovers/handovers.ts';
 import { clearHeight, depthLeft, depthLimit, overDepth } from '../../src/explore/headroom.ts';
-import { withHeadroom } from '../../src/explore/headroom-knobs.ts';
-import { knobsOf } from '../../src/explore/knobs.ts';
-import { rankedRack } from '../../src/explore/ranked.ts';
+import { withHeadroom } from '../../src/explore/knobs/headroom.ts';
+import { knobsOf } from '../../src/explore/knobs/knobs.ts';
+import { rankedRack } from '../../src/explore/rack/ranked.ts';
 import { memberOf } from '../support/session.ts';
 
 const STOREY = {

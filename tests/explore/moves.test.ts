@@ -1,8 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { Best } from '../../src/explore/best.ts';
 import { judge } from '../../src/explore/judge.ts';
 import { type Move, movesOf } from '../../src/explore/moves/index.ts';
+import type { Best } from '../../src/explore/rack/best.ts';
 import { ratiosOf } from '../../src/explore/ratios.ts';
 import { sectionWeight, standingDepth } from '../../src/timber/index.ts';
 import { CHECK_IDS } from '../../src/timber/report.ts';

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { handoversOf } from '../../src/explore/handovers.ts';
-import { rankedRack } from '../../src/explore/ranked.ts';
-import { sweepsOf } from '../../src/explore/sweep.ts';
+import { handoversOf } from '../../src/explore/handovers/handovers.ts';
+import { sweepsOf } from '../../src/explore/handovers/sweep.ts';
+import { rankedRack } from '../../src/explore/rack/ranked.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { restOf } from '../../src/screen/rest.ts';
 import { type HandoversMode, memberOf, type State } from '../../src/screen/state.ts';

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { rackOf } from '../../src/explore/rack.ts';
-import { reachesOf } from '../../src/explore/reaches.ts';
+import { rackOf } from '../../src/explore/rack/rack.ts';
+import { reachesOf } from '../../src/explore/reach/reaches.ts';
 import { showSpanDown } from '../../src/quantity/index.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State } from '../../src/screen/state.ts';

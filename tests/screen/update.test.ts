@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { knobsOf } from '../../src/explore/knobs.ts';
-import { lightestOf } from '../../src/explore/rack.ts';
+import { knobsOf } from '../../src/explore/knobs/knobs.ts';
+import { lightestOf } from '../../src/explore/rack/rack.ts';
 import { START } from '../../src/screen/modes/start.ts';
 import { isKept, memberOf } from '../../src/screen/state.ts';
 import { afterEvents, pressing, stateOf } from '../support/state.ts';

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { woodKnobs } from '../../src/explore/wood-knobs.ts';
+import { woodKnobs } from '../../src/explore/knobs/wood.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State, type WoodMode } from '../../src/screen/state.ts';
 import { checkStock } from '../../src/timber/index.ts';

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { BY_WEIGHT } from '../../src/explore/best.ts';
+import { BY_WEIGHT } from '../../src/explore/rack/best.ts';
 import { rankingOf, readSession, schemaJson, writeSession } from '../../src/session/index.ts';
 import { readYardTable } from '../../src/session/yard-table.ts';
 import { faultOf, rawMember, rawSession, sessionOf } from './documents.ts';

@@ -4,7 +4,7 @@ import { beamLength } from '../../statics/beam.ts';
 import { woodOf } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import type { CheckId } from '../../timber/report.ts';
-import { reachFinder } from '../reach.ts';
+import { reachFinder } from '../reach/reach.ts';
 import { scaleLengths } from '../scale.ts';
 import { type Ladder, rungs } from './ladder.ts';
 

@@ -1,10 +1,10 @@
 import { boardFeet, refusal, sectionWeight, standingDepth } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import type { CheckId } from '../../timber/report.ts';
-import type { Ranking } from '../best.ts';
-import { memberPrice, pieceLength } from '../buying.ts';
+import { memberPrice, pieceLength } from '../buying/buying.ts';
 import { type Judgement, judge } from '../judge.ts';
 import { overLimit } from '../limits.ts';
+import type { Ranking } from '../rack/best.ts';
 import { ratiosLike } from '../ratios.ts';
 
 /** What a changed member comes to. */

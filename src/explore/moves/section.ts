@@ -1,6 +1,6 @@
 import { rackSizesOf, type Size, sizeLabel } from '../../timber/index.ts';
 import type { Member, Section } from '../../timber/member.ts';
-import { takeSize } from '../rack.ts';
+import { takeSize } from '../rack/rack.ts';
 import { type Ladder, rungs } from './ladder.ts';
 
 /** A section as it stands: width of one ply, depth, plies. */

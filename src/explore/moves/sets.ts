@@ -1,7 +1,7 @@
 import type { AppliedLoad } from '../../loads/loading.ts';
 import { writeQuantity } from '../../quantity/index.ts';
 import type { Bracing, Member } from '../../timber/member.ts';
-import { stockSets } from '../stock-set.ts';
+import { stockSets } from '../rack/stock-set.ts';
 
 /**
  * What to put on the command line as --set to get from one member to another that a move made of it: exactly the same

@@ -1,6 +1,6 @@
 import { gradesOf, isRefusal, lookUp, shortSpecies, speciesOf, withStock } from '../../timber/index.ts';
 import { type Member, PRODUCTS, type Product, type Stock } from '../../timber/member.ts';
-import { coversSize, gradesByStrength, valuesOf, withProduct } from '../choose-wood.ts';
+import { coversSize, gradesByStrength, valuesOf, withProduct } from '../rack/choose-wood.ts';
 import { type Ladder, rungs } from './ladder.ts';
 
 /** Typed values belong to the wood they were read for, and a custom product has no other. */

@@ -4,9 +4,9 @@ import type { Member } from '../../timber/member.ts';
 import { figuresOf, plain, ratioText, WORKINGS_WORD, type WorkingLine } from '../../timber/workings/index.ts';
 import { judge } from '../judge.ts';
 import { ASKS_NOTHING, POWERS } from '../powers.ts';
-import { rackOf } from '../rack.ts';
+import { rackOf } from '../rack/rack.ts';
 import { ratiosOf } from '../ratios.ts';
-import { REACH_TO, reachFinder } from '../reach.ts';
+import { REACH_TO, reachFinder } from '../reach/reach.ts';
 import { scaleLengths } from '../scale.ts';
 
 /** How far the section reaches under the loads of the member, and what stops it. */

@@ -1,4 +1,4 @@
-import type { NewLoad } from '../../explore/edit-beam.ts';
+import type { NewLoad } from '../../explore/beam-edits/edit-beam.ts';
 import { reactionRange } from '../../loads/index.ts';
 import { type Addition, additionsTo, kindsOf } from '../additions.ts';
 import { isTooSmall } from '../arrange.ts';

@@ -1,7 +1,7 @@
-import { removeAt } from '../../explore/edit-beam.ts';
-import type { Step as NudgeSize } from '../../explore/knob.ts';
-import { takeSize } from '../../explore/rack.ts';
-import { bestOf } from '../../explore/ranked.ts';
+import { removeAt } from '../../explore/beam-edits/edit-beam.ts';
+import type { Step as NudgeSize } from '../../explore/knobs/knob.ts';
+import { takeSize } from '../../explore/rack/rack.ts';
+import { bestOf } from '../../explore/rack/ranked.ts';
 import { rankingOf } from '../../session/index.ts';
 import { backToBegan, markBegan } from '../began.ts';
 import { nextBest } from '../best-choice.ts';

@@ -1,5 +1,5 @@
-import { BEST_WORD } from '../../explore/best.ts';
-import { sizeName } from '../../explore/rack.ts';
+import { BEST_WORD } from '../../explore/rack/best.ts';
+import { sizeName } from '../../explore/rack/rack.ts';
 import { rankingOf } from '../../session/index.ts';
 import { answerOf } from '../answer.ts';
 import { isTooSmall } from '../arrange.ts';

@@ -1,4 +1,4 @@
-import type { Step as NudgeSize, Turn } from '../../explore/knob.ts';
+import type { Step as NudgeSize, Turn } from '../../explore/knobs/knob.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
 import { headroomInHand, headroomView, inStorey } from '../headroom-view.ts';

@@ -1,4 +1,4 @@
-import { lightestOf, takeSize } from '../../explore/rack.ts';
+import { lightestOf, takeSize } from '../../explore/rack/rack.ts';
 import { parseQuantity, showSpan } from '../../quantity/index.ts';
 import { newMember, newSession } from '../../session/index.ts';
 import type { Use } from '../../timber/member.ts';

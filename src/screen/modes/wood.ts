@@ -1,7 +1,7 @@
-import type { Knob, Turn } from '../../explore/knob.ts';
-import { tidyRack, toggleOnRack } from '../../explore/rack-woods.ts';
-import type { TypedKnob } from '../../explore/typed-knobs.ts';
-import { woodKnobs } from '../../explore/wood-knobs.ts';
+import type { Knob, Turn } from '../../explore/knobs/knob.ts';
+import type { TypedKnob } from '../../explore/knobs/typed.ts';
+import { woodKnobs } from '../../explore/knobs/wood.ts';
+import { tidyRack, toggleOnRack } from '../../explore/rack/rack-woods.ts';
 import { checkStock } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { edited, editOf, inserted } from '../edit.ts';

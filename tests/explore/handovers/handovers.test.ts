@@ -1,0 +1,159 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { aroundOf, handoversOf } from '../../../src/explore/handovers/handovers.ts';
+import { sweepsOf } from '../../../src/explore/handovers/sweep.ts';
+import type { Ranking } from '../../../src/explore/rack/best.ts';
+import { bestOf } from '../../../src/explore/rack/ranked.ts';
+import type { Member } from '../../../src/timber/member.ts';
+import { memberOf } from '../../support/session.ts';
+import { anyPart, withSets } from '../choice-members.ts';
+
+/** A knob and a range, base units: lengths in, area loads psi. */
+const RANGES = [
+  ['spans.0', 48, 300],
+  ['area.live', 0, 120 / 144],
+  ['area.dead', 0, 60 / 144],
+  ['area.snow', 0, 100 / 144],
+  ['tributary', 6, 200],
+  ['maxDepth', 3, 30],
+] as const;
+
+const SHOP: Ranking['shop'] = {
+  yard: [
+    {
+      size: '2x10',
+      product: null,
+      species: null,
+      grade: null,
+      lengths: [96, 144, 192],
+      price: { amount: 1.4, per: 'board foot' },
+    },
+    {
+      size: '2x12',
+      product: null,
+      species: null,
+      grade: null,
+      lengths: [120, 168, 240],
+      price: { amount: 2.9, per: 'foot' },
+    },
+    {
+      size: '4x12',
+      product: null,
+      species: null,
+      grade: null,
+      lengths: [192],
+      price: { amount: 80, per: 'piece' },
+    },
+    { size: '2x14', product: null, species: null, grade: null, lengths: [], price: null },
+  ],
+  prices: [],
+};
+const anyRanking = fc.constantFrom<Ranking>(
+  { best: 'weight', shop: null },
+  { best: 'depth', shop: null },
+  { best: 'boardFeet', shop: null },
+  { best: 'price', shop: SHOP },
+  { best: 'weight', shop: SHOP },
+);
+
+/** Handovers closer to one another than this share of the range are not told apart here. */
+const BESIDE = 1e-6;
+
+describe('handovers of random members', () => {
+  it('have different lit sizes on their two sides and the same one all along between them', () => {
+    fc.assert(
+      fc.property(
+        anyPart,
+        fc.constantFrom(...RANGES),
+        anyRanking,
+        fc.array(fc.double({ min: 0, max: 1, noNaN: true }), { minLength: 3, maxLength: 3 }),
+        (part, [key, from, to], ranking, shares) => {
+          const member = memberOf({ ...part, loads: undefined });
+          const sweep = sweepsOf(member).find((each) => each.key === key)!;
+          const segments = handoversOf(member, sweep.put, from, to, { ranking });
+          const lit = (value: number) => bestOf(sweep.put(member, value), ranking)?.label ?? null;
+          expect(segments[0]!.from).toBe(from);
+          expect(segments.at(-1)!.to).toBe(to);
+          segments.forEach((segment, at) => {
+            const label = segment.size?.label ?? null;
+            const next = segments[at + 1];
+            const wide = segment.to - segment.from;
+            const beside = BESIDE * (to - from);
+            if (next !== undefined) {
+              expect(next.from).toBe(segment.to);
+              expect(next.size).not.toBe(segment.size);
+            }
+            if (wide < 3 * beside) return;
+            expect(lit(segment.from + beside)).toBe(label);
+            expect(lit(segment.to - beside)).toBe(label);
+            for (const share of shares)
+              expect(lit(segment.from + beside + share * (wide - 2 * beside))).toBe(label);
+          });
+        },
+      ),
+      { numRuns: 60 },
+    );
+  });
+
+  it('next on each side are those of the whole range', () => {
+    fc.assert(
+      fc.property(anyPart, fc.constantFrom(...RANGES.slice(0, 3)), (part, [key, least, most]) => {
+        const member = memberOf({
+          ...part,
+          spans: [(part.spans as string[])[0]!],
+          overhangs: {},
+          loads: undefined,
+        });
+        const sweep = sweepsOf(member).find((each) => each.key === key)!;
+        const now = least + 0.4 * (most - least);
+        const at = sweep.put(member, now);
+        const around = aroundOf(at, { put: sweep.put, least, most }, now);
+        const segments = handoversOf(at, sweep.put, least, most);
+        const here = segments.findIndex((each) => each.from <= now && now <= each.to);
+        expect(around.size).toBe(segments[here]!.size);
+        const [below, above] = [segments[here - 1], segments[here + 1]];
+        expect(around.below?.size).toBe(below?.size);
+        expect(around.above?.size).toBe(above?.size);
+        if (below !== undefined) expect(around.below!.at).toBeCloseTo(below.to, 3);
+        if (above !== undefined) expect(around.above!.at).toBeCloseTo(above.from, 3);
+      }),
+      { numRuns: 30 },
+    );
+  });
+});
+
+describe('handovers', () => {
+  const labels = (member: Member, key: string, from: number, to: number) => {
+    const sweep = sweepsOf(member).find((each) => each.key === key)!;
+    return handoversOf(member, sweep.put, from, to).map((each) => [each.size?.label ?? null, each.to]);
+  };
+
+  it('along the depth limit stand at the stock depths themselves', () => {
+    const along = labels(memberOf({ spans: ['12 ft'] }), 'maxDepth', 5, 30);
+    for (const [, to] of along.slice(0, -1)) {
+      expect(
+        [5.5, 7.25, 9.25, 11.25, 13.25, 15.25].some((depth) => Math.abs(depth - Number(to)) < 1e-6),
+      ).toBe(true);
+    }
+  });
+
+  it('along a span agree with the sets of the command line, loads that end with the member going along', () => {
+    const part = {
+      loads: [
+        { kind: 'dead', line: '60 plf' },
+        { kind: 'live', line: '40 plf', to: '8 ft' },
+      ],
+    };
+    const sweep = sweepsOf(memberOf(part), [{ to: false }, { to: true }]).find(
+      (each) => each.key === 'spans.0',
+    )!;
+    for (const span of [100, 150, 190]) {
+      expect(sweep.put(memberOf(part), span)).toEqual(withSets(part, [`spans.0=${span} in`]));
+    }
+  });
+
+  it('refuse an empty range', () => {
+    const sweep = sweepsOf(memberOf()).find((each) => each.key === 'spans.0')!;
+    expect(() => handoversOf(memberOf(), sweep.put, 100, 100)).toThrow(RangeError);
+  });
+});
