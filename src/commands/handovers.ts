@@ -7,8 +7,9 @@ import { harmless, quoted, showSpanDown, type Units } from '../quantity/index.ts
 import { rankingOf } from '../session/index.ts';
 import type { Member } from '../timber/member.ts';
 import { nearestName } from '../timber/nearest-name.ts';
+import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, notChecked, woodName, wrapped } from './prose.ts';
+import { beside, given, woodName, wrapped } from './prose.ts';
 import { woodJson } from './rack.ts';
 import { BadInput, STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -48,56 +49,49 @@ export function handovers(file: string, options: HandoverOptions, print: (text: 
   const segments = handoversOf(member, sweep.put, from, to, { ranking, only: loaded.only });
   const rack = rackOf(member, loaded.only);
   const name = (segment: Segment) => (segment.size === null ? null : sizeName(rack, segment.size));
-  if (options.json === true) {
-    const document = {
-      thrice: 1,
-      ...notChecked(loaded.only).json,
-      member: member.name,
-      knob: sweep.key,
-      unit: BASE_UNIT[sweep.kind],
-      best: ranking.best,
-      ...given(member).json,
-      segments: segments.map((segment) => ({
-        from: segment.from,
-        to: segment.to,
-        size: segment.size?.label ?? null,
-        ...(segment.size !== null && rack.woods.length > 1 ? { wood: woodJson(segment.size.stock) } : {}),
-      })),
-    };
-    print(`${JSON.stringify(document, null, 2)}\n`);
-  } else {
-    const show = (value: number) =>
-      sweep.kind === 'length' && SPANS.test(sweep.key)
-        ? showSpanDown(value, loaded.units)
-        : sweep.show(value, loaded.units);
-    const lines = [
-      ...heading(loaded.session),
-      ...notChecked(loaded.only).lines,
-      '',
-      ...beside([harmless(member.name), ...rack.woods.map(woodName)]),
-      `${BEST_WORD[ranking.best]} size that passes along ${sweep.label}, ${show(from)} to ${show(to)}`,
-      '',
-      ...strip(segments, from, to),
-      ...table(
-        [
-          { head: '', align: 'left' },
-          { head: 'from', align: 'right' },
-          { head: 'to', align: 'right' },
-          { head: 'size', align: 'left' },
-        ],
-        segments.map((segment, at) => [
-          letter(at),
-          show(segment.from),
-          show(segment.to),
-          name(segment) ?? 'none passes',
-        ]),
-      ),
-      ...given(member, loaded.units).lines,
-      '',
-      ...closing(),
-    ];
-    print(`${lines.join('\n')}\n`);
-  }
+  printAnswer(loaded, member, options.json, print, {
+    document: () => {
+      return {
+        member: member.name,
+        knob: sweep.key,
+        unit: BASE_UNIT[sweep.kind],
+        best: ranking.best,
+        ...given(member).json,
+        segments: segments.map((segment) => ({
+          from: segment.from,
+          to: segment.to,
+          size: segment.size?.label ?? null,
+          ...(segment.size !== null && rack.woods.length > 1 ? { wood: woodJson(segment.size.stock) } : {}),
+        })),
+      };
+    },
+    lines: () => {
+      const show = (value: number) =>
+        sweep.kind === 'length' && SPANS.test(sweep.key)
+          ? showSpanDown(value, loaded.units)
+          : sweep.show(value, loaded.units);
+      return [
+        ...beside([harmless(member.name), ...rack.woods.map(woodName)]),
+        `${BEST_WORD[ranking.best]} size that passes along ${sweep.label}, ${show(from)} to ${show(to)}`,
+        '',
+        ...strip(segments, from, to),
+        ...table(
+          [
+            { head: '', align: 'left' },
+            { head: 'from', align: 'right' },
+            { head: 'to', align: 'right' },
+            { head: 'size', align: 'left' },
+          ],
+          segments.map((segment, at) => [
+            letter(at),
+            show(segment.from),
+            show(segment.to),
+            name(segment) ?? 'none passes',
+          ]),
+        ),
+      ];
+    },
+  });
   return STATUS.yes;
 }
 

@@ -5,18 +5,9 @@ import { rankingOf } from '../session/index.ts';
 import { sizeLabel } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
+import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import {
-  beside,
-  closing,
-  given,
-  heading,
-  LINE,
-  lengthsText,
-  notChecked,
-  woodName,
-  wrapped,
-} from './prose.ts';
+import { beside, given, LINE, lengthsText, woodName, wrapped } from './prose.ts';
 import { moneyText } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -30,26 +21,10 @@ export function moves(file: string, options: SessionOptions, print: (text: strin
     only: loaded.only,
     units: loaded.units,
   });
-  if (options.json === true) {
-    const document = {
-      thrice: 1,
-      ...notChecked(loaded.only).json,
-      ...movesJson(member, found, loaded.only),
-      ...given(member).json,
-    };
-    print(`${JSON.stringify(document, null, 2)}\n`);
-  } else {
-    const lines = [
-      ...heading(loaded.session),
-      ...notChecked(loaded.only).lines,
-      '',
-      ...movesText(member, found, loaded.units),
-      ...given(member, loaded.units).lines,
-      '',
-      ...closing(),
-    ];
-    print(`${lines.join('\n')}\n`);
-  }
+  printAnswer(loaded, member, options.json, print, {
+    document: () => ({ ...movesJson(member, found, loaded.only), ...given(member).json }),
+    lines: () => movesText(member, found, loaded.units),
+  });
   return found.moves.some((move) => move.passes) ? STATUS.yes : STATUS.no;
 }
 

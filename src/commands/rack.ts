@@ -18,18 +18,9 @@ import { rankingOf } from '../session/index.ts';
 import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Member, Stock } from '../timber/member.ts';
 import type { CheckId } from '../timber/report.ts';
+import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import {
-  beside,
-  closing,
-  given,
-  heading,
-  LINE,
-  lengthsText,
-  notChecked,
-  woodName,
-  wrapped,
-} from './prose.ts';
+import { beside, given, LINE, lengthsText, woodName, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { type Column, table } from './table.ts';
 
@@ -38,22 +29,10 @@ export function rack(file: string, options: SessionOptions, print: (text: string
   const loaded = load(file, options);
   const { member } = theMember(loaded, file);
   const sizes = rankedRack(member, rankingOf(loaded.session), loaded.only);
-  if (options.json === true) {
-    print(
-      `${JSON.stringify({ thrice: 1, ...notChecked(loaded.only).json, ...rackJson(member, sizes, loaded.only) }, null, 2)}\n`,
-    );
-  } else {
-    const lines = [
-      ...heading(loaded.session),
-      ...notChecked(loaded.only).lines,
-      '',
-      ...rackText(member, sizes, loaded.units),
-      ...given(member, loaded.units).lines,
-      '',
-      ...closing(),
-    ];
-    print(`${lines.join('\n')}\n`);
-  }
+  printAnswer(loaded, member, options.json, print, {
+    document: () => rackJson(member, sizes, loaded.only),
+    lines: () => rackText(member, sizes, loaded.units),
+  });
   return sizes.lightest >= 0 ? STATUS.yes : STATUS.no;
 }
 

@@ -5,8 +5,9 @@ import { reachesOf } from '../explore/reach/reaches.ts';
 import { harmless, showSpanDown, type Units } from '../quantity/index.ts';
 import { CHECK_WORD } from '../screen/words.ts';
 import type { Member } from '../timber/member.ts';
+import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, notChecked, woodName } from './prose.ts';
+import { beside, given, woodName } from './prose.ts';
 import { sizeCells, sizeColumns, sizeJson, woodJson } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -17,35 +18,24 @@ export function reach(file: string, options: SessionOptions, print: (text: strin
   const { member } = theMember(loaded, file);
   const rack = rackOf(member, loaded.only);
   const reaches = reachesOf(member, rack, loaded.only);
-  if (options.json === true) {
-    const sizes = rack.sizes.map((each, at) => ({
-      ...sizeJson(member, each, loaded.only),
-      span: reaches[at]?.span ?? null,
-      stops: reaches[at]?.stops ?? null,
-    }));
-    const lit = rack.sizes[rack.lightest]?.size;
-    const document = {
-      thrice: 1,
-      ...notChecked(loaded.only).json,
-      member: member.name,
-      lightest: lit?.label ?? null,
-      lightestWood: lit === undefined ? null : woodJson(lit.stock),
-      ...given(member).json,
-      sizes,
-    };
-    print(`${JSON.stringify(document, null, 2)}\n`);
-  } else {
-    const lines = [
-      ...heading(loaded.session),
-      ...notChecked(loaded.only).lines,
-      '',
-      ...reachText(member, rack, reaches, loaded.units),
-      ...given(member, loaded.units).lines,
-      '',
-      ...closing(),
-    ];
-    print(`${lines.join('\n')}\n`);
-  }
+  printAnswer(loaded, member, options.json, print, {
+    document: () => {
+      const sizes = rack.sizes.map((each, at) => ({
+        ...sizeJson(member, each, loaded.only),
+        span: reaches[at]?.span ?? null,
+        stops: reaches[at]?.stops ?? null,
+      }));
+      const lit = rack.sizes[rack.lightest]?.size;
+      return {
+        member: member.name,
+        lightest: lit?.label ?? null,
+        lightestWood: lit === undefined ? null : woodJson(lit.stock),
+        ...given(member).json,
+        sizes,
+      };
+    },
+    lines: () => reachText(member, rack, reaches, loaded.units),
+  });
   return rack.lightest >= 0 ? STATUS.yes : STATUS.no;
 }
 

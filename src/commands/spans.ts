@@ -15,8 +15,9 @@ import { CHECK_WORD } from '../screen/words.ts';
 import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId } from '../timber/report.ts';
+import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, closing, given, heading, notChecked, woodName, wrapped } from './prose.ts';
+import { beside, given, woodName, wrapped } from './prose.ts';
 import { woodJson } from './rack.ts';
 import { BadInput, STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -31,37 +32,26 @@ export function spans(file: string, options: SpansOptions, print: (text: string)
   const { member } = theMember(loaded, file);
   const spacings = readSpacings(options.spacings, loaded.units);
   const found = spanTable(member, spacings, loaded.only);
-  if (options.json === true) {
-    const document = {
-      thrice: 1,
-      ...notChecked(loaded.only).json,
-      member: member.name,
-      ...woodJson(member.stock),
-      ...given(member).json,
-      spacings,
-      sizes: found.rows.map(({ size, weight, reaches }) => ({
-        label: size.label,
-        width: standingWidth({ ...size, flat: member.section.flat }),
-        depth: standingDepth({ ...size, flat: member.section.flat }),
-        plies: size.plies,
-        weight,
-        spans: reaches.map((reach) => reach?.span ?? null),
-        stops: reaches.map((reach) => reach?.stops ?? null),
-      })),
-    };
-    print(`${JSON.stringify(document, null, 2)}\n`);
-  } else {
-    const lines = [
-      ...heading(loaded.session),
-      ...notChecked(loaded.only).lines,
-      '',
-      ...spansText(member, found, loaded.units),
-      ...given(member, loaded.units).lines,
-      '',
-      ...closing(),
-    ];
-    print(`${lines.join('\n')}\n`);
-  }
+  printAnswer(loaded, member, options.json, print, {
+    document: () => {
+      return {
+        member: member.name,
+        ...woodJson(member.stock),
+        ...given(member).json,
+        spacings,
+        sizes: found.rows.map(({ size, weight, reaches }) => ({
+          label: size.label,
+          width: standingWidth({ ...size, flat: member.section.flat }),
+          depth: standingDepth({ ...size, flat: member.section.flat }),
+          plies: size.plies,
+          weight,
+          spans: reaches.map((reach) => reach?.span ?? null),
+          stops: reaches.map((reach) => reach?.stops ?? null),
+        })),
+      };
+    },
+    lines: () => spansText(member, found, loaded.units),
+  });
   return STATUS.yes;
 }
 

@@ -4,10 +4,12 @@ import { BEST_WORD, type Best } from '../explore/rack/best.ts';
 import { sizeName } from '../explore/rack/rack.ts';
 import { measureOf } from '../explore/rack/ranked.ts';
 import {
+  fromUnit,
   showInches,
   showQuantity,
   showRatio,
   showSpanDown,
+  toUnit,
   type Units,
   weightNumber,
   weightUnit,
@@ -65,8 +67,18 @@ function tieText(member: Member, answer: Answer, units: Units): string[] {
   const next = rest.sort((a, b) => b.ratio - a.ratio)[0];
   const then =
     next && `Then ${lowered(checkAndPlace(member, next, true))} stops it at ${showRatio(next.ratio)}.`;
-  return [`Tie it down for ${showQuantity('pointLoad', result.demand, units)}.`, ...(then ? [then] : [])];
+  return [`Tie it down for ${tieShown(result.demand, units)}.`, ...(then ? [then] : [])];
 }
+
+/** A force that would hold when typed as it is shown: rounded up to 1 lb, 0.01 kN. */
+function tieShown(force: number, units: Units): string {
+  const [unit, step] = units === 'us' ? (['lb', 1] as const) : (['kN', 0.01] as const);
+  const steps = Math.ceil(toUnit('pointLoad', force, unit) / step - HAIR);
+  return showQuantity('pointLoad', fromUnit('pointLoad', steps * step, unit), units);
+}
+
+/** Parts of a step that are arithmetic's, not a force. */
+const HAIR = 1e-9;
 
 function raised(text: string): string {
   return text.charAt(0).toUpperCase() + text.slice(1);

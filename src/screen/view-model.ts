@@ -1,61 +1,24 @@
 import type { Cure } from '../explore/cures.ts';
-import { whyNotWhole } from '../explore/exponents.ts';
 import type { Knob } from '../explore/knobs/knob.ts';
-import { ASKS_NOTHING, powersOf, standsTo } from '../explore/powers.ts';
-import { BEST_WORD } from '../explore/rack/best.ts';
-import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack/rack.ts';
-import type { RankedSize } from '../explore/rack/ranked.ts';
-import { refusedWord } from '../explore/rack/refused-word.ts';
-import { ratiosOf } from '../explore/ratios.ts';
-import type { Reach } from '../explore/reach/reach.ts';
-import { fieldKey, spanToDepthOf } from '../explore/span-to-depth.ts';
-import {
-  showInches,
-  showQuantity,
-  showSmall,
-  showSpan,
-  showSpanDown,
-  showStress,
-  type Units,
-  weightNumber,
-  weightUnit,
-} from '../quantity/index.ts';
+import { sizeName } from '../explore/rack/rack.ts';
+import { fieldKey } from '../explore/span-to-depth.ts';
+import { showQuantity, showSpan, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { beamFields } from '../statics/index.ts';
-import {
-  assumptionsOf,
-  governingField,
-  isSawn,
-  lineLoadOf,
-  nominalOf,
-  type Size,
-  sectionWeight,
-  shortWood,
-  standingDepth,
-  stockDepths,
-  timberNominalOf,
-} from '../timber/index.ts';
-import type { Member, Stock } from '../timber/member.ts';
-import type { CheckResult } from '../timber/report.ts';
+import { assumptionsOf, governingField, lineLoadOf, sectionWeight } from '../timber/index.ts';
+import type { Member } from '../timber/member.ts';
 import { type Answer, answerOf } from './answer.ts';
 import { beganMark } from './began.ts';
 import { chartView } from './chart-view.ts';
+import { exponentsView, gaugesOf } from './gauge-view.ts';
 import { handoverText } from './handover-now.ts';
 import { type Action, BINDINGS } from './keys.ts';
-import { measureName, patternText, placeOf } from './place-words.ts';
-import { bandOf, scatterRemarks } from './scatter-text.ts';
+import { measureName } from './place-words.ts';
+import { rackView, rulerOf } from './rack-view.ts';
+import { scatterRemarks } from './scatter-text.ts';
 import { isKept, knobInHand, memberOf, type State, unitsOf } from './state.ts';
 import { verdictOf } from './verdict-text.ts';
-import type {
-  CureView,
-  ExponentView,
-  FootView,
-  GaugeView,
-  KnobView,
-  RackView,
-  RulerView,
-  View,
-} from './view.ts';
+import type { CureView, FootView, KnobView, View } from './view.ts';
 import { CHECK_WORD } from './words.ts';
 
 /** Screens from this width show what is dearer to work out: exponents, chart; from the next reach and moves. */
@@ -133,157 +96,6 @@ export function titleOf(state: State): View['title'] {
     position: `${state.member + 1} of ${state.session.members.length}`,
     kept: isKept(state) ? 'kept' : 'not kept',
   };
-}
-
-function gaugesOf(
-  member: Member,
-  answer: Answer,
-  ghost: Member | null,
-  began: Member | null,
-  units: Units,
-): GaugeView[] {
-  const before = ghost === null ? null : powersOf(ratiosOf(ghost));
-  const first = began === null ? null : powersOf(ratiosOf(began));
-  return answer.powers.map(({ name, exponent, ratio, check }, index): GaugeView => {
-    const was = before?.[index]?.ratio ?? null;
-    const result = answer.report.checks.find((each) => each.id === check);
-    return {
-      label: name,
-      power: exponent,
-      ratio,
-      ghost: was,
-      began: first?.[index]?.ratio ?? null,
-      band: name === 'deflection' && ratio !== null ? bandOf(member, ratio) : null,
-      nudge: was === null || ratio === null ? null : ratio - was,
-      governs: check !== null && check === answer.governing,
-      demand: result === undefined ? '' : demandText(member, result, units),
-      brief: result === undefined ? '' : demandText(member, result, units, true),
-      alone:
-        ratio === null || ratio <= ASKS_NOTHING
-          ? ''
-          : `alone, to l/h ${standsTo(answer.spanToDepth, ratio, exponent).toFixed(1)}`,
-    };
-  });
-}
-
-/**
- * "fb 1151 of 900 psi, D+L"; "0.32 of 0.50 in, live, l/360"; where there is more than one span with the place and the
- * spans that are loaded, unless it shall be brief.
- */
-export function demandText(member: Member, result: CheckResult, units: Units, brief = false): string {
-  const { id, demand, capacity, combination } = result;
-  const pattern = brief ? '' : patternText(result);
-  const place = brief ? '' : placeOf(member, result);
-  if (result.unit === 'psi') {
-    const symbol = id === 'shear' ? 'fv' : 'fb';
-    const at = place === '' ? '' : ` ${place}`;
-    return `${symbol} ${numberOf(showStress(demand, units))} of ${showStress(capacity, units)}${at}, ${combination}${pattern}`;
-  }
-  const which = id === 'deflection-live' ? 'live' : 'total';
-  const sized =
-    id === 'deflection-live' && member.limits.liveMax !== null ? '' : `, l/${member.limits[which]}`;
-  const measure = place === '' ? null : measureName(member, result.place);
-  const of = measure === null ? '' : ` of ${measure}`;
-  return `${numberOf(showSmall(demand, units))} of ${showSmall(capacity, units)}, ${which}${sized}${of}${pattern}`;
-}
-
-function numberOf(text: string): string {
-  return text.slice(0, text.indexOf(' '));
-}
-
-/** Keeps the place of exponents that are still being worked out. */
-const NOT_YET = [Number.NaN, Number.NaN, Number.NaN, Number.NaN] as const;
-
-function exponentsView(member: Member, answer: Answer, settled: boolean): ExponentView[] {
-  return answer.powers.flatMap(({ name, exponent, check }) => {
-    if (!settled) return [{ label: name, power: exponent, local: NOT_YET, why: '' }];
-    const own = check === null ? undefined : answer.exponents[check];
-    const result = answer.report.checks.find((each) => each.id === check);
-    if (own === undefined || result === undefined) return [];
-    return [
-      {
-        label: name,
-        power: exponent,
-        local: [own.span, own.depth, own.width, own.load] as const,
-        why: whyNotWhole(member, exponent, own, result),
-      },
-    ];
-  });
-}
-
-function rulerOf(member: Member, answer: Answer, ghost: Member | null): RulerView {
-  const { shearToBending, bendingToDeflection, shearToDeflection } = answer.crossovers;
-  // Where bending rules nowhere, shear hands over to deflection directly.
-  const bendingRules =
-    shearToBending === null || bendingToDeflection === null || shearToBending < bendingToDeflection;
-  const span = answer.spanToDepth * standingDepth(member.section);
-  return {
-    now: answer.spanToDepth,
-    ghost: ghost === null ? null : spanToDepthOf(ghost),
-    standsTo: answer.standsTo,
-    shearToBending: bendingRules ? shearToBending : shearToDeflection,
-    bendingToDeflection: bendingRules ? bendingToDeflection : shearToDeflection,
-    stock: stockDepths(member.stock, member.section.width).map((depth) => ({
-      label: depthLabel(member.stock, depth),
-      spanToDepth: span / depth,
-    })),
-  };
-}
-
-/** A stock depth by its nominal size, which sawn wood alone has. */
-function depthLabel({ product }: Stock, depth: number): string {
-  const nominal = product === 'timber' ? timberNominalOf(depth) : isSawn(product) ? nominalOf(depth) : null;
-  return String(nominal ?? Math.round(depth * 10) / 10);
-}
-
-function rackView(member: Member, answer: Answer, units: Units, settled: boolean): RackView {
-  const { rack } = answer;
-  const mixed = rack.woods.length > 1;
-  return {
-    wood: mixed ? `${rack.woods.length} woods` : shortWood(member.stock),
-    weightUnit: weightUnit(units),
-    current: answer.rack.sizes.findIndex(({ size }) => hasSize(member, size)),
-    lightest: answer.rack.lit,
-    litWord: BEST_WORD[answer.rack.best],
-    rows: answer.rack.sizes.map((each, index) => {
-      const [shear, bending, deflection] =
-        each.refused === null ? powersOf(each.ratios).map((power) => power.ratio) : [null, null, null];
-      return {
-        label: each.size.label,
-        ...(mixed ? woodOfRow(rack, each.size) : {}),
-        weight: weightNumber(each.weight, units),
-        ratios: [shear!, bending!, deflection!] as const,
-        passes: each.passes,
-        nonDominated: each.nonDominated,
-        lacking: each.inYard === false,
-        stops: stopsWord(each, units),
-        // Found for the rows that are drawn alone: a long rack holds many that are not.
-        get reach() {
-          return settled ? reachText(answer.reaches.at(index), units) : '';
-        },
-      };
-    }),
-  };
-}
-
-/** Glulam and LVL say so in their labels; sawn wood has to be named beside them. */
-function woodOfRow(rack: Rack, size: Size): { readonly wood: string; readonly named: string } {
-  const wood = gradeWord(size.stock);
-  return { wood, named: isSawn(size.product) ? `${size.label} ${wood}` : sizeName(rack, size) };
-}
-
-function stopsWord({ refused, passes, governing, over, inYard }: RankedSize, units: Units): string {
-  if (over > 0) return `over by ${showInches(over, units)}`;
-  if (passes && inYard === false) return 'not in yard';
-  if (refused !== null) return refusedWord(refused);
-  return passes || governing === null ? '' : CHECK_WORD[governing];
-}
-
-/** To the inch below, which fits a column: `15'-10"`. */
-function reachText(reach: Reach | null, units: Units): string {
-  if (reach === null) return '';
-  if (reach.span === 0) return 'none';
-  return units === 'us' ? showSpan(Math.floor(reach.span), units) : showSpanDown(reach.span, units);
 }
 
 function cureView(member: Member, answer: Answer, cure: Cure, units: Units): CureView {

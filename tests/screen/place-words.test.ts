@@ -1,8 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { answerOf } from '../../src/screen/answer.ts';
+import { demandText } from '../../src/screen/gauge-view.ts';
 import { checkAndPlace, placeOf } from '../../src/screen/place-words.ts';
 import { verdictOf } from '../../src/screen/verdict-text.ts';
-import { demandText, viewOf } from '../../src/screen/view-model.ts';
+import { viewOf } from '../../src/screen/view-model.ts';
 import type { Member } from '../../src/timber/member.ts';
 import type { CheckId } from '../../src/timber/report.ts';
 import { memberOf } from '../support/session.ts';

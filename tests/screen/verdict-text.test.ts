@@ -42,4 +42,17 @@ describe('the verdict', () => {
     expect(reason).toMatch(/ of the right overhang is nearest its limit at 0\.\d\d\.$/);
     expect(reason.length).toBeLessThanOrEqual(69);
   });
+
+  test('of one that lifts names a tie-down that holds when it is typed as it is shown', () => {
+    const uplift = { area: { dead: '8 psf', windUp: '31.37 psf' }, spans: ['14 ft'] };
+    const member = memberOf(uplift);
+    for (const units of ['us', 'si'] as const) {
+      const [cure] = verdictOf(member, answerOf(member), units).cures;
+      const shown = /^Tie it down for (.*)\.$/.exec(cure!)![1]!;
+      const tied = memberOf({ ...uplift, tiedDown: [shown, shown] });
+      const result = answerOf(tied).report.checks.find(({ id }) => id === 'uplift')!;
+      expect(result.ratio).toBeLessThanOrEqual(1 + 1e-9);
+      expect(result.ratio).toBeGreaterThan(0.99);
+    }
+  });
 });
