@@ -1,11 +1,12 @@
+import { isQuick } from '../explore/is-quick.ts';
 import { isAroundMissing, stripOf, withAround } from './handover-now.ts';
 import { stripRows } from './panels/strip.ts';
 import { windowStart } from './panels/table.ts';
-import type { State } from './state.ts';
+import { memberOf, type State } from './state.ts';
 
 /** What is left to work out once a frame is on the screen; null where nothing is. `ms`: how long no key may have come. */
 export function restOf(state: State): { readonly ms: number } | null {
-  if (!state.settled) return { ms: 0 };
+  if (!state.settled) return { ms: state.session.members.length > 0 && isQuick(memberOf(state)) ? 0 : IDLE };
   if (state.mode.name === 'handovers') return state.mode.strip === null ? { ms: 0 } : null;
   if (state.session.members.length === 0) return null;
   return isAroundMissing(state) ? { ms: IDLE } : null;

@@ -6,6 +6,8 @@ export const PASS = 1 + 1e-9;
 /** A ratio of demand to capacity in at most four or five cells. A failing one never reads 1.00. */
 export function showRatio(ratio: number | null, glyphs: Glyphs): string {
   if (ratio === null || Number.isNaN(ratio) || ratio < 0) return glyphs.none;
+  // What nothing can meet, such as uplift with no tie-down stated.
+  if (ratio === Number.POSITIVE_INFINITY) return 'none';
   if (ratio >= 999.5) return '>999';
   if (ratio >= 99.95) return ratio.toFixed(0);
   if (ratio >= 9.995) return ratio.toFixed(1);

@@ -24,7 +24,7 @@ describe('showRatio', () => {
       '12.8',
       '123',
       '>999',
-      '>999',
+      'none',
     ]);
     expect([null, Number.NaN, -1].map((ratio) => showRatio(ratio, unicode))).toEqual(['—', '—', '—']);
     fc.assert(fc.property(fc.double({ min: 0 }), (ratio) => showRatio(ratio, unicode).length <= 4));
