@@ -1,15 +1,16 @@
 import type { Units } from '../../quantity/index.ts';
-import { prepare } from '../../timber/index.ts';
+import { prepare, sameStock } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../../timber/report.ts';
 import { BEST_WORD, type Best, BY_WEIGHT, type Ranking } from '../rack/best.ts';
 import { gradeWord, sizeName, takeSize } from '../rack/rack.ts';
-import { type RankedRack, rankedRack } from '../rack/ranked.ts';
+import { type RankedRack, type RankedSize, rankedRack } from '../rack/ranked.ts';
 import { type Climb, climb, type Ladder } from './ladder.ts';
 import { closer, shorten } from './length.ts';
 import { bestFirst, helps, type Move, moveBy, moveTo, type Table, tableOf } from './move.ts';
+import type { Outcome } from './outcome.ts';
 import { type Kind, pairsOf, tryKind } from './pairs.ts';
-import { addPly, deepen, freeSize, widen } from './section.ts';
+import { addPly, deepen, freeSize, NEAREST, steps, widen } from './section.ts';
 import { brace, longerBearing, tieDown } from './support.ts';
 import { betterGrade, otherProducts, otherSpecies } from './wood.ts';
 
@@ -99,7 +100,18 @@ function climbMove(table: Table, { ladder, least, nearest }: Climb): Move | null
 export function bestMove(table: Table, rack: RankedRack): Move | null {
   const lit = rack.sizes[rack.lit];
   if (lit === undefined) return null;
-  return moveTo(table, BEST_WORD[rack.best], sizeName(rack, lit.size), takeSize(table.member, lit.size));
+  return moveTo(
+    table,
+    BEST_WORD[rack.best],
+    sizeName(rack, lit.size),
+    takeSize(table.member, lit.size),
+    outcomeOf(lit),
+  );
+}
+
+/** What the rack has found of a size. */
+function outcomeOf({ ratios, refused, passes, governing, worst }: RankedSize): Outcome {
+  return { ratios, refused, passes, governing, worst };
 }
 
 function deepenOrWiden(table: Table): DeepenOrWiden {
@@ -162,11 +174,15 @@ export function nearestMoves(
 ): Move[] {
   const { ranking = BY_WEIGHT, only = null, units = 'us' } = options;
   const table = tableOf(member, ranking, only, units);
+  // The rack has rated every size of the member's own wood already.
+  const own = rack.sizes.filter((each) => each.passes && sameStock(each.size.stock, member.stock));
   const moves = [
     bestMove(table, rack),
-    ladderMove(table, deepen(member)),
-    ladderMove(table, widen(member)),
-    ladderMove(table, addPly(member)),
+    ...NEAREST.map((kind) => {
+      const [nearest] = steps(member, own, kind);
+      if (nearest === undefined) return null;
+      return moveTo(table, kind.kind, nearest.size.label, takeSize(member, nearest.size), outcomeOf(nearest));
+    }),
     ...(table.now.passes ? [] : [ladderMove(table, shorten(member, only))]),
   ];
   return moves.filter((move): move is Move => move?.passes === true);

@@ -15,11 +15,7 @@ function standing({ width, depth, plies, flat }: Section): Standing {
 }
 
 /** Stock sizes of the member's own wood beside the size it has, nearest first. */
-function sizesBy(
-  member: Member,
-  fits: (to: Standing, from: Standing) => boolean,
-  by: (to: Standing) => number,
-): Member[] {
+function sizesBy(member: Member, fits: Fits, by: (to: Standing) => number): Member[] {
   const { flat } = member.section;
   const now = standing(member.section);
   const of = (size: Size) => standing({ ...size, flat });
@@ -31,32 +27,47 @@ function sizesBy(
 
 const label: Ladder['label'] = ({ section, stock }) => sizeLabel(section, stock.product);
 
+type Fits = (to: Standing, from: Standing) => boolean;
+
+const DEEPER: Fits = (to, from) => to.ply === from.ply && to.plies === from.plies && to.depth > from.depth;
+const WIDER: Fits = (to, from) =>
+  to.depth === from.depth && to.ply !== from.ply && to.ply * to.plies > from.ply * from.plies;
+const PLIES_MORE: Fits = (to, from) =>
+  to.depth === from.depth && to.ply === from.ply && to.plies > from.plies;
+
+/** What the kinds of the sentence look for among sizes, and what they take the least of. */
+export const NEAREST = [
+  { kind: 'deepen', fits: DEEPER, by: (to: Standing) => to.depth },
+  { kind: 'widen', fits: WIDER, by: (to: Standing) => to.ply * to.plies },
+  { kind: 'add a ply', fits: PLIES_MORE, by: (to: Standing) => to.plies },
+] as const;
+
+/** Of sizes those that are such a step from the member's own, nearest first. */
+export function steps<T extends { readonly size: Size }>(
+  member: Member,
+  sizes: readonly T[],
+  { fits, by }: (typeof NEAREST)[number],
+): T[] {
+  const { flat } = member.section;
+  const now = standing(member.section);
+  const of = ({ size }: T) => standing({ ...size, flat });
+  return sizes.filter((each) => fits(of(each), now)).sort((a, b) => by(of(a)) - by(of(b)));
+}
+
 /** The next stock depths of the same width and plies. */
 export function deepen(member: Member): Ladder {
-  const deeper = sizesBy(
-    member,
-    (to, from) => to.ply === from.ply && to.plies === from.plies && to.depth > from.depth,
-    (to) => to.depth,
-  );
+  const deeper = sizesBy(member, DEEPER, (to) => to.depth);
   return rungs('deepen', 'section', deeper, label);
 }
 
 /** The next stock widths of the same depth, but for one ply more of the same. */
 export function widen(member: Member): Ladder {
-  const wider = sizesBy(
-    member,
-    (to, from) => to.depth === from.depth && to.ply !== from.ply && to.ply * to.plies > from.ply * from.plies,
-    (to) => to.ply * to.plies,
-  );
+  const wider = sizesBy(member, WIDER, (to) => to.ply * to.plies);
   return rungs('widen', 'section', wider, label);
 }
 
 export function addPly(member: Member): Ladder {
-  const more = sizesBy(
-    member,
-    (to, from) => to.depth === from.depth && to.ply === from.ply && to.plies > from.plies,
-    (to) => to.plies,
-  );
+  const more = sizesBy(member, PLIES_MORE, (to) => to.plies);
   return rungs('add a ply', 'section', more, label);
 }
 

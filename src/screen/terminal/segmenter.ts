@@ -9,9 +9,13 @@ import { SINGLE_WIDTH } from './single-width.ts';
 // Not written Intl.Segmenter: the bundler would put this very class in its place.
 const { Segmenter: EngineSegmenter } = Intl;
 
+/** A control character never joins its neighbours; this one begins the style sequences that Ink reads. */
+const ESCAPE = 0x1b;
+
 function isPlain(text: string): boolean {
   for (let index = 0; index < text.length; index += 1) {
-    if (SINGLE_WIDTH[text.charCodeAt(index)] !== 1) return false;
+    const code = text.charCodeAt(index);
+    if (SINGLE_WIDTH[code] !== 1 && code !== ESCAPE) return false;
   }
   return true;
 }
