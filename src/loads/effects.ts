@@ -1,7 +1,6 @@
 import type { Combination } from './combinations.ts';
 
 export type { Combination } from './combinations.ts';
-export { compileEffects } from './compile.ts';
 
 /**
  * One candidate for the largest value of a demand: `base + perWeight * w`, w the own weight in lb/in.
