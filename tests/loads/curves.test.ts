@@ -51,7 +51,7 @@ describe('curves', () => {
           );
         }
       }),
-      { numRuns: 40, seed: 41 },
+      { numRuns: 40 },
     );
   });
 
@@ -110,7 +110,7 @@ describe('kindAnalysis', () => {
           expect(reaction).toBeGreaterThanOrEqual(min - 1e-9 * Math.abs(min) - 1e-9);
         });
       }),
-      { numRuns: 80, seed: 42 },
+      { numRuns: 80 },
     );
   });
 
@@ -125,7 +125,7 @@ describe('kindAnalysis', () => {
           expect(Math.abs(min - Math.min(...all))).toBeLessThanOrEqual(1e-9 * size);
         });
       }),
-      { numRuns: 40, seed: 43 },
+      { numRuns: 40 },
     );
   });
 });

@@ -109,11 +109,11 @@ function checkAgainstBruteForce(loading: Loading): void {
 
 describe('effects', () => {
   test('agree with every combination under every pattern, solved one by one, on random members', () => {
-    fc.assert(fc.property(anyMember(2, 5), checkAgainstBruteForce), { numRuns: 60, seed: 3 });
+    fc.assert(fc.property(anyMember(2, 5), checkAgainstBruteForce), { numRuns: 60 });
   });
 
   test('agree with it on members of up to four spans with few loads', () => {
-    fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: 12, seed: 4 });
+    fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: 12 });
   });
 
   test('keep a term that governs at middling own weights only, neither at none nor at the heaviest', () => {

@@ -5,10 +5,7 @@ import { anyLoadedBeam, beam, line, point } from './beams.ts';
 
 describe('beamFault', () => {
   test('finds nothing wrong with any sound beam and its loads', () => {
-    fc.assert(
-      fc.property(anyLoadedBeam, ({ on, loads }) => beamFault(on, loads) === null),
-      { seed: 21 },
-    );
+    fc.assert(fc.property(anyLoadedBeam, ({ on, loads }) => beamFault(on, loads) === null));
   });
 
   test.each([

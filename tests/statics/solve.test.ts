@@ -35,7 +35,7 @@ function places(on: Beam): number[] {
   return Array.from({ length: 13 }, (_, i) => ((i + 0.377) / 13.5) * length);
 }
 
-const RUNS = { numRuns: 200, seed: 11 };
+const RUNS = { numRuns: 200 };
 
 describe('solveBeam', () => {
   test('balances forces and moments on any beam under any loads', () => {
@@ -215,7 +215,7 @@ describe('solveBeam', () => {
           for (const [i, v] of derived(s.slope).entries()) expect(v).toBeCloseTo(-s.moment[i]!, 7);
         }
       }),
-      { numRuns: 60, seed: 12 },
+      { numRuns: 60 },
     );
   });
 
@@ -241,7 +241,7 @@ describe('solveBeam', () => {
           if (quantity === 'deflection') expect(Math.abs(at(max.at) - max.value)).toBeLessThanOrEqual(slack);
         }
       }),
-      { numRuns: 80, seed: 13 },
+      { numRuns: 80 },
     );
   });
 
@@ -298,7 +298,7 @@ describe('solveBeam', () => {
         shared.respond([a!]);
         expect(shared.respond([b!]).reactions).toEqual(solveBeam(on).respond([b!]).reactions);
       }),
-      { numRuns: 50, seed: 14 },
+      { numRuns: 50 },
     );
   });
 });

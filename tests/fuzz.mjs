@@ -1,0 +1,40 @@
+/**
+ * npm run fuzz [-- MINUTES [FILE-OR-FOLDER ...]]: the property tests again and again, each round from a seed of chance.
+ * Ends with status 1 at the first round that fails and says how to repeat it.
+ */
+import { spawnSync } from 'node:child_process';
+import { randomInt } from 'node:crypto';
+import { readdirSync, readFileSync } from 'node:fs';
+import { fileURLToPath } from 'node:url';
+
+const root = fileURLToPath(new URL('..', import.meta.url));
+const [minutes = '10', ...within] = process.argv.slice(2);
+if (!(Number(minutes) > 0)) {
+  console.error(`"${minutes}" is not a number of minutes; an example: npm run fuzz -- 30 tests/statics`);
+  process.exit(2);
+}
+
+const files = readdirSync(`${root}tests`, { recursive: true, encoding: 'utf8' })
+  .filter(
+    (file) =>
+      /\.test\.tsx?$/.test(file) && readFileSync(`${root}tests/${file}`, 'utf8').includes('fast-check'),
+  )
+  .map((file) => `tests/${file}`)
+  .filter((file) => within.length === 0 || within.some((part) => file.startsWith(part)));
+
+const end = Date.now() + Number(minutes) * 60_000;
+let rounds = 0;
+while (Date.now() < end) {
+  const seed = String(randomInt(2 ** 31));
+  const { status } = spawnSync('npx', ['vitest', 'run', '--reporter=dot', ...files], {
+    cwd: root,
+    env: { ...process.env, THRICE_SEED: seed },
+    stdio: 'inherit',
+  });
+  if (status !== 0) {
+    console.error(`failed from seed ${seed}; again: THRICE_SEED=${seed} npx vitest run FILE`);
+    process.exit(1);
+  }
+  rounds += 1;
+}
+console.log(`${rounds} rounds of ${files.length} files, none failed`);

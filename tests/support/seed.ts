@@ -1,0 +1,4 @@
+import fc from 'fast-check';
+
+// Every property of a run starts from the seed that vitest.config.ts chose and printed.
+fc.configureGlobal({ seed: Number(process.env.THRICE_SEED) });
