@@ -1,6 +1,9 @@
 import { Command, CommanderError, Option } from 'commander';
 import { harmless, quoted } from '../quantity/index.ts';
 import { nearestName } from '../timber/nearest-name.ts';
+import { completion, SHELLS } from './around/completion.ts';
+import { grammarOf } from './around/grammar.ts';
+import { manual } from './around/manual.ts';
 import { type CheckOptions, check } from './check.ts';
 import { explore } from './explore.ts';
 import { type HandoverOptions, handovers } from './handovers.ts';
@@ -56,13 +59,13 @@ export async function run(args: readonly string[], version: string, streams: Str
       status = check(file, options, streams.out);
     });
   const byBest = (command: Command) =>
-    command.option('--best <what>', "weight, depth, boardFeet or price, in place of the session's");
+    command.option('--best <weight|depth|boardFeet|price>', "what counts as best, in place of the session's");
   byBest(onSession('rack', 'the stock sizes, lightest first, and what stops each', true)).action(
     (file: string, options: SessionOptions) => {
       status = rack(file, options, streams.out);
     },
   );
-  onSession('reach', 'the longest span of each stock size, and what stops it', true).action(
+  byBest(onSession('reach', 'the longest span of each stock size, and what stops it', true)).action(
     (file: string, options: SessionOptions) => {
       status = reach(file, options, streams.out);
     },
@@ -94,6 +97,20 @@ export async function run(args: readonly string[], version: string, streams: Str
     .description('the JSON Schema of the session file')
     .action(() => {
       status = schema(streams.out);
+    });
+
+  program
+    .command('completion')
+    .description('the script by which a shell completes what is typed')
+    .argument(`<${SHELLS}>`, 'the shell')
+    .action((shell: string) => {
+      status = completion(shell, grammarOf(program), streams.out);
+    });
+  program
+    .command('manual')
+    .description('the manual page, to be read by: thrice manual | man -l -')
+    .action(() => {
+      status = manual(grammarOf(program), version, closing(), streams.out);
     });
 
   // More than a file without a command: the first word was meant as one. The commands themselves, which would

@@ -1,9 +1,12 @@
-import { type Rack, type RackSize, rackOf } from '../explore/rack/rack.ts';
+import { BEST_WORD } from '../explore/rack/best.ts';
+import { type RackSize, sizeName } from '../explore/rack/rack.ts';
+import { type RankedRack, rankedRack } from '../explore/rack/ranked.ts';
 import { refusedWord } from '../explore/rack/refused-word.ts';
 import type { Reach } from '../explore/reach/reach.ts';
 import { reachesOf } from '../explore/reach/reaches.ts';
 import { harmless, showSpanDown, type Units } from '../quantity/index.ts';
 import { CHECK_WORD } from '../screen/words.ts';
+import { rankingOf } from '../session/index.ts';
 import type { Member } from '../timber/member.ts';
 import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
@@ -12,11 +15,16 @@ import { sizeCells, sizeColumns, sizeJson, woodJson } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
 
-/** `thrice reach FILE --member NAME`: the longest span of each stock size. Status 0 when some size passes as it is. */
+/**
+ * `thrice reach FILE --member NAME`: the longest span of each stock size, best first. Status 0 when some size passes as
+ * it is. A session that does not say what counts as best is told the lightest, whatever its yard has.
+ */
 export function reach(file: string, options: SessionOptions, print: (text: string) => void): number {
   const loaded = load(file, options);
   const { member } = theMember(loaded, file);
-  const rack = rackOf(member, loaded.only);
+  const rack = rankedRack(member, rankingOf(loaded.session), loaded.only);
+  const stated = loaded.session.best !== undefined;
+  const marked = stated ? rack.lit : rack.lightest;
   const reaches = reachesOf(member, rack, loaded.only);
   printAnswer(loaded, member, options.json, print, {
     document: () => {
@@ -29,17 +37,34 @@ export function reach(file: string, options: SessionOptions, print: (text: strin
       return {
         member: member.name,
         lightest: lit?.label ?? null,
+        ...(stated ? { best: rack.best, lit: rack.sizes[rack.lit]?.size.label ?? null } : {}),
         lightestWood: lit === undefined ? null : woodJson(lit.stock),
         ...given(member).json,
         sizes,
       };
     },
-    lines: () => reachText(member, rack, reaches, loaded.units),
+    lines: () => [
+      ...reachText(member, rack, reaches, marked, loaded.units),
+      ...(stated ? [bestText(rack)] : []),
+    ],
   });
   return rack.lightest >= 0 ? STATUS.yes : STATUS.no;
 }
 
-function reachText(member: Member, rack: Rack, reaches: readonly (Reach | null)[], units: Units): string[] {
+/** What counts as best decides the order: named with the size that it comes to. */
+function bestText(rack: RankedRack): string {
+  const size = rack.sizes[rack.lit]?.size;
+  if (size !== undefined) return `${BEST_WORD[rack.best]} that passes: ${sizeName(rack, size)}`;
+  return rack.lightest < 0 ? 'no size passes' : 'the yard has no size that passes';
+}
+
+function reachText(
+  member: Member,
+  rack: RankedRack,
+  reaches: readonly (Reach | null)[],
+  marked: number,
+  units: Units,
+): string[] {
   return [
     ...beside([harmless(member.name), ...rack.woods.map(woodName)]),
     ...table(
@@ -49,7 +74,7 @@ function reachText(member: Member, rack: Rack, reaches: readonly (Reach | null)[
         { head: 'stopped there by', align: 'left' },
       ],
       rack.sizes.map((each, at) => [
-        ...sizeCells(rack, each, at === rack.lightest, units),
+        ...sizeCells(rack, each, at === marked, units),
         spanText(reaches[at] ?? null, units),
         stopsText(each, reaches[at] ?? null),
       ]),

@@ -20,6 +20,42 @@ function withYard(csv: string, top: Record<string, unknown>, ...members: Record<
 }
 const CSV = 'size,grade,lengths,per foot\r\n2x12,No.2,"12 16",2.10\r\n2x10,No.2,8-16,1.60\r\n';
 
+describe('thrice reach', () => {
+  interface Size {
+    readonly label: string;
+    readonly depth: number;
+    readonly span: number;
+    readonly passes: boolean;
+  }
+  const text = (top: Record<string, unknown>) =>
+    sessionFile(JSON.stringify({ ...JSON.parse(sessionText({})), ...top }));
+
+  test('has its sizes in the order of what the session says counts as best', async () => {
+    const { document } = await json('reach', text({ best: 'depth' }));
+    const depths = document.sizes.map(({ depth }: Size) => depth);
+    expect(depths).toEqual([...depths].sort((a: number, b: number) => a - b));
+    const plain = await json('reach', text({}));
+    const spans = (sizes: readonly Size[]) =>
+      Object.fromEntries(sizes.map(({ label, span }) => [label, span]));
+    expect(spans(document.sizes)).toEqual(spans(plain.document.sizes));
+    expect(document).toMatchObject({ best: 'depth', lightest: plain.document.lightest });
+    expect(document.lit).toBe(document.sizes.find(({ passes }: Size) => passes).label);
+    const { out } = await command('reach', text({ best: 'depth' }));
+    expect(out).toContain(`shallowest that passes: ${document.lit}`);
+    expect(out).toMatch(new RegExp(`^\\* +${document.lit.replace(/[()]/g, '\\$&')} `, 'm'));
+  });
+
+  test('of a session that does not say so is lightest first and names nothing else, whatever its yard has', async () => {
+    const none = await json('reach', text({}));
+    const yard = withYard(CSV, {}, {});
+    expect((await json('reach', yard)).document).toEqual(none.document);
+    expect(none.document).not.toHaveProperty('best');
+    expect((await command('reach', yard)).out).toBe((await command('reach', text({}))).out);
+    const weights = none.document.sizes.map(({ weight }: { weight: number }) => weight);
+    expect(weights).toEqual([...weights].sort((a: number, b: number) => a - b));
+  });
+});
+
 describe('thrice moves', () => {
   test('gives sets that do on the command line just what it promised', async () => {
     const file = failing();
