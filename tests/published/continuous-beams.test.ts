@@ -3,6 +3,7 @@ import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
 import type { Beam, BeamLoad } from '../../src/statics/beam.ts';
 import { solveBeam } from '../../src/statics/solve.ts';
+import { comparedWith } from './compared.ts';
 
 interface Probe {
   readonly x: number;
@@ -24,6 +25,7 @@ const fixture: Fixture = JSON.parse(
   readFileSync(new URL('./continuous-beams.json', import.meta.url), 'utf8'),
 );
 const AGREEMENT = 1e-6;
+const library = comparedWith(`${fixture.source}, a library for beams in general`);
 
 describe(`beams worked out by ${fixture.source}`, () => {
   test('the fixture holds at least 40 beams, of every number of spans, with overhangs, fixed ends and cantilevers', () => {
@@ -40,7 +42,7 @@ describe(`beams worked out by ${fixture.source}`, () => {
     (_, { beam, loads, reactions, probes }) => {
       const response = solveBeam(beam).respond(loads);
       const close = (ours: number, theirs: number, size: number) =>
-        expect(Math.abs(ours - theirs)).toBeLessThanOrEqual(AGREEMENT * size);
+        library.holds(ours, theirs, { within: AGREEMENT * size, size });
       const largest = (values: readonly number[]) => Math.max(...values.map(Math.abs));
       expect(response.reactions.length).toBe(reactions.length);
       for (const [i, reaction] of reactions.entries())

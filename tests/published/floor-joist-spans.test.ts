@@ -2,6 +2,7 @@ import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { command, sessionFile, sessionText } from '../support/session.ts';
+import { comparedWith } from './compared.ts';
 
 // Source: International Residential Code 2018, Table R502.3.1(2), living areas, live 40 psf, dead 10 psf,
 // live-load deflection l/360; values from memory.
@@ -15,6 +16,7 @@ const SIZES = heads!
 const ROWS = lines.map((line) => line.split(','));
 
 const HALF_AN_INCH = 0.5;
+const code = comparedWith('International Residential Code 2018, Table R502.3.1(2), joist spans, from memory');
 
 function inches(feetAndInches: string): number {
   const [feet, inch] = feetAndInches.split('-').map(Number);
@@ -48,10 +50,10 @@ describe('published joist spans', () => {
       const { sizes } = JSON.parse(out) as { sizes: { label: string; span: number }[] };
       SIZES.forEach((size, index) => {
         const reach = sizes.find((each) => each.label === size)!.span;
-        expect(
-          Math.abs(reach - inches(spans[index]!)),
-          `${size}: ${reach} in for ${spans[index]}`,
-        ).toBeLessThanOrEqual(HALF_AN_INCH);
+        code.holds(reach, inches(spans[index]!), {
+          within: HALF_AN_INCH,
+          what: `${size} for ${spans[index]}`,
+        });
       });
     },
   );
