@@ -17,8 +17,9 @@ export function effectsAlone(loading: Loading, options: EffectsOptions): AloneEf
   return {
     byCombination: parts.table.strength.map((_, c) => effectsOf(only(parts, c), options)),
     allSpans: (c) => {
-      const kinds = parts.kinds.map(({ kind, whole }) => ({
+      const kinds = parts.kinds.map(({ kind, lifts, whole }) => ({
         kind,
+        lifts,
         whole,
         parts: null,
         hi: whole,

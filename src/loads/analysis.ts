@@ -1,8 +1,8 @@
 import { type Quantity, responseOf } from '../statics/response.ts';
-import type { States } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import { envelopeOf } from './envelope.ts';
 import type { LoadKind } from './kinds.ts';
-import type { Loading } from './loading.ts';
+import type { Borne, Loading } from './loading.ts';
 import { add, type LoadParts, scaled, solveParts } from './parts.ts';
 import { slopeStretch } from './slope.ts';
 
@@ -25,7 +25,9 @@ export function kindAnalysis(loading: Loading, w: number): KindEffects[] {
   const effects: KindEffects[] = [];
   const dead = deadWith(parts, w);
   if (dead) effects.push(effectsOfKind(parts, 'dead', dead));
-  for (const { kind, whole } of parts.kinds) effects.push(effectsOfKind(parts, kind, whole));
+  for (const { kind, lifts, whole } of parts.kinds) {
+    if (!lifts) effects.push(effectsOfKind(parts, kind, whole));
+  }
   return effects;
 }
 
@@ -51,6 +53,24 @@ function effectsOfKind(parts: LoadParts, kind: LoadKind, states: States): KindEf
     deflection: slopeStretch(parts.loading.slope) ** 2 * largest('deflection'),
     reactions: response.reactions,
   };
+}
+
+/**
+ * What each support bears of each kind that is present, lb: the largest and smallest over the kind's own patterns, no
+ * combination, no factor, live load unreduced, for the reduction of a member is its own; own weight of `w` lb/in in dead.
+ */
+export function borneBy(loading: Loading, w: number): Borne[] {
+  const parts = solveParts({ ...loading, liveReduction: null });
+  const dead = deadWith(parts, w);
+  return parts.solution.supports.map((_, i) => {
+    const borne: { -readonly [K in LoadKind]?: Borne[K] } = {};
+    if (dead) borne.dead = { max: dead.reactions[i]!, min: dead.reactions[i]! };
+    for (const { kind, hi, lo } of parts.kinds) {
+      const { max, min } = borne[kind] ?? { max: 0, min: 0 };
+      borne[kind] = { max: max + hi.reactions[i]!, min: min + lo.reactions[i]! };
+    }
+    return borne;
+  });
 }
 
 /** Largest and smallest upward force of each support over combinations and patterns, lb; own weight `w` lb/in. */

@@ -1,11 +1,11 @@
 import { DEFLECTION, MOMENT, SHEAR, STRIDE, V0, V1 } from '../statics/piece.ts';
-import type { States } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import type { Found } from './bar.ts';
 import type { Effects, TermGroup } from './effects.ts';
 import { type Envelope, variableEnvelope, withDead } from './envelope.ts';
 import { lateralCases } from './lateral-case.ts';
 import type { Loading } from './loading.ts';
-import { MomentGroup } from './moment-group.ts';
+import { momentGroup, momentSource } from './moment-group.ts';
 import { type LoadParts, solveParts } from './parts.ts';
 import { type PatternBook, patternBook } from './pattern-book.ts';
 import { searchNumber, searchPieces } from './search.ts';
@@ -40,6 +40,7 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
   const windy = parts.kinds.some(({ kind }) => kind === 'wind' || kind === 'windUp');
   const deflecting = windy ? variableEnvelope(parts, table.deflection, variable) : variable;
   const book = patternBook(parts);
+  const moments = momentSource(strength, book, heaviest);
   const every = table.strength.map((_, i) => i);
 
   const shear: TermGroup[] = [];
@@ -57,14 +58,15 @@ export function effectsOf(parts: LoadParts, options: EffectsOptions): Effects {
       for (let f = 0; f < fields.length; f++) {
         const from = grid.first[f]!;
         const to = grid.first[f + 1]!;
-        const pushMoments = (groups: TermGroup[], found: readonly Found[]) => {
-          if (found.length > 0)
-            groups.push(new MomentGroup(strength, book, found, duration, f, lateral.case, heaviest));
-        };
-        const down = searchPieces(strength, MOMENT, DOWN, lateral.combinations, from, to, heaviest);
-        pushMoments(sagging, down);
-        const up = searchPieces(strength, MOMENT, UP, lateral.combinations, from, to, heaviest);
-        pushMoments(hogging, up);
+        for (const [groups, sign] of [
+          [sagging, 1],
+          [hogging, -1],
+        ] as const) {
+          const found = searchPieces(strength, MOMENT, [sign], lateral.combinations, from, to, heaviest);
+          if (found.length === 0) continue;
+          const place = { field: f, sign, combinations: lateral.combinations };
+          groups.push(momentGroup(moments, found, { duration, lateralCase: lateral.case }, place));
+        }
       }
     }
   }
@@ -158,7 +160,7 @@ function push(
   groups.push({
     duration,
     place,
-    zeroMomentLength: 0,
+    volume: null,
     lateralCase: 'other',
     terms: found.map((term) => book.term(term)),
   });

@@ -1,6 +1,6 @@
 import { pieceAt } from '../statics/grid.ts';
 import { DEFLECTION, MOMENT, type Order, pieceValue, SHEAR, STRIDE } from '../statics/piece.ts';
-import type { States } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import type { Found } from './bar.ts';
 import { type Envelope, envelopeOf, numberUnder, type ReadPart, WHOLE, worstPattern } from './envelope.ts';
 import type { Loading } from './loading.ts';
@@ -69,7 +69,7 @@ export function curves(
         for (const c of list) {
           const pattern = worstPattern(e, c, sign, read);
           const value =
-            numberUnder(e, c, pattern, read) + (own ? w * e.deadScale[c]! * read(own, null, -1) : 0);
+            numberUnder(e, c, pattern, read) + (own ? w * e.deadScale[c]! * read(own, null, -1, false) : 0);
           most = Math.max(most, sign * value);
         }
       }
@@ -79,7 +79,10 @@ export function curves(
       const readers = readersAt(e, order, x);
       const read = readers[readers.length - 1]!;
       const c = list[0]!;
-      return scale * (numberUnder(e, c, WHOLE, read) + (own ? w * e.deadScale[c]! * read(own, null, -1) : 0));
+      return (
+        scale *
+        (numberUnder(e, c, WHOLE, read) + (own ? w * e.deadScale[c]! * read(own, null, -1, false) : 0))
+      );
     };
     const extreme = (sign: number): CurveExtreme | null => {
       let best: Found | null = null;

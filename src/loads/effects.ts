@@ -31,11 +31,39 @@ export interface TermGroup {
   readonly duration: number;
   /** Index of the field (moments, deflections) or of the support (end shear, bearing, uplift); -1 for shear. */
   readonly place: number;
-  /** Moments only: longest length between points of zero moment round these extremes, in (NDS 5.3.6). */
-  readonly zeroMomentLength: number;
+  /** Moments only, null elsewhere: what their lengths between points of zero moment ask (NDS 5.3.6). */
+  readonly volume: VolumeMoments | null;
   /** Moments only, 'other' elsewhere: how the loads of these combinations lie. Own weight counts as a uniform load. */
   readonly lateralCase: LateralCase;
   readonly terms: readonly Term[];
+}
+
+/** A moment with the length between the points of zero moment on either side of it. */
+export interface VolumeMoment {
+  /** lb.in */
+  readonly moment: number;
+  /** in, along a sloped member */
+  readonly length: number;
+  /** Place of the moment, in from the member's left end. */
+  readonly at: number;
+  /** Its combination and pattern. */
+  readonly term: Term;
+}
+
+/**
+ * Moments of a group judged by the volume factor, which falls with a root of the length between points of zero moment:
+ * the case that asks most need not be the one with the largest moment.
+ */
+export interface VolumeMoments {
+  /** No length is longer, in. */
+  readonly longest: number;
+  /**
+   * The largest `moment length^(1/root)` over all combinations and patterns of the group at own weight `w`, lb/in; null
+   * where none is more than `over` (0 where it is not given).
+   */
+  worst(root: number, w: number, over?: number): VolumeMoment | null;
+  /** The moment of one of the group's terms, by its index. */
+  of(term: number, w: number): VolumeMoment | null;
 }
 
 /**

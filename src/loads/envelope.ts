@@ -1,10 +1,10 @@
 import { Q0, STRIDE, Y0 } from '../statics/piece.ts';
-import type { States } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import { zeros } from '../statics/zeros.ts';
 import type { Combination } from './combinations.ts';
 import type { LoadKind } from './kinds.ts';
-import type { LoadParts } from './parts.ts';
-import { PARTIAL_SNOW, type Pattern } from './patterns.ts';
+import type { KindStates, LoadParts } from './parts.ts';
+import { liftBit, PARTIAL_SNOW, type Pattern } from './patterns.ts';
 
 /**
  * A list of combinations over a member's load parts. For each combination `hi` and `lo` hold, number by number, the
@@ -128,20 +128,25 @@ function addTo(target: States, states: States, factor: number): void {
 }
 
 /** Every load on every field it is given for. */
-export const WHOLE: Pattern = { live: -1, roofLive: -1, snow: -1 };
-
-/** Reads one number from the states of a load part: its kind (null for own weight), its field (-1 for all of it). */
-export type ReadPart = (states: States, kind: LoadKind | null, field: number) => number;
+export const WHOLE: Pattern = { live: -1, roofLive: -1, snow: -1, lifts: 0 };
 
 /**
- * The pattern of combination c that makes `sign` times one number largest. A part that adds nothing counts as present.
+ * Reads one number from the states of a load part: its kind (null for own weight), its field (-1 for all of it), and
+ * whether it is what carried members lift with.
+ */
+export type ReadPart = (states: States, kind: LoadKind | null, field: number, lifts: boolean) => number;
+
+/**
+ * The pattern of combination c that makes `sign` times one number largest. A part that adds nothing counts as present,
+ * one that lifts as absent.
  */
 export function worstPattern(e: Envelope, c: number, sign: number, read: ReadPart): Pattern {
   if (e.plain[c]) return WHOLE;
-  const pattern = { live: -1, roofLive: -1, snow: -1 };
-  for (const { kind, parts } of e.parts.kinds) {
+  const pattern = { live: -1, roofLive: -1, snow: -1, lifts: 0 };
+  for (const { kind, lifts, parts } of e.parts.kinds) {
     if (!parts || !e.list[c]!.factors[kind]) continue;
-    if (kind === 'snow') pattern.snow = worstSnow(e.parts, parts, sign, read);
+    if (lifts) pattern.lifts |= liftsThatAdd(kind, parts, sign, read);
+    else if (kind === 'snow') pattern.snow = worstSnow(e.parts, parts, sign, read);
     else pattern[kind as 'live' | 'roofLive'] = presentMask(kind, parts, sign, read);
   }
   return pattern;
@@ -156,7 +161,21 @@ function presentMask(
   let mask = -1;
   for (let f = 0; f < parts.length; f++) {
     const part = parts[f];
-    if (part && sign * read(part, kind, f) < 0) mask &= ~(1 << f);
+    if (part && sign * read(part, kind, f, false) < 0) mask &= ~(1 << f);
+  }
+  return mask;
+}
+
+function liftsThatAdd(
+  kind: LoadKind,
+  parts: readonly (States | null)[],
+  sign: number,
+  read: ReadPart,
+): number {
+  let mask = 0;
+  for (let f = 0; f < parts.length; f++) {
+    const part = parts[f];
+    if (part && sign * read(part, kind, f, true) > 0) mask |= liftBit(kind, f);
   }
   return mask;
 }
@@ -164,7 +183,7 @@ function presentMask(
 function worstSnow(all: LoadParts, parts: readonly (States | null)[], sign: number, read: ReadPart): number {
   let best = -1;
   let most = Number.NEGATIVE_INFINITY;
-  const each = parts.map((part, f) => (part ? sign * read(part, 'snow', f) : 0));
+  const each = parts.map((part, f) => (part ? sign * read(part, 'snow', f, false) : 0));
   for (const { full } of all.snow) {
     let sum = 0;
     // Only what a case adds to half snow everywhere tells the cases apart.
@@ -180,15 +199,16 @@ function worstSnow(all: LoadParts, parts: readonly (States | null)[], sign: numb
 /** One number under a combination and pattern, own weight left out. */
 export function numberUnder(e: Envelope, c: number, pattern: Pattern, read: ReadPart): number {
   const { parts } = e;
-  let sum = parts.dead ? e.deadScale[c]! * read(parts.dead, 'dead', -1) : 0;
-  for (const { kind, parts: each, whole } of parts.kinds) {
+  let sum = parts.dead ? e.deadScale[c]! * read(parts.dead, 'dead', -1, false) : 0;
+  for (const states of parts.kinds) {
+    const { kind, lifts, parts: each, whole } = states;
     const factor = e.list[c]!.factors[kind];
     if (!factor) continue;
-    if (!each) sum += factor * read(whole, kind, -1);
+    if (!each) sum += factor * read(whole, kind, -1, lifts);
     else {
       for (let f = 0; f < each.length; f++) {
-        const by = each[f] ? partFactor(e, c, kind, f, pattern) : 0;
-        if (by !== 0) sum += by * read(each[f]!, kind, f);
+        const by = each[f] ? partFactor(e, c, states, f, pattern) : 0;
+        if (by !== 0) sum += by * read(each[f]!, kind, f, lifts);
       }
     }
   }
@@ -196,8 +216,15 @@ export function numberUnder(e: Envelope, c: number, pattern: Pattern, read: Read
 }
 
 /** Factor with which a kind's part on a field enters a combination under a pattern. */
-export function partFactor(e: Envelope, c: number, kind: LoadKind, field: number, pattern: Pattern): number {
+function partFactor(
+  e: Envelope,
+  c: number,
+  { kind, lifts }: KindStates,
+  field: number,
+  pattern: Pattern,
+): number {
   const factor = e.list[c]!.factors[kind] ?? 0;
+  if (lifts) return pattern.lifts & liftBit(kind, field) ? factor : 0;
   const bit = 1 << field;
   if (kind === 'snow') return pattern.snow & bit ? factor : factor * PARTIAL_SNOW;
   return pattern[kind as 'live' | 'roofLive'] & bit ? factor : 0;
@@ -217,7 +244,7 @@ export function pieceUnder(e: Envelope, c: number, pattern: Pattern, piece: numb
     }
     for (let f = 0; f < states.parts.length; f++) {
       const part = states.parts[f];
-      const by = part ? partFactor(e, c, states.kind, f, pattern) : 0;
+      const by = part ? partFactor(e, c, states, f, pattern) : 0;
       if (by !== 0) for (let i = Q0; i <= Y0; i++) out[i]! += by * part!.data[o + i]!;
     }
   }

@@ -1,4 +1,5 @@
 import { areaToLine } from './area-to-line.ts';
+import { liftsOf, loadsOf } from './carried.ts';
 import type { LateralCase } from './effects.ts';
 import type { LoadKind } from './kinds.ts';
 import type { LoadParts } from './parts.ts';
@@ -17,11 +18,11 @@ interface Lateral {
  * it. Own weight is a uniform load, so a point load is alone only where own weight is off.
  */
 export function lateralCases(parts: LoadParts, combinations: readonly number[]): Lateral[] {
-  const { beam, loads } = parts.loading;
+  const { beam, links = [], loads } = parts.loading;
   const simple =
     parts.fields.length === 1 && beam.supports === 'bearings' && !beam.fixed.left && !beam.fixed.right;
   if (!simple) return [{ case: 'other', combinations }];
-  if (loads.length === 0) return [{ case: 'uniform', combinations }];
+  if (loads.length === 0 && links.length === 0) return [{ case: 'uniform', combinations }];
   const sorted = new Map<LateralCase, number[]>();
   for (const c of combinations) {
     const found = caseOf(parts, (kind) => (parts.table.strength[c]!.factors[kind] ?? 0) !== 0);
@@ -33,12 +34,12 @@ export function lateralCases(parts: LoadParts, combinations: readonly number[]):
 }
 
 function caseOf(parts: LoadParts, acts: (kind: LoadKind) => boolean): LateralCase {
-  const { beam, loads, selfWeight } = parts.loading;
+  const { beam, selfWeight } = parts.loading;
   const length = beam.spans[0]!;
   let uniform = selfWeight || (acts('dead') && areaToLine(parts.loading, 'dead') !== 0);
   for (const { kind } of parts.kinds) if (acts(kind) && areaToLine(parts.loading, kind) !== 0) uniform = true;
   let points = 0;
-  for (const load of loads) {
+  for (const load of [...loadsOf(parts.loading), ...liftsOf(parts.loading)]) {
     if (!acts(load.kind)) continue;
     if (load.type === 'point') {
       if (load.load === 0) continue;

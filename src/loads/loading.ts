@@ -12,6 +12,42 @@ export interface LiveReduction {
   readonly KLL: number;
 }
 
+/** Which support of a member a link takes the reaction of: that at an end, or one by its index from the left. */
+export type LinkEnd = 'left' | 'right' | number;
+
+/**
+ * What a support bears by kind, lb, downward on what carries it: the largest and the smallest over the kind's own load
+ * patterns; one figure twice where it has none.
+ */
+export type Borne = Readonly<Partial<Record<LoadKind, { readonly max: number; readonly min: number }>>>;
+
+/**
+ * A load that is the reaction of another member: once at a place, or one every so many inches between two places,
+ * spread evenly. Places and spacing in in, on plan.
+ */
+export type Link = {
+  /** Name of the member whose reaction it is. */
+  readonly member: string;
+  readonly end: LinkEnd;
+  /** What that member brings as it stands; null while that has not been worked out. Not in the file. */
+  readonly bears: Borne | null;
+} & (
+  | { readonly type: 'point'; readonly at: number }
+  | {
+      readonly type: 'line';
+      readonly every: number;
+      /** `every` is the spacing that the other member stands at, and follows it. Absent: it was typed. */
+      readonly bySpacing?: true;
+      readonly from: number;
+      readonly to: number;
+    }
+);
+
+/** Where a load or a link stands or runs, in from the member's left end. */
+export type Placed =
+  | { readonly type: 'point'; readonly at: number }
+  | { readonly type: 'line'; readonly from: number; readonly to: number };
+
 /** A beam and all that it carries, in base units (lb, in, psi, lb/in). */
 export interface Loading {
   readonly beam: Beam;
@@ -21,6 +57,8 @@ export interface Loading {
   readonly area: Readonly<Record<LoadKind, number>>;
   /** Line and point loads on top of the area loads. */
   readonly loads: readonly AppliedLoad[];
+  /** Loads that are reactions of other members. Absent: none. */
+  readonly links?: readonly Link[];
   readonly selfWeight: boolean;
   readonly combinations: CombinationSet;
   readonly liveReduction: LiveReduction | null;

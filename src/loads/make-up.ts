@@ -1,6 +1,6 @@
 import { DEFLECTION, MOMENT, type Order, pieceValue, SHEAR, STRIDE } from '../statics/piece.ts';
 import { type Quantity, responseOf } from '../statics/response.ts';
-import type { States } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import type { Combination } from './combinations.ts';
 import { LOAD_KINDS, type LoadKind } from './kinds.ts';
 import type { Loading } from './loading.ts';
@@ -62,10 +62,41 @@ export function makeUp(loading: Loading, w: number, demand: Demanded): MakeUp | 
   return null;
 }
 
+/** A value of a curve to take apart. */
+export interface DemandedAt extends Pick<Demanded, 'combination' | 'deadFactor'> {
+  readonly quantity: Quantity;
+  /** in from the member's left end */
+  readonly at: number;
+  /** 1: the largest value there, -1: the smallest. */
+  readonly sign: 1 | -1;
+}
+
+/**
+ * What the largest or smallest value of a curve at one place is made of, under one combination and the pattern that is
+ * worst there: shares positive where they add to `sign` times the value. At a jump of shear the side that tells more.
+ */
+export function makeUpAt(loading: Loading, w: number, demand: DemandedAt): Share[] {
+  const parts = solveParts(loading);
+  let shares: Share[] = [];
+  let most = Number.NEGATIVE_INFINITY;
+  for (let place = 0; place < parts.grid.first.length - 1; place += 1) {
+    for (const read of readersAt(parts, { ...demand, place }, demand.at)) {
+      const each = sharesOf(parts, w, demand, demand.sign, read);
+      const sum = each.reduce((total, { factor, value }) => total + factor * value, 0);
+      if (sum > most) [shares, most] = [each, sum];
+    }
+  }
+  return shares;
+}
+
 type Read = (states: States) => number;
 
 /** Readers at a place in the demand's field: before and after where pieces meet, for shear jumps there. */
-function readersAt(parts: LoadParts, { quantity, place }: Demanded, at: number): Read[] {
+function readersAt(
+  parts: LoadParts,
+  { quantity, place }: Pick<Demanded, 'quantity' | 'place'>,
+  at: number,
+): Read[] {
   if (quantity === 'reaction') return [(states) => states.reactions[place]!];
   const { grid } = parts;
   const stretch = quantity === 'deflection' ? slopeStretch(parts.loading.slope) ** 2 : 1;
@@ -79,7 +110,13 @@ function readersAt(parts: LoadParts, { quantity, place }: Demanded, at: number):
   return readers;
 }
 
-function sharesOf(parts: LoadParts, w: number, demand: Demanded, sign: number, read: Read): Share[] {
+function sharesOf(
+  parts: LoadParts,
+  w: number,
+  demand: Pick<Demanded, 'combination' | 'deadFactor'>,
+  sign: number,
+  read: Read,
+): Share[] {
   const { factors } = demand.combination;
   const shares: Share[] = [];
   const dead = demand.deadFactor * (factors.dead ?? 0);
@@ -89,11 +126,11 @@ function sharesOf(parts: LoadParts, w: number, demand: Demanded, sign: number, r
       shares.push({ kind: 'own weight', factor: dead, value: sign * w * read(parts.own) });
   }
   for (const kind of LOAD_KINDS) {
-    const states = parts.kinds.find((each) => each.kind === kind);
+    const states = parts.kinds.filter((each) => each.kind === kind);
     const factor = factors[kind] ?? 0;
-    if (states === undefined || factor === 0) continue;
-    const worst = worstOf(parts, states, sign, read);
-    shares.push({ kind, factor, value: sign * read(worst) });
+    if (states.length === 0 || factor === 0) continue;
+    const worst = states.reduce((sum, each) => sum + read(worstOf(parts, each, sign, read)), 0);
+    shares.push({ kind, factor, value: sign * worst });
   }
   return shares;
 }
@@ -101,13 +138,13 @@ function sharesOf(parts: LoadParts, w: number, demand: Demanded, sign: number, r
 /** The states of a kind with the pattern that makes `sign` times a number largest. */
 function worstOf(
   parts: LoadParts,
-  { kind, whole, parts: each }: KindStates,
+  { kind, lifts, whole, parts: each }: KindStates,
   sign: number,
   read: Read,
 ): States {
   if (each === null) return whole;
   const sum = scaled(whole, 0);
-  if (kind === 'snow') {
+  if (kind === 'snow' && !lifts) {
     let most = Number.NEGATIVE_INFINITY;
     let best = parts.snow[0]!.full;
     for (const { full } of parts.snow) {

@@ -1,8 +1,10 @@
 import type { BeamLoad, Field } from '../statics/beam.ts';
 import { type Grid, gridOf, type PieceLoads, spread } from '../statics/grid.ts';
-import { type BeamSolution, type States, solveBeam, statesOf } from '../statics/solve.ts';
+import { type BeamSolution, solveBeam, statesOf } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import { zeros } from '../statics/zeros.ts';
 import { areaToLine, kindSign, planLoad } from './area-to-line.ts';
+import { liftsOf, loadsOf } from './carried.ts';
 import { type CombinationTable, combinationTable } from './combinations.ts';
 import { LOAD_KINDS, type LoadKind } from './kinds.ts';
 import type { AppliedLoad, Loading } from './loading.ts';
@@ -12,6 +14,8 @@ import { slopeStretch } from './slope.ts';
 /** What one variable kind does, by the parts that may be present or absent. */
 export interface KindStates {
   readonly kind: LoadKind;
+  /** What carried members lift with, each field by itself there or not; it is no part of the whole load of the kind. */
+  readonly lifts: boolean;
   /** All of it at once. */
   readonly whole: States;
   /** Where it comes in patterns on more than one field: its part on each field, null where it loads nothing. */
@@ -38,10 +42,12 @@ export interface LoadParts {
 
 /** Solves every load part of a member once, at EI = 1. Cost grows with parts x pieces. */
 export function solveParts(loading: Loading): LoadParts {
-  const { beam, loads, slope } = loading;
+  const { beam, slope } = loading;
   const solution = solveBeam(beam);
   const { fields } = solution;
-  const grid = gridOf(beam, loads, fields);
+  const loads = loadsOf(loading);
+  const lifts = liftsOf(loading);
+  const grid = gridOf(beam, lifts.length === 0 ? loads : [...loads, ...lifts], fields);
   const units = unitStates(solution, grid);
   const stretch = slopeStretch(slope);
 
@@ -69,13 +75,15 @@ export function solveParts(loading: Loading): LoadParts {
   for (const kind of LOAD_KINDS) {
     const line = kindSign(kind) * areaToLine(loading, kind);
     const typed = typedLoads(loads, kind, slope);
-    if (line === 0 && typed.length === 0) continue;
+    const lifting = typedLoads(lifts, kind, slope);
+    if (line === 0 && typed.length === 0 && lifting.length === 0) continue;
     if (kind === 'dead') {
       dead = wholeOf(line, typed);
       continue;
     }
     present.push(kind);
-    if (fields.length > 1 && (kind === 'snow' || SPAN_BY_SPAN.includes(kind))) {
+    const several = fields.length > 1 || lifting.length > 0;
+    if (several && (kind === 'snow' || SPAN_BY_SPAN.includes(kind))) {
       kinds.push(
         patterned(
           kind,
@@ -86,7 +94,11 @@ export function solveParts(loading: Loading): LoadParts {
       );
     } else {
       const whole = wholeOf(line, typed);
-      kinds.push({ kind, whole, parts: null, hi: whole, lo: whole });
+      kinds.push({ kind, lifts: false, whole, parts: null, hi: whole, lo: whole });
+    }
+    if (lifting.length > 0) {
+      const parts = fields.map((_, f) => partOn(f, 0, lifting));
+      kinds.push({ ...patterned('live', parts, grid, solution), kind, lifts: true, whole: wholeOf(0, NONE) });
     }
   }
   return {
@@ -192,7 +204,7 @@ function patterned(
       addSigned(hi.reactions, lo.reactions, part.reactions);
     }
   }
-  return { kind, whole, parts, hi, lo };
+  return { kind, lifts: false, whole, parts, hi, lo };
 }
 
 function addSigned(hi: number[], lo: number[], part: number[]): void {

@@ -1,7 +1,7 @@
 import type { Found } from './bar.ts';
 import type { Term } from './effects.ts';
 import type { LoadParts } from './parts.ts';
-import { type Pattern, patternName } from './patterns.ts';
+import { liftBit, type Pattern, patternName } from './patterns.ts';
 
 /** Numbers the patterns that terms name, "all spans" first; a name is made once, when a term first needs it. */
 export interface PatternBook {
@@ -11,17 +11,26 @@ export interface PatternBook {
 }
 
 const ALL_SPANS = 'all spans';
+const NOTHING: Pattern = { live: 0, roofLive: 0, snow: 0, lifts: 0 };
 
 export function patternBook(parts: LoadParts): PatternBook {
   const names = [ALL_SPANS];
-  const loaded = { live: 0, roofLive: 0, snow: 0 };
+  const loaded = { ...NOTHING };
   let patterns = false;
-  for (const { kind, parts: fieldParts } of parts.kinds) {
+  for (const { kind, lifts, parts: fieldParts } of parts.kinds) {
     if (!fieldParts) continue;
     patterns = true;
-    loaded[kind as keyof Pattern] = fieldParts.reduce((bits, part, f) => (part ? bits | (1 << f) : bits), 0);
+    if (lifts) {
+      fieldParts.forEach((part, f) => {
+        if (part) loaded.lifts |= liftBit(kind, f);
+      });
+    } else
+      loaded[kind as keyof Pattern] = fieldParts.reduce(
+        (bits, part, f) => (part ? bits | (1 << f) : bits),
+        0,
+      );
   }
-  const known = new Map<number, number>([[bitsOf(loaded, loaded), 0]]);
+  const known = new Map<number, number>([[bitsOf({ ...loaded, lifts: 0 }, loaded), 0]]);
   const index = (pattern: Pattern): number => {
     if (!patterns) return 0;
     const key = bitsOf(pattern, loaded);
@@ -51,9 +60,9 @@ export function patternBook(parts: LoadParts): PatternBook {
 
 /** Only loaded fields tell patterns apart; a beam has eight fields at most. */
 function bitsOf(pattern: Pattern, loaded: Pattern): number {
-  return (
+  const pressing =
     (pattern.live & loaded.live) |
     ((pattern.roofLive & loaded.roofLive) << 8) |
-    ((pattern.snow & loaded.snow) << 16)
-  );
+    ((pattern.snow & loaded.snow) << 16);
+  return pressing + (pattern.lifts & loaded.lifts) * 2 ** 24;
 }

@@ -1,5 +1,5 @@
 import type { Field } from '../statics/beam.ts';
-import type { LoadKind } from './kinds.ts';
+import { KIND_WORD, type LoadKind } from './kinds.ts';
 
 /** Kinds that may be left off any field (domain: floor live and roof live, ASCE 7 §4.3.3, §4.8.2.1). */
 export const SPAN_BY_SPAN: readonly LoadKind[] = ['live', 'roofLive'];
@@ -35,14 +35,25 @@ export interface Pattern {
   readonly live: number;
   readonly roofLive: number;
   readonly snow: number;
+  /** What carried members lift with, by kind and field: bits of `liftBit`. */
+  readonly lifts: number;
+}
+
+const KINDS = ['live', 'roofLive', 'snow'] as const;
+/** A beam has eight fields at most. */
+const MOST_FIELDS = 8;
+
+/** The bit of what carried members of a kind lift one field with. */
+export function liftBit(kind: LoadKind, field: number): number {
+  return 1 << (MOST_FIELDS * KINDS.indexOf(kind as (typeof KINDS)[number]) + field);
 }
 
 /** Every field that a kind loads at all, as bits. */
-export type LoadedFields = Readonly<Record<keyof Pattern, number>>;
+export type LoadedFields = Readonly<Record<'live' | 'roofLive' | 'snow', number>>;
 
 /**
  * A pattern in words: "live on span 2", "live on left overhang and spans 1, 3", "snow full on span 1, half
- * elsewhere", "all spans" where every load is on every field it is given for.
+ * elsewhere", "carried live lifting span 1", "all spans" where every load is on every field it is given for.
  */
 export function patternName(pattern: Pattern, fields: readonly Field[], loaded: LoadedFields): string {
   const parts: string[] = [];
@@ -57,6 +68,10 @@ export function patternName(pattern: Pattern, fields: readonly Field[], loaded: 
   if ((pattern.snow & loaded.snow) !== loaded.snow) {
     const full = pattern.snow & loaded.snow;
     parts.push(full === 0 ? 'half snow' : `snow full on ${placeNames(full, fields)}, half elsewhere`);
+  }
+  for (const kind of KINDS) {
+    const on = fields.reduce((bits, _, f) => (pattern.lifts & liftBit(kind, f) ? bits | (1 << f) : bits), 0);
+    if (on !== 0) parts.push(`carried ${KIND_WORD[kind]} lifting ${placeNames(on, fields)}`);
   }
   return parts.length === 0 ? 'all spans' : parts.join('; ');
 }

@@ -34,7 +34,7 @@ export function refine(
     return;
   }
   const cuts = patternCuts(e, order, c, p, from, to);
-  const snowLoad = e.parts.kinds.find((states) => states.kind === 'snow' && states.parts);
+  const snowLoad = e.parts.kinds.find(({ kind, lifts, parts }) => kind === 'snow' && !lifts && parts);
   const cases = snowLoad && e.list[c]!.factors.snow ? e.parts.snow : null;
   for (let i = 0; i + 1 < cuts.length; i++) {
     const lo = cuts[i]!;
@@ -47,7 +47,7 @@ export function refine(
       continue;
     }
     for (const snow of cases) {
-      const one = { live: pattern.live, roofLive: pattern.roofLive, snow: snow.full };
+      const one = { ...pattern, snow: snow.full };
       pieceUnder(e, c, one, p, NUMBERS);
       consider(e, order, sign, c, p, lo, hi, one, bar, found);
     }
@@ -57,8 +57,8 @@ export function refine(
 /** Ends of the stretches of a piece on which no part that may be absent changes sign. */
 function patternCuts(e: Envelope, order: Order, c: number, p: number, from: number, to: number): number[] {
   const cuts = [from, to];
-  for (const { kind, parts } of e.parts.kinds) {
-    if (!parts || kind === 'snow' || !e.list[c]!.factors[kind]) continue;
+  for (const { kind, lifts, parts } of e.parts.kinds) {
+    if (!parts || (kind === 'snow' && !lifts) || !e.list[c]!.factors[kind]) continue;
     for (const part of parts) {
       if (!part) continue;
       const count = signChanges(part.data, STRIDE * p, order, from, to);

@@ -1,4 +1,5 @@
-import type { Effects, Term, TermGroup } from './effects.ts';
+import { loadsOf } from './carried.ts';
+import type { Effects, Term, TermGroup, VolumeMoment, VolumeMoments } from './effects.ts';
 import type { Loading } from './loading.ts';
 
 /**
@@ -7,7 +8,7 @@ import type { Loading } from './loading.ts';
  * at EI = 1 four times. Point loads do not grow with the length, nor does the depth within which shear is left out.
  */
 export function isSelfSimilar(loading: Loading): boolean {
-  return loading.shearAt === 'support' && loading.loads.every((load) => load.type === 'line');
+  return loading.shearAt === 'support' && loadsOf(loading).every((load) => load.type === 'line');
 }
 
 /** The effects of a self-similar loading with every span, overhang and load position multiplied by `factor`. */
@@ -31,7 +32,7 @@ export function scaleEffects(effects: Effects, factor: number): Effects {
 }
 
 function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup {
-  const terms = group.terms.map((term): Term => {
+  const scaled = (term: Term): Term => {
     const { valueAt, placeAt } = term;
     return {
       ...term,
@@ -41,13 +42,33 @@ function scaleGroup(group: TermGroup, factor: number, power: number): TermGroup 
       placeAt: placeAt === null ? null : (w) => factor * placeAt(w),
       at: term.at * factor,
     };
-  });
+  };
   return {
     ...group,
-    get zeroMomentLength() {
-      return group.zeroMomentLength * factor;
-    },
-    terms,
+    volume: scaleVolume(group.volume, { lengths: factor, moments: power, weights: 1 }, scaled),
+    terms: group.terms.map(scaled),
+  };
+}
+
+/** Lengths and moments so many times as large, under own weights so many times as heavy. */
+function scaleVolume(
+  volume: VolumeMoments | null,
+  by: { readonly lengths: number; readonly moments: number; readonly weights: number },
+  scaled: (term: Term) => Term,
+): VolumeMoments | null {
+  if (volume === null) return null;
+  const change = (one: VolumeMoment | null): VolumeMoment | null =>
+    one && {
+      moment: one.moment * by.moments,
+      length: one.length * by.lengths,
+      at: one.at * by.lengths,
+      term: scaled(one.term),
+    };
+  return {
+    longest: volume.longest * by.lengths,
+    worst: (root, w, over = 0) =>
+      change(volume.worst(root, w / by.weights, over / by.moments / by.lengths ** (1 / root))),
+    of: (term, w) => change(volume.of(term, w / by.weights)),
   };
 }
 
@@ -61,10 +82,9 @@ export function scaleLoadEffects(effects: Effects, factor: number): Effects {
     from.map(
       (group): TermGroup => ({
         ...group,
-        // A getter of its class, which the copy above leaves behind; asked for by glulam only.
-        get zeroMomentLength() {
-          return group.zeroMomentLength;
-        },
+        volume: scaleVolume(group.volume, { lengths: 1, moments: factor, weights: factor }, (term) =>
+          scaleLoad(term, factor),
+        ),
         terms: group.terms.map((term) => scaleLoad(term, factor)),
       }),
     );

@@ -15,7 +15,7 @@ import {
   Y0,
   Y1,
 } from '../statics/piece.ts';
-import type { States } from '../statics/solve.ts';
+import type { States } from '../statics/states.ts';
 import { Bar, type Found, kept } from './bar.ts';
 import { type Envelope, worstPattern } from './envelope.ts';
 import { refine } from './refine.ts';

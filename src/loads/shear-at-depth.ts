@@ -3,6 +3,7 @@ import { pieceAt } from '../statics/grid.ts';
 import { pieceValue, SHEAR, STRIDE, V0, V1 } from '../statics/piece.ts';
 import { planLoad } from './area-to-line.ts';
 import type { Found } from './bar.ts';
+import { liftsOf, loadsOf } from './carried.ts';
 import type { ShearAtDepth } from './effects.ts';
 import { type Envelope, numberUnder, type ReadPart, worstPattern } from './envelope.ts';
 import type { LoadKind } from './kinds.ts';
@@ -28,6 +29,7 @@ interface Side {
 /** A point load on a side's field. */
 interface SidePoint {
   readonly kind: LoadKind;
+  readonly lifts: boolean;
   readonly at: number;
   /** lb, downward positive */
   readonly load: number;
@@ -43,7 +45,7 @@ interface SidePoint {
 export function shearBeyond(e: Envelope, book: PatternBook): (depth: number, w: number) => ShearAtDepth[] {
   const { parts } = e;
   const sides = sidesOf(parts);
-  const mixed = parts.loading.loads.some(
+  const mixed = [...loadsOf(parts.loading), ...liftsOf(parts.loading)].some(
     (load) => (load.type === 'point' ? load.load : Math.min(load.start, load.end)) < 0,
   );
   return (depth, w) => {
@@ -93,7 +95,7 @@ function placeAtDepth(side: Side, depth: number): number {
 
 function shearUnder(e: Envelope, c: number, sign: number, side: Side, at: number, read: ReadPart): Found {
   const pattern = worstPattern(e, c, sign, read);
-  const own = e.parts.own ? read(e.parts.own, null, -1) : 0;
+  const own = e.parts.own ? read(e.parts.own, null, -1, false) : 0;
   return {
     base: sign * numberUnder(e, c, pattern, read),
     perWeight: sign * e.deadScale[c]! * own,
@@ -116,7 +118,7 @@ function readerAt(parts: LoadParts, side: Side, depth: number, at: number): Read
   if (side.toward > 0) p = Math.max(grid.first[side.field]!, p);
   else p = Math.min(grid.first[side.field + 1]! - 1, p);
   const t = at - grid.edges[p]!;
-  const near: { kind: LoadKind; change: number }[] = [];
+  const near: { kind: LoadKind; lifts: boolean; change: number }[] = [];
   if (!side.held) {
     for (const point of side.points) {
       const x = Math.max(0, side.toward * (point.at - side.face));
@@ -124,13 +126,13 @@ function readerAt(parts: LoadParts, side: Side, depth: number, at: number): Read
       const passed = side.toward * (at - point.at) > grid.tolerance;
       const shear = point.shear();
       const here = shear - (passed ? side.toward * point.load : 0);
-      near.push({ kind: point.kind, change: (x / depth) * shear - here });
+      near.push({ kind: point.kind, lifts: point.lifts, change: (x / depth) * shear - here });
     }
   }
-  return (states, kind, field) => {
+  return (states, kind, field, lifts) => {
     let shear = pieceValue(states.data, STRIDE * p, SHEAR, t);
     if (field < 0 || field === side.field)
-      for (const { kind: of, change } of near) if (of === kind) shear += change;
+      for (const point of near) if (point.kind === kind && point.lifts === lifts) shear += point.change;
     return shear;
   };
 }
@@ -186,7 +188,8 @@ function pointsOf(parts: LoadParts, f: number, toward: 1 | -1): SidePoint[] {
   const end = field.start + field.length;
   const isLast = f === fields.length - 1;
   const points: SidePoint[] = [];
-  for (const typed of loading.loads) {
+  const pressing = loadsOf(loading);
+  for (const [index, typed] of [...pressing, ...liftsOf(loading)].entries()) {
     const load = planLoad(typed, loading.slope);
     if (load.type !== 'point' || load.load === 0) continue;
     if (load.at < field.start - grid.tolerance || load.at > end + grid.tolerance) continue;
@@ -196,6 +199,7 @@ function pointsOf(parts: LoadParts, f: number, toward: 1 | -1): SidePoint[] {
     let shear: number | null = null;
     points.push({
       kind: typed.kind,
+      lifts: index >= pressing.length,
       at: load.at,
       load: load.load,
       shear: () => {

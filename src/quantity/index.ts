@@ -3,6 +3,8 @@ export { KIND_EXAMPLES, KIND_NAMES, type QuantityKind, type Units } from './kind
 export { type Parsed, parseQuantity } from './parse.ts';
 export {
   type LengthStyle,
+  massNumber,
+  massUnit,
   showInches,
   showMoment,
   showQuantity,
@@ -12,6 +14,7 @@ export {
   showSpanDown,
   showStress,
   showWeight,
+  weightIn,
   weightNumber,
   weightUnit,
 } from './show.ts';

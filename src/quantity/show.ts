@@ -86,22 +86,38 @@ export function showWeight(value: number, units: Units): string {
 
 /** As showWeight without the unit, for columns. */
 export function weightNumber(value: number, units: Units): string {
-  return fixed(units === 'us' ? value * INCHES_PER_FOOT : value * KG_PER_M_PER_LB_PER_IN, 1);
+  return fixed(weightIn(value, units), 1);
+}
+
+/** A weight per length, lb/in, in lb/ft or kg/m. */
+export function weightIn(value: number, units: Units): number {
+  return value * (units === 'us' ? INCHES_PER_FOOT : KG_PER_M_PER_LB_PER_IN);
 }
 
 export function weightUnit(units: Units): string {
   return units === 'us' ? 'lb/ft' : 'kg/m';
 }
 
-/** 0.45359237 kg a pound (exact) over 0.0254 m an inch. */
-const KG_PER_M_PER_LB_PER_IN = 0.45359237 / 0.0254;
+/** What a piece weighs, lb, to the pound or the kilogram, without its unit. */
+export function massNumber(pounds: number, units: Units): string {
+  return fixed(units === 'us' ? pounds : pounds * KG_PER_LB, 0);
+}
+
+export function massUnit(units: Units): string {
+  return units === 'us' ? 'lb' : 'kg';
+}
+
+/** Exact. */
+const KG_PER_LB = 0.45359237;
+/** A pound an inch in kg/m: 0.0254 m an inch. */
+const KG_PER_M_PER_LB_PER_IN = KG_PER_LB / 0.0254;
 
 /** What still counts as passing; the same hair as the checks allow. */
 const PASS = 1 + 1e-9;
 
-/** A ratio with two decimals; a failing one is never shown as 1.00, one that nothing can meet as "none". */
+/** A ratio with two decimals; a failing one is never shown as 1.00, one without end (uplift that nothing ties down) as "untied". */
 export function showRatio(ratio: number): string {
-  if (!Number.isFinite(ratio)) return 'none';
+  if (!Number.isFinite(ratio)) return 'untied';
   const text = fixed(ratio, 2);
   return ratio > PASS && Number(text) <= 1 ? '1.01' : text;
 }

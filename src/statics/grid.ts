@@ -54,8 +54,13 @@ export function gridOf(
 
 /** Index of the piece that starts at x or holds it; the last piece for the member's right end. */
 export function pieceAt(grid: Grid, x: number): number {
+  return Math.min(edgeAt(grid, x), grid.count - 1);
+}
+
+/** Index of the last edge that x has reached: at a place that the grid was cut at, the edge there. */
+function edgeAt(grid: Grid, x: number): number {
   let lo = 0;
-  let hi = grid.count - 1;
+  let hi = grid.count;
   while (lo < hi) {
     const mid = (lo + hi + 1) >> 1;
     if (grid.edges[mid]! <= x + grid.tolerance) lo = mid;
@@ -80,24 +85,33 @@ export interface PieceLoads {
   readonly points: number[];
 }
 
-/** Spreads loads over the pieces of a grid that was cut at their places. Parts outside [from, to) are left out. */
+/**
+ * Spreads loads over the pieces of a grid that was cut at their places. A line load runs from edge to edge; one that is
+ * shorter than the grid tells apart is the point load it comes to. Parts outside [from, to) are left out.
+ */
 export function spread(grid: Grid, loads: readonly BeamLoad[], from = 0, to = grid.count): PieceLoads {
   const q0 = zeros(grid.count);
   const q1 = zeros(grid.count);
   const points = zeros(grid.count + 1);
-  const { edges, tolerance } = grid;
-  const right = edges[grid.count]!;
+  const { edges } = grid;
+  const stand = (edge: number, load: number) => {
+    if (edge === grid.count ? to === grid.count : edge >= from && edge < to) points[edge]! += load;
+  };
   for (const load of loads) {
     if (load.type === 'point') {
-      const atEnd = load.at >= right - tolerance;
-      const piece = atEnd ? grid.count : pieceAt(grid, load.at);
-      if (atEnd ? to === grid.count : piece >= from && piece < to) points[piece]! += load.load;
+      stand(edgeAt(grid, load.at), load.load);
       continue;
     }
-    const growth = (load.end - load.start) / (load.to - load.from);
-    for (let p = Math.max(from, pieceAt(grid, load.from)); p < to; p++) {
-      if (edges[p + 1]! > load.to + tolerance) break;
-      q0[p]! += load.start + growth * (edges[p]! - load.from);
+    const first = edgeAt(grid, load.from);
+    const end = edgeAt(grid, load.to);
+    if (first === end) {
+      stand(first, ((load.start + load.end) / 2) * (load.to - load.from));
+      continue;
+    }
+    const start = edges[first]!;
+    const growth = (load.end - load.start) / (edges[end]! - start);
+    for (let p = Math.max(from, first); p < Math.min(to, end); p++) {
+      q0[p]! += load.start + growth * (edges[p]! - start);
       q1[p]! += growth;
     }
   }

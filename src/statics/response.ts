@@ -16,7 +16,7 @@ import {
   V0,
   Y0,
 } from './piece.ts';
-import type { BeamSolution, States } from './solve.ts';
+import type { BeamLayout, States } from './states.ts';
 
 /** A value and its place, in from the member's left end. */
 export interface Extreme {
@@ -65,7 +65,7 @@ export interface Response {
 const ORDER_OF: Readonly<Record<Quantity, Order>> = { shear: SHEAR, moment: MOMENT, deflection: DEFLECTION };
 
 /** A response that reads its values from the states of a grid's pieces. */
-export function responseOf(solution: BeamSolution, grid: Grid, states: States): Response {
+export function responseOf(layout: BeamLayout, grid: Grid, states: States): Response {
   const { data } = states;
   const read = (order: Order) => (x: number) => {
     const p = pieceAt(grid, x);
@@ -76,16 +76,16 @@ export function responseOf(solution: BeamSolution, grid: Grid, states: States): 
     states,
     reactions: Array.from(states.reactions),
     supportMoments() {
-      const left = solution.beam.supports === 'bearings' && grid.fields[0]!.kind === 'overhang' ? 1 : 0;
-      return solution.supports.map((_, i) => {
-        if (i > 0 && i === solution.supports.length - 1) {
+      const left = layout.beam.supports === 'bearings' && grid.fields[0]!.kind === 'overhang' ? 1 : 0;
+      return layout.supports.map((_, i) => {
+        if (i > 0 && i === layout.supports.length - 1) {
           return data[STRIDE * (grid.first[left + i]! - 1) + M1]!;
         }
         return data[STRIDE * grid.first[left + i]! + M0]!;
       });
     },
     fixedMoments() {
-      const { beam, fields } = solution;
+      const { beam, fields } = layout;
       const cantilever = beam.supports === 'cantilever';
       const leading = !cantilever && fields[0]!.kind === 'overhang' ? 1 : 0;
       const atStart = (f: number) => (f < fields.length ? data[STRIDE * grid.first[f]! + M0]! : 0);

@@ -2,14 +2,11 @@ import { type Beam, type BeamLoad, beamFields, type Field, supportPlaces } from 
 import { type Grid, gridOf, type PieceLoads, spread } from './grid.ts';
 import { M0, M1, Q0, Q1, QE, S0, S1, STRIDE, V0, V1, Y0, Y1 } from './piece.ts';
 import { type Response, responseOf } from './response.ts';
+import type { BeamLayout, States } from './states.ts';
 import { zeros } from './zeros.ts';
 
 /** A beam made ready: the equations of its support moments factored, whatever it is to carry. */
-export interface BeamSolution {
-  readonly beam: Beam;
-  readonly fields: readonly Field[];
-  /** in from the member's left end */
-  readonly supports: readonly number[];
+export interface BeamSolution extends BeamLayout {
   /** Exact response at EI = 1 to these loads; cut at the places of `cuts` too, so that it can be added to others. */
   respond(loads: readonly BeamLoad[], cuts?: readonly BeamLoad[]): Response;
   /** Multipliers of the elimination, one a support. */
@@ -18,13 +15,6 @@ export interface BeamSolution {
     readonly pivot: number[];
     readonly upper: number[];
   };
-}
-
-/** What a beam does under loads: the numbers of every piece (see piece.ts), and the forces of its supports. */
-export interface States {
-  readonly data: number[];
-  /** Upward force of each support, lb. */
-  readonly reactions: number[];
 }
 
 /**

@@ -9,9 +9,10 @@ import {
 import { showQuantity, type Units } from '../quantity/index.ts';
 import { temperatureIn } from './factors/temperature.ts';
 import { feetIn, inchesIn } from './factors/wording.ts';
+import { borneText, linkText } from './link-words.ts';
 import type { AssumedKey, Bracing, Member } from './member.ts';
 
-/** Sentences on what the checks take for given: what nobody stated, and that the top edge is held. */
+/** Sentences on what the checks take for given: what nobody stated, that the top edge is held, what others bring. */
 export function assumptionsOf(member: Member, units: Units = 'us'): string[] {
   const sentences: string[] = [];
   const { assumed } = member;
@@ -32,6 +33,9 @@ export function assumptionsOf(member: Member, units: Units = 'us'): string[] {
     );
   }
   if (member.liveReduction !== null) sentences.push(reduction(member.area.live, member.liveReduction, units));
+  for (const link of member.links ?? []) {
+    sentences.push(`carries ${linkText(link, units)}: ${borneText(link, units)}`);
+  }
   return sentences;
 }
 

@@ -1,7 +1,7 @@
-import type { DesignValues, Refusal } from './look-up.ts';
 import type { Product, Section, Stock, StockValue } from './member.ts';
 import { nearestName } from './nearest-name.ts';
 import { nominalUp, SIZE_TOLERANCE, TIMBER_DRESSING } from './nominal.ts';
+import type { DesignValues, Refusal } from './reference-values.ts';
 import { rowsOf } from './rows.ts';
 import { pieceThickness, pieceWidth } from './standing.ts';
 import { GLULAM } from './tables/glulam.ts';

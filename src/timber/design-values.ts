@@ -4,7 +4,8 @@ import { GLULAM } from './tables/glulam.ts';
 import { LVL } from './tables/lvl.ts';
 import { SHORT_SPECIES, SP, WESTERN } from './tables/species.ts';
 
-export { type DesignValues, isRefusal, lookUp, type Refusal } from './look-up.ts';
+export { lookUp } from './look-up.ts';
+export { type DesignValues, isRefusal, type Refusal } from './reference-values.ts';
 export { checkStock, refusal, stockFault } from './refusal.ts';
 
 /** Species that a product is listed in; LVL and custom have none. */
@@ -33,6 +34,19 @@ export function gradesOf(product: Product, species: string): string[] {
 /** A species group in few letters, "DF-L", where the trade has them; its name where it has not. */
 export function shortSpecies(species: string): string {
   return SHORT_SPECIES[species] ?? species;
+}
+
+const letters = (name: string) => name.toLowerCase().replace(/[^a-z0-9]/g, '');
+const BY_LETTERS = new Map(
+  Object.entries(SHORT_SPECIES).flatMap(([full, short]) => [
+    [letters(full), full] as const,
+    [letters(short), full] as const,
+  ]),
+);
+
+/** A species group by its full name, where `name` is that or its short one in any writing; else null. */
+export function speciesNamed(name: string): string | null {
+  return BY_LETTERS.get(letters(name)) ?? null;
 }
 
 /** The wood in few letters: "DF-L No.2", "GL 24F-1.8E", "LVL typical 2.0E". */

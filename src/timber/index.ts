@@ -16,6 +16,7 @@ export {
   prepareScaled,
 } from './checks/prepare.ts';
 export { rate } from './checks/rate.ts';
+export { untiedUplift } from './checks/untied-uplift.ts';
 export { type Wood, type WoodConditions, woodOf } from './checks/wood.ts';
 export {
   type DesignValues,
@@ -25,6 +26,7 @@ export {
   type Refusal,
   shortSpecies,
   shortWood,
+  speciesNamed,
   speciesOf,
 } from './design-values.ts';
 export { nominalOf, timberNominalOf } from './nominal.ts';

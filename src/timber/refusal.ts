@@ -1,8 +1,9 @@
 import { candidateAt, candidatesOf, sizesCovered } from './candidates.ts';
 import { conditionRefusal } from './checks/forbidden.ts';
 import { notchRefusal } from './checks/notch.ts';
-import { candidateFor, isRefusal } from './look-up.ts';
+import { candidateFor } from './look-up.ts';
 import type { FactorSymbol, Member, Section, Stock, TypedFactors } from './member.ts';
+import { isRefusal } from './reference-values.ts';
 import { standingDepth } from './standing.ts';
 
 /** What is wrong with a member's wood, and the key of the session file it is wrong at. */

@@ -1,5 +1,6 @@
-import { isRefusal, lookUp } from './look-up.ts';
+import { lookUp } from './look-up.ts';
 import type { Member, Section } from './member.ts';
+import { isRefusal } from './reference-values.ts';
 import { ownWeight } from './weight.ts';
 
 /** Own weight, lb/in, of a section of the member's stock; NaN where the stock has no values at that size. */

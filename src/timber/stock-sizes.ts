@@ -1,7 +1,7 @@
 import { candidateAt, candidatesOf, glulamGroup } from './candidates.ts';
-import { isRefusal } from './look-up.ts';
 import type { Product, Section, Stock } from './member.ts';
 import { DRESSED, nominalUp, SIZE_TOLERANCE, TIMBER_DRESSING } from './nominal.ts';
+import { isRefusal } from './reference-values.ts';
 import { sizeLabel } from './size-label.ts';
 import { isSawn } from './standing.ts';
 import { SP } from './tables/species.ts';

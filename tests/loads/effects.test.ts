@@ -7,7 +7,7 @@ import { termValue } from '../../src/loads/term-value.ts';
 import { beamFields, beamLength } from '../../src/statics/beam.ts';
 import type { Quantity } from '../../src/statics/response.ts';
 import { type Case, everyCase } from './brute-force.ts';
-import { anyMember, member, PSF } from './members.ts';
+import { anyCarrier, anyMember, member, PSF } from './members.ts';
 
 const HEAVIEST = 3;
 const DEAD_FACTOR = 0.5;
@@ -116,6 +116,10 @@ describe('effects', () => {
     fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: 12 });
   });
 
+  test('agree with it on members that carry others, which press and lift by their own patterns', () => {
+    fc.assert(fc.property(anyCarrier(2, 2), checkAgainstBruteForce), { numRuns: 40 });
+  });
+
   test('keep a term that governs at middling own weights only, neither at none nor at the heaviest', () => {
     // Shear governs left of the first support, then left of the second, then right of the first, as own weight grows.
     const dead = (from: number, to: number, start: number, end: number) =>
@@ -154,7 +158,7 @@ describe('effects', () => {
     // wl²/8 with w = 52 psf x 6 ft = 26 lb/in, l = 168 in
     expect(bending.terms[0]!.base).toBeCloseTo((26 * 168 ** 2) / 8, 6);
     expect(bending.terms[0]!.at).toBeCloseTo(84, 9);
-    expect(bending.zeroMomentLength).toBe(168);
+    expect(bending.volume!.of(0, 1)!.length).toBe(168);
     expect(bending.lateralCase).toBe('uniform');
   });
 
@@ -194,8 +198,8 @@ describe('effects', () => {
     const loading = member({ spans: [160], fixed: { left: true, right: false } }, { area: { dead: 0.1 } });
     const effects = compileEffects(loading, { heaviest: 0, deadFactor: 1 });
     // M = 0 where 3wl/8 x = w x²/2 from the prop: x = 3l/4.
-    expect(effects.sagging[0]!.zeroMomentLength).toBeCloseTo(120, 8);
-    expect(effects.hogging[0]!.zeroMomentLength).toBeCloseTo(40, 8);
+    expect(effects.sagging[0]!.volume!.of(0, 0)!.length).toBeCloseTo(120, 8);
+    expect(effects.hogging[0]!.volume!.of(0, 0)!.length).toBeCloseTo(40, 8);
   });
 
   test('give the longest length between points of zero moment of the patterns that come to the same moment', () => {
@@ -208,7 +212,7 @@ describe('effects', () => {
     const group = effects.hogging.find(({ duration }) => duration === 1)!;
     expect(group.terms[0]!.base).toBeCloseTo(((dead + live) * 96 ** 2) / 2, 6);
     const reaction = (dead * 288 ** 2 - (dead + live) * 96 ** 2) / (2 * 288);
-    expect(group.zeroMomentLength).toBeCloseTo(288 - (2 * reaction) / dead + 96, 6);
+    expect(group.volume!.worst(10, 0)!.length).toBeCloseTo(288 - (2 * reaction) / dead + 96, 6);
   });
 
   test('sort their bending groups by the cases of NDS Table 3.3.3', () => {

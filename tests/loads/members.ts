@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { LOAD_KINDS, type LoadKind } from '../../src/loads/kinds.ts';
-import type { AppliedLoad, Loading } from '../../src/loads/loading.ts';
+import type { AppliedLoad, Link, Loading } from '../../src/loads/loading.ts';
 import type { Beam } from '../../src/statics/beam.ts';
 import { beamFields, beamLength } from '../../src/statics/beam.ts';
 
@@ -54,6 +54,30 @@ export function anyBeam(mostSpans: number): fc.Arbitrary<Beam> {
     }),
   );
   return fc.oneof({ weight: 6, arbitrary: bearings }, cantilever);
+}
+
+/** Such members that carry the reactions of a few others, pressing, lifting or either by the pattern. */
+export function anyCarrier(mostSpans: number, mostLinks: number): fc.Arbitrary<Loading> {
+  return anyMember(mostSpans, 1).chain((on) => {
+    const length = beamLength(on.beam);
+    const place = fc.integer({ min: 0, max: 1000 }).map((k) => (k / 1000) * length);
+    const force = fc.integer({ min: -400, max: 900 });
+    const range = fc.tuple(force, force).map(([a, b]) => ({ max: Math.max(a, b), min: Math.min(a, b) }));
+    const whole = force.map((figure) => ({ max: figure, min: figure }));
+    const bears = fc
+      .record({ dead: whole, windUp: whole, kind: fc.constantFrom('live', 'roofLive', 'snow'), range })
+      .map(({ kind, range: of, ...more }) => ({ ...more, [kind]: of }));
+    const named = { member: 'J1', end: 'left' } as const;
+    const point = fc.record({ at: place, bears }).map((more): Link => ({ ...named, ...more, type: 'point' }));
+    const line = fc
+      .record({ a: place, b: place, bears, every: fc.integer({ min: 12, max: 96 }) })
+      .filter(({ a, b }) => Math.abs(a - b) > 1)
+      .map(({ a, b, ...more }): Link => {
+        return { ...named, ...more, type: 'line', from: Math.min(a, b), to: Math.max(a, b) };
+      });
+    const links = fc.array(fc.oneof(point, line), { minLength: 1, maxLength: mostLinks });
+    return links.map((list) => ({ ...on, links: list }));
+  });
 }
 
 /** Members with area loads of up to four kinds and a few line and point loads of any of them. */

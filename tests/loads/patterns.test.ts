@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import { compileEffects } from '../../src/loads/compile.ts';
-import { type Pattern, patternName, snowCases } from '../../src/loads/patterns.ts';
+import { liftBit, type Pattern, patternName, snowCases } from '../../src/loads/patterns.ts';
 import { beamFields } from '../../src/statics/beam.ts';
 import { beam } from '../statics/beams.ts';
 import { member, PSF } from './members.ts';
@@ -24,7 +24,7 @@ describe('patternName', () => {
   const all = bits(0, 1, 2, 3, 4, 5);
   const loaded = { live: all, roofLive: all, snow: all };
   const name = (pattern: Partial<Pattern>, on = loaded) =>
-    patternName({ live: -1, roofLive: -1, snow: -1, ...pattern }, fields, on);
+    patternName({ live: -1, roofLive: -1, snow: -1, lifts: 0, ...pattern }, fields, on);
 
   test.each<readonly [Partial<Pattern>, string]>([
     [{}, 'all spans'],
@@ -37,6 +37,8 @@ describe('patternName', () => {
     [{ roofLive: bits(5) }, 'roof live on right overhang'],
     [{ snow: bits(0) }, 'snow full on left overhang, half elsewhere'],
     [{ live: bits(1), snow: bits(3, 4) }, 'live on span 1; snow full on spans 3, 4, half elsewhere'],
+    [{ lifts: liftBit('live', 1) | liftBit('live', 3) }, 'carried live lifting spans 1, 3'],
+    [{ live: bits(1), lifts: liftBit('snow', 0) }, 'live on span 1; carried snow lifting left overhang'],
   ])('says %o as "%s"', (pattern, words) => {
     expect(name(pattern)).toBe(words);
   });

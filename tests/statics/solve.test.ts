@@ -271,6 +271,47 @@ describe('solveBeam', () => {
     expect(response.deflectionAt(130)).toBeCloseTo((-30 * 2 * 100 ** 3) / 24, 4);
   });
 
+  test('takes a line load too short to tell its ends apart for the force that it comes to, wherever it lies', () => {
+    // From 1e-16 to 1e-6 of the length; ends of any sizes, so that its growth per inch has no bounds.
+    const narrow = anyBeam.chain((on) =>
+      fc.record({
+        on: fc.constant(on),
+        place: fc.oneof(
+          fc.double({ min: 0, max: 1, noNaN: true }).map((part) => part * beamLength(on)),
+          fc.constantFrom(...supportPlaces(on), beamLength(on)),
+        ),
+        away: fc.constantFrom(-1e-9, -1e-10, -1e-13, 0, 1e-13, 1e-10, 1e-9),
+        exponent: fc.double({ min: -16, max: -6, noNaN: true }),
+        start: fc.integer({ min: -50, max: 50 }),
+        end: fc.integer({ min: -50, max: 50 }),
+      }),
+    );
+    fc.assert(
+      fc.property(narrow, ({ on, place, away, exponent, start, end }) => {
+        const length = beamLength(on);
+        const to = Math.min(length, Math.max(0, place + away * length));
+        const from = Math.max(0, to - 10 ** exponent * length);
+        fc.pre(from < to);
+        const solution = solveBeam(on);
+        const load = line(from, to, start, end);
+        const one = solution.respond([load, line(0, length, 1)]);
+        const two = solution.respond([point(total(load).force, (from + to) / 2), line(0, length, 1)]);
+        // Its force moved within its own length; and 50 lb/in at most on what its ends may move to meet an edge.
+        const slack = 50 * ((to - from) ** 2 + 4e-10 * length ** 2);
+        for (const x of places(on)) {
+          expect(Math.abs(one.momentAt(x) - two.momentAt(x))).toBeLessThanOrEqual(slack);
+        }
+        const shortest = Math.min(...on.spans);
+        one.reactions.forEach((reaction, i) => {
+          expect(Math.abs(reaction - two.reactions[i]!)).toBeLessThanOrEqual((10 * slack) / shortest);
+        });
+        const { max, min } = one.extremes('moment');
+        expect(Math.max(max.value, -min.value)).toBeLessThanOrEqual(1.001 * length ** 2);
+      }),
+      RUNS,
+    );
+  });
+
   test('says the moments over supports and at fixed ends', () => {
     const two = solveBeam(beam([120, 120])).respond([line(0, 240, 5)]);
     expect(two.supportMoments()[1]).toBeCloseTo((-5 * 120 ** 2) / 8, 6);

@@ -8,7 +8,8 @@ import { sizeFactor } from '../../src/timber/factors/size.ts';
 import { temperatureFactor } from '../../src/timber/factors/temperature.ts';
 import { volumeFactor, volumeLength, volumeSection } from '../../src/timber/factors/volume.ts';
 import { wetService } from '../../src/timber/factors/wet-service.ts';
-import { isRefusal, lookUp } from '../../src/timber/look-up.ts';
+import { lookUp } from '../../src/timber/look-up.ts';
+import { isRefusal } from '../../src/timber/reference-values.ts';
 import { stockOf } from './member-of.ts';
 
 // NDS 2018 and its Supplement, by the clause each title names, from memory.

@@ -1,6 +1,7 @@
 import type { Section } from '../member.ts';
+import { bendingCapacity, governingMoment } from './bending.ts';
 import type { Prepared } from './prepare.ts';
-import { bendingCapacity } from './rate.ts';
+import { heavyEnough } from './rate.ts';
 import type { TermSet } from './term-set.ts';
 import { sizeWood, type Wood } from './wood.ts';
 
@@ -26,9 +27,11 @@ export function adjusted(
 ): AdjustedValues | null {
   if (!sizeWood(wood, section)) return null;
   const { at } = wood;
+  const { member, sagging, hogging } = heavyEnough(prepared, wood);
+  const w = member.selfWeight ? at.weight : 0;
   return {
-    Fb: inField(prepared.sagging, wood, at.FbSagging, duration, field),
-    FbHogging: inField(prepared.hogging, wood, at.FbHogging, duration, field),
+    Fb: inField(sagging, wood, at.FbSagging, duration, field, w),
+    FbHogging: inField(hogging, wood, at.FbHogging, duration, field, w),
     Fv: at.Fv * duration,
     E: at.E,
     Emin: at.Emin,
@@ -36,9 +39,10 @@ export function adjusted(
   };
 }
 
-function inField(set: TermSet, wood: Wood, Fb: number, duration: number, field: number): number {
+function inField(set: TermSet, wood: Wood, Fb: number, duration: number, field: number, w: number): number {
   for (let g = 0; g < set.count; g += 1) {
-    if (set.place[g] === field && set.duration[g] === duration) return bendingCapacity(set, g, wood, Fb);
+    if (set.place[g] !== field || set.duration[g] !== duration) continue;
+    return bendingCapacity(set, g, wood, Fb, governingMoment(set, g, wood, Fb, w).length);
   }
   return Fb * duration * wood.at.Cfu;
 }

@@ -5,6 +5,7 @@ import { bearingAreaReason, bearingNeeded } from '../factors/bearing-area.ts';
 import type { Section } from '../member.ts';
 import { CHECK_IDS, type CheckResult, type Factor } from '../report.ts';
 import { isSawn } from '../standing.ts';
+import { bendingCapacity, groupSlenderness } from './bending.ts';
 import { bendingFactors, durationFactor, factor, serviceFactorList } from './factor-list.ts';
 import { type Governing, governingTerm } from './governing-term.ts';
 import { notchCapacity } from './notch.ts';
@@ -12,8 +13,6 @@ import type { Prepared } from './prepare.ts';
 import {
   BEARING,
   BENDING,
-  bendingCapacity,
-  groupSlenderness,
   HOGGING,
   heavyEnough,
   LIVE,
@@ -114,11 +113,11 @@ function bending(p: Prepared, wood: Wood, found: Governing, g: number, hogging: 
   const combination = strengthOf(p, found);
   return {
     demand: found.demand / wood.at.modulus,
-    capacity: bendingCapacity(set, g, wood, Fb),
+    capacity: bendingCapacity(set, g, wood, Fb, found.length),
     unit: 'psi',
     combination: combination.label,
     clause: 'NDS 3.3',
-    factors: bendingFactors(wood, set, g, Fb, hogging, combination, units),
+    factors: bendingFactors(wood, set, g, Fb, hogging, combination, found.length, units),
   };
 }
 

@@ -12,7 +12,7 @@ import { type Property, wetService, wetServiceReason } from '../factors/wet-serv
 import type { FactorSymbol } from '../member.ts';
 import type { Factor } from '../report.ts';
 import { liesFlat, pieceThickness, pieceWidth } from '../standing.ts';
-import { groupSlenderness, groupStability, groupVolume } from './rate.ts';
+import { groupSlenderness, groupStability, momentVolume } from './bending.ts';
 import type { TermSet } from './term-set.ts';
 import { flatRule, sizeRule, type Wood } from './wood.ts';
 
@@ -44,7 +44,10 @@ export function durationFactor(wood: Wood, value: number, combination: Combinati
   return factor(wood, 'CD', value, loadDurationReason(combination));
 }
 
-/** All factors of Fb in a group of bending, `Fb` being Fb* without CD, `hogging` the sign. */
+/**
+ * All factors of Fb in a group of bending, `Fb` being Fb* without CD, `hogging` the sign, `length` that between points
+ * of zero moment, in.
+ */
 export function bendingFactors(
   wood: Wood,
   set: TermSet,
@@ -52,6 +55,7 @@ export function bendingFactors(
   Fb: number,
   hogging: boolean,
   combination: Combination,
+  length: number,
   units: Units,
 ): Factor[] {
   const { at, conditions, candidates, rules } = wood;
@@ -66,14 +70,14 @@ export function bendingFactors(
   list.push(...serviceFactorList(wood, 'Fb', (hogging ? values.FbNeg : values.Fb) * usedCF, units));
 
   const CL = groupStability(set, g, wood, Fb);
-  const CV = groupVolume(set, g, wood);
+  const CV = momentVolume(wood, length);
   const volume = rules.volume !== 'none' || isTyped(wood, 'CV');
   const lesser = (mine: number, other: number) =>
     volume && other < mine ? '; not applied, the other of CL and CV is the lesser, NDS 5.3.6' : '';
   list.push(factor(wood, 'CL', CL, stabilityOf(wood, set, g, hogging, units) + lesser(CL, CV)));
   if (volume) {
     const width = at.flat ? at.depth : at.width;
-    const reason = volumeReason(rules.volume, set.groups[g]!.zeroMomentLength, width, at.d, units);
+    const reason = volumeReason(rules.volume, length, width, at.d, units);
     list.push(factor(wood, 'CV', CV, reason + (CL <= CV && CV < 1 ? lesser(CV, CL) : '')));
   }
   // Glulam and LVL have CV in place of CF; whichever enters the value is listed.

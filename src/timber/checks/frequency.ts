@@ -1,4 +1,5 @@
 import { areaToLine } from '../../loads/area-to-line.ts';
+import { loadsOf } from '../../loads/carried.ts';
 import { slopedLength } from '../../loads/slope.ts';
 import { beamFields } from '../../statics/beam.ts';
 import type { Member } from '../member.ts';
@@ -10,7 +11,7 @@ const MODE = { span: Math.PI / 2, overhang: 1.875104 ** 2 / (2 * Math.PI) } as c
 
 /**
  * First frequency, Hz, of the longest span under dead load alone (domain: f1 = (π/2)·sqrt(EI/(m·l⁴)), m = D/g).
- * Line and point loads count as spread over the span. Null where there is no dead load. Advice, not code.
+ * Line and point loads, those of other members' reactions among them, count as spread over the span. Null where there is no dead load. Advice, not code.
  */
 export function firstFrequency(member: Member, w: number, EI: number): number | null {
   const parts = frequencyParts(member, w);
@@ -32,7 +33,7 @@ export function frequencyParts(
   const from = longest.start;
   const to = from + longest.length;
   let typed = 0;
-  for (const load of member.loads) {
+  for (const load of loadsOf(member)) {
     if (load.kind !== 'dead') continue;
     if (load.type === 'point') typed += load.at >= from && load.at <= to ? load.load : 0;
     else typed += lineWithin(load, from, to);

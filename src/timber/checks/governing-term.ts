@@ -1,4 +1,5 @@
 import type { Term } from '../../loads/effects.ts';
+import { governingMoment } from './bending.ts';
 import type { Prepared } from './prepare.ts';
 import { BEARING, BENDING, HOGGING, heavyEnough, LIVE, NOTCH, SHEAR, TOTAL, UPLIFT } from './rate.ts';
 import { groupDemand, type TermSet, worstTerm } from './term-set.ts';
@@ -12,6 +13,8 @@ export interface Governing {
   readonly term: Term;
   readonly place: number;
   readonly at: number;
+  /** Bending: between the points of zero moment, in, where CV goes with it. */
+  readonly length: number;
 }
 
 /** What governs a check: `g` the group that `rate` named, the wood still at the section rated. */
@@ -21,12 +24,24 @@ export function governingTerm(prepared: Prepared, wood: Wood, id: number, g: num
   if (id === SHEAR && p.effects.shearAtDepth !== null) {
     const { term, value, duration } = p.effects.shearAtDepth(wood.at.d, w)[g]!;
     const typed = p.member.typedFactors?.CD?.value;
-    return { demand: value, duration: typed ?? duration, term, place: term.place, at: term.at };
+    return { demand: value, duration: typed ?? duration, term, place: term.place, at: term.at, length: 0 };
   }
   const set = setOf(p, id);
+  if (id === BENDING || id === HOGGING) {
+    const Fb = id === BENDING ? wood.at.FbSagging : wood.at.FbHogging;
+    const { moment, length, at, term } = governingMoment(set, g, wood, Fb, w);
+    return { demand: moment, duration: set.duration[g]!, term, place: term.place, at, length };
+  }
   const term = set.groups[g]!.terms[worstTerm(set, g, w)]!;
   const at = term.placeAt === null ? term.at : term.placeAt(w);
-  return { demand: groupDemand(set, g, w), duration: set.duration[g]!, term, place: term.place, at };
+  return {
+    demand: groupDemand(set, g, w),
+    duration: set.duration[g]!,
+    term,
+    place: term.place,
+    at,
+    length: 0,
+  };
 }
 
 /** The groups of a check, by its index in CHECK_IDS. */

@@ -1,4 +1,5 @@
 import { areaToLine } from '../../loads/area-to-line.ts';
+import { loadsOf } from '../../loads/carried.ts';
 import type { LoadKind } from '../../loads/kinds.ts';
 import { beamLength } from '../../statics/beam.ts';
 import type { Member } from '../member.ts';
@@ -17,7 +18,7 @@ export function lineLoadOf(member: Member): number {
 /** All line and point loads of a kind, lb. */
 function typedLoad(member: Member, kind: LoadKind): number {
   let sum = 0;
-  for (const load of member.loads) {
+  for (const load of loadsOf(member)) {
     if (load.kind !== kind) continue;
     sum += load.type === 'point' ? load.load : ((load.start + load.end) / 2) * (load.to - load.from);
   }

@@ -3,6 +3,8 @@ import {
   type Effects,
   isSelfSimilar,
   type Loading,
+  liftsOf,
+  loadsOf,
   scaleEffects,
   scaleLoadEffects,
   slopedLength,
@@ -110,7 +112,7 @@ export function prepareLike(prepared: Prepared, member: Member): Prepared {
 export function prepareResized(prepared: Prepared, member: Member): Prepared {
   const { member: like } = prepared;
   const scaled =
-    member.loads.length === 0 && isOneSpan(member.beam) && isOneSpan(like.beam) && sameLoading(member, like);
+    placesNothing(member) && isOneSpan(member.beam) && isOneSpan(like.beam) && sameLoading(member, like);
   return scaled && deadFactorOf(member) === deadFactorOf(like)
     ? prepareScaled(prepared, member, member.beam.spans[0]! / like.beam.spans[0]!)
     : prepareLike(prepared, member);
@@ -120,6 +122,7 @@ export function prepareResized(prepared: Prepared, member: Member): Prepared {
 const LOADING_KEYS = [
   'tributary',
   'area',
+  'links',
   'selfWeight',
   'combinations',
   'liveReduction',
@@ -143,6 +146,10 @@ const JUDGING_KEYS = [
   'typedFactors',
   'stock',
 ] as const satisfies readonly (keyof Member)[];
+
+function placesNothing({ links = [], loads }: Member): boolean {
+  return loads.length === 0 && links.length === 0;
+}
 
 /** A single span between bearings that turn freely. */
 function isOneSpan({ spans, overhangs, supports, fixed }: Beam): boolean {
@@ -207,7 +214,7 @@ function isLoaded(member: Member): boolean {
   const area = member.tributary > 0 && Object.values(member.area).some((load) => load > 0);
   return (
     area ||
-    member.loads.some((load) =>
+    [...loadsOf(member), ...liftsOf(member)].some((load) =>
       load.type === 'point' ? load.load !== 0 : load.start !== 0 || load.end !== 0,
     )
   );

@@ -1,11 +1,11 @@
-import { beamStability, effectiveLength, MOST_SLENDER, slendernessRatio } from '../factors/beam-stability.ts';
-import { volumeFactor } from '../factors/volume.ts';
+import { MOST_SLENDER } from '../factors/beam-stability.ts';
 import type { Section } from '../member.ts';
 import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../report.ts';
+import { bendingRatio, groupSlenderness, hasLength, NO_LENGTH, worstByVolume } from './bending.ts';
 import { isForbidden } from './forbidden.ts';
 import { notchCapacity } from './notch.ts';
 import { type Prepared, prepare } from './prepare.ts';
-import { groupDemand, type TermSet, volumeLengths } from './term-set.ts';
+import { groupDemand, type TermSet } from './term-set.ts';
 import { sizeWood, type Wood } from './wood.ts';
 
 const at = (id: CheckId) => CHECK_IDS.indexOf(id);
@@ -20,7 +20,7 @@ export const UPLIFT = at('uplift');
 export const NOTCH = at('notch');
 
 /** An upward reaction under this is rounding of the statics, lb. */
-const NO_UPLIFT = 1e-6;
+export const NO_UPLIFT = 1e-6;
 
 /**
  * All checks of a member in all combinations and patterns, for one wood and section: fills `ratios` in the order of
@@ -41,7 +41,7 @@ export function rate(
     return false;
   }
   const p = heavyEnough(prepared, wood);
-  const { b, d, area, modulus, weight } = wood.at;
+  const { b, d, area, weight } = wood.at;
   const w = p.member.selfWeight ? weight : 0;
   ratios.fill(Number.NaN);
 
@@ -53,8 +53,8 @@ export function rate(
       raise(ratios, SHEAR, ratio, governing, g);
     }
   }
-  rateBending(p.sagging, wood, wood.at.FbSagging, w, modulus, 0, BENDING, ratios, governing);
-  rateBending(p.hogging, wood, wood.at.FbHogging, w, modulus, p.sagging.count, HOGGING, ratios, governing);
+  rateBending(p.sagging, wood, wood.at.FbSagging, w, 0, BENDING, ratios, governing);
+  rateBending(p.hogging, wood, wood.at.FbHogging, w, p.sagging.count, HOGGING, ratios, governing);
 
   const stiffness = wood.at.E * wood.at.inertia;
   const { deflectionLive: live, deflectionTotal: total } = p;
@@ -107,50 +107,46 @@ function rateBending(
   wood: Wood,
   Fb: number,
   w: number,
-  modulus: number,
   offset: number,
   id: number,
   ratios: Float64Array,
   governing: Int32Array | undefined,
 ): void {
+  let first = -1;
   for (let g = 0; g < set.count; g += 1) {
-    const demand = groupDemand(set, g, w);
+    const moment = groupDemand(set, g, w);
     // A group that no longer bends this way at this weight has nothing to check.
-    if (demand <= 0) continue;
-    raise(ratios, id, demand / modulus / bendingCapacity(set, g, wood, Fb), governing, g);
+    if (moment <= 0) continue;
     const RB = groupSlenderness(set, g, wood);
+    const ratio = bendingRatio(set, g, wood, Fb, { moment, length: NO_LENGTH }, RB);
+    if (!(ratio <= ratios[id]!)) first = g;
+    raise(ratios, id, ratio, governing, g);
     if (RB > 0) raise(ratios, SLENDERNESS, RB / MOST_SLENDER, governing, offset + g);
   }
+  if (first < 0 || !hasLength(wood)) return;
+  // The group with the largest ratio before CV first: few others can then come up to it.
+  rateVolume(set, first, wood, Fb, w, id, ratios, governing);
+  for (let g = 0; g < set.count; g += 1)
+    if (g !== first) rateVolume(set, g, wood, Fb, w, id, ratios, governing);
 }
 
-/** RB of a group's compression edge; 0 where it is held, or where the section is not deeper than wide. */
-export function groupSlenderness(set: TermSet, g: number, wood: Wood): number {
-  const lu = set.unbraced[g]!;
-  const { b, d } = wood.at;
-  return lu === 0 || d <= b ? 0 : slendernessRatio(effectiveLength(set.lateral[g]!, lu, d), b, d);
-}
-
-/** CL of a group. `Fb` is Fb* without CD. */
-export function groupStability(set: TermSet, g: number, wood: Wood, Fb: number): number {
-  const typed = wood.conditions.typedFactors?.CL;
-  if (typed !== undefined) return typed.value;
-  const RB = groupSlenderness(set, g, wood);
-  return RB === 0 ? 1 : beamStability(Fb * set.duration[g]!, wood.at.EyMin, RB);
-}
-
-/** CV of a group. */
-export function groupVolume(set: TermSet, g: number, wood: Wood): number {
-  const typed = wood.conditions.typedFactors?.CV;
-  if (typed !== undefined) return typed.value;
-  const { volume } = wood.rules;
-  return volume === 'none' ? 1 : volumeFactor(volumeLengths(set, volume)[g]!, wood.at.volume);
-}
-
-/** Fb' of a group, psi: the lesser of CL and CV (NDS 5.3.6). */
-export function bendingCapacity(set: TermSet, g: number, wood: Wood, Fb: number): number {
-  const CL = groupStability(set, g, wood, Fb);
-  const CV = groupVolume(set, g, wood);
-  return Fb * set.duration[g]! * wood.at.Cfu * Math.min(CL, CV);
+/** Raises the bending ratio by what CV makes of the moments of a group. */
+function rateVolume(
+  set: TermSet,
+  g: number,
+  wood: Wood,
+  Fb: number,
+  w: number,
+  id: number,
+  ratios: Float64Array,
+  governing: Int32Array | undefined,
+): void {
+  const { volume } = set.groups[g]!;
+  const moment = groupDemand(set, g, w);
+  if (volume === null || moment <= 0) return;
+  if (bendingRatio(set, g, wood, Fb, { moment, length: volume.longest }) <= ratios[id]!) return;
+  const worst = worstByVolume(set, g, wood, Fb, w, ratios[id]!);
+  if (worst !== null) raise(ratios, id, bendingRatio(set, g, wood, Fb, worst), governing, g);
 }
 
 function rateShearAtDepth(

@@ -1,5 +1,4 @@
 import type { LateralCase, TermGroup } from '../../loads/effects.ts';
-import { type VolumeRule, volumeLength } from '../factors/volume.ts';
 
 /**
  * The groups of one check laid out in flat arrays (plain ones: typed arrays cost more to make than they save), so that the largest demand of a group at an own weight is a few
@@ -18,8 +17,6 @@ export interface TermSet {
   /** Bending: unbraced length of the compression edge, in; 0 where it is held throughout. */
   readonly unbraced: readonly number[];
   readonly lateral: readonly LateralCase[];
-  /** Part of CV that goes with the length, by rule, made when first asked for. */
-  readonly volume: Partial<Record<VolumeRule, readonly number[]>>;
 }
 
 /**
@@ -62,7 +59,6 @@ export function termSet(
     place: groups.map((group) => group.place),
     unbraced,
     lateral,
-    volume: {},
   };
 }
 
@@ -114,13 +110,4 @@ function termValue(
     if (valueAt !== null) return valueAt(w);
   }
   return base[t]! + perWeight[t]! * w;
-}
-
-/** The length parts of CV of the groups under a rule. */
-export function volumeLengths(set: TermSet, rule: VolumeRule): readonly number[] {
-  const known = set.volume[rule];
-  if (known !== undefined) return known;
-  const made = set.groups.map((group) => volumeLength(rule, group.zeroMomentLength));
-  set.volume[rule] = made;
-  return made;
 }

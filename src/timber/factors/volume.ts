@@ -22,7 +22,7 @@ const EXPONENT: Readonly<Record<VolumeRule, number>> = {
 
 /** The part of CV that goes with the length between points of zero moment, in. */
 export function volumeLength(rule: VolumeRule, zeroMomentLength: number): number {
-  if (rule === 'none' || rule === 'LVL') return 1;
+  if (!hasVolumeLength(rule)) return 1;
   return ((BASE_LENGTH * FOOT) / zeroMomentLength) ** EXPONENT[rule];
 }
 
@@ -41,6 +41,11 @@ export function volumeFactor(length: number, section: number): number {
 /** 1/x of NDS 5.3.6, as x. */
 export function volumeRoot(rule: VolumeRule): number {
   return Math.round(1 / EXPONENT[rule]);
+}
+
+/** Whether CV goes with the length between points of zero moment. */
+export function hasVolumeLength(rule: VolumeRule): boolean {
+  return rule === 'glulam western' || rule === 'glulam pine';
 }
 
 /** Why CV has its value. */

@@ -1,4 +1,5 @@
 import { areaToLine } from '../../loads/area-to-line.ts';
+import { loadsOf } from '../../loads/carried.ts';
 import { KIND_LETTER, KIND_WORD, LOAD_KINDS, type LoadKind } from '../../loads/kinds.ts';
 import type { AppliedLoad } from '../../loads/loading.ts';
 import { liveReductionFactor } from '../../loads/reduction.ts';
@@ -10,8 +11,10 @@ import { firstFrequency, frequencyParts, GRAVITY } from '../checks/frequency.ts'
 import { lineLoadOf } from '../checks/line-load.ts';
 import { analyse } from '../checks/reactions.ts';
 import { capacityLines } from './capacity.ts';
+import { carriedLines } from './carried.ts';
 import { plain, sumText } from './figures.ts';
 import { kindLine, ownWeightLines } from './line-loads.ts';
+import { plyLines } from './plies.ts';
 import { sectionLines } from './section.ts';
 import type { Work } from './work.ts';
 import type { BasisId, WorkingLine } from './workings.ts';
@@ -26,6 +29,7 @@ const loads = (work: Work): WorkingLine[] => {
     lines.push({ heading: 'typed loads' });
     for (const load of member.loads) lines.push({ note: typedText(work, load) });
   }
+  lines.push(...carriedLines(work));
   const combinations = work.prepared.effects.combinations.map(({ label }) => label).join(', ');
   const set = `${member.combinations} 2.4.1`;
   lines.push(
@@ -79,7 +83,7 @@ function glance(work: Work): WorkingLine {
   const { figures: f, member, ownWeight } = work;
   const whole = beamLength(member.beam);
   const of = (kind: LoadKind) =>
-    member.loads.reduce(
+    loadsOf(member).reduce(
       (sum, load) => {
         if (load.kind !== kind) return sum;
         const force =
@@ -180,7 +184,7 @@ const reactions = (work: Work): WorkingLine[] => {
     {
       symbol: 'smallest',
       result: f.force(min),
-      ...(min < 0 ? { note: 'upward: it wants holding down' } : {}),
+      ...(min < 0 ? { note: 'upward: it wants tying down' } : {}),
     },
   ]);
 };
@@ -219,6 +223,7 @@ const WRITERS: Readonly<Record<BasisId, (work: Work) => WorkingLine[]>> = {
   'design values': designValues,
   reactions,
   frequency,
+  plies: plyLines,
 };
 
 /** What the checks stand on, line by line. */
@@ -226,7 +231,8 @@ export function basisLines(work: Work, id: BasisId): WorkingLine[] {
   return WRITERS[id](work);
 }
 
-/** Whether there is anything to say: frequency is advice on floors with dead load. */
+/** Whether there is anything to say: frequency is advice on floors with dead load, fastening on more than one ply. */
 export function basisApplies({ member, ownWeight }: Work, id: BasisId): boolean {
+  if (id === 'plies') return member.section.plies > 1;
   return id !== 'frequency' || (member.use === 'floor' && frequencyParts(member, ownWeight) !== null);
 }

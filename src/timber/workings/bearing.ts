@@ -58,6 +58,6 @@ export const bearing: Write = (work, check) => {
     }),
     { heading: 'bearing length that would just do' },
     { symbol: 'lb needed', ...need, result: f.size(needed), clause: 'NDS 3.10.2, 3.10.4' },
-    ...resultLines(work, check, 'fc-perp', "Fc-perp'"),
+    ...resultLines(work, check),
   ];
 };

@@ -1,3 +1,5 @@
+import { governingTerm } from '../checks/governing-term.ts';
+import { BENDING, HOGGING } from '../checks/rate.ts';
 import { sizeRule } from '../checks/wood.ts';
 import { TIMBER_DEPTH } from '../factors/size.ts';
 import { BASE_DEPTH, BASE_LENGTH, BASE_WIDTH, volumeRoot, WIDEST } from '../factors/volume.ts';
@@ -35,7 +37,7 @@ function bendingFormulas(work: Work, edge: Edge) {
     };
     return formulas;
   }
-  const L = edge.set.groups[edge.group]!.zeroMomentLength;
+  const L = governingTerm(work.prepared, wood, edge.hogging ? HOGGING : BENDING, edge.group).length;
   const width = Math.min(at.flat ? at.depth : at.width, WIDEST);
   const [length, deep, broad] = [f.span(BASE_LENGTH * FOOT), f.size(BASE_DEPTH), f.size(BASE_WIDTH)];
   formulas.CV = {
@@ -86,6 +88,6 @@ export const bending =
         adjusted: check.capacity,
         silent: [...SERVICE, 'Cr'],
       }),
-      ...resultLines(work, check, 'fb', `${symbol}'`),
+      ...resultLines(work, check, `${symbol}'`),
     ];
   };

@@ -36,7 +36,7 @@ const shear: Write = (work, check) => {
       adjusted: check.capacity,
       silent: SERVICE,
     }),
-    ...resultLines(work, check, 'fv', "Fv'"),
+    ...resultLines(work, check),
   ];
 };
 
@@ -54,21 +54,27 @@ const slenderness: Write = (work, check) => {
     { heading: 'slenderness of the compression edge' },
     ...slendernessLines(work, edge),
     { note: 'the worst of all fields and both edges; it goes with no combination' },
-    ...resultLines(work, check, 'RB', '50'),
+    ...resultLines(work, check),
   ];
 };
 
 const uplift: Write = (work, check) => {
-  const { figures: f, member } = work;
+  const { figures: f } = work;
   const demand = demandOf(work, 'uplift', 'reaction', 'R upward');
-  const held = member.tiedDown === null ? 'no tie-down is stated' : 'the tie-down stated at this support';
+  const held = check.capacity === 0 ? 'untied: none is stated here' : 'the tie-down stated at this support';
   return [
     ...governsLines(work, 'uplift'),
     { heading: 'demand' },
     ...demandLines(work, demand),
     { heading: 'capacity' },
     { symbol: 'tie-down', result: f.force(check.capacity), note: held },
-    ...resultLines(work, check, 'R upward', 'tie-down'),
+    {
+      symbol: 'tie-down that would do',
+      formula: 'R upward',
+      result: f.force(check.demand),
+      note: 'rounded up where it is named',
+    },
+    ...resultLines(work, check),
   ];
 };
 
@@ -113,7 +119,7 @@ const notch: Write = (work, check) => {
       result: f.force(check.capacity),
       clause: check.clause,
     },
-    ...resultLines(work, check, 'V', "Vr'"),
+    ...resultLines(work, check),
   ];
 };
 

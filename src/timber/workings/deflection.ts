@@ -36,7 +36,7 @@ export const deflection =
       ...demandLines(work, demand),
       { heading: 'limit' },
       limitLine(work, check, live ? member.limits.live : member.limits.total, index.kind === 'overhang'),
-      ...resultLines(work, check, 'deflection', 'limit'),
+      ...resultLines(work, check),
     ];
   };
 

@@ -1,6 +1,6 @@
 import type { Combination } from '../../loads/combinations.ts';
 import { KIND_WORD } from '../../loads/kinds.ts';
-import { type MakeUp, makeUp } from '../../loads/make-up.ts';
+import { type MakeUp, makeUp, type Share } from '../../loads/make-up.ts';
 import { slopeStretch } from '../../loads/slope.ts';
 import { plain, sumText, timesText } from './figures.ts';
 import { combinedLoad, evenLoads, type KindLine } from './line-loads.ts';
@@ -124,10 +124,28 @@ function deflectionLine(work: Work, w: number, l: number, stretch: number, sized
   };
 }
 
-function shown(work: Work, quantity: Quantity, value: number): string {
-  const { figures: f } = work;
+/** A value of the analysis with its unit; a deflection times E' I. */
+export function shown({ figures: f }: Work, quantity: Quantity, value: number): string {
   if (quantity === 'moment') return f.moment(value);
   return quantity === 'deflection' ? f.bending(value) : f.force(value);
+}
+
+/** A value as the sum of what each kind of load brings to it; nothing where no kind does. */
+export function sharesText(
+  work: Work,
+  quantity: Quantity,
+  shares: readonly Share[],
+  value: number,
+): { readonly formula?: string; readonly numbers?: string } {
+  const felt = shares.filter((share) => Math.abs(share.value) > NOTHING * Math.abs(value));
+  if (felt.length === 0) return {};
+  const word = (kind: Share['kind']) => (kind === 'own weight' ? kind : KIND_WORD[kind]);
+  return {
+    formula: felt
+      .map(({ kind, factor }) => (factor === 1 ? word(kind) : `${plain(factor)} ${word(kind)}`))
+      .join(' + '),
+    numbers: sumText(felt.map((share) => timesText(share.factor, shown(work, quantity, share.value)))),
+  };
 }
 
 /** A fraction of the demand under which a kind brings nothing but rounding. */
@@ -147,20 +165,14 @@ function fromAnalysis(work: Work, demand: Demand): WorkingLine[] {
     ? ': shear at d from the face, line loads within it left out, point loads there times x/d'
     : '';
   const note = `from the analysis of the whole member, ${where}${loads}${depth}`;
-  const lines: WorkingLine[] = [];
-  const shares = (made?.shares ?? []).filter((share) => Math.abs(share.value) > NOTHING * value);
-  if (shares.length > 0) {
-    const word = (kind: (typeof shares)[number]['kind']) => (kind === 'own weight' ? kind : KIND_WORD[kind]);
-    lines.push({
+  const lines: WorkingLine[] = [
+    {
       symbol,
-      formula: shares
-        .map(({ kind, factor }) => (factor === 1 ? word(kind) : `${plain(factor)} ${word(kind)}`))
-        .join(' + '),
-      numbers: sumText(shares.map((share) => timesText(share.factor, shown(work, quantity, share.value)))),
+      ...sharesText(work, quantity, made?.shares ?? [], value),
       result: shown(work, quantity, value),
       note,
-    });
-  } else lines.push({ symbol, result: shown(work, quantity, value), note });
+    },
+  ];
   if (quantity !== 'deflection') return lines;
   const { figures: f, wood } = work;
   const { E, inertia } = wood.at;

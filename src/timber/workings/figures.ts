@@ -1,4 +1,4 @@
-import { toUnit, type Units } from '../../quantity/index.ts';
+import { toUnit, type Units, weightIn, weightUnit } from '../../quantity/index.ts';
 import { PASS_LIMIT } from '../report.ts';
 
 /** Digits that every number of a calculation is given with. */
@@ -26,9 +26,9 @@ export function factorText(value: number): string {
 const RATIO_PLACES = 3;
 const MOST_PLACES = 10;
 
-/** A ratio with three decimals, more where it fails by less: never a failing "1.000". "none" where nothing can meet it. */
+/** A ratio with three decimals, more where it fails by less: never a failing "1.000". "untied" for uplift that nothing ties down. */
 export function ratioText(ratio: number): string {
-  if (!Number.isFinite(ratio)) return 'none';
+  if (!Number.isFinite(ratio)) return 'untied';
   let text = ratio.toFixed(RATIO_PLACES);
   for (let places = RATIO_PLACES + 1; ratio > PASS_LIMIT && Number(text) <= 1; places += 1) {
     if (places > MOST_PLACES) break;
@@ -51,6 +51,10 @@ export interface Figures {
   force(value: number): string;
   /** plf, kN/m */
   line(value: number): string;
+  /** Own weight as the rack shows it: lb/ft, kg/m. */
+  weight(value: number): string;
+  /** What a piece weighs, from lb: lb, kg. */
+  mass(value: number): string;
   /** The same for deflections: lb/in, N/mm. */
   lineForDeflection(value: number): string;
   /** psf, kPa */
@@ -78,6 +82,8 @@ const US: Figures = {
   stress: (value) => `${plain(value)} psi`,
   force: (value) => `${plain(value)} lb`,
   line: (value) => `${plain(value * FOOT)} plf`,
+  weight: (value) => `${plain(weightIn(value, 'us'))} ${weightUnit('us')}`,
+  mass: (value) => `${plain(value)} lb`,
   lineForDeflection: (value) => `${plain(value)} lb/in`,
   load: (value) => `${plain(toUnit('areaLoad', value, 'psf'))} psf`,
   moment: (value) => `${plain(value / FOOT)} ft-lb`,
@@ -96,6 +102,8 @@ const SI: Figures = {
   stress: (value) => `${plain(toUnit('stress', value, 'MPa'))} MPa`,
   force: (value) => `${plain(toUnit('pointLoad', value, 'kN'))} kN`,
   line: (value) => `${plain(toUnit('lineLoad', value, 'kN/m'))} kN/m`,
+  weight: (value) => `${plain(weightIn(value, 'si'))} ${weightUnit('si')}`,
+  mass: (value) => `${plain((weightIn(value, 'si') * IN_TO_MM) / 1000)} kg`,
   lineForDeflection: (value) => `${plain(toUnit('lineLoad', value, 'N/mm'))} N/mm`,
   load: (value) => `${plain(toUnit('areaLoad', value, 'kPa'))} kPa`,
   moment: (value) => `${plain((value * LB_TO_N * IN_TO_MM) / 1e6)} kN-m`,

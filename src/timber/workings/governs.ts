@@ -5,7 +5,8 @@ import { governingTerm } from '../checks/governing-term.ts';
 import { deadFactorOf, type Prepared, withEffects } from '../checks/prepare.ts';
 import { rate } from '../checks/rate.ts';
 import { CHECK_IDS, type CheckId, type CheckResult } from '../report.ts';
-import { factorText, plain, ratioText } from './figures.ts';
+import { factorText, ratioText } from './figures.ts';
+import { measured } from './result.ts';
 import { checkOf, heaviestOf, type Work } from './work.ts';
 import type { WorkingLine } from './workings.ts';
 
@@ -80,10 +81,10 @@ function onWords(pattern: string): string {
 }
 
 /** "1486.1 psi of 900 psi, CD 1.0". */
-function asks(work: Work, check: CheckResult): string {
+function asks({ figures: f }: Work, check: CheckResult): string {
   const CD = check.factors.find(({ symbol }) => symbol === 'CD');
   const duration = CD === undefined ? '' : `, CD ${factorText(CD.value)}`;
-  return `${measured(work, check, check.demand)} of ${measured(work, check, check.capacity)}${duration}`;
+  return `${measured(f, check, check.demand)} of ${measured(f, check, check.capacity)}${duration}`;
 }
 
 function nextText(work: Work, check: CheckResult, next: CheckResult): string {
@@ -92,18 +93,4 @@ function nextText(work: Work, check: CheckResult, next: CheckResult): string {
     return `${text}; it asks more but may lean on more, for its load is shorter`;
   if (next.demand > check.demand * (1 + 1e-9)) return `${text}; it asks more elsewhere, of more capacity`;
   return check.demand === next.demand ? `${text}; it asks the same` : `${text}; it asks less`;
-}
-
-/** A demand or capacity of a check with its unit. */
-export function measured({ figures: f }: Work, { unit }: CheckResult, value: number): string {
-  switch (unit) {
-    case 'psi':
-      return f.stress(value);
-    case 'in':
-      return f.size(value);
-    case 'lb':
-      return f.force(value);
-    default:
-      return plain(value);
-  }
 }

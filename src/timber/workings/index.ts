@@ -8,8 +8,11 @@ import { ratioText } from './figures.ts';
 import { checkOf, workOf } from './work.ts';
 import { BASIS_IDS, type BasisId, WORKINGS_WORD, type Workings, type WorkingsId } from './workings.ts';
 
-export { figuresOf, plain, ratioText } from './figures.ts';
+export { type DiagramPlace, diagramLines } from './diagrams.ts';
+export { type Figures, figuresOf, plain, ratioText, sumText } from './figures.ts';
+export { weightLines } from './line-loads.ts';
 export { fieldName } from './places.ts';
+export { measured, ratioLine } from './result.ts';
 export {
   BASIS_IDS,
   type BasisId,

@@ -1,9 +1,10 @@
 import { areaToLine, kindSign } from '../../loads/area-to-line.ts';
+import { carriedLoads, liftsOf } from '../../loads/carried.ts';
 import { KIND_LETTER, KIND_WORD, LOAD_KINDS, type LoadKind } from '../../loads/kinds.ts';
 import { liveReductionFactor } from '../../loads/reduction.ts';
 import { slopeStretch } from '../../loads/slope.ts';
 import { density, MOISTURE } from '../weight.ts';
-import { plain, sumText, timesText } from './figures.ts';
+import { type Figures, plain, sumText, timesText } from './figures.ts';
 import type { Work } from './work.ts';
 import type { WorkingLine } from './workings.ts';
 
@@ -14,8 +15,14 @@ export interface KindLine {
   readonly line: WorkingLine;
 }
 
+/** A line load over the whole member, lb/in, and what it is called. */
+export interface EvenLoad {
+  readonly word: string;
+  readonly load: number;
+}
+
 /** Load of a kind that lies evenly on the whole member, with own weight in dead; null where the kind is absent. */
-export function kindLine(work: Work, kind: LoadKind, typed: readonly number[]): KindLine | null {
+export function kindLine(work: Work, kind: LoadKind, typed: readonly EvenLoad[]): KindLine | null {
   const { figures: f, member, ownWeight } = work;
   const { area, tributary, slope } = member;
   const stretch = slopeStretch(slope);
@@ -32,9 +39,9 @@ export function kindLine(work: Work, kind: LoadKind, typed: readonly number[]): 
     const part = reduction === 1 ? '' : ` x ${plain(reduction)}`;
     numbers.push(`${sign < 0 ? '-' : ''}${f.load(area[kind])} x ${f.span(tributary)}${part}${along}`);
   }
-  for (const load of typed) {
+  for (const { word, load } of typed) {
     value += sign * turned * load;
-    words.push('line load');
+    words.push(word);
     numbers.push(`${f.line(sign * load)}${along}`);
   }
   if (kind === 'dead' && ownWeight !== 0) {
@@ -60,10 +67,17 @@ export function kindLine(work: Work, kind: LoadKind, typed: readonly number[]): 
 
 /** Every kind's line load where all loads lie evenly on the whole member; null where one does not. */
 export function evenLoads(work: Work): KindLine[] | null {
-  const { loads } = work.member;
-  const typed = new Map<LoadKind, number[]>();
+  const { member } = work;
+  if (liftsOf(member).length > 0) return null;
+  const even = new Map<LoadKind, EvenLoad[]>();
   const [field] = work.prepared.fields;
-  for (const load of loads) {
+  const all = [
+    ...member.loads.map((load) => ({ load, word: 'line load' })),
+    ...(member.links ?? []).flatMap((link) =>
+      carriedLoads(link, member).map((load) => ({ load, word: `from ${link.member}` })),
+    ),
+  ];
+  for (const { load, word } of all) {
     if (load.type === 'point') {
       if (load.load !== 0) return null;
       continue;
@@ -71,9 +85,9 @@ export function evenLoads(work: Work): KindLine[] | null {
     if (load.start === 0 && load.end === 0) continue;
     const whole = load.from <= 0 && load.to >= field!.length && load.start === load.end;
     if (!whole) return null;
-    typed.set(load.kind, [...(typed.get(load.kind) ?? []), load.start]);
+    even.set(load.kind, [...(even.get(load.kind) ?? []), { word, load: load.start }]);
   }
-  return LOAD_KINDS.flatMap((kind) => kindLine(work, kind, typed.get(kind) ?? []) ?? []);
+  return LOAD_KINDS.flatMap((kind) => kindLine(work, kind, even.get(kind) ?? []) ?? []);
 }
 
 /** "w = wD + 0.75 wL" with the loads it is made of. `deadFactor` multiplies the combination's own. */
@@ -110,6 +124,27 @@ export function combinedLoad(
 const WATER = 62.4;
 const KN_PER_M3 = 4.4482216152605e-3 / 0.3048 ** 3;
 
+/** Own weight, lb/in, of a section of `area`, in², by the density that makes it; in SI as a mass too. */
+export function weightLines(f: Figures, area: number, weight: number): WorkingLine[] {
+  const us = f.units === 'us';
+  const part = us ? `${f.area(area)} / 144 in2/ft2` : `${f.area(area)} / 1000000 mm2/m2`;
+  const heavy = (weight / area) * CUBIC_FOOT;
+  const density = us ? `${plain(heavy)} lb/ft3` : `${plain(heavy * KN_PER_M3)} kN/m3`;
+  const line = {
+    symbol: 'own weight',
+    formula: 'A x density',
+    numbers: `${part} x ${density}`,
+    result: f.line(weight),
+  };
+  if (us) return [line];
+  const numbers = `${f.line(weight)} x 1000 N/kN / ${GRAVITY_SI} m/s2`;
+  return [line, { symbol: 'as mass', formula: 'own weight / g', numbers, result: f.weight(weight) }];
+}
+
+const CUBIC_FOOT = 1728;
+/** Standard gravity, m/s². */
+const GRAVITY_SI = 9.80665;
+
 /** Own weight from specific gravity and moisture. */
 export function ownWeightLines(work: Work): WorkingLine[] {
   const { figures: f, member, values, wood } = work;
@@ -119,8 +154,6 @@ export function ownWeightLines(work: Work): WorkingLine[] {
   const unit = us ? 'lb/ft3' : 'kN/m3';
   const heavy = density(values.G, moisture);
   const { area, weight } = wood.at;
-  const part = us ? `${f.area(area)} / 144 in2/ft2` : `${f.area(area)} / 1000000 mm2/m2`;
-  const numbers = `${part} x ${plain(heavy * turned)} ${unit}`;
   const dry = member.service === 'dry';
   return [
     { symbol: 'G', result: plain(values.G), note: 'specific gravity', clause: values.source },
@@ -136,12 +169,7 @@ export function ownWeightLines(work: Work): WorkingLine[] {
       result: `${plain(heavy * turned)} ${unit}`,
       clause: 'NDS Supplement 3.1.3',
     },
-    {
-      symbol: 'own weight',
-      formula: 'A x density',
-      numbers,
-      result: f.line(weight),
-      ...(member.selfWeight ? {} : { note: 'not counted: own weight is switched off' }),
-    },
+    ...weightLines(f, area, weight),
+    ...(member.selfWeight ? [] : [{ note: 'not counted: own weight is switched off' }]),
   ];
 }

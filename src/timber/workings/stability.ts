@@ -1,5 +1,5 @@
+import { groupSlenderness, groupStability } from '../checks/bending.ts';
 import { serviceFactorList } from '../checks/factor-list.ts';
-import { groupSlenderness, groupStability } from '../checks/rate.ts';
 import type { TermSet } from '../checks/term-set.ts';
 import { effectiveLength, effectiveLengthRule } from '../factors/beam-stability.ts';
 import type { Factor } from '../report.ts';

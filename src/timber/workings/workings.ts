@@ -22,7 +22,7 @@ export interface Workings {
 }
 
 /** The calculations of a member beside its checks. */
-export const BASIS_IDS = ['loads', 'design values', 'reactions', 'frequency'] as const;
+export const BASIS_IDS = ['loads', 'design values', 'reactions', 'frequency', 'plies'] as const;
 export type BasisId = (typeof BASIS_IDS)[number];
 
 export type WorkingsId = CheckId | BasisId;
@@ -42,4 +42,5 @@ export const WORKINGS_WORD: Readonly<Record<WorkingsId, string>> = {
   'design values': 'design values',
   reactions: 'reactions',
   frequency: 'first frequency',
+  plies: 'plies and their fastening',
 };

@@ -60,6 +60,9 @@ export const member: fc.Arbitrary<Member> = fc
       area: Object.fromEntries(
         Object.entries(base.area).map(([kind, load]) => [kind, felt(load)]),
       ) as Member['area'],
+      tributary: felt(base.tributary),
+      tiedDown: base.tiedDown?.map(felt) ?? null,
+      spacing: base.spacing === null ? null : felt(base.spacing),
       loads: bare ? [] : base.loads.map(feltLoad),
       typedFactors: typed,
       notch: { left: may ? notch : 0, right: 0 },

@@ -1,13 +1,28 @@
 /** A value known to lie between two numbers. */
 export type Interval = readonly [low: number, high: number];
 
-/** Numbers are printed with five digits. */
+/** Numbers are printed with five digits; where more stand behind a point, with those. */
 const ROUNDING = 5.1e-5;
+const DIGITS = 5;
+
+function roundingOf(number: string): number {
+  const [digits] = number.split('e') as [string];
+  const count = digits.replace('.', '').replace(/^0+/, '').length;
+  return digits.includes('.') && count > DIGITS ? 0.51 * 10 ** (1 - count) : ROUNDING;
+}
 
 /** The number that a text begins with, widened by its rounding; null where it begins with none. */
 export function leading(text: string): Interval | null {
-  const found = /^-?\d+(\.\d+)?(e-?\d+)?/.exec(text);
+  const found = /^[-+]?\d+(\.\d+)?(e-?\d+)?/.exec(text);
   return found === null ? null : widened(Number(found[0]), ROUNDING);
+}
+
+/** The number of a result: ratios and exponents are printed with three decimals. */
+export function printed(text: string): Interval {
+  const found = leading(text);
+  if (found === null) throw new Error(`${text} begins with no number`);
+  const slack = /^[-+]?\d+\.\d{3}$/.test(text) ? 5.1e-4 : 0;
+  return [found[0] - slack, found[1] + slack];
 }
 
 export function widened(value: number, by: number): Interval {
@@ -20,7 +35,7 @@ export function meet(a: Interval, b: Interval): boolean {
 }
 
 const TOKEN =
-  /\s*(?:(\d+(?:\.\d+)?(?:e-?\d+)?)|(sqrt|min|max)(?=\()|(x)(?=\s)|([A-Za-z%][\w/-]*)|([-+/^(),]))/y;
+  /\s*(?:(\d+(?:\.\d+)?(?:e-?\d+)?)|(sqrt|min|max|ln)(?=\()|(x)(?=\s)|([A-Za-z%][\w/-]*)|([-+/^(),]))/y;
 
 /** Works out "3 in x (11.25 in)^2 / 6" with the rounding of its numbers; units are passed over. */
 export function evaluate(text: string): Interval {
@@ -76,6 +91,11 @@ export function evaluate(text: string): Interval {
       const [low, high] = single();
       return [Math.sqrt(Math.max(0, low)), Math.sqrt(high)];
     }
+    if (token === 'ln') {
+      at += 1;
+      const [low, high] = single();
+      return [Math.log(low), Math.log(high)];
+    }
     if (token === 'min' || token === 'max') {
       at += 1;
       take('(');
@@ -95,7 +115,7 @@ export function evaluate(text: string): Interval {
     at += 1;
     const value = Number(token);
     if (Number.isNaN(value)) throw new Error(`${token} is no number, in ${text}`);
-    return widened(value, ROUNDING);
+    return widened(value, roundingOf(token));
   };
   const value = sum();
   if (at !== tokens.length) throw new Error(`${tokens.slice(at).join(' ')} left over of ${text}`);
