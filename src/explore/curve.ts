@@ -1,9 +1,10 @@
-import { beamFault } from '../statics/index.ts';
-import { prepareResized } from '../timber/index.ts';
+import { governingField, prepareResized } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
-import type { NumberKnob } from './knobs/knob.ts';
+import { placeFault } from './beam-edits/placed.ts';
+import type { Knob, NumberKnob } from './knobs/knob.ts';
 import { powersOf } from './powers.ts';
 import { ratiosLike } from './ratios.ts';
+import { fieldKey } from './span-to-depth.ts';
 
 /** Ratios of the three powers along a knob, at equal steps from `from` to `to` (base units). */
 export interface Curve {
@@ -20,11 +21,17 @@ export function curveOf(member: Member, knob: NumberKnob, from: number, to: numb
     const value = from + ((to - from) * at) / (samples - 1);
     const turned = knob.put(member, value);
     // At lengths that leave a load off the member there is nothing to draw.
-    const fits = beamFault(turned.beam, turned.loads) === null;
+    const fits = placeFault(turned) === null;
     const powers = fits ? powersOf(ratios(turned, (prepared) => prepareResized(prepared, turned))) : null;
     for (const [index, list] of along.entries()) list.push(powers?.[index]?.ratio ?? Number.NaN);
   }
   return { from, to, ratios: along };
+}
+
+/** The knob of the length that l/h goes by: what a chart is drawn against where the knob in hand is a choice. */
+export function spanKnob(member: Member, knobs: readonly Knob[]): Knob {
+  const key = fieldKey(member, governingField(member));
+  return knobs.find((knob) => knob.key === key) ?? knobs[0]!;
 }
 
 /** Steps between the marks of an axis, in its units, and ten times, a hundred times those. */

@@ -1,3 +1,4 @@
+import { loadsOf } from '../loads/index.ts';
 import { prepareLoaded, prepareScaled } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
@@ -25,28 +26,51 @@ export const IDEAL: Readonly<Record<1 | 2 | 3, Exponents>> = {
 };
 
 /** Relative step of the two-sided difference: its error is of the order of its square. */
-const STEP = 1e-5;
+export const STEP = 1e-5;
 /** One-sided slopes further apart than this stand on the two sides of a step of some factor. */
 const STEP_APART = 0.05;
 
-/** Local exponents of every check that applies. */
-export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>> {
+/** Ratios of all checks, in the order of CHECK_IDS, a step below a quantity, as it is, and a step above. */
+export interface Runs {
+  readonly below: Float64Array;
+  readonly here: Float64Array;
+  readonly above: Float64Array;
+}
+
+/** The runs of the checks that the local exponents come from. */
+export function exponentRuns(member: Member): Readonly<Record<keyof Exponents, Runs>> {
   const ratios = ratiosLike(member);
   const here = ratios(member);
+  const around = (at: (factor: number) => Float64Array): Runs => ({
+    below: at(1 - STEP),
+    here,
+    above: at(1 + STEP),
+  });
   const grown = (key: 'width' | 'depth') => (by: number) =>
     ratios({ ...member, section: { ...member.section, [key]: member.section[key] * by } });
   const upright = !member.section.flat;
-  const slopes = {
-    span: slopesOf(here, (by) => {
+  return {
+    span: around((by) => {
       const scaled = scaleLengths(member, by);
       return ratios(scaled, (prepared) => prepareScaled(prepared, scaled, by));
     }),
-    depth: slopesOf(here, grown(upright ? 'depth' : 'width')),
-    width: slopesOf(here, grown(upright ? 'width' : 'depth')),
-    load: slopesOf(here, (by) => {
+    depth: around(grown(upright ? 'depth' : 'width')),
+    width: around(grown(upright ? 'width' : 'depth')),
+    load: around((by) => {
       const scaled = scaleLoads(member, by);
       return ratios(scaled, (prepared) => prepareLoaded(prepared, scaled, by));
     }),
+  };
+}
+
+/** Local exponents of every check that applies. */
+export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>> {
+  const runs = exponentRuns(member);
+  const slopes = {
+    span: slopesOf(runs.span),
+    depth: slopesOf(runs.depth),
+    width: slopesOf(runs.width),
+    load: slopesOf(runs.load),
   };
   const exponents: Partial<Record<CheckId, Exponents>> = {};
   CHECK_IDS.forEach((id, at) => {
@@ -62,9 +86,7 @@ export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>>
 }
 
 /** Slopes on logarithmic axes; where a factor steps the slope of the side that does not step. */
-function slopesOf(here: Float64Array, at: (factor: number) => Float64Array): number[] {
-  const below = at(1 - STEP);
-  const above = at(1 + STEP);
+function slopesOf({ below, here, above }: Runs): number[] {
   return Array.from(here, (ratio, index) => {
     const left = Math.log(ratio / below[index]!) / -Math.log1p(-STEP);
     const right = Math.log(above[index]! / ratio) / Math.log1p(STEP);
@@ -94,7 +116,7 @@ export function whyNotWhole(
   if (factor('CV') < 1) causes.push('CV');
   if (member.stock.product === 'timber' && factor('CF') < 1) causes.push('size factor');
   if (power === 1 && member.shearAt === 'd') causes.push('shear at d');
-  if (member.loads.some((load) => load.type === 'point')) causes.push('point loads');
+  if (loadsOf(member).some((load) => load.type === 'point')) causes.push('point loads');
   if (power === 3 && member.limits.liveMax !== null) causes.push('limit as a length');
   return causes.length > 0 ? causes.join(', ') : 'loads not alike';
 }

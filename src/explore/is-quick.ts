@@ -1,3 +1,4 @@
+import { loadsOf } from '../loads/index.ts';
 import { beamFields } from '../statics/beam.ts';
 import { woodsOf } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
@@ -10,7 +11,7 @@ const FEW_WOODS = 2;
 export function isQuick(member: Member): boolean {
   return (
     beamFields(member.beam).length === 1 &&
-    member.loads.length <= FEW_LOADS &&
+    loadsOf(member).length <= FEW_LOADS &&
     woodsOf(member).length <= FEW_WOODS
   );
 }

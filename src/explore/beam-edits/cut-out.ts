@@ -1,18 +1,14 @@
-import type { AppliedLoad } from '../../loads/loading.ts';
+import type { Placed } from '../../loads/index.ts';
+import type { LineLoad } from '../../statics/beam.ts';
 import { same } from './resize-field.ts';
 
 /**
- * Loads of a member `whole` long with the stretch from `from` to `to` taken out and its ends put together, all in.
+ * Loads or links of a member `whole` long with the stretch from `from` to `to` taken out and its ends put together, all in.
  * Loads on the stretch go with it, lines that reach into it are cut where they do.
  */
-export function cutOut(
-  loads: readonly AppliedLoad[],
-  from: number,
-  to: number,
-  whole: number,
-): AppliedLoad[] {
+export function cutOut<T extends Placed>(loads: readonly T[], from: number, to: number, whole: number): T[] {
   const gap = to - from;
-  const left: AppliedLoad[] = [];
+  const left: T[] = [];
   for (const load of loads) {
     if (load.type === 'point') {
       const { at } = load;
@@ -23,29 +19,27 @@ export function cutOut(
         left.push(at >= to || same(at, to) ? { ...load, at: Math.max(from, at - gap) } : load);
       continue;
     }
-    const kept = cutLine(load, from, to);
+    const kept = cutLine(load as T & Run, from, to);
     if (kept !== null) left.push(kept);
   }
   return left;
 }
 
-function cutLine(
-  load: AppliedLoad & { readonly type: 'line' },
-  from: number,
-  to: number,
-): AppliedLoad | null {
+type Run = Extract<Placed, { readonly type: 'line' }>;
+
+function cutLine<T extends Run>(line: T, from: number, to: number): T | null {
   const gap = to - from;
-  const at = (x: number) =>
-    load.start === load.end
-      ? load.start
-      : load.start + ((load.end - load.start) * (x - load.from)) / (load.to - load.from);
-  const [left, start] =
-    load.from <= from
-      ? [load.from, load.start]
-      : load.from >= to
-        ? [load.from - gap, load.start]
-        : [from, at(to)];
-  const [right, end] =
-    load.to <= from ? [load.to, load.end] : load.to >= to ? [load.to - gap, load.end] : [from, at(from)];
-  return right > left && !same(left, right) ? { ...load, from: left, to: right, start, end } : null;
+  const inside = (x: number) => x > from && x < to;
+  const moved = (x: number) => (inside(x) ? from : x >= to ? x - gap : x);
+  const [left, right] = [moved(line.from), moved(line.to)];
+  if (right <= left || same(left, right)) return null;
+  const placed = { ...line, from: left, to: right };
+  if (!('start' in line && 'end' in line) || line.start === line.end) return placed;
+  const { start, end } = line as unknown as LineLoad;
+  const at = (x: number) => start + ((end - start) * (x - line.from)) / (line.to - line.from);
+  return {
+    ...placed,
+    start: inside(line.from) ? at(to) : start,
+    end: inside(line.to) ? at(from) : end,
+  };
 }

@@ -1,18 +1,12 @@
+import type { AppliedLoad, Placed } from '../../loads/index.ts';
 import type { LoadKind } from '../../loads/kinds.ts';
 import { KIND_WORD, LOAD_KINDS } from '../../loads/kinds.ts';
-import type { AppliedLoad } from '../../loads/loading.ts';
 import { fromUnit, type Units } from '../../quantity/index.ts';
-import {
-  beamFault,
-  beamFields,
-  beamLength,
-  MOST_LOADS,
-  MOST_SPANS,
-  supportPlaces,
-} from '../../statics/index.ts';
+import { beamFields, beamLength, MOST_LOADS, MOST_SPANS, supportPlaces } from '../../statics/index.ts';
 import { checkStock } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { cutOut } from './cut-out.ts';
+import { placedOn, placeFault, withPlaces } from './placed.ts';
 import { resized, same } from './resize-field.ts';
 
 /** What an edit of the beam gives: the changed member and the knob to take in hand, or why it stays as it was. */
@@ -22,8 +16,7 @@ export type Side = 'left' | 'right';
 
 /** Nothing leaves here that cannot be worked out, nor with a rule broken that held before (a notch at an overhang). */
 function settled(before: Member, member: Member, knob: string): Edit {
-  const fault =
-    beamFault(member.beam, member.loads) ?? (checkStock(before) === null ? checkStock(member) : null);
+  const fault = placeFault(member) ?? (checkStock(before) === null ? checkStock(member) : null);
   return fault === null ? { member, knob } : { fault };
 }
 
@@ -36,16 +29,15 @@ export function addSpan(member: Member): Edit {
   const whole = beamLength(beam);
   const length = beam.spans.at(-1)!;
   const beyond = (x: number) => x > support && !same(x, support);
-  const loads = member.loads.map((load): AppliedLoad => {
+  const move = <T extends Placed>(load: T): T => {
     if (load.type === 'point') return beyond(load.at) ? { ...load, at: load.at + length } : load;
     const follows = beyond(load.to) || (same(load.from, 0) && same(load.to, whole));
     const begins = beyond(load.from) || (same(load.from, support) && beyond(load.to));
     return { ...load, from: load.from + (begins ? length : 0), to: load.to + (follows ? length : 0) };
-  });
+  };
   const changed: Member = {
-    ...member,
+    ...withPlaces(member, move),
     beam: { ...beam, spans: [...beam.spans, length] },
-    loads,
     bearing: [...member.bearing, member.bearing.at(-1)!],
     tiedDown: member.tiedDown && [...member.tiedDown, 0],
   };
@@ -115,7 +107,7 @@ export type NewLoad = 'point' | 'whole line' | 'partial line' | 'tapered line';
  * overhang or a cantilever at its free end; a partial line covers that field, half of it where there is no other.
  */
 export function addLoad(member: Member, what: NewLoad, kind: LoadKind, inHand: string, units: Units): Edit {
-  if (member.loads.length >= MOST_LOADS)
+  if (placedOn(member).length >= MOST_LOADS)
     return { fault: `a member carries at most ${MOST_LOADS} loads: take one out first` };
   const { beam } = member;
   const fields = beamFields(beam);
@@ -154,7 +146,7 @@ export function addWind(member: Member, kind: 'wind' | 'windUp', units: Units): 
   return settled(member, changed, `area.${kind}`);
 }
 
-/** Index of the field that a knob is about: its own span or overhang, that of its load, else the first span. */
+/** Index of the field that a knob is about: its own span or overhang, that of its load or link, else the first span. */
 export function fieldInHand(member: Member, knob: string): number {
   const { beam } = member;
   const fields = beamFields(beam);
@@ -162,19 +154,23 @@ export function fieldInHand(member: Member, knob: string): number {
   const [group, part] = knob.split('.');
   if (group === 'spans') return Math.min(fields.length - 1, leading + Number(part));
   if (group === 'overhangs') return part === 'left' ? 0 : fields.length - 1;
-  const load = group === 'loads' ? member.loads[Number(part)] : undefined;
+  const list: readonly Placed[] | undefined =
+    group === 'loads' ? member.loads : group === 'links' ? member.links : undefined;
+  const load = list?.[Number(part)];
   if (load === undefined) return leading;
   const at = load.type === 'point' ? load.at : (load.from + load.to) / 2;
   const found = fields.findIndex((field) => at <= field.start + field.length);
   return found < 0 ? fields.length - 1 : found;
 }
 
-/** Takes out what a knob stands for: a load, a span, an overhang, a tie-down, the hold of a fixed end, an area load. */
+/** Takes out what a knob stands for: a load, a link, a span, an overhang, a tie-down, the hold of a fixed end, an area load. */
 export function removeAt(member: Member, knob: string, label: string): Edit {
   const [group, part] = knob.split('.') as [string, string];
   switch (group) {
     case 'loads':
       return removeLoad(member, Number(part));
+    case 'links':
+      return removeLink(member, Number(part));
     case 'spans':
       return removeSpan(member, Number(part));
     case 'overhangs':
@@ -198,6 +194,12 @@ function removeLoad(member: Member, index: number): Edit {
   return settled(member, { ...member, loads }, next < 0 ? 'spans.0' : `loads.${next}.kind`);
 }
 
+function removeLink(member: Member, index: number): Edit {
+  const links = (member.links ?? []).filter((_, at) => at !== index);
+  const next = Math.min(index, links.length - 1);
+  return settled(member, { ...member, links }, next < 0 ? 'spans.0' : `links.${next}`);
+}
+
 /** Closes the member up: what stood in the span goes, what stood beyond it moves in. */
 function removeSpan(member: Member, index: number): Edit {
   const { beam } = member;
@@ -210,11 +212,20 @@ function removeSpan(member: Member, index: number): Edit {
   const changed: Member = {
     ...member,
     beam: { ...beam, spans },
-    loads: cutOut(member.loads, places[index]!, places[index + 1]!, beamLength(beam)),
+    ...withoutStretch(member, places[index]!, places[index + 1]!),
     bearing: without(member.bearing),
     tiedDown: member.tiedDown && without(member.tiedDown),
   };
   return settled(member, changed, `spans.${Math.min(index, spans.length - 1)}`);
+}
+
+function withoutStretch(
+  { beam, links, loads }: Member,
+  from: number,
+  to: number,
+): Pick<Member, 'loads' | 'links'> {
+  const cut = <T extends Placed>(list: readonly T[]) => cutOut(list, from, to, beamLength(beam));
+  return links === undefined ? { loads: cut(loads) } : { loads: cut(loads), links: cut(links) };
 }
 
 function removeOverhang(member: Member, side: Side): Edit {
@@ -225,13 +236,13 @@ function removeOverhang(member: Member, side: Side): Edit {
   const changed: Member = {
     ...member,
     beam: { ...beam, overhangs: { ...beam.overhangs, [side]: 0 } },
-    loads: cutOut(member.loads, from, to, whole),
+    ...withoutStretch(member, from, to),
   };
   return settled(member, changed, side === 'left' ? 'spans.0' : `spans.${beam.spans.length - 1}`);
 }
 
 function removeTieDown(member: Member, index: number): Edit {
-  if (!(member.tiedDown?.[index] ?? 0)) return { fault: `no tie-down is stated at support ${index + 1}` };
+  if (!(member.tiedDown?.[index] ?? 0)) return { fault: `support ${index + 1} is untied: there is no tie-down to take off` };
   const tiedDown = member.tiedDown!.map((force, at) => (at === index ? 0 : force));
   const changed = { ...member, tiedDown: tiedDown.some((force) => force > 0) ? tiedDown : null };
   return settled(member, changed, `tiedDown.${index}`);

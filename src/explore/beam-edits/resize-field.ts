@@ -1,6 +1,7 @@
-import type { AppliedLoad } from '../../loads/loading.ts';
+import type { Placed } from '../../loads/index.ts';
 import { type Beam, beamLength, supportPlaces } from '../../statics/index.ts';
 import type { Member } from '../../timber/member.ts';
+import { placedOn, withPlaces } from './placed.ts';
 
 /** A stretch of the beam by its key: a span by its index, an overhang by its side. */
 export type FieldKey = number | 'left' | 'right';
@@ -35,10 +36,9 @@ export function resized(member: Member, key: FieldKey, length: number): Member {
   const { beam } = member;
   const { start, length: now } = fieldOf(beam, key);
   const by = length - now;
-  const loads = member.loads.map(
-    key === 'left' ? movedFromLeft(beam, by, now === 0) : movedFromRight(beam, start + now, by, now === 0),
-  );
-  return { ...member, beam: withLength(beam, key, length), loads };
+  const move =
+    key === 'left' ? movedFromLeft(beam, by, now === 0) : movedFromRight(beam, start + now, by, now === 0);
+  return { ...withPlaces(member, move), beam: withLength(beam, key, length) };
 }
 
 function withLength(beam: Beam, key: FieldKey, length: number): Beam {
@@ -48,7 +48,7 @@ function withLength(beam: Beam, key: FieldKey, length: number): Beam {
   return { ...beam, overhangs: { ...beam.overhangs, [key]: length } };
 }
 
-type Move = (load: AppliedLoad) => AppliedLoad;
+type Move = <T extends Placed>(load: T) => T;
 
 /** The left end moves out by `by`: all places, which are counted from it, grow. */
 function movedFromLeft(beam: Beam, by: number, isNew: boolean): Move {
@@ -77,11 +77,6 @@ function movedFromRight(beam: Beam, end: number, by: number, isNew: boolean): Mo
   };
 }
 
-/** "point load 2": loads by their kind of place and their number in the list. */
-export function loadName(load: AppliedLoad, index: number): string {
-  return `${load.type} load ${index + 1}`;
-}
-
 /**
  * Why a field cannot have this length, in: a load that stands in it would be left beyond its end. Null when it can.
  * `show` writes a length for people.
@@ -96,13 +91,12 @@ export function resizeFault(
   const { start, length: now } = fieldOf(beam, key);
   if (length >= now) return null;
   const end = start + now;
-  const after = resized(member, key, length).loads;
+  const after = placedOn(resized(member, key, length));
   // A load that comes to stand on an inner support would go with it from then on.
   const inner = key !== 'left' && !same(end, beamLength(beam));
   const most = start + length + (inner ? -HAIR : HAIR);
-  for (const [index, load] of member.loads.entries()) {
-    const changed = after[index]!;
-    const name = loadName(load, index);
+  for (const [index, { placed: load, name }] of placedOn(member).entries()) {
+    const changed = after[index]!.placed;
     const places =
       load.type === 'point'
         ? [[load.at, changed.type === 'point' ? changed.at : 0] as const]

@@ -2,17 +2,27 @@ import { slopedLength } from '../../loads/index.ts';
 import { beamLength } from '../../statics/beam.ts';
 import { boardFeet, isSawn, type Size } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
-import { offerOf, type Piece, type Price, type Shop } from './yard.ts';
+import { offerOf } from './offer.ts';
+import type { Piece, Price, PriceRow, Shop, YardRow } from './yard.ts';
 
 const FOOT = 12;
 
 /** Length of one piece of a member, in: from end to end, half a bearing beyond the end supports, along the slope. */
 export function pieceLength(member: Pick<Member, 'beam' | 'bearing' | 'slope'>): number {
-  const { beam, bearing, slope } = member;
+  const { left, right } = beyondEnds(member);
+  return slopedLength(member.slope, left + beamLength(member.beam) + right);
+}
+
+/** What a piece of a member has beyond its ends, in: half a bearing at an end support, else nothing. */
+export function beyondEnds({ beam, bearing }: Pick<Member, 'beam' | 'bearing'>): {
+  readonly left: number;
+  readonly right: number;
+} {
   const held = beam.supports === 'cantilever';
-  const left = beam.overhangs.left === 0 ? bearing[0]! / 2 : 0;
-  const right = held || beam.overhangs.right > 0 ? 0 : bearing[bearing.length - 1]! / 2;
-  return slopedLength(slope, left + beamLength(beam) + right);
+  return {
+    left: beam.overhangs.left === 0 ? bearing[0]! / 2 : 0,
+    right: held || beam.overhangs.right > 0 ? 0 : bearing[bearing.length - 1]! / 2,
+  };
 }
 
 /** Lengths that sawn lumber comes in where no yard list says, ft; common practice, no source. */
@@ -31,6 +41,12 @@ export interface Purchase {
   readonly waste: number;
   /** A piece; null where there is no price for it. */
   readonly price: number | null;
+  /** What that goes by; null where there is no price. */
+  readonly rate: Price | null;
+  /** Line of the yard list that it is bought from; null where it is from none. */
+  readonly line: YardRow | null;
+  /** Line of the prices that it goes by; null where it goes by none of them. */
+  readonly priced: PriceRow | null;
 }
 
 /** Floating-point slack on a sum of lengths, in. */
@@ -43,27 +59,41 @@ const ROUNDING = 1e-9;
 export function buyPiece(shop: Shop | null, piece: Piece, needed: number): Purchase {
   const offer = shop === null ? null : offerOf(shop, piece);
   const rows = offer?.rows ?? null;
-  const stocked: { lengths: readonly number[]; price: Price | null }[] = rows?.map(({ lengths, price }) => ({
-    lengths,
-    price: price ?? offer!.price,
-  })) ?? [{ lengths: isSawn(piece.stock.product) ? USUAL_LENGTHS : [], price: offer?.price ?? null }];
-  let length: number | null = null;
-  let price: number | null = null;
+  const priced = offer?.priced ?? null;
+  const usual = isSawn(piece.stock.product) ? USUAL_LENGTHS : [];
+  let bought: Purchase = { ...NOTHING, inYard: rows === null ? null : rows.length > 0 };
   let longest: number | null = null;
-  for (const row of stocked) {
-    const fits = row.lengths.length === 0 ? needed : row.lengths.find((each) => each >= needed - ROUNDING);
-    const last = row.lengths[row.lengths.length - 1];
+  for (const line of rows ?? [null]) {
+    const lengths = line?.lengths ?? usual;
+    const fits = lengths.length === 0 ? needed : lengths.find((each) => each >= needed - ROUNDING);
+    const last = lengths[lengths.length - 1];
     if (last !== undefined && last > (longest ?? 0)) longest = last;
     if (fits === undefined) continue;
-    const cost = costOf(row.price, piece, fits);
-    const shorter = length === null || fits < length;
-    if (shorter || (fits === length && cost !== null && (price === null || cost < price))) {
-      length = fits;
-      price = cost;
-    }
+    const rate = line?.price ?? priced?.price ?? null;
+    const price = costOf(rate, piece, fits);
+    const shorter = bought.length === null || fits < bought.length;
+    const cheaper = price !== null && (bought.price === null || price < bought.price);
+    if (!shorter && !(fits === bought.length && cheaper)) continue;
+    const own = price !== null && line?.price == null ? priced : null;
+    const waste = fits - needed;
+    bought = { ...bought, length: fits, waste, price, rate: price === null ? null : rate, line, priced: own };
   }
-  const inYard = rows === null ? null : rows.length > 0;
-  return { inYard, length, longest, waste: length === null ? 0 : length - needed, price };
+  return { ...bought, longest };
+}
+
+const NOTHING: Omit<Purchase, 'inYard'> = {
+  length: null,
+  longest: null,
+  waste: 0,
+  price: null,
+  rate: null,
+  line: null,
+  priced: null,
+};
+
+/** Every length that something in a shop is stocked in, in: where a longer piece takes another, its price steps. */
+export function stockedLengths({ yard }: Shop): number[] {
+  return [...new Set(yard === null ? USUAL_LENGTHS : yard.flatMap(({ lengths }) => lengths))];
 }
 
 function costOf(price: Price | null, { stock, width, depth }: Piece, length: number): number | null {

@@ -1,7 +1,7 @@
 import { boardFeet, sectionWeight, sizeLabel } from '../../timber/index.ts';
 import type { Member, Stock } from '../../timber/member.ts';
 import { buyPiece, pieceLength } from './buying.ts';
-import type { Shop } from './yard.ts';
+import type { Price, Shop } from './yard.ts';
 
 const FOOT = 12;
 
@@ -25,12 +25,17 @@ export interface OrderLine {
   readonly boardFeet: number | null;
   /** A piece; null where it has no price. */
   readonly price: number | null;
+  /** What that goes by, and where it stands; null where it has no price. */
+  readonly rate: Price | null;
+  readonly priceFrom: PriceSource | null;
   /** Why it has none; null where it has one. */
   readonly unpriced: Unpriced | null;
   /** Longest length that is stocked, in, where none is long enough. */
   readonly longest: number | null;
 }
 
+/** The yard list, or the prices of woods that were typed beside it. */
+export type PriceSource = 'yard' | 'prices';
 export type Unpriced = 'no price' | 'not in the yard' | 'none long enough';
 
 export interface Order {
@@ -48,7 +53,7 @@ export interface Order {
 
 /** What to buy for members, each piece in one length from end to end. */
 export function orderOf(members: readonly Member[], shop: Shop | null): Order {
-  const lines = members.map((member) => lineOf(member, shop));
+  const lines = members.map((member) => orderLine(member, shop));
   const sum = (of: (line: OrderLine) => number) => lines.reduce((total, line) => total + of(line), 0);
   const ordered = sum((line) => line.pieces * (line.length ?? line.needed));
   const priced = lines.filter((line) => line.price !== null);
@@ -63,33 +68,38 @@ export function orderOf(members: readonly Member[], shop: Shop | null): Order {
   };
 }
 
-function lineOf(member: Member, shop: Shop | null): OrderLine {
+/** What to buy for one member and those like it: the same figures wherever they are told. */
+export function orderLine(member: Member, shop: Shop | null): OrderLine {
   const { stock, section } = member;
   const piece = { ...section, plies: 1, flat: false };
   const needed = pieceLength(member);
-  const { inYard, length, longest, waste, price } = buyPiece(shop, { ...section, stock }, needed);
+  const { inYard, length, longest, waste, price, rate, priced } = buyPiece(
+    shop,
+    { ...section, stock },
+    needed,
+  );
   const pieces = section.plies * member.count;
   const ordered = length ?? needed;
   const feet = boardFeet(piece, stock.product);
-  const has = price !== null && inYard !== false;
   return {
     member: member.name,
     size: sizeLabel(piece, stock.product),
     stock,
     pieces,
     needed,
-    length: inYard === false ? null : length,
+    length,
     waste,
     weight: sectionWeight(member, piece) * ordered,
     boardFeet: feet === null ? null : (feet * pieces * ordered) / FOOT,
-    price: has ? price : null,
-    unpriced: has
-      ? null
-      : inYard === false
-        ? 'not in the yard'
-        : length === null
-          ? 'none long enough'
-          : 'no price',
+    price,
+    rate,
+    priceFrom: price === null ? null : priced === null ? 'yard' : 'prices',
+    unpriced: price === null ? unpricedBy(inYard, length) : null,
     longest: length === null ? longest : null,
   };
+}
+
+function unpricedBy(inYard: boolean | null, length: number | null): Unpriced {
+  if (inYard === false) return 'not in the yard';
+  return length === null ? 'none long enough' : 'no price';
 }

@@ -1,7 +1,7 @@
-import { type Prepared, prepareLike, rate, type Size, sameStock } from '../../timber/index.ts';
+import { type Prepared, prepareLike, rate, type Size, sameStock, untiedUplift } from '../../timber/index.ts';
 import type { Member, Section } from '../../timber/member.ts';
 import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../../timber/report.ts';
-import { buyPiece, pieceLength } from '../buying/buying.ts';
+import { buyPiece, pieceLength, stockedLengths } from '../buying/buying.ts';
 import { judge } from '../judge.ts';
 import { overLimit } from '../limits.ts';
 import type { Ranking } from '../rack/best.ts';
@@ -17,12 +17,18 @@ export interface Reading {
   place(index: number): number;
   /** Largest ratio of a size; Infinity where it does not count. */
   worst(index: number): number;
+  /** Upward reaction of a size at a support that nothing holds down, lb: negative where it presses, -Infinity where nothing lifts. */
+  lifting(index: number): number;
+  /** Of one member of a size; null where it has no price or price does not count. */
+  price(index: number): number | null;
 }
 
 /** The rack of one member, to be read at any value of a knob. */
 export interface Along {
   readonly sizes: readonly Size[];
   read(value: number): Reading;
+  /** Values between two at which the next stocked length has to be bought, each with one just beyond it. */
+  steps(from: number, to: number): number[];
 }
 
 /** How a member takes a value of the knob. */
@@ -52,7 +58,7 @@ export function alongOf(
   const read = (value: number): Reading => {
     const changed = put(member, value);
     const prepared = new Map<Prepared, Prepared>();
-    const { order, places, has } = shelf(pieceLength(changed));
+    const { order, places, prices, has } = shelf(pieceLength(changed));
     const known = new Map<number, number>();
     const worst = (index: number): number => {
       const seen = known.get(index);
@@ -61,24 +67,49 @@ export function alongOf(
       known.set(index, found);
       return found;
     };
-    const rated = (index: number): number => {
-      const section = sections[index]!;
+    const loadsOn = (index: number): Prepared => {
       const lot = lots[lotOf[index]!]!;
-      if (overLimit(changed, section) !== null) return Number.POSITIVE_INFINITY;
       let here = prepared.get(lot.prepared);
       if (here === undefined) {
         here = prepareLike(lot.prepared, put(lot.member, value));
         prepared.set(lot.prepared, here);
       }
+      return here;
+    };
+    const rated = (index: number): number => {
+      const section = sections[index]!;
+      const lot = lots[lotOf[index]!]!;
+      if (overLimit(changed, section) !== null) return Number.POSITIVE_INFINITY;
+      const here = loadsOn(index);
       rate(here, lot.wood, section, ratios);
       const judgement = judge(ratios, only);
       return here.loaded ? judgement.worst : Number.POSITIVE_INFINITY;
     };
     const lit = order.findIndex((index) => worst(index) <= PASS_LIMIT);
-    return { value, lit: lit < 0 ? -1 : order[lit]!, place: (index) => places[index]!, worst };
+    return {
+      value,
+      lit: lit < 0 ? -1 : order[lit]!,
+      place: (index) => places[index]!,
+      worst,
+      lifting: (index) => untiedUplift(loadsOn(index), rack.sizes[index]!.weight),
+      price: (index) => prices?.[index] ?? null,
+    };
   };
-  return { sizes, read };
+  const steps = (from: number, to: number): number[] => {
+    if (ranking.shop === null) return [];
+    const needed = (value: number) => pieceLength(put(member, value));
+    const [least, most] = [needed(from), needed(to)];
+    // The length of a piece goes evenly with any length of the beam, and with nothing else.
+    return stockedLengths(ranking.shop)
+      .filter((length) => (length - least) * (length - most) < 0)
+      .map((length) => from + ((to - from) * (length - least)) / (most - least))
+      .flatMap((value) => [value, value + JUST_BEYOND * Math.abs(value)]);
+  };
+  return { sizes, read, steps };
 }
+
+/** As a share of a value: nearer than handovers are told apart. */
+const JUST_BEYOND = 5e-10;
 
 /** The order in which sizes are looked at for pieces of one length, and whether each can be had. */
 interface Shelf {
@@ -86,13 +117,15 @@ interface Shelf {
   readonly order: readonly number[];
   /** By size, its place in the order. */
   readonly places: readonly number[];
+  /** By size, where the order goes by price. */
+  readonly prices: readonly (number | null)[] | null;
   has(index: number): boolean;
 }
 
 /** Sizes come in the ranking's order at the member as it is; only prices and what can be had go with the length. */
 function shelfOf(sizes: readonly Size[], { best, shop }: Ranking): (needed: number) => Shelf {
   const asIs = sizes.map((_, index) => index);
-  if (shop === null) return () => ({ order: asIs, places: asIs, has: () => true });
+  if (shop === null) return () => ({ order: asIs, places: asIs, prices: null, has: () => true });
   let last: { readonly needed: number; readonly shelf: Shelf } | null = null;
   return (needed) => {
     if (last !== null && last.needed === needed) return last.shelf;
@@ -100,18 +133,20 @@ function shelfOf(sizes: readonly Size[], { best, shop }: Ranking): (needed: numb
     const has = (index: number) =>
       bought[index]!.inYard === null || (bought[index]!.inYard && bought[index]!.length !== null);
     let order = asIs;
+    let prices: (number | null)[] | null = null;
     if (best === 'price') {
-      const price = (index: number) => {
+      const all = sizes.map(({ plies }, index) => {
         const each = bought[index]!.price;
-        return each === null ? null : each * sizes[index]!.plies;
-      };
-      order = asIs.toSorted((a, b) => compare(price(a), price(b)) || a - b);
+        return each === null ? null : each * plies;
+      });
+      order = asIs.toSorted((a, b) => compare(all[a]!, all[b]!) || a - b);
+      prices = all;
     }
     const places = new Array<number>(sizes.length);
     order.forEach((index, place) => {
       places[index] = place;
     });
-    last = { needed, shelf: { order, places, has } };
+    last = { needed, shelf: { order, places, prices, has } };
     return last.shelf;
   };
 }

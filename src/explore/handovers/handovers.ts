@@ -37,11 +37,12 @@ export function handoversOf(
   const along = alongOf(member, put, ranking, only);
   const turns: { readonly value: number; readonly lit: number }[] = [];
   const readings = spread(along, from, to);
+  const seen = [...readings];
   for (let at = 1; at < readings.length; at += 1) {
     let here = readings[at - 1]!;
     const end = readings[at]!;
     while (here.lit !== end.lit) {
-      const { after } = turningPoint(along, here, end);
+      const { after } = turningPoint(along, here, end, seen);
       turns.push({ value: after.value, lit: after.lit });
       here = after;
     }
@@ -80,8 +81,9 @@ function segmentsOf(
 }
 
 /**
- * Readings from end to end, with one more wherever a size might pass, or fail, between two that agree: where its ratio
- * turns round near the limit, as it does where a load helps until it harms.
+ * Readings from end to end, with more where a price steps or crosses that of a lit size, and wherever a size might
+ * pass, or fail, between two that agree: where its ratio turns round near the limit, as it does where a load helps
+ * until it harms.
  */
 function spread(along: Along, from: number, to: number): Reading[] {
   const readings = Array.from({ length: READINGS }, (_, at) =>
@@ -97,8 +99,42 @@ function spread(along: Along, from: number, to: number): Reading[] {
       if (place !== null) more.add(place);
     }
   }
-  const added = [...more].filter((value) => value > from && value < to).map((value) => along.read(value));
-  return [...readings, ...added].sort((a, b) => a.value - b.value);
+  const within = (values: Iterable<number>): Reading[] =>
+    [...values].filter((value) => value > from && value < to).map((value) => along.read(value));
+  const inOrder = (all: Reading[]): Reading[] => all.sort((a, b) => a.value - b.value);
+  const stepped = inOrder([...readings, ...within(more), ...within(along.steps(from, to))]);
+  const crossed = stepped
+    .slice(1)
+    .flatMap((right, at) => pricesCross(along.sizes.length, stepped[at]!, right));
+  return crossed.length === 0 ? stepped : inOrder([...stepped, ...within(crossed)]);
+}
+
+/**
+ * Where between two readings the price of a size comes to be less than that of a lit one, or ceases to be: prices go
+ * evenly with the length from one step to the next.
+ */
+function pricesCross(sizes: number, left: Reading, right: Reading): number[] {
+  const places: number[] = [];
+  for (const lit of new Set([left.lit, right.lit])) {
+    if (lit < 0) continue;
+    for (let index = 0; index < sizes; index += 1) {
+      const [before, after] = [dearerBy(left, index, lit), dearerBy(right, index, lit)];
+      if (before === null || after === null || before * after >= 0) continue;
+      const share = before / (before - after);
+      // On both sides of it, so that the size that is the cheaper for a short stretch is met.
+      for (const aside of [-JUST_ASIDE, JUST_ASIDE])
+        places.push(left.value + (share + aside) * (right.value - left.value));
+    }
+  }
+  return places;
+}
+
+/** As a share of the way from one reading to the next. */
+const JUST_ASIDE = 1e-7;
+
+function dearerBy(reading: Reading, index: number, than: number): number | null {
+  const [one, other] = [reading.price(index), reading.price(than)];
+  return one === null || other === null ? null : one - other;
 }
 
 /** A ratio that turns round nearer than this to the limit may cross it between two readings. */
@@ -149,17 +185,22 @@ export function aroundOf(
 ): Around {
   const along = alongOf(member, knob.put, ranking, only);
   const here = along.read(now);
+  const seen = [here];
   const next = (end: number, by: 1 | -1): Neighbour | null => {
     let last = here;
     let step = FIRST * Math.max(Math.abs(now), (knob.most - knob.least) * CLOSE);
     while (by > 0 ? last.value < end : last.value > end) {
       const value = by > 0 ? Math.min(end, last.value + step) : Math.max(end, last.value - step);
-      const reading = along.read(value);
-      if (reading.lit !== here.lit) {
-        const { after } = turningPoint(along, last, reading);
-        return { at: after.value, size: along.sizes[after.lit] ?? null };
+      const steps = along.steps(last.value, value).sort((a, b) => by * (a - b));
+      for (const place of [...steps, value]) {
+        const reading = along.read(place);
+        if (reading.lit !== here.lit) {
+          const { after } = turningPoint(along, last, reading, seen);
+          return { at: after.value, size: along.sizes[after.lit] ?? null };
+        }
+        last = reading;
+        seen.push(reading);
       }
-      last = reading;
       step *= LONGER;
     }
     return null;

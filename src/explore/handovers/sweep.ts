@@ -1,7 +1,8 @@
-import type { AppliedLoad } from '../../loads/loading.ts';
+import type { Placed } from '../../loads/index.ts';
 import { type QuantityKind, showInches, type Units } from '../../quantity/index.ts';
-import { beamFault, beamLength } from '../../statics/index.ts';
+import { beamLength } from '../../statics/index.ts';
 import type { Member } from '../../timber/member.ts';
+import { placeFault } from '../beam-edits/placed.ts';
 import { type Knob, measureKnob, SCALES } from '../knobs/knob.ts';
 import { knobsOf } from '../knobs/knobs.ts';
 import type { Put } from './along.ts';
@@ -17,7 +18,7 @@ export interface Sweep {
   show(value: number, units: Units): string;
 }
 
-/** Where a load's ends were not stated, they are those of the member. */
+/** Where the ends of a load or a link were not stated, they are those of the member. */
 export interface LoadEnds {
   readonly to: boolean;
 }
@@ -25,7 +26,7 @@ export interface LoadEnds {
 /**
  * What can be swept of a member: every knob that is a number but the section's own sizes, and the limits of depth and
  * width. A value taken is what the same key set in the session file would give: places of loads stay where they are
- * stated, and `stated` says of which loads the end is (all where absent).
+ * stated, and `stated` says of which loads, then links, the end is (all where absent).
  */
 export function sweepsOf(member: Member, stated: readonly LoadEnds[] = []): Sweep[] {
   const asTributary = { ...member, spacing: null };
@@ -56,7 +57,7 @@ function sweepOf(knob: Knob, member: Member, put: Put): Sweep {
       if ('fault' in turn) return turn;
       const value = get(turn.member);
       const changed = put(member, value);
-      const fault = beamFault(changed.beam, changed.loads);
+      const fault = placeFault(changed);
       return fault === null ? { value } : { fault };
     },
     show: (value, units) => knob.show(knob.number!.put(member, value), units),
@@ -82,11 +83,11 @@ function plainPut(knob: Knob, as: Member, stated: readonly LoadEnds[]): Put {
         ? { ...beam, spans: beam.spans.map((span, at) => (at === Number(index) ? value : span)) }
         : { ...beam, overhangs: { ...beam.overhangs, [side]: value } };
     const whole = beamLength(changed);
-    const loads = member.loads.map(
-      (load, at): AppliedLoad =>
-        load.type === 'line' && stated[at]?.to === false ? { ...load, to: whole } : load,
-    );
-    return { ...member, beam: changed, loads };
+    const follow = <T extends Placed>(placed: T, at: number): T =>
+      placed.type === 'line' && stated[at]?.to === false ? { ...placed, to: whole } : placed;
+    const loads = member.loads.map(follow);
+    const links = member.links?.map((link, at) => follow(link, loads.length + at));
+    return { ...member, beam: changed, loads, ...(links === undefined ? {} : { links }) };
   };
 }
 

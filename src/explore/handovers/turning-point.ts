@@ -10,61 +10,156 @@ export interface Turn {
 /** Places are found to this share of the larger end. */
 export const CLOSE = 1e-9;
 const ROUNDS = 200;
+/** Readings that a guess is led by at most: beside the two ends the nearest others. */
+const LEADERS = 5;
+/** A reading aims so many times the guess's own error beyond it. */
+const BEYOND = 2;
+/** And so many times more where the one before fell short. */
+const WIDER = 16;
+/** More than this share of what was between the ends is left: the reading fell short. */
+const MUCH = 0.8;
 
 /**
  * The first place between two readings where another size is lit, closed in on from both sides. One size decides it:
- * the lit one that stops passing, or a better one that begins to; its ratio leads to the place by Chandrupatla's
- * method (inverse quadratic where three readings allow it, else halving).
+ * the lit one that stops passing, or a better one that begins to. Its ratio (or the uplift that fails it) at the
+ * readings around, those `seen` before among them, leads to the place by inverse interpolation; every reading aims just
+ * beyond it as seen from the nearer end, so that both ends close in, and halves where nothing leads. What is read is
+ * added to `seen`.
  */
-export function turningPoint(along: Along, from: Reading, to: Reading): Turn {
-  let [before, after] = [from, to];
-  /** The reading that was given up last. */
-  let third: Reading | null = null;
+export function turningPoint(along: Along, from: Reading, to: Reading, seen: Reading[] = []): Turn {
+  let { before, after } = within(from, to, seen);
+  let wider = 1;
   for (let round = 0; round < ROUNDS; round += 1) {
     const apart = Math.abs(after.value - before.value);
     const close = CLOSE * Math.max(Math.abs(before.value), Math.abs(after.value));
     if (apart <= close) break;
-    const share = shareOf(before, after, third);
-    const least = Math.min(0.5, (0.4 * close) / apart);
-    const kept = Math.min(1 - least, Math.max(least, share));
-    const value = before.value + kept * (after.value - before.value);
+    const value = aimed(before, after, seen, close, wider) ?? (before.value + after.value) / 2;
     if (value === before.value || value === after.value) break;
     const here = along.read(value);
-    if (here.lit === from.lit) {
-      third = before;
-      before = here;
-    } else {
-      third = after;
-      after = here;
-    }
+    seen.push(here);
+    if (here.lit === from.lit) before = here;
+    else after = here;
+    const left = Math.abs(after.value - before.value);
+    wider = left > MUCH * apart ? wider * WIDER : 1;
   }
   return { before, after };
 }
 
-/** How far on the way from `before` to `after` the deciding ratio should be at its limit. */
-function shareOf(before: Reading, after: Reading, third: Reading | null): number {
-  const index = decider(before, after);
-  const excess = (reading: Reading) => Math.log(reading.worst(index) / PASS_LIMIT);
-  const [fa, fb] = [excess(before), excess(after)];
-  if (!Number.isFinite(fa) || !Number.isFinite(fb) || fa <= 0 === fb <= 0) return HALF;
-  if (third === null) return fa / (fa - fb);
-  const fc = excess(third);
-  if (!Number.isFinite(fc)) return HALF;
-  // Where the third reading lies beyond `before` the roles of the two ends change.
-  const beyondAfter = (third.value - after.value) * (after.value - before.value) > 0;
-  return beyondAfter
-    ? 1 - inverse(after.value, before.value, third.value, fb, fa, fc)
-    : inverse(before.value, after.value, third.value, fa, fb, fc);
+/** The two ends with what has been read between them taken into account. */
+function within(from: Reading, to: Reading, seen: readonly Reading[]): Turn {
+  const way = Math.sign(to.value - from.value);
+  const on = (reading: Reading) => way * (reading.value - from.value);
+  const between = seen
+    .filter((reading) => on(reading) > 0 && on(reading) < on(to))
+    .sort((a, b) => on(a) - on(b));
+  const at = between.findIndex(({ lit }) => lit !== from.lit);
+  return at < 0
+    ? { before: between.at(-1) ?? from, after: to }
+    : { before: between[at - 1] ?? from, after: between[at]! };
 }
 
-const HALF = 0.5;
+/** Where to read next; null where the ratios lead nowhere. */
+function aimed(
+  before: Reading,
+  after: Reading,
+  seen: readonly Reading[],
+  close: number,
+  wider: number,
+): number | null {
+  const index = decider(before, after);
+  const points = leaders(before, after, seen, index);
+  if (points === null) return null;
+  const low = Math.min(before.value, after.value);
+  const high = Math.max(before.value, after.value);
+  const found = crossing(points, low, high);
+  if (found === null) return null;
+  const { at, error } = found;
+  const [far, distance] = at - low > high - at ? [-1, at - low] : [1, high - at];
+  return at + far * Math.min(wider * Math.max(BEYOND * error, NEARER * close), distance / 2);
+}
 
-/** Inverse quadratic step from `a` towards `b`, as a share; half where the three readings do not allow it. */
-function inverse(a: number, b: number, c: number, fa: number, fb: number, fc: number): number {
-  const xi = (a - b) / (c - b);
-  const phi = (fa - fb) / (fc - fb);
-  if (!(phi * phi < xi && (1 - phi) * (1 - phi) < 1 - xi)) return HALF;
-  return (fa / (fb - fa)) * (fc / (fb - fc)) + ((c - a) / (b - a)) * (fa / (fc - fa)) * (fb / (fc - fb));
+/** Two readings this far on either side of a place are close to one another. */
+const NEARER = 0.4;
+
+/** A value of the knob and how far the deciding size is beyond its limit there: the logarithm of its ratio, or lb of uplift. */
+type Point = readonly [value: number, excess: number];
+
+/** The ends and the readings nearest to them, as long as the measure goes one way through them; null where they lead nowhere. */
+function leaders(
+  before: Reading,
+  after: Reading,
+  seen: readonly Reading[],
+  index: number,
+): readonly Point[] | null {
+  // Uplift that nothing holds down makes a ratio jump: the force itself leads to where it begins.
+  const jumps = [before, after].some((reading) => reading.worst(index) === Number.POSITIVE_INFINITY);
+  const pointOf = (reading: Reading): Point => [
+    reading.value,
+    jumps ? reading.lifting(index) : Math.log(reading.worst(index) / PASS_LIMIT),
+  ];
+  const ends = [pointOf(before), pointOf(after)];
+  // The limit has to lie between the two: else it is something else that changes there, a price or what can be had.
+  if (ends.filter(([, excess]) => excess > 0).length !== 1) return null;
+  if (!jumps && !ends.every(isKnown)) return null;
+  const middle = (before.value + after.value) / 2;
+  const away = (reading: Reading) => Math.abs(reading.value - middle);
+  const others = seen
+    .filter(({ value }) => value !== before.value && value !== after.value)
+    .sort((a, b) => away(a) - away(b));
+  // Where nothing lifts any more the force is not known: those of one side lead then.
+  const points = ends.filter(isKnown);
+  for (const reading of others) {
+    if (points.length === LEADERS) break;
+    const point = pointOf(reading);
+    if (isKnown(point) && isOneWay([...points, point])) points.push(point);
+    else if (!jumps) break;
+  }
+  return points.length < 2 ? null : points;
+}
+
+function isKnown([, excess]: Point): boolean {
+  return Number.isFinite(excess);
+}
+
+/** True where the excess rises all along, or falls all along. */
+function isOneWay(points: readonly Point[]): boolean {
+  const sorted = points.toSorted((a, b) => a[0] - b[0]);
+  const steps = sorted.slice(1).map((point, at) => Math.sign(point[1] - sorted[at]![1]));
+  return steps.every((step) => step !== 0 && step === steps[0]);
+}
+
+/**
+ * Where a curve through the points crosses the limit, between `low` and `high` (a place just beyond them is taken for
+ * the end itself), and about how wrong that is: Neville's scheme of the value over the excess, a point more at a time
+ * for as long as the places come closer to one another.
+ */
+function crossing(
+  points: readonly Point[],
+  low: number,
+  high: number,
+): { readonly at: number; readonly error: number } | null {
+  const margin = (high - low) / 4;
+  const isWithin = (at: number) => at > low - margin && at < high + margin;
+  /** Estimates that end with the newest point, of growing order. */
+  let diagonal: number[] = [];
+  let best: { readonly at: number; readonly error: number } | null = null;
+  for (const [count, [value, excess]] of points.entries()) {
+    const next = [value];
+    for (let order = 1; order <= count; order += 1) {
+      const [, other] = points[count - order]!;
+      next.push((other * next[order - 1]! - excess * diagonal[order - 1]!) / (other - excess));
+    }
+    const at = next[count]!;
+    if (count === 1) best = { at, error: margin };
+    if (count > 1) {
+      const error = Math.abs(at - diagonal[count - 1]!);
+      if (!isWithin(at) || error >= best!.error) break;
+      best = { at, error };
+    }
+    diagonal = next;
+  }
+  if (best === null || !isWithin(best.at)) return null;
+  return { ...best, at: Math.min(high, Math.max(low, best.at)) };
 }
 
 /** The size whose passing makes the difference: of the two lit ones the better. */

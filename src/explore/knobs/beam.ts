@@ -1,7 +1,7 @@
 import { showSpan, type Units } from '../../quantity/index.ts';
-import { beamFault } from '../../statics/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { type Edit, type Side, setFixed, setSupports } from '../beam-edits/edit-beam.ts';
+import { placeFault } from '../beam-edits/placed.ts';
 import { type FieldKey, resized, resizeFault } from '../beam-edits/resize-field.ts';
 import { choiceKnob, type Knob, measureKnob, SCALES, type Turn } from './knob.ts';
 
@@ -44,8 +44,7 @@ function fieldKnob(field: FieldKey, key: string, label: string, least: number): 
     put: (member, value) => resized(member, field, value),
     show: showSpan,
     check: (after, before, units) =>
-      resizeFault(before, field, get(after), (length) => showSpan(length, units)) ??
-      beamFault(after.beam, after.loads),
+      resizeFault(before, field, get(after), (length) => showSpan(length, units)) ?? placeFault(after),
   });
 }
 

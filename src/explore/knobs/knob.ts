@@ -118,6 +118,28 @@ export const SCALES = {
       axis: 1000 * MM,
     },
   },
+  spacing: {
+    us: {
+      unit: 1,
+      fine: 1,
+      normal: 4,
+      coarse: 40,
+      bare: 'in',
+      hint: '16, 16", 19.2',
+      stepText: '4"',
+      axis: FOOT,
+    },
+    si: {
+      unit: MM,
+      fine: 10,
+      normal: 100,
+      coarse: 1000,
+      bare: 'mm',
+      hint: '400, 400mm, 16"',
+      stepText: '100 mm',
+      axis: 1000 * MM,
+    },
+  },
   section: {
     us: {
       unit: 1,

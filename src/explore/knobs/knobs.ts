@@ -6,6 +6,7 @@ import { CONDITION_KNOBS } from './condition.ts';
 import { headroomKnobs } from './headroom.ts';
 import { type Knob, measureKnob, SCALES } from './knob.ts';
 import { limitKnobs } from './limit.ts';
+import { linkKnobs } from './link.ts';
 import { loadKnobs } from './load.ts';
 import { stated } from './stated.ts';
 import { grade, plies, sectionDepth, sectionWidth, species } from './stock.ts';
@@ -27,6 +28,7 @@ export function knobsOf(member: Member): Knob[] {
     ...AREA_KNOBS.filter(({ kind }) => isShownFirst(member, kind)).map(({ knob }) => knob),
     member.spacing === null ? tributary : spacing,
     ...loadKnobs(member),
+    ...linkKnobs(member),
     ...supportKnobs(member),
     UNBRACED_TOP,
     LIMIT_LIVE,
@@ -82,10 +84,7 @@ const spacing = measureKnob({
   key: 'spacing',
   label: 'spacing',
   kind: 'length',
-  scale: {
-    us: { ...SCALES.tributary.us, normal: 4, coarse: 40, bare: 'in', hint: '16, 16", 19.2', stepText: '4"' },
-    si: { ...SCALES.tributary.si, bare: 'mm', hint: '400, 400mm, 16"' },
-  },
+  scale: SCALES.spacing,
   least: 4,
   most: 20 * FOOT,
   get: (member) => member.spacing ?? member.tributary,

@@ -1,9 +1,9 @@
 import { KIND_WORD, LOAD_KINDS } from '../../loads/kinds.ts';
 import type { AppliedLoad } from '../../loads/loading.ts';
 import { showQuantity, showSpan } from '../../quantity/index.ts';
-import { beamFault, beamLength } from '../../statics/index.ts';
+import { beamLength } from '../../statics/index.ts';
 import type { Member } from '../../timber/member.ts';
-import { loadName } from '../beam-edits/resize-field.ts';
+import { loadName, placeFault } from '../beam-edits/placed.ts';
 import { choiceKnob, type Knob, measureKnob, SCALES } from './knob.ts';
 
 /** Shortest line load that the knobs make, in. */
@@ -60,7 +60,7 @@ function place(
     get: (member) => (member.loads[index] as unknown as Readonly<Record<string, number>>)[key]!,
     put: (member, value) => changed(member, index, { [key]: value }),
     show: showSpan,
-    check: (after) => beamFault(after.beam, after.loads),
+    check: (after) => placeFault(after),
   });
 }
 

@@ -1,4 +1,4 @@
-import { reactionRange } from '../../loads/index.ts';
+import { liftsOf, loadsOf, reactionRange } from '../../loads/index.ts';
 import { parseQuantity, showInches, showQuantity, type Units } from '../../quantity/index.ts';
 import { beamFields, supportPlaces } from '../../statics/index.ts';
 import { sectionWeight } from '../../timber/index.ts';
@@ -111,7 +111,7 @@ function tieDown(support: number): Knob {
         at === support ? value : (member.tiedDown?.[at] ?? 0),
       ),
     }),
-    show: (value, units) => (value === 0 ? 'none' : showQuantity('pointLoad', value, units)),
+    show: (value, units) => (value === 0 ? 'untied' : showQuantity('pointLoad', value, units)),
   });
 }
 
@@ -142,8 +142,9 @@ function liftedSupports(member: Member): readonly boolean[] {
 }
 
 /** Under nothing but downward loads a single span presses on both its supports. */
-function couldLift({ beam, area, loads }: Member): boolean {
-  const upward = loads.some((load) =>
+function couldLift(member: Member): boolean {
+  const { beam, area } = member;
+  const upward = [...loadsOf(member), ...liftsOf(member)].some((load) =>
     load.kind === 'windUp' ? true : (load.type === 'point' ? load.load : Math.min(load.start, load.end)) < 0,
   );
   return upward || area.windUp > 0 || beamFields(beam).length > 1;

@@ -1,4 +1,4 @@
-import type { AppliedLoad } from '../../loads/loading.ts';
+import type { Placed } from '../../loads/index.ts';
 import { showInches, showSpan } from '../../quantity/index.ts';
 import { beamLength } from '../../statics/beam.ts';
 import { woodOf } from '../../timber/index.ts';
@@ -29,7 +29,7 @@ export function shorten(member: Member, only: readonly CheckId[] | null): Ladder
 
 /** `scaleLengths` with lengths that can be measured off, none longer than the factor makes it. */
 function shortened(member: Member, factor: number): Member {
-  const { beam, loads } = scaleLengths(member, factor);
+  const { beam, loads, links } = scaleLengths(member, factor);
   const down = (value: number) => Math.floor(value / PLACE_STEP + ROUNDING) * PLACE_STEP;
   const rounded = {
     ...beam,
@@ -38,16 +38,16 @@ function shortened(member: Member, factor: number): Member {
   };
   const [was, whole] = [beamLength(member.beam), beamLength(rounded)];
   const place = (before: number, now: number) => (before === was ? whole : Math.min(whole, down(now)));
+  const moved = <T extends Placed>(now: T, before: Placed): T => {
+    if (now.type === 'point') return { ...now, at: place(before.type === 'point' ? before.at : 0, now.at) };
+    const [from, to] = before.type === 'line' ? [before.from, before.to] : [0, 0];
+    return { ...now, from: place(from, now.from), to: place(to, now.to) };
+  };
   return {
     ...member,
     beam: rounded,
-    loads: loads.map((load, at): AppliedLoad => {
-      const before = member.loads[at]!;
-      if (load.type === 'point')
-        return { ...load, at: place(before.type === 'point' ? before.at : 0, load.at) };
-      const [from, to] = before.type === 'line' ? [before.from, before.to] : [0, 0];
-      return { ...load, from: place(from, load.from), to: place(to, load.to) };
-    }),
+    loads: loads.map((load, at) => moved(load, member.loads[at]!)),
+    ...(links === undefined ? {} : { links: links.map((link, at) => moved(link, member.links![at]!)) }),
   };
 }
 

@@ -85,8 +85,13 @@ export function moveTo(
       depth: less('depth'),
       price: less('price'),
     },
-    times: before.tributary > 0 && member.tributary > 0 ? before.tributary / member.tributary : 1,
+    times: timesAsMany(before, member),
   };
+}
+
+/** How many times as many members the same floor takes after as before. */
+export function timesAsMany(before: Member, after: Member): number {
+  return before.tributary > 0 && after.tributary > 0 ? before.tributary / after.tributary : 1;
 }
 
 /** The move to a step of a ladder. */

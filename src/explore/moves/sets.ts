@@ -1,11 +1,11 @@
-import type { AppliedLoad } from '../../loads/loading.ts';
+import type { Placed } from '../../loads/index.ts';
 import { writeQuantity } from '../../quantity/index.ts';
 import type { Bracing, Member } from '../../timber/member.ts';
 import { stockSets } from '../rack/stock-set.ts';
 
 /**
  * What to put on the command line as --set to get from one member to another that a move made of it: exactly the same
- * doubles are read back. Of what a move may change: lengths and places of loads, bearings and tie-downs, width of
+ * doubles are read back. Of what a move may change: lengths and places of loads and links, bearings and tie-downs, width of
  * floor, bracing, wood and section.
  */
 export function setsBetween(from: Member, to: Member): string[] {
@@ -14,6 +14,7 @@ export function setsBetween(from: Member, to: Member): string[] {
     ...lengthSet('overhangs.left', from.beam.overhangs.left, to.beam.overhangs.left),
     ...lengthSet('overhangs.right', from.beam.overhangs.right, to.beam.overhangs.right),
     ...to.loads.flatMap((load, at) => placeSets(`loads.${at}`, from.loads[at]!, load)),
+    ...(to.links ?? []).flatMap((link, at) => placeSets(`links.${at}`, from.links![at]!, link)),
     ...widthSets(from, to),
     ...bearingSets(from.bearing, to.bearing),
     ...tieSets(from.tiedDown, to.tiedDown),
@@ -34,7 +35,7 @@ function lengthSet(key: string, from: number | undefined, to: number): string[] 
   return from === to ? [] : [`${key}=${length(to)}`];
 }
 
-function placeSets(key: string, from: AppliedLoad, to: AppliedLoad): string[] {
+function placeSets(key: string, from: Placed, to: Placed): string[] {
   if (to.type === 'point') return lengthSet(`${key}.at`, from.type === 'point' ? from.at : undefined, to.at);
   const was = from.type === 'line' ? from : null;
   return [...lengthSet(`${key}.from`, was?.from, to.from), ...lengthSet(`${key}.to`, was?.to, to.to)];

@@ -1,4 +1,4 @@
-import { isSelfSimilar } from '../../loads/index.ts';
+import { isSelfSimilar, liftsOf, loadsOf } from '../../loads/index.ts';
 import { beamFields } from '../../statics/beam.ts';
 import type { Prepared, Wood } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
@@ -23,7 +23,8 @@ const EXPONENT: Readonly<Partial<Record<CheckId, number>>> = {
 export function followsLaws(prepared: Prepared, member: Member, wood: Wood): boolean {
   const downward =
     member.area.windUp === 0 &&
-    member.loads.every(
+    liftsOf(member).length === 0 &&
+    loadsOf(member).every(
       (load) => load.type === 'line' && load.kind !== 'windUp' && load.start >= 0 && load.end >= 0,
     );
   return (

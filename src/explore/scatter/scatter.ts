@@ -3,7 +3,7 @@ import type { Member } from '../../timber/member.ts';
 import { normalBelow } from './normal.ts';
 
 /** Standard deviations from the mean to the 5th and to the 95th percentile of a normal distribution. */
-const FIFTH = 1.645;
+export const FIFTH = 1.645;
 
 /** What the scatter of stiffness does to a deflection ratio. */
 export interface Scatter {

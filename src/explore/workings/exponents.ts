@@ -1,20 +1,31 @@
 import { reportMember } from '../../timber/index.ts';
-import type { Member } from '../../timber/member.ts';
+import { CHECK_IDS } from '../../timber/report.ts';
 import { WORKINGS_WORD, type WorkingLine } from '../../timber/workings/index.ts';
-import { EXPONENT_QUANTITIES, exponentsOf, IDEAL, whyNotWhole } from '../exponents.ts';
+import {
+  EXPONENT_QUANTITIES,
+  exponentRuns,
+  exponentsOf,
+  IDEAL,
+  type Runs,
+  STEP,
+  whyNotWhole,
+} from '../exponents.ts';
 import { POWERS } from '../powers.ts';
+import type { Asked } from './about.ts';
 
 const PLACES = 3;
 
 /** The local exponents of every check, the ideal ones, and why they differ. */
-export function exponentLines(member: Member): WorkingLine[] {
+export function exponentLines({ member }: Pick<Asked, 'member'>): WorkingLine[] {
   const exponents = exponentsOf(member);
+  const runs = exponentRuns(member);
   const { checks } = reportMember(member);
   const lines: WorkingLine[] = [
     {
       note:
         'How many per cent a ratio grows for one per cent more span, depth, width or load: d ln(ratio) / d ln(quantity), ' +
-        'from two runs of the checks, a hundred-thousandth to either side. All spans and load places move together, ' +
+        'from two runs of the checks, a hundred-thousandth to either side; where a factor steps, from the side that does ' +
+        'not. All spans and load places move together, ' +
         'depth and width freely, not by stock; load is all applied load, own weight apart.',
     },
   ];
@@ -26,6 +37,7 @@ export function exponentLines(member: Member): WorkingLine[] {
     for (const quantity of EXPONENT_QUANTITIES) {
       lines.push({
         symbol: quantity,
+        ...slopeText(runs[quantity], CHECK_IDS.indexOf(check.id), local[quantity]),
         result: signed(local[quantity], PLACES),
         ...(power === undefined ? {} : { note: `ideal ${signed(IDEAL[power.exponent][quantity], 0)}` }),
       });
@@ -35,8 +47,43 @@ export function exponentLines(member: Member): WorkingLine[] {
       lines.push({ note: why === 'whole' ? 'as the ideal' : `not the ideal ones for: ${why}` });
     }
   }
-  return lines;
+  return [...lines, { heading: 'where the ideal ones come from' }, ...IDEAL_REASONS];
 }
+
+/** A simple span under an even load w: each ratio written out in what it goes with. */
+const IDEAL_REASONS: readonly WorkingLine[] = [
+  { note: "shear: fv / Fv' = 1.5 (w l / 2) / (b d Fv')", clause: 'NDS 3.4.2' },
+  { note: "bending: fb / Fb' = (w l^2 / 8) / ((b d^2 / 6) Fb')", clause: 'NDS 3.3.2' },
+  { note: "deflection: 5 w l^4 / (384 E' b d^3 / 12) over the limit l / n", clause: 'IBC Table 1604.3' },
+  { note: 'no size factor, own weight left out' },
+];
+
+/** The two runs that an exponent comes from. */
+function slopeText(
+  { below, here, above }: Runs,
+  at: number,
+  slope: number,
+): Pick<WorkingLine, 'formula' | 'numbers'> {
+  const sides = [
+    ['above', 'below', above[at]!, below[at]!, 2 * STEP],
+    ['here', 'below', here[at]!, below[at]!, STEP],
+    ['above', 'here', above[at]!, here[at]!, STEP],
+  ] as const;
+  const off = ([, , upper, lower, step]: (typeof sides)[number]) =>
+    Math.abs(Math.log(upper / lower) / step - slope);
+  const [first, second, upper, lower, step] = sides.reduce((best, each) =>
+    off(each) < off(best) ? each : best,
+  );
+  const apart = step.toFixed(STEP_PLACES);
+  return {
+    formula: `ln(ratio ${first} / ratio ${second}) / ${apart}`,
+    numbers: `ln(${upper.toPrecision(RUN_DIGITS)} / ${lower.toPrecision(RUN_DIGITS)}) / ${apart}`,
+  };
+}
+
+const STEP_PLACES = 5;
+/** So many that their difference still has the digits that are shown. */
+const RUN_DIGITS = 10;
 
 function signed(value: number, places: number): string {
   const text = value.toFixed(places);

@@ -1,16 +1,37 @@
-import type { Units } from '../../quantity/index.ts';
 import { beamFields } from '../../statics/beam.ts';
-import { governingField, standingDepth } from '../../timber/index.ts';
-import type { Member } from '../../timber/member.ts';
+import { governingField, standingDepth, stockDepths } from '../../timber/index.ts';
 import { CHECK_IDS } from '../../timber/report.ts';
 import { fieldName, figuresOf, plain, WORKINGS_WORD, type WorkingLine } from '../../timber/workings/index.ts';
 import { crossovers } from '../crossovers.ts';
 import { ASKS_NOTHING, OTHER_CHECKS, type PowerRatio, powersOf, standsTo } from '../powers.ts';
 import { ratiosOf } from '../ratios.ts';
 import { fieldSpan, spanToDepthOf } from '../span-to-depth.ts';
+import { usualBands } from '../usual-proportions.ts';
+import type { Asked } from './about.ts';
 
-/** Span over depth of a member, and which span it is. */
-export function spanToDepthLines(member: Member, units: Units): WorkingLine[] {
+/** Span over depth of a member, and which span it is; of the stock depths; and what is usual. */
+export function spanToDepthLines(asked: Pick<Asked, 'member' | 'units'>): WorkingLine[] {
+  const { member, units } = asked;
+  const f = figuresOf(units);
+  const l = spanToDepthOf(member) * standingDepth(member.section);
+  return [
+    ...ownProportion(asked),
+    { heading: 'stock depths at this span' },
+    ...stockDepths(member.stock, member.section.width).map((depth) => ({
+      symbol: `of ${f.size(depth)}`,
+      numbers: `${f.size(l)} / ${f.size(depth)}`,
+      result: plain(l / depth),
+    })),
+    { heading: 'what is usual' },
+    ...usualBands(member).map(({ label, from, to, source }) => ({
+      symbol: label,
+      result: from === 0 ? `up to ${plain(to)}` : `${plain(from)} to ${plain(to)}`,
+      note: source,
+    })),
+  ];
+}
+
+function ownProportion({ member, units }: Pick<Asked, 'member' | 'units'>): WorkingLine[] {
   const f = figuresOf(units);
   const fields = beamFields(member.beam);
   const field = fields.length === 1 ? 0 : governingField(member);
@@ -35,14 +56,14 @@ export function spanToDepthLines(member: Member, units: Units): WorkingLine[] {
 }
 
 /** Where the laws of the three powers cross, and up to where the member stands. */
-export function crossoverLines(member: Member, units: Units): WorkingLine[] {
+export function crossoverLines({ member, units }: Pick<Asked, 'member' | 'units'>): WorkingLine[] {
   const ratios = ratiosOf(member);
   const powers = powersOf(ratios);
   const lambda = spanToDepthOf(member);
   const [shear, bending, deflection] = powers.map(({ ratio }) => ratio ?? 0) as [number, number, number];
   const found = crossovers(lambda, shear, bending, deflection);
   const lines: WorkingLine[] = [
-    ...spanToDepthLines(member, units),
+    ...ownProportion({ member, units }),
     { heading: 'the three powers here' },
     ...powers.map(powerLine),
     {

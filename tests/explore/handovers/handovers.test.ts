@@ -122,7 +122,65 @@ describe('handovers of random members', () => {
   });
 });
 
+describe('handovers by price', () => {
+  const ANY = { product: null, species: null, grade: null, price: null };
+  /** Two sizes whose prices step at lengths of their own, a foot apart, and one that is cut to length. */
+  const STEPS: Ranking = {
+    best: 'price',
+    shop: {
+      yard: [
+        { ...ANY, size: '4x14', lengths: [96, 120, 144, 168], price: { amount: 4, per: 'foot' } },
+        { ...ANY, size: '4x16', lengths: [108, 132, 156, 180], price: { amount: 4.2, per: 'foot' } },
+        { ...ANY, size: '4x12', lengths: [], price: { amount: 4.3, per: 'foot' } },
+      ],
+      prices: [],
+    },
+  };
+
+  it('miss no stretch between two stocked lengths, however long the range', () => {
+    const member = memberOf({ spans: ['8 ft'], tributary: '3 ft' });
+    const { put } = sweepsOf(member).find(({ key }) => key === 'spans.0')!;
+    const [from, to] = [12, 1000];
+    const segments = handoversOf(member, put, from, to, { ranking: STEPS });
+    const at = (value: number) => segments.find((each) => value <= each.to)!.size?.label;
+    // Every eighth of an inch.
+    for (let value = from + 1 / 16; value < to; value += 1 / 8)
+      expect(at(value), `at ${value} in`).toBe(bestOf(put(member, value), STEPS)?.label);
+    expect(segments.length).toBeGreaterThan(7);
+  });
+
+  it('next on each side are the nearest steps', () => {
+    const member = memberOf({ spans: ['8 ft'], tributary: '3 ft' });
+    const { put } = sweepsOf(member).find(({ key }) => key === 'spans.0')!;
+    const segments = handoversOf(member, put, 12, 1000, { ranking: STEPS });
+    for (const { from, to, size } of segments.slice(1, -1)) {
+      const now = (from + to) / 2;
+      const around = aroundOf(put(member, now), { put, least: 12, most: 1000 }, now, { ranking: STEPS });
+      expect(around.size).toBe(size);
+      expect(around.below!.at).toBeCloseTo(from, 4);
+      expect(around.above!.at).toBeCloseTo(to, 4);
+    }
+  });
+});
+
 describe('handovers', () => {
+  it('take few readings each, also where uplift that nothing holds down begins', () => {
+    const member = memberOf({
+      spans: ['14 ft', '16 ft', '12 ft'],
+      area: { dead: '12 psf', live: '40 psf', snow: '25 psf' },
+    });
+    const { put } = sweepsOf(member).find(({ key }) => key === 'spans.0')!;
+    const read = new Set<number>();
+    const counted: typeof put = (of, value) => {
+      read.add(value);
+      return put(of, value);
+    };
+    const segments = handoversOf(member, counted, 72, 288);
+    expect(segments.length).toBeGreaterThan(10);
+    // Halving to a thousand-millionth would take 26 for each.
+    expect(read.size / segments.length).toBeLessThan(8);
+  });
+
   const labels = (member: Member, key: string, from: number, to: number) => {
     const sweep = sweepsOf(member).find((each) => each.key === key)!;
     return handoversOf(member, sweep.put, from, to).map((each) => [each.size?.label ?? null, each.to]);
