@@ -4,12 +4,6 @@ import { nearestName } from '../timber/nearest-name.ts';
 import { type Path, SessionFault } from './fault.ts';
 import { childSchema, keysOf, schemaAt } from './schema-walk.ts';
 
-/** Keys of features that this version does not have; refused by that name, never ignored. */
-const LATER_KEYS: Readonly<Record<'top' | 'member', readonly string[]>> = {
-  top: ['sheet'],
-  member: ['links', 'trail'],
-};
-
 /** No known name is longer; more of a wrong one need not be compared. */
 const LONGEST_KEY = 80;
 
@@ -51,9 +45,6 @@ function explain(issue: Issue, path: Path, document: unknown, root: z.core.$ZodT
 /** The refusal of a key, by what may stand in its place. */
 export function unknownKey(path: Path, key: string, root: z.core.$ZodType): SessionFault {
   const full = [...path, key];
-  const inMember = path.length === 2 && path[0] === 'members';
-  const later = path.length === 0 ? LATER_KEYS.top : inMember ? LATER_KEYS.member : [];
-  if (later.includes(key)) return new SessionFault(full, 'not supported by this version; leave it out');
   const here = schemaAt(root, path);
   const known = keysOf(here);
   if (here === undefined || known.length === 0)

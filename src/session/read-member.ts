@@ -1,5 +1,5 @@
 import { LOAD_KINDS } from '../loads/kinds.ts';
-import type { AppliedLoad, CombinationSet } from '../loads/loading.ts';
+import type { AppliedLoad, CombinationSet, Link } from '../loads/loading.ts';
 import { parseQuantity, type QuantityKind, showSpan } from '../quantity/index.ts';
 import { type Beam, beamLength, supportPlaces } from '../statics/beam.ts';
 import {
@@ -18,11 +18,14 @@ import {
 } from '../timber/member.ts';
 import { seasonedByDefault } from '../timber/with-stock.ts';
 import { type Path, SessionFault } from './fault.ts';
-import { type LoadFile, type MemberFile, readSlope } from './schema.ts';
+import { BY_SPACING, type LinkFile, type LoadFile, type MemberFile, readSlope } from './schema.ts';
+import { MAX_LOADS } from './session.ts';
 
 /** Defaults (contract, "Session file"); in. */
 export const DEFAULT_BEARING = 3.5;
 export const DEFAULT_TRIBUTARY = 72;
+/** Stands for the spacing of another member until that is known, in. */
+const UNKNOWN_SPACING = 16;
 /** Slack for positions that were summed in another unit, in. */
 const HAIR = 1e-6;
 
@@ -57,6 +60,7 @@ export function readMember(file: MemberFile, combinations: CombinationSet, path:
       ]),
     ) as Member['area'],
     loads: (file.loads ?? []).map((load, i) => readLoad(load, beamLength(beam), [...path, 'loads', i])),
+    ...readLinks(file, beamLength(beam), path),
     selfWeight: file.selfWeight ?? true,
     combinations,
     liveReduction:
@@ -167,10 +171,12 @@ function countMessage(given: number, supports: number): string {
   return `${given} given for ${supports} ${supports === 1 ? 'support' : 'supports'}; write one for each`;
 }
 
-function readLoad(load: LoadFile, whole: number, path: Path): AppliedLoad {
-  const { kind } = load;
-  const place = (key: 'from' | 'to' | 'at', otherwise: number): number => {
-    const text = load[key];
+type PlaceKey = 'from' | 'to' | 'at';
+
+/** Reads the places of a load or a link on a member `whole` long. */
+function placesOf(file: Readonly<Partial<Record<PlaceKey, string | undefined>>>, whole: number, path: Path) {
+  return (key: PlaceKey, otherwise: number): number => {
+    const text = file[key];
     if (text === undefined) return otherwise;
     const at = length(text);
     if (at > whole + HAIR) {
@@ -181,6 +187,47 @@ function readLoad(load: LoadFile, whole: number, path: Path): AppliedLoad {
     }
     return Math.min(at, whole);
   };
+}
+
+function readLinks(file: MemberFile, whole: number, path: Path): { links?: Link[] } {
+  if (file.links === undefined) return {};
+  const count = file.links.length + (file.loads?.length ?? 0);
+  if (count > MAX_LOADS) {
+    const text = `${count} loads and links together; a member takes at most ${MAX_LOADS}`;
+    throw new SessionFault([...path, 'links'], text);
+  }
+  return { links: file.links.map((link, i) => readLink(link, whole, [...path, 'links', i])) };
+}
+
+/** A link as it stands; what it brings is known once all members are read. */
+function readLink(link: LinkFile, whole: number, path: Path): Link {
+  const { member, end } = link;
+  const named = { member, end, bears: null };
+  const place = placesOf(link, whole, path);
+  if (link.at !== undefined && link.every !== undefined) {
+    throw new SessionFault(path, 'both at and every are given; write two links');
+  }
+  if (link.every !== undefined) {
+    const [from, to] = [place('from', 0), place('to', whole)];
+    if (from >= to)
+      throw new SessionFault([...path, 'to'], 'the link must end to the right of where it begins');
+    return link.every === BY_SPACING
+      ? { ...named, type: 'line', every: UNKNOWN_SPACING, bySpacing: true, from, to }
+      : { ...named, type: 'line', every: length(link.every), from, to };
+  }
+  const stray = link.from !== undefined ? 'from' : link.to !== undefined ? 'to' : null;
+  if (stray !== null)
+    throw new SessionFault([...path, stray], 'a link that lands once takes at instead of from and to');
+  if (link.at === undefined) {
+    const text = 'the link has neither at nor every; write "at": "5 ft" or "every": "16 in"';
+    throw new SessionFault(path, text);
+  }
+  return { ...named, type: 'point', at: place('at', 0) };
+}
+
+function readLoad(load: LoadFile, whole: number, path: Path): AppliedLoad {
+  const { kind } = load;
+  const place = placesOf(load, whole, path);
   if (load.line !== undefined && load.point !== undefined) {
     throw new SessionFault(path, 'both line and point are given; write two loads');
   }

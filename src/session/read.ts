@@ -1,5 +1,7 @@
+import { linkFault, resolved } from '../explore/links/index.ts';
 import type { CombinationSet } from '../loads/loading.ts';
 import { quoted } from '../quantity/index.ts';
+import type { Member } from '../timber/member.ts';
 import { stockFault, stockNameFault } from '../timber/refusal.ts';
 import { explainIssues } from './explain-issue.ts';
 import { faultLine, type Path, SessionFault } from './fault.ts';
@@ -7,8 +9,10 @@ import { readPins } from './pins.ts';
 import { readPrices, readYard } from './read-buying.ts';
 import { readJson } from './read-json.ts';
 import { readMember } from './read-member.ts';
-import { type SessionFile, sessionSchema } from './schema.ts';
-import { MAX_BYTES, type Session, type SessionMember, type SessionRead } from './session.ts';
+import { FORMAT, type SessionFile, sessionSchema } from './schema.ts';
+import type { Session, SessionMember, SessionRead } from './session.ts';
+import { isTooLarge } from './too-large.ts';
+import { readTrail } from './trail.ts';
 
 /**
  * The session that a file's text holds. `file` is only named in the fault, which is one line: file, path, what is wrong,
@@ -41,8 +45,20 @@ export function readText(text: string): unknown {
   return readJson(text);
 }
 
-/** The session of a raw document; throws SessionFault. */
+/** The session of a raw document, with what its links bring; throws SessionFault. */
 export function readDocument(document: unknown): Session {
+  const session = readUnlinked(document);
+  const fault = linkFault(session);
+  if (fault !== null) {
+    const { member, pin, link, key, text } = fault;
+    const design = pin === null ? [] : ['pins', pin, 'design'];
+    throw new SessionFault(['members', member, ...design, 'links', link, key], text);
+  }
+  return resolved(session);
+}
+
+/** The session of a raw document, its links not looked at. */
+export function readUnlinked(document: unknown): Session {
   if (document === null || typeof document !== 'object' || Array.isArray(document)) {
     throw new SessionFault([], 'a session is an object: { "thrice": 1, "members": [ ... ] }');
   }
@@ -61,6 +77,7 @@ export function readDocument(document: unknown): Session {
     ...(file.best === undefined ? {} : { best: file.best }),
     ...(file.yard === undefined ? {} : { yard: readYard(file.yard) }),
     ...(file.prices === undefined ? {} : { prices: readPrices(file.prices) }),
+    ...(file.sheet === undefined ? {} : { sheet: file.sheet }),
     members: file.members.map((_, i) => readOne(file, raw.members[i], i, combinations)),
     written: top,
   };
@@ -89,7 +106,23 @@ function readOne(
     throw new SessionFault([...path, 'rack', at, key], unknown.reason);
   }
   const pins = readPins(file.members[index]!, written, combinations, path);
-  return { member, written, ...(pins === undefined ? {} : { pins }) };
+  const trail = readTrail(file.members[index]!.trail);
+  return {
+    member,
+    written,
+    ...(pins === undefined ? {} : { pins }),
+    ...(trail === undefined ? {} : { trail }),
+  };
+}
+
+/** The member that a raw record says, as the only one of a session; null where it cannot be read. */
+export function readOneMember(record: unknown, combinations: CombinationSet): Member | null {
+  try {
+    return readUnlinked({ thrice: FORMAT, combinations, members: [record] }).members[0]!.member;
+  } catch (fault) {
+    if (fault instanceof SessionFault) return null;
+    throw fault;
+  }
 }
 
 function checkNames(file: SessionFile): void {
@@ -102,10 +135,4 @@ function checkNames(file: SessionFile): void {
     }
     seen.set(name, index);
   }
-}
-
-/** By UTF-8 bytes, counted only where the count of characters leaves it open. */
-function isTooLarge(text: string): boolean {
-  if (text.length > MAX_BYTES) return true;
-  return text.length * 3 > MAX_BYTES && new TextEncoder().encode(text).length > MAX_BYTES;
 }

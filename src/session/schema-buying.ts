@@ -1,6 +1,6 @@
 import * as z from 'zod/mini';
 import { PRODUCTS } from '../timber/member.ts';
-import { MAX_YARD } from './session.ts';
+import { MAX_FILE_NAME, MAX_YARD } from './session.ts';
 
 /** What the schema is put together from: texts of a length, lengths within bounds. */
 export interface Parts {
@@ -9,7 +9,6 @@ export interface Parts {
 }
 
 const NAME_LENGTH = 60;
-const FILE_LENGTH = 500;
 const MOST_LENGTHS = 60;
 const FEET = 12;
 const LONGEST = 200 * FEET;
@@ -23,7 +22,7 @@ export type PriceRowFile = z.infer<ReturnType<typeof priceRow>>;
 /** `yard`: the name of a CSV file beside the session, or its lines. */
 export function yard(parts: Parts) {
   return z
-    .union([parts.text(1, FILE_LENGTH), z.array(yardRow(parts)).check(z.maxLength(MAX_YARD))])
+    .union([parts.text(1, MAX_FILE_NAME), z.array(yardRow(parts)).check(z.maxLength(MAX_YARD))])
     .register(z.globalRegistry, {
       description: 'what the yard has: the name of a CSV file, from the folder of the session, or its lines',
     });

@@ -4,6 +4,8 @@ import { LOAD_KINDS } from '../loads/kinds.ts';
 import { isHarmful, parseQuantity, type QuantityKind, quoted } from '../quantity/index.ts';
 import { FACTOR_SYMBOLS, PRODUCTS, STOCK_VALUES } from '../timber/member.ts';
 import { prices, yard } from './schema-buying.ts';
+import { sheet } from './schema-sheet.ts';
+import { trail } from './schema-trail.ts';
 import { MAX_LOADS, MAX_MEMBERS, MAX_PINS, MAX_RACK, MAX_SPANS } from './session.ts';
 
 /** The format's version, the value of the key `thrice`. */
@@ -35,6 +37,10 @@ export type MemberFile = SessionFile['members'][number];
 /** A member's record without what it is called. */
 export type DesignFile = NonNullable<MemberFile['pins']>[number]['design'];
 export type LoadFile = NonNullable<MemberFile['loads']>[number];
+export type LinkFile = NonNullable<MemberFile['links']>[number];
+
+/** What stands for the distance of repeated reactions that follows the spacing of their member. */
+export const BY_SPACING = 'spacing';
 
 let built: ReturnType<typeof build> | undefined;
 
@@ -59,6 +65,7 @@ function build() {
     best: z.optional(z.enum(BESTS)),
     yard: z.optional(yard(PARTS)),
     prices: z.optional(prices(PARTS)),
+    sheet: z.optional(sheet(PARTS)),
     members: z.array(memberWithPins()).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
   });
 }
@@ -84,6 +91,7 @@ function memberWithPins() {
           description: 'designs of this member that were set aside to compare, each with a note',
         }),
     ),
+    trail: z.optional(trail(PARTS)),
   });
 }
 
@@ -135,6 +143,12 @@ function member() {
         )
         .check(z.maxLength(MAX_LOADS)),
     ),
+    links: z.optional(
+      z.array(link()).check(z.maxLength(MAX_LOADS)).register(z.globalRegistry, {
+        description:
+          'loads that are reactions of other members: once at a place, or one every so far between two places',
+      }),
+    ),
     selfWeight: flag,
     liveReduction: z.optional(
       z.strictObject({
@@ -178,6 +192,38 @@ function member() {
     creep: z.optional(z.enum(['half dead', 'Kcr'])),
     factors: z.optional(factors()),
   });
+}
+
+/** A load that is the reaction of another member. */
+function link() {
+  const place = z.optional(
+    quantity('length', 0, (MAX_SPANS + 2) * LONGEST, '0 ft to the length of the member'),
+  );
+  return z.strictObject({
+    member: text(1, NAME_LENGTH),
+    end: z
+      .union([z.enum(['left', 'right']), z.int().check(z.minimum(0), z.maximum(MAX_SPANS))])
+      .register(z.globalRegistry, {
+        description: 'which of its supports: "left", "right", or one by its index from the left, 0 the first',
+      }),
+    at: place,
+    every: z.optional(every()),
+    from: place,
+    to: place,
+  });
+}
+
+function every() {
+  return z
+    .string()
+    .check(
+      z.check<string>(({ value, issues }) => {
+        if (value !== BY_SPACING) inBounds('length', value, 1, LONGEST, '1 in to 200 ft', issues);
+      }),
+    )
+    .register(z.globalRegistry, {
+      description: 'how far apart they land: "16 in", or "spacing" for the spacing of the member itself',
+    });
 }
 
 /** What a storey is made up of, and so the depth that it leaves a beam. */

@@ -3,6 +3,7 @@ import type { Best } from '../explore/rack/best.ts';
 import type { CombinationSet } from '../loads/loading.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
+import type { Change } from './differences.ts';
 
 /** A job: its members, and how it wants to be shown and combined. */
 export interface Session {
@@ -10,7 +11,7 @@ export interface Session {
   readonly title: string;
   readonly units: Units;
   readonly combinations: CombinationSet;
-  /** One or more, names unique. */
+  /** One or more, names unique. Their links hold what the members they name bring: see `resolved`. */
   readonly members: readonly SessionMember[];
   /** What counts as best; absent: the lightest. */
   readonly best?: Best;
@@ -18,8 +19,29 @@ export interface Session {
   readonly yard?: YardList | null;
   /** What woods cost where the yard list does not say. */
   readonly prices?: readonly PriceRow[];
+  /** The title block of the calculation sheet, and its paper; absent: nothing filled in. */
+  readonly sheet?: SheetKeys;
   /** The raw top of the file it was read from, without its members; absent for a session that was never a file. */
   readonly written?: unknown;
+}
+
+/** Sizes of paper that a sheet is printed on. */
+export const PAPERS = ['A4', 'Letter'] as const;
+export type Paper = (typeof PAPERS)[number];
+
+/** What the calculation sheet is headed with; an entry that is absent or empty is left out there. */
+export interface SheetKeys {
+  readonly firm?: string | undefined;
+  /** Absent: the title of the session. */
+  readonly job?: string | undefined;
+  readonly jobNumber?: string | undefined;
+  readonly by?: string | undefined;
+  readonly checkedBy?: string | undefined;
+  readonly revision?: string | undefined;
+  /** As it shall stand there; no clock fills it in. */
+  readonly date?: string | undefined;
+  /** Absent: Letter with US units, A4 with SI. */
+  readonly paper?: Paper | undefined;
 }
 
 export interface YardList {
@@ -35,6 +57,8 @@ export interface SessionMember {
   readonly written: unknown;
   /** Designs set aside, in the order they were; absent: none. */
   readonly pins?: readonly Pin[];
+  /** What was done to it; absent: nothing that was noted. It goes with the member wherever that is moved. */
+  readonly trail?: Trail;
 }
 
 /** A design set aside to compare with others. */
@@ -46,6 +70,21 @@ export interface Pin {
   readonly written: unknown;
 }
 
+/** What was done to a member, oldest first. */
+export interface Trail {
+  /** How many changes older than the entries are told by their number alone. */
+  readonly before: number;
+  readonly entries: readonly TrailEntry[];
+}
+
+/** One change of a member's record; a run of nudges of one knob is one. */
+export interface TrailEntry extends Change {
+  /** UTC, "2026-12-01T09:30:00Z". The order of the entries is theirs, whatever the clock said. */
+  readonly time: string;
+  /** In words: "span", "size". */
+  readonly what: string;
+}
+
 export type SessionRead =
   | { readonly ok: true; readonly session: Session }
   | { readonly ok: false; readonly fault: string };
@@ -55,9 +94,12 @@ export const MAX_BYTES = 16 * 1024 * 1024;
 export const MAX_MEMBERS = 500;
 export const MAX_SPANS = 6;
 export const MAX_LOADS = 100;
-/** Lines of a yard list; a bound of this program's own. */
+/** Characters of the name of a yard list's file, and lines of a list; bounds of this program's own. */
+export const MAX_FILE_NAME = 500;
 export const MAX_YARD = 20_000;
 /** Designs set aside of one member: as many as can be looked at side by side. */
 export const MAX_PINS = 6;
+/** Changes of one member that are kept one by one; a bound of this program's own. */
+export const MAX_TRAIL = 200;
 /** Woods on one rack; a bound of this program's own. */
 export const MAX_RACK = 16;

@@ -1,39 +1,15 @@
 import type { AppliedLoad } from '../loads/loading.ts';
 import { type QuantityKind, type Units, writeQuantity } from '../quantity/index.ts';
-import { keep, keeper, keepList, present, type Raw, rawAt, same } from './keep.ts';
+import { keep, keepEnd, keeper, keepList, keepRecords, present, type Raw, rawAt } from './keep.ts';
 
-/**
- * The `loads` list of a member; undefined where there are none and the file had no list. A load that has not changed
- * keeps its record even when others before it were taken out; one that has keeps the text of its other values.
- */
+/** The `loads` list of a member; undefined where there are none and the file had no list. */
 export function writeLoads(
   loads: readonly AppliedLoad[],
   raw: unknown,
   before: readonly AppliedLoad[] | undefined,
   units: Units,
 ): unknown {
-  if (loads.length === 0 && raw === undefined) return undefined;
-  const records: readonly unknown[] = Array.isArray(raw) ? raw : [];
-  const then = before ?? [];
-  const used = new Set<number>();
-  const claim = (load: AppliedLoad, from: number): number => {
-    const found = then.findIndex((one, i) => i >= from && !used.has(i) && same(one, load));
-    if (found >= 0) used.add(found);
-    return found;
-  };
-  // Unchanged loads claim their records first, so that a changed one cannot take the record of another.
-  const claimed = loads.map((load, i) => {
-    const here = then[i] !== undefined && !used.has(i) && same(then[i], load) ? i : -1;
-    if (here >= 0) used.add(here);
-    return here;
-  });
-  for (const [i, load] of loads.entries()) if (claimed[i] === -1) claimed[i] = claim(load, 0);
-  return loads.map((load, i) => {
-    const index = claimed[i]!;
-    if (index >= 0 && records[index] !== undefined) return records[index];
-    const old = used.has(i) ? undefined : then[i];
-    return writeLoad(load, old === undefined ? undefined : records[i], old, units);
-  });
+  return keepRecords(raw, before, loads, (load, record, old) => writeLoad(load, record, old, units));
 }
 
 function writeLoad(load: AppliedLoad, raw: unknown, old: AppliedLoad | undefined, units: Units): Raw {
@@ -49,12 +25,7 @@ function writeLoad(load: AppliedLoad, raw: unknown, old: AppliedLoad | undefined
     };
   }
   const before = old?.type === 'line' ? old : undefined;
-  const of = keeper(raw, before, load);
-  // An end that was left out stays out only while it has not moved.
-  const end = (key: 'from' | 'to') =>
-    raw !== undefined && rawAt(raw, key) === undefined && before?.[key] === load[key]
-      ? undefined
-      : of(key, undefined, length);
+  const end = (key: 'from' | 'to') => keepEnd(key, raw, before, load, length);
   return present({
     kind: load.kind,
     line: writeLine(load, raw, before, text('lineLoad')),

@@ -11,6 +11,7 @@ import { seasonedByDefault } from '../timber/with-stock.ts';
 import { group, keep, keeper, keepList, present, type Raw, rawAt } from './keep.ts';
 import { DEFAULT_BEARING, DEFAULT_TRIBUTARY } from './read-member.ts';
 import { readSlope } from './schema.ts';
+import { writeLinks } from './write-links.ts';
 import { writeLoads } from './write-loads.ts';
 import { writeStock } from './write-stock.ts';
 
@@ -58,6 +59,7 @@ export function writeMember(member: Member, raw: unknown, before: Member | undef
       Object.fromEntries(LOAD_KINDS.map((kind) => [kind, ofArea(kind, 0, text('areaLoad'))])),
     ),
     loads: writeLoads(member.loads, under('loads'), before?.loads, units),
+    links: writeLinks(member.links ?? [], under('links'), before?.links, units),
     selfWeight: of('selfWeight', true),
     liveReduction: writeLiveReduction(member, under('liveReduction'), before, text('area')),
     slope: of('slope', 0, slopeText),

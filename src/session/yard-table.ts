@@ -1,12 +1,11 @@
 import type { YardRow } from '../explore/buying/yard.ts';
-import { harmless, parseQuantity, quoted } from '../quantity/index.ts';
+import { doubleIn, yardChecker } from '../explore/buying/yard-fault.ts';
+import { quoted } from '../quantity/index.ts';
+import type { Stock } from '../timber/member.ts';
 import { nearestName } from '../timber/nearest-name.ts';
-import { explainIssues } from './explain-issue.ts';
 import { SessionFault } from './fault.ts';
-import { readYardRow } from './read-buying.ts';
-import { PARTS } from './schema.ts';
-import { yardRow } from './schema-buying.ts';
 import { MAX_YARD } from './session.ts';
+import { countedBy, lengthsOf, type MoneyKey, moneyOf, yardRowOf } from './yard-cells.ts';
 
 export type YardRead =
   | { readonly ok: true; readonly rows: readonly YardRow[] }
@@ -68,62 +67,84 @@ const KNOWN = [
   'per',
 ];
 
-type MoneyKey = 'each' | 'perFoot' | 'perBoardFoot';
-
-const PER: Readonly<Record<string, MoneyKey>> = {
-  piece: 'each',
-  pc: 'each',
-  each: 'each',
-  ea: 'each',
-  foot: 'perFoot',
-  ft: 'perFoot',
-  lf: 'perFoot',
-  boardfoot: 'perBoardFoot',
-  bdft: 'perBoardFoot',
-  bf: 'perBoardFoot',
-};
-
 /**
  * A yard list from the lines of a table, its heads first, in any order. Lengths stand in one cell ("8 10 12", "8-20" for
  * every two feet, "2.4 m; 3 m"), bare numbers in feet, or metres where the head says so. Prices have a column for each
- * way of counting, or one for the amount and one for what it is for. An empty cell says nothing.
+ * way of counting, or one for the amount and one for what it is for. An empty cell says nothing. `woods`: those of the
+ * job, known beside the ones in the tables.
  */
-export function readYardTable(lines: readonly TableLine[]): YardRead {
+export function readYardTable(lines: readonly TableLine[], woods: readonly Stock[] = []): YardRead {
   const [head, ...rest] = lines;
   try {
     if (head === undefined)
       throw new SessionFault([], 'is empty; its first line names its columns: size, grade, ...');
-    const keys = head.cells.map(keyOf);
-    if (!keys.includes('size')) throw new SessionFault([], `line ${head.line}: no column is named size`);
+    const keys = keysOf(head);
     const metres = head.cells.some((cell) => /^lengths? *\(?m\)?$/i.test(cell.trim()));
+    if (rest.length === 0)
+      throw new SessionFault([], `has no line below its heads; one a size, as ${EXAMPLE}`);
     if (rest.length > MAX_YARD)
       throw new SessionFault([], `has over ${MAX_YARD} lines, the most that are read`);
-    return { ok: true, rows: rest.map((line) => readLine(line, keys, metres ? 'm' : 'ft')) };
+    const check = yardChecker(woods);
+    const rows = rest.map((line) => readLine(line, keys, metres ? 'm' : 'ft', check));
+    const double = doubleIn(rows);
+    if (double !== null) {
+      const [line, first] = [rest[double.at]!.line, rest[double.of]!.line];
+      throw new SessionFault(
+        [],
+        `line ${line}: ${quoted(rows[double.at]!.size)} of this wood and length is in line ${first} already; leave one of them out`,
+      );
+    }
+    return { ok: true, rows };
   } catch (fault) {
     if (fault instanceof SessionFault) return { ok: false, fault: fault.message };
     throw fault;
   }
 }
 
-function keyOf(cell: string): Key {
+const EXAMPLE = '2x12,No.2,8-20,35';
+
+function keysOf({ line, cells }: TableLine): Key[] {
+  const keys = cells.map((cell) => keyOf(cell, line));
+  if (!keys.includes('size'))
+    throw new SessionFault([], `line ${line}: no column is named size; the first line names the columns`);
+  const twice = keys.find((key, at) => keys.indexOf(key) < at);
+  if (twice !== undefined)
+    throw new SessionFault([], `line ${line}: two columns are for ${twice}; leave one of them out`);
+  return keys;
+}
+
+function keyOf(cell: string, line: number): Key {
   const plain = cell.toLowerCase().replace(/[^a-z]/g, '');
   const key = Object.hasOwn(HEADS, plain) ? HEADS[plain] : undefined;
   if (key !== undefined) return key;
   const near = nearestName(cell.trim().slice(0, 40), KNOWN);
   throw new SessionFault(
     [],
-    `line 1: no column ${quoted(cell)} is known; ${near === null ? `known are ${KNOWN.join(', ')}` : `the nearest is "${near}"`}`,
+    `line ${line}: no column ${quoted(cell)} is known; ${near === null ? `known are ${KNOWN.join(', ')}` : `the nearest is "${near}"`}`,
   );
 }
 
-function readLine({ line, cells }: TableLine, keys: readonly Key[], unit: 'ft' | 'm'): YardRow {
+/** A longer cell is no cell of such a list: a quote was left open, or the file is another one. */
+const LONGEST_CELL = 1000;
+
+function readLine(
+  { line, cells }: TableLine,
+  keys: readonly Key[],
+  unit: 'ft' | 'm',
+  check: ReturnType<typeof yardChecker>,
+): YardRow {
   const at = (text: string) => new SessionFault([], `line ${line}: ${text}`);
+  if (cells.slice(keys.length).some((cell) => cell.trim() !== ''))
+    throw at(`has more cells than the ${keys.length} columns named; quote a cell that holds the separator`);
   const raw: Record<string, unknown> = {};
   let price: string | null = null;
   let per: string | null = null;
   keys.forEach((key, column) => {
     const text = (cells[column] ?? '').trim();
     if (text === '') return;
+    if (text.length > LONGEST_CELL)
+      throw at(`${key}: a cell of ${text.length} characters; is a quote left open in this line or above?`);
+    if (/^[=+@]/.test(text)) throw at(`${key}: ${quoted(text)} is a formula; put the value in its place`);
     if (key === 'price') price = text;
     else if (key === 'per') per = text;
     else if (key === 'lengths') raw.lengths = lengthsOf(text, unit, at);
@@ -131,68 +152,8 @@ function readLine({ line, cells }: TableLine, keys: readonly Key[], unit: 'ft' |
     else raw[key] = text;
   });
   if (price !== null) raw[countedBy(per, at)] = moneyOf(price, at);
-  const schema = yardRow(PARTS);
-  const parsed = schema.safeParse(raw);
-  if (!parsed.success) {
-    const { path, message } = explainIssues(parsed.error.issues, raw, schema);
-    throw at(`${path.length === 0 ? '' : `${path.join('.')}: `}${message}`);
-  }
-  try {
-    return readYardRow(parsed.data, []);
-  } catch (fault) {
-    if (fault instanceof SessionFault) throw at(fault.message);
-    throw fault;
-  }
+  const row = yardRowOf(raw, at);
+  const fault = check(row);
+  if (fault !== null) throw at(`${fault.key}: ${fault.reason}`);
+  return row;
 }
-
-function countedBy(per: string | null, at: (text: string) => SessionFault): MoneyKey {
-  if (per === null) throw at('the price does not say for what; write piece, foot or board foot under "per"');
-  const plain = per
-    .toLowerCase()
-    .replace(/^(a|per) |[^a-z]/g, '')
-    .replace(/feet$/, 'foot');
-  const key = Object.hasOwn(PER, plain) ? PER[plain] : undefined;
-  if (key === undefined)
-    throw at(`${quoted(per)} is nothing that a price is for; write piece, foot or board foot`);
-  return key;
-}
-
-/** "12.50", "$1,234.50", "12.50 EUR". */
-function moneyOf(text: string, at: (text: string) => SessionFault): number {
-  const plain = text.replace(/^\p{Sc}\s*|\s*(?:\p{Sc}|[A-Z]{3})$/gu, '');
-  if (!/^(?:\d{1,3}(?:,\d{3})+|\d+)(?:\.\d+)?$|^\.\d+$/.test(plain)) {
-    throw at(`${quoted(text)} is no price; write 12.50`);
-  }
-  return Number(plain.replaceAll(',', ''));
-}
-
-const FEET_APART = 2;
-const MOST_FEET = 200;
-
-function lengthsOf(text: string, unit: 'ft' | 'm', at: (text: string) => SessionFault): string[] {
-  const range = /^(\d+) ?- ?(\d+)$/.exec(text);
-  if (range !== null && unit === 'ft') {
-    const [from, to] = [Number(range[1]), Number(range[2])];
-    if (from > to || to > MOST_FEET) throw at(`${quoted(text)} is no range of lengths; write 8-20`);
-    return Array.from(
-      { length: Math.floor((to - from) / FEET_APART) + 1 },
-      (_, n) => `${from + n * FEET_APART} ft`,
-    );
-  }
-  const parts = /[;,|/]/.test(text)
-    ? text.split(/[;,|/]/)
-    : /[a-z'"]/i.test(text)
-      ? [text]
-      : text.split(/\s+/);
-  return parts
-    .map((part) => part.trim())
-    .filter((part) => part !== '')
-    .map((part) => {
-      const written = /^[\d.]+$/.test(part) ? `${part} ${unit}` : part;
-      const parsed = parseQuantity('length', written);
-      if (!parsed.ok) throw at(`lengths: ${harmless(parsed.fault, FAULT_LENGTH)}`);
-      return written;
-    });
-}
-
-const FAULT_LENGTH = 160;

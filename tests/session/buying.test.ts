@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { BY_WEIGHT } from '../../src/explore/rack/best.ts';
 import { rankingOf, readSession, schemaJson, writeSession } from '../../src/session/index.ts';
+import { MAX_YARD } from '../../src/session/session.ts';
 import { readYardTable } from '../../src/session/yard-table.ts';
 import { faultOf, rawMember, rawSession, sessionOf } from './documents.ts';
 
@@ -275,6 +276,88 @@ describe('a yard list as a table', () => {
       ],
       'line 2: size: missing',
     ],
+    [[['size', 'grade']], 'has no line below its heads; one a size, as 2x12,No.2,8-20,35'],
+    [
+      [
+        ['size', 'Size'],
+        ['2x4', '2x4'],
+      ],
+      'line 1: two columns are for size; leave one of them out',
+    ],
+    [
+      [
+        ['size', 'each'],
+        ['2x4', '-3'],
+      ],
+      'line 2: "-3" is less than nothing; a price is more than 0',
+    ],
+    [
+      [
+        ['size', 'each'],
+        ['2x4', '(3.00)'],
+      ],
+      'line 2: "(3.00)" is less than nothing',
+    ],
+    [
+      [
+        ['size', 'each'],
+        ['2x4', '=B1*2'],
+      ],
+      'line 2: each: "=B1*2" is a formula; put the value in its place',
+    ],
+    [[['size'], ['=HYPERLINK("x")']], 'line 2: size: \'=HYPERLINK("x")\' is a formula'],
+    [
+      [
+        ['size', 'each'],
+        ['2x4', '@SUM(1)'],
+      ],
+      'is a formula',
+    ],
+    [
+      [
+        ['size', 'grade'],
+        ['2x4', '#REF!'],
+      ],
+      'line 2: grade: "#REF!" is not known here',
+    ],
+    [[['size'], ['2x4'], ['2x13']], 'line 3: size: "2x13" is not made'],
+    [
+      [
+        ['size', 'species'],
+        ['2x4', 'Bamboo'],
+      ],
+      'line 2: species: "Bamboo" is not known here',
+    ],
+    [
+      [
+        ['size', 'each'],
+        ['2x4', '1'],
+        ['2x6', '2'],
+        ['2 X 4', '3'],
+      ],
+      'line 4: "2 X 4" of this wood and length is in line 2 already; leave one of them out',
+    ],
+    [
+      [
+        ['size', 'each'],
+        ['2x4', '1', '35'],
+      ],
+      'line 2: has more cells than the 2 columns named',
+    ],
+    [
+      [
+        ['size', 'grade'],
+        ['2x4', 'x'.repeat(1_000_000)],
+      ],
+      'line 2: grade: a cell of 1000000 characters; is a quote left open',
+    ],
+    [
+      [
+        ['size', 'lengths'],
+        ['2x4', '8 '.repeat(500_000)],
+      ],
+      'line 2: lengths: a cell of 999999 characters',
+    ],
     [[['size'], ['2x4\u001b[2J']], 'line 2: size: "2x4\\u{1b}[2J" holds control or invisible characters'],
   ])('%j is refused with its line and the reason', (lines, reason) => {
     expect(fault(...(lines as string[][]))).toContain(reason);
@@ -283,4 +366,40 @@ describe('a yard list as a table', () => {
 
 test('a session with a yard list of its own reads from text', () => {
   expect(readSession(rawSession(undefined, { yard: YARD, best: 'price' }), 'job.json').ok).toBe(true);
+});
+
+test('a table knows the woods of the job beside those of the standards', () => {
+  const own = {
+    product: 'dimension lumber',
+    species: 'Larch of the valley',
+    grade: 'A',
+    values: null,
+    valuesFrom: null,
+  } as const;
+  const lines = [
+    { line: 1, cells: ['size', 'species'] },
+    { line: 2, cells: ['2x12', own.species] },
+  ];
+  expect(readYardTable(lines).ok).toBe(false);
+  expect(readYardTable(lines, [own]).ok).toBe(true);
+});
+
+test('a table of the most lines that are read is read, and one double among them is found', () => {
+  const head = { line: 1, cells: ['size', 'species', 'grade', 'lengths'] };
+  const lines = Array.from({ length: MAX_YARD }, (_, at) => ({
+    line: at + 2,
+    cells: [
+      `2x${[4, 6, 8, 10, 12][at % 5]}`,
+      'DF-L',
+      `No.${1 + (Math.floor(at / 5) % 2)}`,
+      `${96 + Math.floor(at / 10)} in`,
+    ],
+  }));
+  expect(readYardTable([head, ...lines])).toMatchObject({ ok: true });
+  const last = { line: MAX_YARD + 1, cells: lines[0]!.cells };
+  expect(readYardTable([head, ...lines.slice(0, -1), last])).toMatchObject({
+    fault: expect.stringContaining(
+      `line ${MAX_YARD + 1}: "2x4" of this wood and length is in line 2 already`,
+    ),
+  });
 });

@@ -386,19 +386,6 @@ describe('a bad value', () => {
     expect(fault).not.toMatch(/[\u0000-\u001f\u202e]/);
   });
 
-  test.each(['links', 'trail'])(
-    'the later key %s of a member is refused as not supported by this version',
-    (key) => {
-      expect(memberFault({ [key]: [] })).toBe(
-        `job.json: members[0].${key}: not supported by this version; leave it out`,
-      );
-    },
-  );
-
-  test.each(['sheet'])('the later key %s at the top is refused as not supported by this version', (key) => {
-    expect(faultOf(rawSession(undefined, { [key]: {} }))).toContain(`${key}: not supported by this version`);
-  });
-
   test('two members of one name are refused, both named', () => {
     expect(faultOf(rawSession([rawMember(), rawMember()]))).toBe(
       'job.json: members[1].name: "G1" is also the name of members[0]; names must differ',

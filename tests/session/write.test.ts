@@ -1,10 +1,11 @@
-import { readdirSync, readFileSync } from 'node:fs';
+import { readFileSync } from 'node:fs';
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { newMember } from '../../src/session/new-member.ts';
 import type { Session } from '../../src/session/session.ts';
 import { writeSession } from '../../src/session/write.ts';
 import type { Member } from '../../src/timber/member.ts';
+import { SAMPLES } from '../support/samples.ts';
 import { member } from './arbitrary-member.ts';
 import { rawMember, rawSession, sessionOf } from './documents.ts';
 
@@ -176,8 +177,8 @@ describe('the text of a file', () => {
 `);
   });
 
-  test.each(readdirSync('sessions'))('of the sample %s is written back letter for letter', (file) => {
-    const text = readFileSync(`sessions/${file}`, 'utf8');
+  test.each(SAMPLES)('of the sample $title is written back letter for letter', ({ file }) => {
+    const text = readFileSync(file, 'utf8');
     expect(writeSession(sessionOf(text))).toBe(text);
   });
 });

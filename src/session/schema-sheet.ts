@@ -1,0 +1,26 @@
+import * as z from 'zod/mini';
+import type { PARTS } from './schema.ts';
+import { PAPERS } from './session.ts';
+
+/** Entries of a title block take one line of a page. */
+const ENTRY_LENGTH = 120;
+
+/** `sheet`: the title block of the calculation sheet, each entry of which may be left out, and its paper. */
+export function sheet({ text }: typeof PARTS) {
+  const entry = z.optional(text(0, ENTRY_LENGTH));
+  return z
+    .strictObject({
+      firm: entry,
+      job: entry,
+      jobNumber: entry,
+      by: entry,
+      checkedBy: entry,
+      revision: entry,
+      date: entry,
+      paper: z.optional(z.enum(PAPERS)),
+    })
+    .register(z.globalRegistry, {
+      description:
+        'the title block of the calculation sheet, on every page of it; each entry may be left out. The paper is Letter with US units, A4 with SI, where none is stated',
+    });
+}
