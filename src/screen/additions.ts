@@ -9,11 +9,12 @@ import {
   setFixed,
   setSupports,
 } from '../explore/beam-edits/edit-beam.ts';
+import { placedOn } from '../explore/beam-edits/placed.ts';
 import { KIND_WORD, LOAD_KINDS, type LoadKind } from '../loads/index.ts';
 import { showQuantity, showSpan, type Units } from '../quantity/index.ts';
 import { beamFields, MOST_LOADS, MOST_SPANS } from '../statics/index.ts';
 import type { Member } from '../timber/member.ts';
-import { placeName } from './place-words.ts';
+import { placeName } from '../timber/place-words.ts';
 
 /** One line of what can be added. */
 export interface Addition {
@@ -24,6 +25,8 @@ export interface Addition {
   readonly detail: string;
   /** A load asks for its kind next; anything else is done at once. */
   readonly load: NewLoad | null;
+  /** It asks in the links which member's reaction it is; absent: it does not. */
+  readonly links?: boolean;
   edit(): Edit;
 }
 
@@ -34,7 +37,14 @@ export function additionsTo(member: Member, inHand: string, units: Units): Addit
   const here = placeName(member, fieldInHand(member, inHand));
   const several = beamFields(beam).length > 1;
   const list: (Addition | false)[] = [
-    ...(member.loads.length < MOST_LOADS ? loadLines(member, here, several, inHand, units) : []),
+    ...(placedOn(member).length < MOST_LOADS ? loadLines(member, here, several, inHand, units) : []),
+    {
+      ...done('r', 'the reaction of another member', 'K shows and changes them', () => ({
+        member,
+        knob: inHand,
+      })),
+      links: true,
+    },
     onBearings &&
       beam.spans.length < MOST_SPANS &&
       done('s', 'a span at the right', `as long as the last, ${showSpan(beam.spans.at(-1)!, units)}`, () =>

@@ -1,3 +1,4 @@
+import { linksOf } from '../explore/links/index.ts';
 import { KIND_WORD, LOAD_KINDS } from '../loads/kinds.ts';
 import { showQuantity, showRatio, showSpan } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
@@ -17,12 +18,15 @@ export function answerText(state: State): readonly [string, string, string] {
     (kind) => `${KIND_WORD[kind]} ${showQuantity('areaLoad', member.area[kind], units)}`,
   );
   const others = member.loads.length === 0 ? [] : [`${member.loads.length} more loads`];
+  const names = [...new Set(linksOf(member).map((link) => link.member))];
+  const carried = names.length === 0 ? [] : [`carries ${names.join(', ')}`];
   const what = [
     `${sizeLabel(member.section, member.stock.product)} ${shortWood(member.stock)}`,
     `span ${spans}`,
     `tributary ${showSpan(member.tributary, units)}`,
     ...loads,
     ...others,
+    ...carried,
   ];
   const powers = answer.powers.flatMap(({ name, ratio }) =>
     ratio === null ? [] : [`${name} ${showRatio(ratio)}`],

@@ -15,7 +15,7 @@ const WIDE = 100;
 /** From here: the verdict on one row, reach and the full chart. */
 const WIDER = 120;
 /** From here: the moves beside the gauges. */
-const WIDEST = 160;
+export const WIDEST = 160;
 /** From here: the remarks in a column of their own. */
 const NOTES = 200;
 /** More is left blank: nothing would be gained by stretching. */
@@ -113,11 +113,19 @@ function knobColumns(width: number): number {
 
 function movesColumns(width: number): number {
   if (width < WIDEST) return 0;
-  return width >= NOTES ? 56 : 46;
+  return width >= NOTES ? 68 : 56;
 }
 
 /** Powers with demand and capacity, the others on two rows, exponents: what the middle holds at least. */
 const MIDDLE_ROWS = 1 + 6 + 2 + 4;
+/** Title, verdict, handover, a remark, foot. */
+const OTHER_ROWS = 1 + 2 + 1 + 1 + 1;
+
+/** The smallest screen with a chart on it; a row less where the verdict has one row. */
+export const CHART_NEEDS = {
+  columns: WIDE,
+  rows: OTHER_ROWS + MIDDLE_ROWS + 1 + RULER_ROWS + LEAST_CHART_ROWS,
+};
 
 /**
  * The rows of the middle where the rack has room below the ruler with a chart beside it; null where it has

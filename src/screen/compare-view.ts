@@ -1,3 +1,4 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { knobsOf } from '../explore/knobs/knobs.ts';
 import { costOf } from '../explore/moves/index.ts';
 import type { Ranking } from '../explore/rack/best.ts';
@@ -16,11 +17,10 @@ import { rankingOf } from '../session/index.ts';
 import { sizeLabel, woodOf } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId } from '../timber/report.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import { pinsOf } from './pins.ts';
-import { moneyText } from './signed.ts';
 import { memberOf, type State, unitsOf } from './state.ts';
-import { CHECK_WORD } from './words.ts';
 
 /** Designs side by side, the one at hand first. */
 export interface CompareView {

@@ -14,6 +14,7 @@ export type DiagramAction =
   | 'combination-before'
   | 'combination-after'
   | 'units'
+  | 'workings'
   | 'back';
 
 /** Every key of the diagrams view. */
@@ -40,6 +41,7 @@ export const DIAGRAM_BINDINGS: readonly {
     help: 'one combination at a time, and back to the envelope of all',
   },
   { keys: 'i', presses: { i: 'units' }, help: 'inches or SI' },
+  { keys: 'w', presses: { w: 'workings' }, help: 'workings: how the values at the cursor come about' },
   { keys: 'Esc, v or q', presses: { v: 'back', q: 'back', enter: 'back' }, help: 'back' },
 ];
 

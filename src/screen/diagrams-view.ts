@@ -1,7 +1,3 @@
-import type { Curve, CurvesOf } from '../loads/index.ts';
-import { reactionRange } from '../loads/index.ts';
-import { showSpan } from '../quantity/index.ts';
-import { beamLength } from '../statics/index.ts';
 import {
   basisOf,
   type DiagramModel,
@@ -14,9 +10,13 @@ import {
   unitOf,
   valuesAt,
   whereIs,
-} from './diagram-model.ts';
-import { DOTS_ACROSS } from './draw/braille.ts';
-import { type SketchView, sketchOf } from './sketch-model.ts';
+} from '../explore/diagrams/diagram-model.ts';
+import { type SketchView, sketchOf } from '../explore/diagrams/sketch-model.ts';
+import type { Curve, CurvesOf } from '../loads/index.ts';
+import { reactionRange } from '../loads/index.ts';
+import { showSpan } from '../quantity/index.ts';
+import { DOTS_ACROSS } from '../sheet/drawing/dots.ts';
+import { beamLength } from '../statics/index.ts';
 import { memberOf, type State, unitsOf } from './state.ts';
 import type { FootView } from './view.ts';
 
@@ -97,6 +97,7 @@ const FOOT: readonly FootView[] = [
   { keys: '↑↓', does: 'combination' },
   { keys: 'Esc', does: 'back' },
   { keys: 'i', does: 'units' },
+  { keys: 'w', does: 'workings' },
   { keys: 'Shift', does: 'x10' },
 ];
 
@@ -105,11 +106,11 @@ type Basis = ReturnType<typeof basisOf>;
 function whichText({ combinations, patterns }: Basis, which: CurvesOf): string {
   const count = combinations.length;
   if (which !== 'envelope') {
-    const behind = patterns > 1 ? 'its load patterns' : 'the envelope of all';
+    const behind = patterns.length > 1 ? 'its load patterns' : 'the envelope of all';
     return `${combinations[which]!.label}, ${which + 1} of ${count}; dotted: ${behind}`;
   }
   const all = count === 1 ? `${combinations[0]!.label} alone` : `envelope of ${count} combinations`;
-  return patterns > 1 ? `${all}, ${patterns} load patterns` : all;
+  return patterns.length > 1 ? `${all}, ${patterns.length} load patterns` : all;
 }
 
 function countsText(deadFactor: number, combinations: Basis['deflection'], which: CurvesOf): string {

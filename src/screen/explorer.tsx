@@ -1,9 +1,11 @@
-import { useApp } from 'ink';
-import { type ReactElement, useEffect, useRef, useState } from 'react';
+import { useApp, useIsScreenReaderEnabled } from 'ink';
+import { type ReactElement, useEffect, useLayoutEffect, useRef, useState } from 'react';
 import type { Glyphs } from './draw/glyphs.ts';
 import { Screen } from './draw/screen.tsx';
 import type { Theme } from './draw/theme.ts';
 import { drawState } from './draw-state.ts';
+import { Spoken } from './ear/spoken.tsx';
+import { pressName } from './keys.ts';
 import { restOf } from './rest.ts';
 import type { Effect, State } from './state.ts';
 import { useKeys } from './terminal/use-keys.ts';
@@ -18,13 +20,26 @@ interface ExplorerProps {
   readonly glyphs: Glyphs;
   /** Carries out what the state asks for and tells what came of it. */
   readonly perform: (effect: Effect) => Event | null;
+  /** Tells what happens outside without having been asked for; gives what ends it. */
+  readonly listen: (happen: (event: Event) => void) => () => void;
 }
 
 /** The loop: keys become events, events the next state, the state a screen. */
-export function Explorer({ initial, columns, rows, theme, glyphs, perform }: ExplorerProps): ReactElement {
+export function Explorer({
+  initial,
+  columns,
+  rows,
+  theme,
+  glyphs,
+  perform,
+  listen,
+}: ExplorerProps): ReactElement {
   const app = useApp();
   const state = useRef(initial);
   const [, redraw] = useState(0);
+  const byEar = useIsScreenReaderEnabled();
+  /** How often a listener asked to hear everything again. */
+  const again = useRef(0);
 
   const happen = (events: readonly Event[]): void => {
     const queue = [...events];
@@ -32,11 +47,11 @@ export function Explorer({ initial, columns, rows, theme, glyphs, perform }: Exp
       const step = update(state.current, event);
       state.current = step.state;
       for (const effect of step.effects) {
+        const after = perform(effect);
         if (effect.do === 'leave') {
           app.exit();
           return;
         }
-        const after = perform(effect);
         if (after !== null) queue.unshift(after);
       }
     }
@@ -44,9 +59,18 @@ export function Explorer({ initial, columns, rows, theme, glyphs, perform }: Exp
   };
 
   useKeys({
-    onKeys: (keys) => happen(keys.map((press) => ({ type: 'key', press }))),
+    onKeys: (keys) => {
+      if (byEar && keys.some((press) => pressName(press) === 'ctrl-l')) again.current += 1;
+      const time = Date.now();
+      happen(keys.map((press) => ({ type: 'key', press, time })));
+    },
     onPaste: (text) => happen([{ type: 'paste', text }]),
   });
+
+  // Its end is part of taking the screen down: a signal leaves no time for effects.
+  const told = useRef(happen);
+  told.current = happen;
+  useLayoutEffect(() => listen((event) => told.current([event])), [listen]);
 
   useEffect(() => {
     const rest = restOf(state.current);
@@ -60,6 +84,7 @@ export function Explorer({ initial, columns, rows, theme, glyphs, perform }: Exp
     state.current = update(state.current, { type: 'resize', columns, rows }).state;
   }
 
+  if (byEar) return <Spoken state={state.current} again={again.current} />;
   const { canvas, entry } = drawState(state.current, glyphs);
   return <Screen canvas={canvas} theme={theme} entry={entry} />;
 }

@@ -3,9 +3,9 @@ import { ASKS_NOTHING, powersOf, standsTo } from '../explore/powers.ts';
 import { ratiosOf } from '../explore/ratios.ts';
 import { showSmall, showStress, type Units } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
+import { measureName, patternText, placeOf } from '../timber/place-words.ts';
 import type { CheckResult } from '../timber/report.ts';
 import type { Answer } from './answer.ts';
-import { measureName, patternText, placeOf } from './place-words.ts';
 import { bandOf } from './scatter-text.ts';
 import type { ExponentView, GaugeView } from './view.ts';
 

@@ -8,10 +8,10 @@ import { showInches, showSpan, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Headroom, Member } from '../timber/member.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import { type HeadroomMode, memberOf, type State, unitsOf } from './state.ts';
 import type { View } from './view.ts';
-import { CHECK_WORD } from './words.ts';
 
 /** What the headroom view shows. */
 export interface HeadroomView extends Pick<View, 'knobs' | 'knob' | 'entry'> {

@@ -1,3 +1,4 @@
+import { BUYING_BINDINGS } from './buying-keys.ts';
 import { DIAGRAM_BINDINGS } from './diagram-keys.ts';
 import { BINDINGS, WORDS } from './keys.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
@@ -16,6 +17,14 @@ const OTHER_VIEWS: readonly HelpSection[] = [
       ['Esc', 'back; the key that opened it leaves it too'],
       ['↑↓ PgUp PgDn', 'scroll, or choose a line; Home and End go to its ends'],
       ['i', 'inches or SI, where figures are shown'],
+      ['w', 'workings of what the view shows, of the move or pin in hand; Esc leads back to it'],
+    ],
+  },
+  {
+    title: 'writing the sheet',
+    lines: [
+      ['Tab', 'of the whole job, or of the member in hand alone'],
+      ['Enter', 'write it; again: over the file that is there'],
     ],
   },
   {
@@ -29,12 +38,33 @@ const OTHER_VIEWS: readonly HelpSection[] = [
     title: 'adding',
     lines: [['↑↓ Enter', 'what to add, then of which kind; the key beside a line takes it at once']],
   },
-  { title: 'in the workings', lines: [['←→ or Tab', 'the number after, the number before']] },
+  {
+    title: 'in the workings',
+    lines: [
+      ['←→ or Tab', 'the number after, the number before'],
+      ['l', 'the list of all of them, to choose from'],
+    ],
+  },
   {
     title: 'in the moves',
     lines: [
       ['←→', 'deepen or widen, where the two stand side by side'],
       ['Enter', 'apply it; u undoes it'],
+    ],
+  },
+  {
+    title: 'in the trail',
+    lines: [
+      ['Enter', 'back to how the member stood after the line in hand; one change more, u undoes it'],
+      ['u r', 'undo, redo; the trail tells those too'],
+    ],
+  },
+  {
+    title: 'when not everything was kept',
+    lines: [
+      ['t', 'take what was recovered; s keeps it, u goes back to what the file holds'],
+      ['d', 'drop it'],
+      ['Esc', 'set it aside in a file of its own beside the session, NAME.recovered'],
     ],
   },
   {
@@ -44,6 +74,17 @@ const OTHER_VIEWS: readonly HelpSection[] = [
       ['Enter', 'go back to it'],
       ['n', 'write a note on it'],
       ['Delete', 'drop it'],
+    ],
+  },
+  {
+    title: 'in the links view',
+    lines: [
+      ['a', 'carry another member: choose which, Enter'],
+      ['←→ [ ] { }', 'nudge where it lands, or how far apart; Enter or a digit types it'],
+      ['e', 'another of its supports'],
+      ['t', 'once, or repeated along the member'],
+      ['Delete', 'take the link out'],
+      ['g', 'go to the other member; so does Enter where it carries this one'],
     ],
   },
   {
@@ -67,6 +108,10 @@ export function helpSections(): readonly HelpSection[] {
     {
       title: 'in the wood view',
       lines: WOOD_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
+    },
+    {
+      title: 'in the buying view',
+      lines: BUYING_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
     },
     ...OTHER_VIEWS,
     { title: 'words', lines: WORDS },

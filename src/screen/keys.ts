@@ -21,12 +21,15 @@ export type Action =
   | 'moves'
   | 'pin'
   | 'headroom'
+  | 'links'
+  | 'buying'
   | 'reach'
   | 'handovers'
   | 'best'
   | 'proportions'
   | 'scatter'
   | 'chart-scale'
+  | 'chart-of'
   | 'compare'
   | 'began'
   | 'mark-began'
@@ -35,6 +38,9 @@ export type Action =
   | 'wood'
   | 'units'
   | 'save'
+  | 'save-as'
+  | 'sheet'
+  | 'trail'
   | 'help'
   | 'workings'
   | 'leave'
@@ -144,6 +150,13 @@ export const BINDINGS: readonly Binding[] = [
     foot: 'scatter',
   },
   {
+    keys: 'C',
+    presses: ['C'],
+    action: 'chart-of',
+    help: 'the chart of the next: ratio, weight, capacity (the load it carries), each against the knob in hand',
+    foot: 'chart',
+  },
+  {
     keys: 'L',
     presses: ['L'],
     action: 'chart-scale',
@@ -156,6 +169,13 @@ export const BINDINGS: readonly Binding[] = [
     action: 'best',
     help: 'for what: what counts as best, the lightest, the shallowest, the least wood, the cheapest',
     foot: 'best',
+  },
+  {
+    keys: '$',
+    presses: ['$'],
+    action: 'buying',
+    help: 'buying: pieces, lengths, waste, weight and price of every size; prices and yard list typed or loaded',
+    foot: 'buying',
   },
   {
     keys: 'e',
@@ -177,6 +197,13 @@ export const BINDINGS: readonly Binding[] = [
     action: 'headroom',
     help: 'headroom: the storey to scale, the depth it leaves, the clear height below every size',
     foot: 'headroom',
+  },
+  {
+    keys: 'K',
+    presses: ['K'],
+    action: 'links',
+    help: 'links: the reactions of other members that this one carries, and what carries it',
+    foot: 'links',
   },
   {
     keys: 'o',
@@ -231,11 +258,18 @@ export const BINDINGS: readonly Binding[] = [
     keys: 'w',
     presses: ['w'],
     action: 'workings',
-    help: 'workings: the calculation behind what governs, then behind every other number',
+    help: 'workings: the calculation behind what governs, then behind every other number; with z on, behind the scatter first',
     foot: 'workings',
   },
   { keys: 'u', presses: ['u'], action: 'undo', help: 'undo', foot: 'undo' },
   { keys: 'r', presses: ['r'], action: 'redo', help: 'redo', foot: '' },
+  {
+    keys: 'T',
+    presses: ['T'],
+    action: 'trail',
+    help: 'trail: what was done to this member, when, from what to what; back to any point of it',
+    foot: 'trail',
+  },
   {
     keys: 'Tab',
     presses: ['tab'],
@@ -257,6 +291,20 @@ export const BINDINGS: readonly Binding[] = [
     action: 'save',
     help: 'keep: write the session to its file, the only key that does',
     foot: 'keep',
+  },
+  {
+    keys: 'A',
+    presses: ['A'],
+    action: 'save-as',
+    help: 'keep as: write the session to a file of another name, and go on there',
+    foot: 'keep as',
+  },
+  {
+    keys: 'S',
+    presses: ['S'],
+    action: 'sheet',
+    help: 'the sheet: the calculation written out, as .pdf, .html, .md or .txt',
+    foot: 'sheet',
   },
   {
     keys: '?',
@@ -310,10 +358,16 @@ export const WORDS: readonly (readonly [string, string])[] = [
   ['best', 'what counts: lightest, shallowest, least wood or cheapest; the lit size follows it'],
   ['◊ on the rack', 'it passes, and none that passes is as light and as shallow'],
   ['handover', 'the value of a knob at which the best size changes to the next'],
+  ['yard list', 'what the yard has: sizes, woods, the lengths they are stocked in, prices'],
   ['reach', 'the longest span at which a size still passes'],
+  ['link', 'a load that is the reaction of another member, and follows it'],
   ['move', 'one change that would help, with what it does and what it costs'],
+  ['sheet', 'the calculation written out, fit to hand over, with the title block of the session'],
   ['workings', 'the calculation behind a number, line by line, with clauses'],
+  ['untied', 'uplift at a support where no tie-down is stated: nothing holds it, so it does not pass'],
   ['pin', 'a design set aside to compare; kept in the session file'],
   ['where we began', 'a second ghost, set with O'],
+  ['trail', 'what was done to a member, in the order it was done; kept in the session file'],
   ['kept', 'what the file holds; s alone writes it'],
+  ['recovery journal', 'what is not kept yet, beside the file, for when the program is stopped'],
 ];

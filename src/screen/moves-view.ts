@@ -1,3 +1,4 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { type Move, type Moves, movesOf } from '../explore/moves/index.ts';
 import { powersOf } from '../explore/powers.ts';
@@ -7,11 +8,12 @@ import { showInches, showRatio, type Units, weightNumber, weightUnit } from '../
 import { rankingOf } from '../session/index.ts';
 import { prepare, standingDepth, standingWidth } from '../timber/index.ts';
 import type { CheckId } from '../timber/report.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { type Answer, answerOf } from './answer.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
-import { moneyText, signed } from './signed.ts';
+import { signed } from './signed.ts';
 import { type MovesMode, memberOf, type State, unitsOf } from './state.ts';
-import { CHECK_WORD } from './words.ts';
+import type { MovesTable } from './view.ts';
 
 /** The two ways to put in more wood. */
 export type Way = 'deepen' | 'widen';
@@ -20,14 +22,10 @@ export const WAYS: readonly Way[] = ['deepen', 'widen'];
 export const SIDE_LINES = 2;
 
 /** What the moves view shows, in words. */
-export interface MovesView {
+export interface MovesView extends MovesTable {
   /** "moves, lightest first" */
   readonly heading: string;
   readonly sides: readonly SideLine[];
-  readonly columns: readonly TableColumn[];
-  readonly rows: readonly TableRow[];
-  /** Said where there is no move. */
-  readonly none: string;
   /** Of the move in hand: each check with its ratio after, "bending 0.93". */
   readonly after: readonly string[];
   /** The move in hand in full: "closer spacing, 12": passes, with 1.33 x as many members". */
@@ -86,12 +84,19 @@ export function movesView(state: State, mode: MovesMode): MovesView {
       },
       { label: 'next size', sides: { deepen: sideView(stock.deepen), widen: sideView(stock.widen) } },
     ],
-    columns: columnsOf(moves, units, state.columns >= WIDE),
-    rows: moves.moves.map((move) => rowOf(move, units)),
-    none: 'No change of this member helps.',
+    ...movesTable(moves, units, state.columns >= WIDE ? WIDE_HEADS : CLOSE_HEADS),
     after: inHand === null ? [] : afterText(inHand),
     note: inHand === null ? '' : noteText(inHand, prepare(memberOf(state)).loaded),
     takes: inHand === null ? '' : takesText(inHand, units),
+  };
+}
+
+/** The moves as a table, best first, with the ratio of each power where `heads` names them. */
+export function movesTable(moves: Moves, units: Units, heads: readonly string[]): MovesTable {
+  return {
+    columns: columnsOf(moves, units, heads),
+    rows: moves.moves.map((move) => rowOf(move, units, heads.length)),
+    none: 'No change of this member helps.',
   };
 }
 
@@ -111,17 +116,20 @@ function sideView(move: Move | null): SideView | null {
 
 /** From this many columns the powers have their names above. */
 const WIDE = 100;
+const WIDE_HEADS = ['shear¹', 'bend²', 'defl³'];
+const CLOSE_HEADS = ['¹', '²', '³'];
 const WANTED: Readonly<Record<Best, number>> = { weight: 6, depth: 7, boardFeet: 9, price: 8 };
 const RATIOS_AT = 2;
+/** Cells of nearly any size with its grade: "GL 3-1/8x13-1/2 16F-1.3E". */
+const NAME = 25;
 
 /** What is wanted least of stands whatever else has no room. */
-function columnsOf({ best, moves }: Moves, units: Units, wide: boolean): TableColumn[] {
-  const heads = wide ? ['shear¹', 'bend²', 'defl³'] : ['¹', '²', '³'];
+function columnsOf({ best, moves }: Moves, units: Units, heads: readonly string[]): TableColumn[] {
   const measure = (key: Best, head: string): TableColumn =>
     key === best ? { head, align: 'right' } : { head, align: 'right', spare: WANTED[key] };
   return [
     { head: 'move', align: 'left' },
-    { head: 'to', align: 'left' },
+    { head: 'to', align: 'left', least: NAME },
     ...heads.map((head, at): TableColumn => ({ head, align: 'right', spare: 3 - at })),
     { head: 'worst', align: 'right' },
     { head: 'by', align: 'left', spare: 5 },
@@ -132,9 +140,11 @@ function columnsOf({ best, moves }: Moves, units: Units, wide: boolean): TableCo
   ];
 }
 
-function rowOf(move: Move, units: Units): TableRow {
+function rowOf(move: Move, units: Units, powers: number): TableRow {
   const { change, passes, governing, worst } = move;
-  const ratios = powersOf(move.ratios).map(({ ratio }) => (ratio === null ? '—' : showRatio(ratio)));
+  const ratios = powersOf(move.ratios)
+    .slice(0, powers)
+    .map(({ ratio }) => (ratio === null ? '—' : showRatio(ratio)));
   return {
     cells: [
       move.kind,

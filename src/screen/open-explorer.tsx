@@ -1,10 +1,11 @@
 import type { ReactElement } from 'react';
+import type { Keeper } from '../files/keeper.ts';
 import type { Session } from '../session/session.ts';
 import { chooseGlyphs } from './draw/glyphs.ts';
 import { chooseTheme } from './draw/theme.ts';
 import { Explorer } from './explorer.tsx';
 import { START } from './modes/start.ts';
-import type { Effect, State } from './state.ts';
+import { type Effect, EXPLORE, type Mode, type SheetAnswer, type State, type YardAnswer } from './state.ts';
 import type { Size } from './terminal/open.tsx';
 import type { Event } from './update.ts';
 
@@ -15,9 +16,16 @@ export interface ExplorerOptions {
   readonly env: Readonly<Record<string, string | undefined>>;
   /** Sends text to the clipboard, where the terminal takes that. */
   readonly copy: (text: string) => void;
-  /** Writes a session; null when kept, else the reason why not. */
-  readonly save: (file: string, session: Session, fresh: boolean) => string | null;
+  /** Writes the session, its recovery journal, and nothing where it may not. */
+  readonly keeper: Keeper;
+  /** Writes a calculation sheet, by and by. */
+  readonly writeSheet: (wanted: SheetWanted) => Promise<SheetAnswer['outcome']>;
+  /** Reads a yard list by its name, for a session of this file. */
+  readonly readYard: (name: string, session: Session, file: string | null) => YardAnswer;
 }
+
+/** A sheet as the screen asks for it. */
+export type SheetWanted = Extract<Effect, { readonly do: 'write-sheet' }>;
 
 /** What `openScreen` draws for the explorer at each size. */
 export function openExplorer({
@@ -25,7 +33,9 @@ export function openExplorer({
   session,
   env,
   copy,
-  save,
+  keeper,
+  readYard,
+  writeSheet,
 }: ExplorerOptions): (size: Size) => ReactElement {
   const theme = chooseTheme(env);
   const glyphs = chooseGlyphs(env);
@@ -38,19 +48,47 @@ export function openExplorer({
     past: [],
     future: [],
     ghost: null,
-    mode: session === null ? START : { name: 'explore' },
-    notice: null,
+    readOnly: keeper.readOnly,
+    mode: firstMode(session, keeper),
+    notice: keeper.notice === null ? null : { text: keeper.notice, refusal: true },
     settled: false,
     ...size,
   });
   let first: State | null = null;
+  let tell: (event: Event) => void = () => undefined;
   const perform = (effect: Effect): Event | null => {
     if (effect.do === 'copy') copy(effect.text);
+    if (effect.do === 'read-yard')
+      return { type: 'yard', answer: readYard(effect.name, effect.session, effect.file) };
+    if (effect.do === 'write-sheet') {
+      const { file } = effect;
+      void writeSheet(effect).then((outcome) => tell({ type: 'sheet', answer: { file, outcome } }));
+    }
+    if (effect.do === 'journal') keeper.note(effect.session);
+    if (effect.do === 'leave') keeper.note(null);
+    if (effect.do === 'answer-recovered') {
+      const text = keeper.answer(effect.answer);
+      return text === null ? null : { type: 'told', text, refusal: false };
+    }
     if (effect.do !== 'save') return null;
-    const reason = save(effect.file, effect.session, effect.fresh);
-    return reason === null
-      ? { type: 'saved', file: effect.file, session: effect.session, thenLeave: effect.thenLeave }
-      : { type: 'save-failed', reason };
+    const { file, session, thenLeave } = effect;
+    const outcome = keeper.save(effect);
+    switch (outcome.kind) {
+      case 'saved':
+        return { type: 'saved', file, session, thenLeave };
+      case 'changed':
+        return { type: 'changed-on-disk', thenLeave };
+      case 'failed':
+        return { type: 'save-failed', reason: outcome.reason };
+    }
+  };
+  const listen = (happen: (event: Event) => void): (() => void) => {
+    tell = happen;
+    keeper.listen((text) => happen({ type: 'told', text, refusal: true }));
+    return () => {
+      tell = () => undefined;
+      keeper.close();
+    };
   };
   return (size) => {
     first ??= initial(size);
@@ -62,9 +100,16 @@ export function openExplorer({
         theme={theme}
         glyphs={glyphs}
         perform={perform}
+        listen={listen}
       />
     );
   };
+}
+
+/** What was not kept is asked about before anything else. */
+function firstMode(session: Session | null, { recovered }: Keeper): Mode {
+  const after = session === null ? START : EXPLORE;
+  return recovered === null ? after : { name: 'recovered', recovered, scroll: 0, after };
 }
 
 /** Before the first question is answered there is no member to show. */

@@ -47,16 +47,15 @@ export function backTo(state: State, design: Member, what: string): State {
   const before = memberOf(state);
   const { name, note, count } = before;
   if (isSame(design, before)) return { ...state, notice: { text: `this is ${what}`, refusal: false } };
+  const back = withMember(state, { ...design, name, note, count });
+  if (back.session === state.session) return back;
   const notice = { text: `back to ${what}; u undoes it`, refusal: false };
-  return {
-    ...withMember(state, { ...design, name, note, count }),
-    ghost: { knob: 'pins', member: before },
-    notice,
-  };
+  return { ...back, ghost: { knob: 'pins', member: before }, notice };
 }
 
-/** Designs that say the same, whatever they are called. */
+/** Designs that say the same, whatever they are called and whatever others bring them by now. */
 function isSame(one: Member, other: Member): boolean {
-  const plain = ({ name: _name, note: _note, count: _count, ...design }: Member) => JSON.stringify(design);
+  const plain = ({ name: _name, note: _note, count: _count, ...design }: Member) =>
+    JSON.stringify(design, (key, value) => (key === 'bears' ? undefined : value));
   return one === other || plain(one) === plain(other);
 }

@@ -1,6 +1,6 @@
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
+import { type Band, usualBands } from '../explore/usual-proportions.ts';
 import { rankingOf } from '../session/index.ts';
-import type { Member } from '../timber/member.ts';
 import { answerOf } from './answer.ts';
 import { pinsOf } from './pins.ts';
 import { memberOf, type State } from './state.ts';
@@ -23,24 +23,6 @@ export interface ProportionView {
   readonly sources: string;
 }
 
-/** A stretch of l/h that is usual. */
-export interface Band {
-  readonly label: string;
-  /** 0: from the beginning of the axis. */
-  readonly from: number;
-  readonly to: number;
-}
-
-/** Usual l/h of timber: common practice, no source. */
-const TIMBER_BANDS: readonly Band[] = [
-  { label: 'joists', from: 16, to: 24 },
-  { label: 'girders', from: 10, to: 16 },
-  { label: 'glulam', from: 14, to: 20 },
-];
-
-/** Largest l/h of concrete beams whose deflection is not calculated (ACI 318-19 Table 9.3.1.1, from memory). */
-const CONCRETE = { simple: 16, oneEndContinuous: 18.5, bothEndsContinuous: 21, cantilever: 8 } as const;
-
 export function proportionView(state: State): ProportionView {
   const member = memberOf(state);
   const ranking = rankingOf(state.session);
@@ -54,15 +36,7 @@ export function proportionView(state: State): ProportionView {
       spanToDepth: spanToDepthOf(pin.member),
       worst: answerOf(pin.member, ranking).worst,
     })),
-    bands: [...TIMBER_BANDS, { label: 'concrete', from: 0, to: concreteLimit(member) }],
+    bands: usualBands(member),
     sources: 'usual: common practice; concrete at most: ACI 318 Table 9.3.1.1 (from memory)',
   };
-}
-
-/** By the supports of the member as a whole; of several spans the end ones decide. */
-function concreteLimit({ beam }: Member): number {
-  if (beam.supports === 'cantilever') return CONCRETE.cantilever;
-  if (beam.fixed.left && beam.fixed.right) return CONCRETE.bothEndsContinuous;
-  const continuous = beam.spans.length > 1 || beam.fixed.left || beam.fixed.right;
-  return continuous ? CONCRETE.oneEndContinuous : CONCRETE.simple;
 }

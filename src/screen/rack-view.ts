@@ -1,3 +1,4 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { powersOf } from '../explore/powers.ts';
 import { BEST_WORD } from '../explore/rack/best.ts';
 import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack/rack.ts';
@@ -23,9 +24,9 @@ import {
   timberNominalOf,
 } from '../timber/index.ts';
 import type { Member, Stock } from '../timber/member.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import type { Answer } from './answer.ts';
 import type { RackView, RulerView } from './view.ts';
-import { CHECK_WORD } from './words.ts';
 
 export function rulerOf(member: Member, answer: Answer, ghost: Member | null): RulerView {
   const { shearToBending, bendingToDeflection, shearToDeflection } = answer.crossovers;
@@ -55,6 +56,7 @@ function depthLabel({ product }: Stock, depth: number): string {
 export function rackView(member: Member, answer: Answer, units: Units, settled: boolean): RackView {
   const { rack } = answer;
   const mixed = rack.woods.length > 1;
+  const priced = rack.sizes.some((each) => each.price !== null);
   return {
     wood: mixed ? `${rack.woods.length} woods` : shortWood(member.stock),
     weightUnit: weightUnit(units),
@@ -71,6 +73,7 @@ export function rackView(member: Member, answer: Answer, units: Units, settled: 
         ratios: [shear!, bending!, deflection!] as const,
         passes: each.passes,
         nonDominated: each.nonDominated,
+        ...(priced ? { price: each.price === null ? '—' : moneyText(each.price) } : {}),
         lacking: each.inYard === false,
         stops: stopsWord(each, units),
         // Found for the rows that are drawn alone: a long rack holds many that are not.

@@ -1,3 +1,4 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { gradeWord, hasSize } from '../explore/rack/rack.ts';
 import type { RankedSize } from '../explore/rack/ranked.ts';
 import { refusedWord } from '../explore/rack/refused-word.ts';
@@ -11,11 +12,10 @@ import {
   weightUnit,
 } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
-import { moneyText } from './signed.ts';
 import { memberOf, type State, unitsOf } from './state.ts';
-import { CHECK_WORD } from './words.ts';
 
 /** The longest span of every size of the rack, and what stops it there. */
 export interface ReachView {

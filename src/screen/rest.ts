@@ -1,5 +1,7 @@
 import { isQuick } from '../explore/is-quick.ts';
+import { watched } from './carriers.ts';
 import { isAroundMissing, stripOf, withAround } from './handover-now.ts';
+import { isMovesMissing, withMoves } from './moves-beside.ts';
 import { stripRows } from './panels/strip.ts';
 import { windowStart } from './panels/table.ts';
 import { memberOf, type State } from './state.ts';
@@ -9,7 +11,7 @@ export function restOf(state: State): { readonly ms: number } | null {
   if (!state.settled) return { ms: state.session.members.length > 0 && isQuick(memberOf(state)) ? 0 : IDLE };
   if (state.mode.name === 'handovers') return state.mode.strip === null ? { ms: 0 } : null;
   if (state.session.members.length === 0) return null;
-  return isAroundMissing(state) ? { ms: IDLE } : null;
+  return state.watch !== undefined || isAroundMissing(state) || isMovesMissing(state) ? { ms: IDLE } : null;
 }
 
 /** Longer than a held key takes from one to the next (30 a second), so that a search never holds one up. */
@@ -19,7 +21,9 @@ const IDLE = 60;
 export function rested(state: State): State {
   if (!state.settled) return { ...state, settled: true };
   if (state.mode.name === 'handovers') return state.mode.strip === null ? withStrip(state) : state;
-  return isAroundMissing(state) ? withAround(state) : state;
+  if (state.watch !== undefined) return watched(state);
+  if (isAroundMissing(state)) return withAround(state);
+  return isMovesMissing(state) ? withMoves(state) : state;
 }
 
 /** With the strip found, scrolled to the stretch that holds now. */

@@ -5,8 +5,3 @@ export function signed(value: number | null, show: (size: number) => string): st
   if (!/[1-9]/.test(text)) return '0';
   return `${value < 0 ? '−' : '+'}${text}`;
 }
-
-/** Money, in whatever the yard list is written in. */
-export function moneyText(amount: number): string {
-  return amount.toFixed(2);
-}

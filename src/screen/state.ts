@@ -1,11 +1,19 @@
 import type { NewLoad } from '../explore/beam-edits/edit-beam.ts';
+import type { YardRow } from '../explore/buying/yard.ts';
 import { knobsOf } from '../explore/knobs/knobs.ts';
+import { linkFault, resolved } from '../explore/links/index.ts';
+import type { ReadOnly, Recovered, RecoveredAnswer } from '../files/keeper.ts';
 import type { CurvesOf } from '../loads/index.ts';
 import type { Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
+import { sameButTrails } from '../session/trail.ts';
+import type { Size } from '../timber/index.ts';
 import type { Member, Product } from '../timber/member.ts';
+import type { Watch } from './carriers.ts';
+import type { ChartOf } from './chart-view.ts';
 import type { Edit } from './edit.ts';
-import type { FoundAround, Strip } from './handover-now.ts';
+import type { FoundAround, FoundMoves, Strip } from './found.ts';
+import type { Run } from './trail.ts';
 
 /** Everything the explorer knows; one value, never changed in place. */
 export interface State {
@@ -18,15 +26,23 @@ export interface State {
   readonly member: number;
   /** Key of the knob in hand. */
   readonly knob: string;
+  /** Why the file is not written; absent or null where it is. */
+  readonly readOnly?: ReadOnly | null;
   readonly past: readonly Moment[];
   readonly future: readonly Moment[];
+  /** What a key has just done, where the change does not say it itself; for the trail, which takes it away. */
+  readonly doing?: string;
+  /** The changes of one thing that the trail tells as one while they go on. */
+  readonly run?: Run | null;
   /** Where the run of nudges on one knob began. */
   readonly ghost: { readonly knob: string; readonly member: Member } | null;
   /** By member's name, where the user said that we began; a name that is absent began as it was opened. */
   readonly began?: Readonly<Record<string, Member>>;
   /** What the scatter of stiffness comes to is told among the remarks. */
   readonly scatter?: boolean;
-  /** The chart's ratio axis is even; absent or false: logarithmic. */
+  /** What the chart is of; absent: the ratios of the powers. */
+  readonly chart?: ChartOf;
+  /** The chart's axis of figures is even; absent or false: logarithmic. */
   readonly linear?: boolean;
   readonly mode: Mode;
   readonly notice: Notice | null;
@@ -37,8 +53,12 @@ export interface State {
    * the rest (cures, reach, exponents, chart) with the next frame, which follows as soon as no key waits.
    */
   readonly settled: boolean;
+  /** Members that carry a changed one, still to be looked at; absent: none. */
+  readonly watch?: Watch;
   /** The handovers that were found last; they hold for their own member and knob alone. */
   readonly found?: FoundAround;
+  /** The moves that were found last; they hold for their own member alone. */
+  readonly foundMoves?: FoundMoves;
 }
 
 /** A point to come back to. */
@@ -63,8 +83,11 @@ export type Mode =
       readonly fault: string | null;
       readonly thenLeave: boolean;
     }
+  | { readonly name: 'changed-on-disk'; readonly thenLeave: boolean }
+  | RecoveredMode
+  | TrailMode
   | { readonly name: 'help'; readonly scroll: number }
-  | { readonly name: 'workings'; readonly page: number; readonly scroll: number }
+  | WorkingsMode
   | DiagramsMode
   | WoodMode
   | AddMode
@@ -72,11 +95,31 @@ export type Mode =
   | CompareMode
   | HandoversMode
   | HeadroomMode
+  | LinksMode
+  | BuyingMode
+  | SheetMode
   | { readonly name: 'copy' }
   | { readonly name: 'proportions' }
   | { readonly name: 'reach'; readonly scroll: number }
   | { readonly name: 'leaving' }
   | StartMode;
+
+/** Where the calculation sheet shall be written. */
+export interface SheetMode {
+  readonly name: 'sheet';
+  readonly edit: Edit;
+  readonly fault: string | null;
+  /** Of the whole job; false: of the member in hand alone. */
+  readonly whole: boolean;
+  /** The file that is there already, of which that was told. */
+  readonly over: string | null;
+}
+
+/** What came of writing a sheet; `there`: a file of the name is there already, and was not written over. */
+export interface SheetAnswer {
+  readonly file: string;
+  readonly outcome: 'written' | 'there' | { readonly fault: string };
+}
 
 /** Choosing the wood of the member in hand. */
 export interface WoodMode {
@@ -93,6 +136,18 @@ export interface WoodMode {
   readonly fault: string | null;
   /** First line shown of what the wood brings. */
   readonly scroll: number;
+}
+
+/** The calculations, page by page. */
+export interface WorkingsMode {
+  readonly name: 'workings';
+  /** Index of the page; counted on round and round. */
+  readonly page: number;
+  readonly scroll: number;
+  /** Line in hand of the list of pages; null while a page is shown. */
+  readonly line: number | null;
+  /** Where Escape leads back to; what stands in hand there says whose calculations these are. */
+  readonly from: Mode;
 }
 
 /** The beam with its diagrams. */
@@ -124,12 +179,45 @@ export interface HeadroomMode {
   readonly fault: string | null;
 }
 
+/** What each size takes to buy. */
+export interface BuyingMode {
+  readonly name: 'buying';
+  /** The size in hand: of the rack; null: the member's own. */
+  readonly size: Size | null;
+  /** What is being typed; null while nothing is. */
+  readonly asks: BuyingQuestion | null;
+}
+
+export interface BuyingQuestion {
+  /** A price of the piece in hand or of its wood, a line of the yard list, the file of a list. */
+  readonly of: 'price' | 'wood price' | 'line' | 'file';
+  readonly edit: Edit;
+  /** Why what was typed may not be. */
+  readonly fault: string | null;
+}
+
 /** The handovers along the knob in hand. */
 export interface HandoversMode {
   readonly name: 'handovers';
   /** null: still being found. */
   readonly strip: Strip | null;
   readonly scroll: number;
+}
+
+/** What was done to the member in hand. */
+export interface TrailMode {
+  readonly name: 'trail';
+  /** How many of the entries are done at the line in hand: 0 before all of them. */
+  readonly line: number;
+}
+
+/** The question of what is to become of what was not kept when the program last ended. */
+export interface RecoveredMode {
+  readonly name: 'recovered';
+  readonly recovered: Recovered;
+  readonly scroll: number;
+  /** Where it goes on. */
+  readonly after: Mode;
 }
 
 /** Designs side by side. */
@@ -140,6 +228,17 @@ export interface CompareMode {
   readonly scroll: number;
   /** The note of the pin in hand being typed; null while none is. */
   readonly edit: Edit | null;
+}
+
+/** What the member in hand carries of others, and what carries it. */
+export interface LinksMode {
+  readonly name: 'links';
+  /** Index among the lines that can be taken in hand. */
+  readonly line: number;
+  /** It is asked which member to carry. */
+  readonly choosing: boolean;
+  /** The place or spacing being typed, by the key of its knob; null while none is. */
+  readonly typing: { readonly knob: string; readonly edit: Edit; readonly fault: string | null } | null;
 }
 
 /** The list of moves. */
@@ -177,6 +276,11 @@ export function still(state: State): Step {
   return { state, effects: [] };
 }
 
+/** The lines of a yard list with the name that a session keeps it by, or why there are none, with the way out. */
+export type YardAnswer =
+  | { readonly ok: true; readonly file: string; readonly rows: readonly YardRow[] }
+  | { readonly ok: false; readonly fault: string };
+
 /** What is to be done outside the state; carried out in one place. */
 export type Effect =
   | {
@@ -184,10 +288,30 @@ export type Effect =
       readonly file: string;
       readonly session: Session;
       readonly fresh: boolean;
+      /** Also over what somebody else has written meanwhile. */
+      readonly over: boolean;
       readonly thenLeave: boolean;
     }
+  /** Note the session in the recovery journal; null: the file holds all of it. */
+  | { readonly do: 'journal'; readonly session: Session | null }
+  | { readonly do: 'answer-recovered'; readonly answer: RecoveredAnswer }
   /** Put text on the clipboard, where the terminal takes that. */
   | { readonly do: 'copy'; readonly text: string }
+  /** Read the yard list of this name, beside the session's file. */
+  | {
+      readonly do: 'read-yard';
+      readonly name: string;
+      readonly session: Session;
+      readonly file: string | null;
+    }
+  /** Write the calculation sheet of these members; `over`: also over a file that is there. */
+  | {
+      readonly do: 'write-sheet';
+      readonly file: string;
+      readonly session: Session;
+      readonly members: Session['members'];
+      readonly over: boolean;
+    }
   | { readonly do: 'leave' };
 
 export function memberOf(state: State): Member {
@@ -198,8 +322,9 @@ export function unitsOf(state: State): Units {
   return state.session.units;
 }
 
+/** Nothing but what was done to get there tells the session from the file. */
 export function isKept(state: State): boolean {
-  return state.session === state.kept;
+  return state.kept !== null && sameButTrails(state.session, state.kept);
 }
 
 /** The state with the member in hand changed; what was is put on the past. */
@@ -210,8 +335,14 @@ export function withMember(state: State, member: Member): State {
   return withSession(state, { ...state.session, members });
 }
 
-/** The state with another session; what was is put on the past. */
-export function withSession(state: State, session: Session): State {
+/**
+ * The state with another session, what its links bring worked out; what was is put on the past. Refused where a link
+ * would lead nowhere or in a circle.
+ */
+export function withSession(state: State, changed: Session): State {
+  const fault = linkFault(changed);
+  if (fault !== null) return refused(state, `${changed.members[fault.member]!.member.name}: ${fault.text}`);
+  const session = resolved(changed);
   return { ...state, session, past: [...state.past, momentOf(state)], future: [], notice: null };
 }
 

@@ -16,11 +16,11 @@ import {
 } from '../quantity/index.ts';
 import type { Size } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
+import { checkAndPlace, isPlain, patternText } from '../timber/place-words.ts';
 import { PASS_LIMIT } from '../timber/report.ts';
+import { CHECK_SUBJECT } from '../timber/words.ts';
 import type { Answer } from './answer.ts';
-import { checkAndPlace, isPlain, patternText } from './place-words.ts';
 import type { VerdictView } from './view.ts';
-import { CHECK_SUBJECT } from './words.ts';
 
 /**
  * The sentence of the meeting: what stops the member and the nearest cures, or what it still has in hand. Where it is
@@ -46,7 +46,7 @@ function reasonOf(member: Member, answer: Answer, passes: boolean): string {
     // The word before it says that everything passes.
     return sentence.length <= MOST_REASON ? sentence : `${name(true)} ${nearest}`;
   }
-  if (!Number.isFinite(answer.worst)) return `${name(true)} stops it: no tie-down is stated.`;
+  if (!Number.isFinite(answer.worst)) return `${name(true)} stops it: it is untied.`;
   const sentence = `${name(true)} stops it at ${ratio}`;
   const pattern = result === undefined ? '' : patternText(result);
   return `${sentence}${sentence.length + pattern.length <= MOST_REASON ? pattern : ''}.`;

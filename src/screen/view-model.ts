@@ -1,28 +1,29 @@
 import type { Cure } from '../explore/cures.ts';
+import { spanKnob } from '../explore/curve.ts';
 import type { Knob } from '../explore/knobs/knob.ts';
 import { sizeName } from '../explore/rack/rack.ts';
-import { fieldKey } from '../explore/span-to-depth.ts';
 import { showQuantity, showSpan, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { beamFields } from '../statics/index.ts';
 import { assumptionsOf, governingField, lineLoadOf, sectionWeight } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
+import { measureName } from '../timber/place-words.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { type Answer, answerOf } from './answer.ts';
 import { beganMark } from './began.ts';
 import { chartView } from './chart-view.ts';
 import { exponentsView, gaugesOf } from './gauge-view.ts';
 import { handoverText } from './handover-now.ts';
 import { type Action, BINDINGS } from './keys.ts';
-import { measureName } from './place-words.ts';
+import { movesBeside } from './moves-beside.ts';
 import { rackView, rulerOf } from './rack-view.ts';
 import { scatterRemarks } from './scatter-text.ts';
 import { isKept, knobInHand, memberOf, type State, unitsOf } from './state.ts';
 import { verdictOf } from './verdict-text.ts';
 import type { CureView, FootView, KnobView, View } from './view.ts';
-import { CHECK_WORD } from './words.ts';
 
 /** Screens from this width show what is dearer to work out: exponents, chart; from the next reach and moves. */
-export const WIDE = 100;
+const WIDE = 100;
 export const WIDER = 120;
 
 /** The frame for a state. */
@@ -54,6 +55,7 @@ export function viewOf(state: State): View {
     handover: settled ? handoverText(state) : null,
     chart: wide ? chartOf(state, member, knobs, index) : null,
     cures: cures.map((cure) => cureView(member, answer, cure, units)),
+    moves: movesBeside(state),
     remarks: [
       ...(state.scatter ? scatterRemarks(member, answer.powers[2].ratio) : []),
       ...remarksOf(member, answer, units, state.columns),
@@ -76,14 +78,13 @@ export function viewOf(state: State): View {
 }
 
 function chartOf(state: State, member: Member, knobs: readonly Knob[], index: number): View['chart'] {
-  const chart = chartView(member, knobs[index]!, spanKnob(member, knobs), unitsOf(state), state.settled);
-  return chart === null || !state.linear ? chart : { ...chart, linear: true };
-}
-
-/** The knob of the length that l/h goes by: what a chart is drawn against where the knob in hand is a choice. */
-function spanKnob(member: Member, knobs: readonly Knob[]): Knob {
-  const key = fieldKey(member, governingField(member));
-  return knobs.find((knob) => knob.key === key) ?? knobs[0]!;
+  const asked = {
+    of: state.chart ?? 'ratio',
+    linear: state.linear === true,
+    ranking: rankingOf(state.session),
+    units: unitsOf(state),
+  } as const;
+  return chartView(member, knobs[index]!, spanKnob(member, knobs), asked, state.settled);
 }
 
 /** The first row of every view of a member. */
@@ -94,8 +95,13 @@ export function titleOf(state: State): View['title'] {
     member: member.note === '' ? member.name : `${member.name} ${member.note}`,
     method: `ASD, NDS 2018, ${member.service}`,
     position: `${state.member + 1} of ${state.session.members.length}`,
-    kept: isKept(state) ? 'kept' : 'not kept',
+    kept: keptText(state),
   };
+}
+
+function keptText(state: State): string {
+  if (state.readOnly === 'asked') return 'read-only';
+  return isKept(state) ? 'kept' : 'not kept';
 }
 
 function cureView(member: Member, answer: Answer, cure: Cure, units: Units): CureView {
@@ -169,12 +175,16 @@ const FOOT_ORDER: readonly Action[] = [
   'next-member',
   'best',
   'reach',
+  'buying',
   'handovers',
   'headroom',
   'proportions',
+  'chart-of',
   'scatter',
   'copy',
   'began',
+  'trail',
+  'save-as',
   'leave',
   'help',
 ];

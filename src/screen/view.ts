@@ -1,4 +1,5 @@
 import type { Style } from './draw/canvas.ts';
+import type { TableColumn, TableRow } from './panels/table.ts';
 
 /**
  * Everything one frame of the explorer shows, as words and numbers already in the user's units.
@@ -22,6 +23,8 @@ export interface View {
   readonly handover: string | null;
   readonly chart: ChartView | null;
   readonly cures: readonly CureView[];
+  /** Beside the gauges, best first; absent or null until they are found: the cures stand there. */
+  readonly moves?: MovesTable | null;
   /** Lines about what is assumed and warned, most worth first. */
   readonly remarks: readonly string[];
   readonly foot: readonly FootView[];
@@ -131,6 +134,8 @@ export interface RackRowView {
   readonly passes: boolean;
   /** It passes, and none that passes is as light and as shallow. */
   readonly nonDominated?: boolean;
+  /** One member of it: "43.20", or that there is none; absent where nothing on the rack has a price. */
+  readonly price?: string;
   /** The yard does not have it, or none so long. */
   readonly lacking?: boolean;
   /** What stops it: "bending", "uplift", or the clause that refuses the size. Empty when it passes. */
@@ -142,14 +147,46 @@ export interface RackRowView {
 export interface ChartView {
   /** "ratio against span" */
   readonly title: string;
+  /** What the lines are, on a row of its own: the first of these that fits whole; absent: nothing is told. */
+  readonly key?: readonly string[];
   /** Sampled at equal steps of the knob: one series a power; NaN where there is no value. */
-  readonly series: readonly { readonly power: 1 | 2 | 3; readonly ratios: readonly number[] }[];
+  readonly series: readonly ChartSeries[];
+  /** The axis of the figures; absent: ratios, as the gauges are, with the limit at 1. */
+  readonly axis?: ChartAxis;
+  /** Places along the knob's axis, 0 to 1, where another power comes to govern, with the figure there; absent: not marked. */
+  readonly crossovers?: readonly (readonly [at: number, figure: number])[];
   /** The ratio axis is even from 0 to twice the limit; absent: logarithmic, as the gauges are. */
   readonly linear?: boolean;
   /** Where the knob stands now, 0 to 1 along the axis. */
   readonly now: number;
   /** Labels at 0, 1/4, 1/2, 3/4, 1 of the axis. */
   readonly labels: readonly string[];
+}
+
+export interface ChartSeries {
+  /** The line it is drawn in: of a power, of checks outside the powers, or that of a limit. */
+  readonly power: 1 | 2 | 3 | 'other' | 'limit';
+  /** Ratios, or the figures of the axis. */
+  readonly ratios: readonly number[];
+  /** Where it stands now, where that is known better than from the samples on either side. */
+  readonly now?: number;
+}
+
+/** An axis of figures: marks are what is written along it. */
+export interface ChartAxis {
+  readonly from: number;
+  readonly to: number;
+  /** Else logarithmic. */
+  readonly even: boolean;
+  readonly marks: readonly (readonly [figure: number, label: string])[];
+}
+
+/** Moves as a table, best first. */
+export interface MovesTable {
+  readonly columns: readonly TableColumn[];
+  readonly rows: readonly TableRow[];
+  /** Said where there is no move. */
+  readonly none: string;
 }
 
 export interface CureView {

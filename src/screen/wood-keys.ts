@@ -14,6 +14,7 @@ export type WoodAction =
   | 'page-up'
   | 'page-down'
   | 'take'
+  | 'workings'
   | 'back';
 
 /** Every key of the wood view. */
@@ -61,6 +62,12 @@ export const WOOD_BINDINGS: readonly {
     presses: { pageup: 'page-up', pagedown: 'page-down' },
     help: 'more of what the wood brings',
     foot: 'more',
+  },
+  {
+    keys: 'Ctrl W',
+    presses: { 'ctrl-w': 'workings' },
+    help: 'workings: how the values and factors of the wood as chosen come about',
+    foot: 'workings',
   },
   {
     keys: '0-9 a-z',

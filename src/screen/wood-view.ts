@@ -1,7 +1,9 @@
 import { PRODUCT_WORD, shortGrade, woodKnobs } from '../explore/knobs/wood.ts';
+import { BEST_WORD, type Ranking } from '../explore/rack/best.ts';
 import { gradesByStrength, valuesOf, withProduct, withSpecies } from '../explore/rack/choose-wood.ts';
 import { sizeName } from '../explore/rack/rack.ts';
 import { showRatio, showStress, toUnit, type Units } from '../quantity/index.ts';
+import { rankingOf } from '../session/index.ts';
 import {
   checkStock,
   type DesignValues,
@@ -17,12 +19,12 @@ import {
 } from '../timber/index.ts';
 import { type Member, PRODUCTS, type Section, type Stock } from '../timber/member.ts';
 import type { CheckResult } from '../timber/report.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import type { Style } from './draw/canvas.ts';
 import { memberOf, type State, unitsOf, type WoodMode } from './state.ts';
 import type { FootView, View } from './view.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
-import { CHECK_WORD } from './words.ts';
 
 /** Everything one frame of the wood view shows. */
 export interface WoodView extends Pick<View, 'knobs' | 'knob' | 'entry'> {
@@ -60,6 +62,7 @@ export function woodViewOf(state: State, mode: WoodMode): WoodView {
   const { draft } = mode;
   const before = memberOf(state);
   const units = unitsOf(state);
+  const ranking = rankingOf(state.session);
   const knobs = woodKnobs(draft);
   const inHand = Math.max(
     0,
@@ -84,11 +87,15 @@ export function woodViewOf(state: State, mode: WoodMode): WoodView {
             fault: mode.fault,
             hint: `${knobs[inHand]!.label}: ${knobs[inHand]!.hint(units)}`,
           },
-    verdict: refused === null ? verdictOf(draft) : [line(`May not be: ${refused}`, 'governsStrong')],
+    verdict: refused === null ? verdictOf(draft, ranking) : [line(`May not be: ${refused}`, 'governsStrong')],
     options: optionsOf(mode, knobs[inHand]!.key, units),
     heads: HEADS,
     units: units === 'us' ? 'psi; E and Emin in million psi' : 'MPa; E and Emin in GPa',
-    notes: [...sourceOf(draft), ...rackLines(draft), ...(refused === null ? reportLines(draft, units) : [])],
+    notes: [
+      ...sourceOf(draft),
+      ...rackLines(draft),
+      ...(refused === null ? reportLines(draft, ranking, units) : []),
+    ],
     scroll: mode.scroll,
     foot: WOOD_BINDINGS.filter((binding) => binding.foot !== '').map(({ keys, foot }) => ({
       keys,
@@ -101,20 +108,26 @@ function line(text: string, style: Style = 'plain'): WoodLine {
   return { text, style };
 }
 
-function verdictOf(draft: Member): WoodLine[] {
-  const answer = answerOf(draft);
+function verdictOf(draft: Member, ranking: Ranking): WoodLine[] {
+  const answer = answerOf(draft, ranking);
   const { section, stock } = draft;
   const size = sizeLabel(section, stock.product);
-  const lit = answer.rack.sizes[answer.rack.lightest];
+  const lit = answer.rack.sizes[answer.rack.lit];
+  const best = BEST_WORD[ranking.best];
   const worst = answer.governing === null ? '' : `${CHECK_WORD[answer.governing]} ${showRatio(answer.worst)}`;
   return [
     line(`${size} ${answer.report.passes ? 'PASSES' : 'FAILS'}, ${worst}`, 'strong'),
     line(
       lit === undefined
-        ? 'No stock size on the rack passes.'
-        : `Lightest that passes: ${sizeName(answer.rack, lit.size)}, ${showRatio(lit.worst)}.`,
+        ? noneText(answer.rack.lightest >= 0)
+        : `${best[0]!.toUpperCase()}${best.slice(1)} that passes: ${sizeName(answer.rack, lit.size)}, ${showRatio(lit.worst)}.`,
     ),
   ];
+}
+
+/** Nothing is lit where nothing passes, or nothing that does can be had. */
+function noneText(passes: boolean): string {
+  return passes ? 'The yard has no size that passes.' : 'No stock size on the rack passes.';
 }
 
 /** In the order of worth: where there is no room the last are left out. */
@@ -178,9 +191,9 @@ const CAPACITY: Readonly<Partial<Record<CheckResult['id'], string>>> = {
   bearing: "Fcperp'",
 };
 
-function reportLines(draft: Member, units: Units): WoodLine[] {
+function reportLines(draft: Member, ranking: Ranking, units: Units): WoodLine[] {
   // The answer's own report has its sizes in feet and inches.
-  const report = units === 'us' ? answerOf(draft).report : reportMember(draft, units);
+  const report = units === 'us' ? answerOf(draft, ranking).report : reportMember(draft, units);
   const lines: WoodLine[] = [];
   for (const id of Object.keys(CAPACITY) as CheckResult['id'][]) {
     const check = report.checks.find((each) => each.id === id);

@@ -25,9 +25,19 @@ describe('the chart on one screen', () => {
     expect(figures(pressing(stateOf(), 'L', 'L').state)).toEqual(log);
   });
 
-  it('says where it is shown when the screen is too narrow for it', () => {
+  it('says where it is shown when the screen is too small for it', () => {
     const { state } = pressing({ ...stateOf(), columns: 80, rows: 24 }, 'L');
-    expect(state.notice?.text).toContain('from 100 columns');
+    expect(state.notice?.text).toContain('it needs 100 columns and 36 rows');
     expect(state.past).toEqual([]);
+    for (const [columns, rows, needs] of [
+      [100, 36, false],
+      [100, 35, true],
+      [99, 36, true],
+      [120, 35, false],
+      [120, 30, true],
+    ] as const) {
+      const text = pressing({ ...stateOf(), columns, rows }, 'L').state.notice!.text;
+      expect(text.includes('needs'), `${columns} x ${rows}`).toBe(needs);
+    }
   });
 });

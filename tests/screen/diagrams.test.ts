@@ -1,8 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { basisOf } from '../../src/explore/diagrams/diagram-model.ts';
 import { curves } from '../../src/loads/index.ts';
 import { showMoment, showQuantity, showSmall, showSpan } from '../../src/quantity/index.ts';
-import { basisOf } from '../../src/screen/diagram-model.ts';
 import { GUTTER } from '../../src/screen/diagrams-view.ts';
 import type { Glyphs } from '../../src/screen/draw/glyphs.ts';
 import { drawState } from '../../src/screen/draw-state.ts';

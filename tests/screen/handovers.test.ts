@@ -6,20 +6,12 @@ import { drawState } from '../../src/screen/draw-state.ts';
 import { restOf } from '../../src/screen/rest.ts';
 import { type HandoversMode, memberOf, type State } from '../../src/screen/state.ts';
 import { viewOf } from '../../src/screen/view-model.ts';
-import { afterEvents, pressing, stateOf } from '../support/state.ts';
+import { rankingOf } from '../../src/session/index.ts';
+import { atRest, pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';
 
 const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
   frame(drawState({ ...state, columns, rows }, glyphs).canvas);
-/** The state once nothing is left to work out. */
-function atRest(state: State): State {
-  let now = state;
-  for (let step = 0; restOf(now) !== null; step += 1) {
-    if (step > 4) throw new Error('it never comes to rest');
-    now = afterEvents(now, { type: 'settle' }).state;
-  }
-  return now;
-}
 const onLive = () => ({ ...stateOf(), knob: 'area.live' });
 const PSF = 1 / 144;
 
@@ -65,6 +57,25 @@ describe('the handovers beside the rack', () => {
     expect(viewOf(stateOf()).handover).toMatch(/is lightest (from|up to)/);
     expect(restOf(stateOf())).toBeNull();
     expect(restOf({ ...stateOf(), knob: 'stock.grade' })).toBeNull();
+  });
+
+  it('follow the price where that counts as best, along the span too and for the section in hand', () => {
+    const start = stateOf();
+    const any = { product: null, species: null, grade: null };
+    const prices = (
+      [
+        ['2x12', 1.6],
+        ['2x14', 3],
+        ['4x16', 9],
+      ] as const
+    ).map(([size, amount]) => ({ ...any, size, price: { amount, per: 'foot' as const } }));
+    const session = { ...start.session, best: 'price' as const, prices };
+    for (const knob of ['spans.0', 'section.depth', 'stock.grade']) {
+      const state = atRest({ ...start, session, knob });
+      const parts = /^span: (.+) is cheapest (?:from .+|up) to .+/.exec(viewOf(state).handover ?? '');
+      const { sizes, lit } = rankedRack(memberOf(state), rankingOf(session));
+      expect(parts?.[1], knob).toBe(sizes[lit]!.size.label);
+    }
   });
 
   it('are not searched where nothing is lit', () => {

@@ -4,8 +4,8 @@ import { reachesOf } from '../../src/explore/reach/reaches.ts';
 import { showSpanDown } from '../../src/quantity/index.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State } from '../../src/screen/state.ts';
-import { CHECK_WORD } from '../../src/screen/words.ts';
 import type { Session } from '../../src/session/session.ts';
+import { CHECK_WORD } from '../../src/timber/words.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';
 

@@ -134,15 +134,16 @@ describe('undo and redo', () => {
 describe('keeping and leaving', () => {
   it('writes only on s, in one key', () => {
     const changed = pressing(stateOf(), 'right');
-    expect(changed.effects).toEqual([]);
+    // The recovery journal is no file of the user's.
+    expect(changed.effects).toEqual([{ do: 'journal', session: changed.state.session }]);
     const { effects } = pressing(changed.state, 's');
-    expect(effects).toMatchObject([{ do: 'save', file: 'test.json', fresh: false }]);
+    expect(effects).toMatchObject([{ do: 'save', file: 'test.json', fresh: false, over: false }]);
   });
 
   it('leaves at once when all is kept, and asks when it is not', () => {
     expect(pressing(stateOf(), 'q').effects).toEqual([{ do: 'leave' }]);
     const asked = pressing(stateOf(), 'right', 'q');
-    expect(asked.effects).toEqual([]);
+    expect(asked.effects).toEqual([{ do: 'journal', session: asked.state.session }]);
     expect(asked.state.mode.name).toBe('leaving');
     expect(pressing(asked.state, 'escape').state.mode.name).toBe('explore');
     expect(pressing(asked.state, 'd').effects).toEqual([{ do: 'leave' }]);

@@ -1,8 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { woodKnobs } from '../../src/explore/knobs/wood.ts';
+import { rankedRack } from '../../src/explore/rack/ranked.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State, type WoodMode } from '../../src/screen/state.ts';
+import { rankingOf } from '../../src/session/index.ts';
 import { checkStock } from '../../src/timber/index.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';
@@ -220,6 +222,29 @@ describe('the wood view', () => {
       }),
       { numRuns: 60 },
     );
+  });
+});
+
+describe('what counts as best', () => {
+  it('is followed by the wood view: it names the lit size of the rack', () => {
+    for (const [best, word] of [
+      [undefined, 'Lightest'],
+      ['depth', 'Shallowest'],
+      ['boardFeet', 'Least wood'],
+    ] as const) {
+      const start = stateOf([{ spans: ['12 ft'] }]);
+      const session = { ...start.session, ...(best === undefined ? {} : { best }) };
+      const state = pressing({ ...start, session }, 'y').state;
+      const { sizes, lit } = rankedRack(memberOf(state), rankingOf(session));
+      expect(text(state, 120, 36)).toContain(`${word} that passes: ${sizes[lit]!.size.label},`);
+    }
+  });
+
+  it('says where the yard has nothing that passes', () => {
+    const start = stateOf([{ spans: ['12 ft'] }]);
+    const yard = { file: null, rows: [] };
+    const state = pressing({ ...start, session: { ...start.session, yard } }, 'y').state;
+    expect(text(state, 120, 36)).toContain('The yard has no size that passes.');
   });
 });
 

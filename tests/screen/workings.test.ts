@@ -4,7 +4,7 @@ import { pageIds, pageOf } from '../../src/explore/workings/index.ts';
 import { glyphsOf } from '../../src/screen/draw/glyphs.ts';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State } from '../../src/screen/state.ts';
-import { workingsRows, wrapText } from '../../src/screen/workings-rows.ts';
+import { workingsRows, wrapText } from '../../src/sheet/workings-rows.ts';
 import { reportMember } from '../../src/timber/index.ts';
 import { CHECK_IDS } from '../../src/timber/report.ts';
 import { pressing, stateOf } from '../support/state.ts';

@@ -29,12 +29,19 @@ export function cells(text: string): string {
   return safe;
 }
 
-/** A name in at most `width` cells, ended by the mark of what is left out. The text is cells already. */
+/**
+ * A name in at most `width` cells, ended by the mark of what is left out: after a whole word where that leaves half of
+ * it. The text is cells already.
+ */
 export function shorten(text: string, width: number, glyphs: Glyphs): string {
   if (text.length <= width) return text;
   if (width < 1) return '';
-  return text.slice(0, width - 1).trimEnd() + glyphs.more;
+  const blank = text.lastIndexOf(' ', width - 1);
+  return text.slice(0, 2 * blank >= width ? blank : width - 1).replace(LOOSE_END, '') + glyphs.more;
 }
+
+/** What joins words to those that are left out. */
+const LOOSE_END = /[ ,;+]+$/;
 
 /** A sentence in at most `width` cells, ended after a whole word. */
 export function clip(text: string, width: number, glyphs: Glyphs): string {

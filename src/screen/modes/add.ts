@@ -1,14 +1,15 @@
 import type { NewLoad } from '../../explore/beam-edits/edit-beam.ts';
+import { basisOf } from '../../explore/diagrams/diagram-model.ts';
+import { sketchOf } from '../../explore/diagrams/sketch-model.ts';
 import { reactionRange } from '../../loads/index.ts';
 import { type Addition, additionsTo, kindsOf } from '../additions.ts';
 import { isTooSmall } from '../arrange.ts';
-import { basisOf } from '../diagram-model.ts';
 import { drawTooSmall } from '../layout.ts';
 import { drawAdd } from '../panels/add.ts';
-import { sketchOf } from '../sketch-model.ts';
 import { EXPLORE, knobInHand, memberOf, refused, type State, still, unitsOf, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
+import { openChoice } from './links.ts';
 import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
 
 type Add = ModeOf<'add'>;
@@ -68,6 +69,7 @@ function press(state: State, mode: Add, press: KeyPress): State {
 
 /** Does it, with the new knob in hand and the ghost where the gauges stood before. */
 function chosen(state: State, line: Addition): State {
+  if (line.links) return openChoice(state);
   if (line.load !== null) return { ...state, mode: { name: 'add', line: 0, load: line.load } };
   const back: State = { ...state, mode: EXPLORE };
   const edit = line.edit();

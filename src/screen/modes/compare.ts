@@ -8,6 +8,7 @@ import { type CompareMode, EXPLORE, type State, still, unitsOf, withSession } fr
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
 import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** Designs side by side with what differs marked: go back to one, note one, drop one. */
 export const compare: ModeRules<CompareMode> = {
@@ -39,6 +40,7 @@ function held(state: State, design: number): number {
 function press(state: State, mode: CompareMode, press: KeyPress): State {
   const design = held(state, mode.design);
   if (isCancel(press)) return { ...state, mode: EXPLORE };
+  if (opensWorkings(press)) return openedWorkings(state);
   const scroll = scrolled(
     mode.scroll,
     press,

@@ -1,17 +1,18 @@
+import { basisOf, diagramsOf, placesAlong, placesOfNote } from '../../explore/diagrams/diagram-model.ts';
 import type { CurvesOf } from '../../loads/index.ts';
+import { DOTS_ACROSS } from '../../sheet/drawing/dots.ts';
 import { beamLength } from '../../statics/index.ts';
 import { answerOf } from '../answer.ts';
 import { isTooSmall } from '../arrange.ts';
 import { diagramActionOf } from '../diagram-keys.ts';
-import { basisOf, diagramsOf, placesAlong, placesOfNote } from '../diagram-model.ts';
 import { beamCells, diagramsView } from '../diagrams-view.ts';
-import { DOTS_ACROSS } from '../draw/braille.ts';
 import { drawTooSmall } from '../layout.ts';
 import { drawDiagrams } from '../panels/diagrams.ts';
 import { EXPLORE, memberOf, type State, still, unitsOf, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
 import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { openedWorkings } from './workings.ts';
 
 type Diagrams = ModeOf<'diagrams'>;
 
@@ -71,6 +72,8 @@ function press(state: State, mode: Diagrams, press: KeyPress): State {
       return { ...state, mode: { ...mode, which: turned(state, mode.which, -1) } };
     case 'combination-after':
       return { ...state, mode: { ...mode, which: turned(state, mode.which, 1) } };
+    case 'workings':
+      return openedWorkings(state);
     case 'units': {
       const units = unitsOf(state) === 'us' ? 'si' : 'us';
       return withSession(state, { ...state.session, units });

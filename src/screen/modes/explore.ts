@@ -3,9 +3,12 @@ import type { Step as NudgeSize } from '../../explore/knobs/knob.ts';
 import { takeSize } from '../../explore/rack/rack.ts';
 import { bestOf } from '../../explore/rack/ranked.ts';
 import { rankingOf } from '../../session/index.ts';
+import { arrange, CHART_NEEDS } from '../arrange.ts';
 import { backToBegan, markBegan } from '../began.ts';
 import { nextBest } from '../best-choice.ts';
+import { CHARTS, type ChartOf } from '../chart-view.ts';
 import { editOf, inserted } from '../edit.ts';
+import { redo, undo } from '../history.ts';
 import { type Action, actionOf, startsEntry } from '../keys.ts';
 import { drawExplorer } from '../layout.ts';
 import { pinned } from '../pins.ts';
@@ -13,7 +16,6 @@ import {
   isKept,
   knobInHand,
   memberOf,
-  momentOf,
   refused,
   type State,
   type Step,
@@ -23,17 +25,21 @@ import {
   withSession,
 } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { viewOf, WIDE } from '../view-model.ts';
+import { viewOf } from '../view-model.ts';
+import { openBuying } from './buying.ts';
 import { openCompare } from './compare.ts';
 import { copied } from './copy.ts';
 import { openDiagrams } from './diagrams.ts';
 import { opened } from './entry.ts';
 import { openHandovers } from './handovers.ts';
 import { openHeadroom } from './headroom.ts';
+import { openLinks } from './links.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { openMoves } from './moves.ts';
 import { openReach } from './reach.ts';
-import { save } from './save-as.ts';
+import { openSaveAs, save } from './save-as.ts';
+import { openSheet } from './sheet.ts';
+import { openTrail } from './trail.ts';
 import { openWood } from './wood.ts';
 import { openedWorkings } from './workings.ts';
 
@@ -99,6 +105,8 @@ function act(state: State, action: Action): Step {
       return still(openDiagrams(state));
     case 'chart-scale':
       return still(otherScale(state));
+    case 'chart-of':
+      return still(otherChart(state));
     case 'scatter':
       return still({ ...state, scatter: !state.scatter, notice: null });
     case 'handovers':
@@ -109,8 +117,12 @@ function act(state: State, action: Action): Step {
       return still(nextBest(state));
     case 'proportions':
       return still({ ...state, mode: { name: 'proportions' }, notice: null });
+    case 'buying':
+      return still(openBuying(state));
     case 'headroom':
       return still(openHeadroom(state));
+    case 'links':
+      return still(openLinks(state));
     case 'pin':
       return still(pinned(state));
     case 'compare':
@@ -129,8 +141,15 @@ function act(state: State, action: Action): Step {
       return still({ ...state, mode: { name: 'help', scroll: 0 } });
     case 'save':
       return save(state, false);
+    case 'save-as':
+      return still(openSaveAs(state, false));
+    case 'sheet':
+      return still(openSheet(state));
+    case 'trail':
+      return still(openTrail(state));
     case 'leave':
-      return isKept(state)
+      // What was opened to be looked at is left without a question.
+      return isKept(state) || state.readOnly === 'asked'
         ? { state, effects: [{ do: 'leave' }] }
         : still({ ...state, mode: { name: 'leaving' }, notice: null });
     default:
@@ -185,30 +204,29 @@ function takeLit(state: State): State {
   return { ...withMember(state, takeSize(member, lit)), ghost: { knob: 'rack', member } };
 }
 
-function undo(state: State): State {
-  const last = state.past.at(-1);
-  if (last === undefined) return refused(state, 'nothing to undo');
-  return {
-    ...state,
-    ...last,
-    past: state.past.slice(0, -1),
-    future: [momentOf(state), ...state.future],
-    ghost: null,
-    notice: null,
-  };
-}
-
-function redo(state: State): State {
-  const [next, ...future] = state.future;
-  if (next === undefined) return refused(state, 'nothing to redo');
-  return { ...state, ...next, past: [...state.past, momentOf(state)], future, ghost: null, notice: null };
-}
-
-/** The chart logarithmic or even; said where no chart is in sight. */
+/** The chart logarithmic or even. */
 function otherScale(state: State): State {
   const linear = !state.linear;
-  const text = `the chart is ${linear ? 'even from 0' : 'logarithmic'}${state.columns < WIDE ? `; it is shown from ${WIDE} columns` : ''}`;
-  return { ...state, linear, notice: { text, refusal: false } };
+  return { ...state, linear, notice: aboutChart(state, linear ? 'even from 0' : 'logarithmic') };
+}
+
+/** The chart of the next quantity. */
+function otherChart(state: State): State {
+  const chart = CHARTS[(CHARTS.indexOf(state.chart ?? 'ratio') + 1) % CHARTS.length]!;
+  return { ...state, chart, notice: aboutChart(state, `of ${CHART_WORD[chart]}`) };
+}
+
+const CHART_WORD: Readonly<Record<ChartOf, string>> = {
+  ratio: 'the ratios',
+  weight: 'weight',
+  capacity: 'capacity',
+};
+
+/** Said also where no chart is in sight. */
+function aboutChart(state: State, what: string): State['notice'] {
+  const inSight = arrange(viewOf(state), state.columns, state.rows).some(({ panel }) => panel === 'chart');
+  const needs = inSight ? '' : `; it needs ${CHART_NEEDS.columns} columns and ${CHART_NEEDS.rows} rows`;
+  return { text: `the chart is ${what}${needs}`, refusal: false };
 }
 
 function turnTo(state: State, by: number): State {

@@ -3,12 +3,13 @@ import { sizeName } from '../../explore/rack/rack.ts';
 import { rankingOf } from '../../session/index.ts';
 import { answerOf } from '../answer.ts';
 import { isTooSmall } from '../arrange.ts';
-import type { Strip } from '../handover-now.ts';
+import type { Strip } from '../found.ts';
 import { drawTooSmall } from '../layout.ts';
 import { drawStrip, type StripView, stripRows } from '../panels/strip.ts';
 import { EXPLORE, type HandoversMode, memberOf, type State, still } from '../state.ts';
 import { titleOf } from '../view-model.ts';
 import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** Which size is the best from where to where along the knob in hand; found once the view stands. */
 export const handovers: ModeRules<HandoversMode> = {
@@ -16,6 +17,7 @@ export const handovers: ModeRules<HandoversMode> = {
     const last = Math.max(0, (mode.strip?.segments.length ?? 0) - stripRows(state.rows));
     const scroll = scrolled(mode.scroll, press, last);
     if (scroll !== null) return still({ ...state, mode: { ...mode, scroll } });
+    if (opensWorkings(press)) return still(openedWorkings(state));
     const closes =
       isCancel(press) || press.name === 'enter' || (press.name === 'char' && /^[Hq]$/.test(press.char ?? ''));
     return still(closes ? { ...state, mode: EXPLORE } : state);

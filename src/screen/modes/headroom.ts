@@ -9,6 +9,7 @@ import { EXPLORE, type HeadroomMode, memberOf, type State, still, unitsOf, withM
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
 import { isCancel, type ModeRules } from './mode.ts';
+import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The storey that a member stands in, with knobs of its own; what is nudged or typed is taken at once. */
 export const headroom: ModeRules<HeadroomMode> = {
@@ -47,6 +48,7 @@ const NUDGES: Readonly<Partial<Record<Action, readonly [1 | -1, NudgeSize]>>> = 
 function press(state: State, mode: HeadroomMode, press: KeyPress): State {
   const closes = isCancel(press) || (press.name === 'char' && !press.ctrl && /^[hq]$/.test(press.char ?? ''));
   if (closes) return { ...state, mode: EXPLORE };
+  if (opensWorkings(press)) return openedWorkings(state);
   if (startsEntry(press)) return { ...state, mode: { ...mode, edit: editOf(press.char ?? ''), fault: null } };
   const { knobs, index } = headroomInHand(state, mode);
   const action = actionOf(press);

@@ -1,5 +1,7 @@
 import type { Mode } from '../state.ts';
 import { add } from './add.ts';
+import { buying } from './buying.ts';
+import { changedOnDisk } from './changed-on-disk.ts';
 import { compare } from './compare.ts';
 import { copy } from './copy.ts';
 import { diagrams } from './diagrams.ts';
@@ -9,12 +11,16 @@ import { handovers } from './handovers.ts';
 import { headroom } from './headroom.ts';
 import { help } from './help.ts';
 import { leaving } from './leaving.ts';
+import { links } from './links.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { moves } from './moves.ts';
 import { proportions } from './proportions.ts';
 import { reach } from './reach.ts';
+import { recovered } from './recovered.ts';
 import { saveAs } from './save-as.ts';
+import { sheet } from './sheet.ts';
 import { start } from './start.ts';
+import { trail } from './trail.ts';
 import { wood } from './wood.ts';
 import { workings } from './workings.ts';
 
@@ -30,12 +36,18 @@ const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
   add,
   moves,
   headroom,
+  buying,
   proportions,
   reach,
   handovers,
   compare,
   copy,
   leaving,
+  links,
+  'changed-on-disk': changedOnDisk,
+  recovered,
+  sheet,
+  trail,
   start,
 };
 

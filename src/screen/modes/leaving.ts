@@ -4,14 +4,14 @@ import { EXPLORE, type State, type Step, still } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
-import { save } from './save-as.ts';
+import { openSaveAs, save } from './save-as.ts';
 
 /** The question before changes are lost. */
 export const leaving: ModeRules<ModeOf<'leaving'>> = {
   press,
   draw(state, _mode, canvas, glyphs) {
     drawExplorer(viewOf(state), canvas, glyphs);
-    drawPrompt(canvas, 'Not everything is kept.', 's keep and leave   d leave without keeping   Esc stay');
+    drawPrompt(canvas, 'Not everything is kept.', 's keep and leave  A elsewhere  d leave anyway  Esc stay');
     return null;
   },
 };
@@ -21,6 +21,7 @@ function press(state: State, _mode: ModeOf<'leaving'>, press: KeyPress): Step {
   if (press.name !== 'char') return still(state);
   if (press.ctrl) return press.char === 'c' ? { state, effects: [{ do: 'leave' }] } : still(state);
   if (press.char === 's') return save({ ...state, mode: EXPLORE }, true);
+  if (press.char === 'A') return still(openSaveAs(state, true));
   if (press.char === 'd' || press.char === 'q') return { state, effects: [{ do: 'leave' }] };
   return still(state);
 }

@@ -16,6 +16,7 @@ import {
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
 import { isCancel, type ModeRules } from './mode.ts';
+import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The changes that would help, best first; Enter applies the one in hand. */
 export const moves: ModeRules<MovesMode> = {
@@ -36,6 +37,7 @@ export function openMoves(state: State): State {
 function press(state: State, mode: MovesMode, press: KeyPress): State {
   const closes = isCancel(press) || (press.name === 'char' && /^[mq]$/.test(press.char ?? ''));
   if (closes) return { ...state, mode: EXPLORE };
+  if (opensWorkings(press)) return openedWorkings(state);
   const last = SIDE_LINES + movesNow(state).moves.length - 1;
   const at = (line: number): State => ({
     ...state,

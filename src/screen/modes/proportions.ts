@@ -5,10 +5,12 @@ import { proportionView } from '../proportion-view.ts';
 import { EXPLORE, still } from '../state.ts';
 import { titleOf } from '../view-model.ts';
 import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The three laws over l/h. */
 export const proportions: ModeRules<ModeOf<'proportions'>> = {
   press(state, _mode, press) {
+    if (opensWorkings(press)) return still(openedWorkings(state));
     const closes =
       isCancel(press) || press.name === 'enter' || (press.name === 'char' && /^[=q]$/.test(press.char ?? ''));
     return still(closes ? { ...state, mode: EXPLORE } : state);

@@ -6,6 +6,7 @@ import { reachView } from '../reach-view.ts';
 import { EXPLORE, type State, still, unitsOf, withSession } from '../state.ts';
 import { titleOf } from '../view-model.ts';
 import { isCancel, type ModeOf, type ModeRules, scrolled } from './mode.ts';
+import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The longest span of every size, and what stops it. */
 export const reach: ModeRules<ModeOf<'reach'>> = {
@@ -13,6 +14,7 @@ export const reach: ModeRules<ModeOf<'reach'>> = {
     const last = Math.max(0, reachView(state).rows.length - reachRows(state.rows));
     const scroll = scrolled(mode.scroll, press, last);
     if (scroll !== null) return still({ ...state, mode: { name: 'reach', scroll } });
+    if (opensWorkings(press)) return still(openedWorkings(state));
     const letter = press.name === 'char' && !press.ctrl ? press.char : null;
     if (letter === 'i') {
       const units = unitsOf(state) === 'us' ? 'si' : 'us';

@@ -1,7 +1,8 @@
+import { NOT_WRITTEN } from '../../files/keeper.ts';
 import { edited, editOf, inserted } from '../edit.ts';
 import { drawExplorer } from '../layout.ts';
 import { drawPrompt } from '../panels/prompt.ts';
-import { EXPLORE, isKept, type State, type Step, still } from '../state.ts';
+import { EXPLORE, refused, type State, type Step, still } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
 import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
@@ -22,19 +23,21 @@ export const saveAs: ModeRules<ModeOf<'save-as'>> = {
 
 /** Asks for the session to be written, and for a name first where it has none. */
 export function save(state: State, thenLeave: boolean): Step {
-  if (state.file === null) {
-    return still({
-      ...state,
-      mode: { name: 'save-as', edit: editOf('beam.json'), fault: null, thenLeave },
-      notice: null,
-    });
-  }
-  if (isKept(state))
+  if (state.readOnly === 'asked') return still(refused(state, NOT_WRITTEN));
+  if (state.file === null) return still(openSaveAs(state, thenLeave));
+  if (state.session === state.kept)
     return still({ ...state, notice: { text: `${state.file} already holds this`, refusal: false } });
   return {
     state,
-    effects: [{ do: 'save', file: state.file, session: state.session, fresh: false, thenLeave }],
+    effects: [{ do: 'save', file: state.file, session: state.session, fresh: false, over: false, thenLeave }],
   };
+}
+
+/** Asks for the name of a new file; one beside the session's own is offered. */
+export function openSaveAs(state: State, thenLeave: boolean): State {
+  if (state.readOnly === 'asked') return refused(state, NOT_WRITTEN);
+  const name = state.file === null ? 'beam.json' : state.file.replace(/(\.json)?$/, '-2.json');
+  return { ...state, mode: { name: 'save-as', edit: editOf(name), fault: null, thenLeave }, notice: null };
 }
 
 function press(state: State, mode: ModeOf<'save-as'>, press: KeyPress): Step {
@@ -48,6 +51,8 @@ function press(state: State, mode: ModeOf<'save-as'>, press: KeyPress): Step {
     return still({ ...state, mode: { ...mode, fault: 'a file name is needed, such as beam.json' } });
   return {
     state: { ...state, mode: EXPLORE },
-    effects: [{ do: 'save', file, session: state.session, fresh: true, thenLeave: mode.thenLeave }],
+    effects: [
+      { do: 'save', file, session: state.session, fresh: true, over: false, thenLeave: mode.thenLeave },
+    ],
   };
 }

@@ -11,6 +11,7 @@ import type { KeyPress } from '../terminal/key-press.ts';
 import { type WoodAction, woodActionOf } from '../wood-keys.ts';
 import { woodViewOf } from '../wood-view.ts';
 import { isCancel, type ModeRules } from './mode.ts';
+import { openedWorkings } from './workings.ts';
 
 /** Choosing the wood: a draft of the member that Enter takes and Escape drops. */
 export const wood: ModeRules<WoodMode> = {
@@ -86,6 +87,8 @@ function act(state: State, mode: WoodMode, action: WoodAction): State {
       return scroll(state, mode, -PAGE);
     case 'page-down':
       return scroll(state, mode, PAGE);
+    case 'workings':
+      return openedWorkings(state);
     case 'take':
       return take(state, mode);
     case 'back':

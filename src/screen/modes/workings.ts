@@ -1,50 +1,67 @@
-import { type PageId, pageIds, pageOf, pageWord } from '../../explore/workings/index.ts';
+import { pageOf, pageWord } from '../../explore/workings/index.ts';
+import { type WorkingsRow, workingsRows } from '../../sheet/workings-rows.ts';
+import { CHECK_IDS } from '../../timber/report.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import { drawText, lastOffset, type TextLine } from '../panels/text.ts';
-import { EXPLORE, memberOf, type State, type Step, still, unitsOf, withSession } from '../state.ts';
+import { windowStart } from '../panels/table.ts';
+import { drawText, lastOffset, type TextLine, textRows } from '../panels/text.ts';
+import {
+  type Mode,
+  type State,
+  type Step,
+  still,
+  unitsOf,
+  type WorkingsMode,
+  withSession,
+} from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import type { FootView } from '../view.ts';
-import { type WorkingsRow, workingsRows } from '../workings-rows.ts';
-import { isCancel, type ModeOf, type ModeRules, scrolled } from './mode.ts';
+import { type WorkingsSubject, workingsSubject } from '../workings-subject.ts';
+import { isCancel, type ModeRules, scrolled } from './mode.ts';
 
-type Page = ModeOf<'workings'>;
-
-/** The calculation behind any number: what governs first, then every other check, then what they stand on. */
-export const workings: ModeRules<Page> = {
-  press,
+/** The calculation behind any number: what the view it was asked in is about first, then every other. */
+export const workings: ModeRules<WorkingsMode> = {
+  press(state, mode, press) {
+    return mode.line === null ? turn(state, mode, press) : still(choose(state, mode, mode.line, press));
+  },
   draw(state, mode, canvas, glyphs) {
-    const { ids, at } = place(state, mode);
-    drawWorkings(state, ids, at, mode.scroll, canvas, glyphs);
+    const subject = workingsSubject(state, mode.from);
+    if (mode.line === null) drawPage(state, mode, subject, canvas, glyphs);
+    else drawList(state, mode.line, subject, canvas, glyphs);
     return null;
   },
 };
 
-/** The state with the workings of what governs opened. */
+/** The workings opened from the view a state is in, the page of what it is about in front; Escape leads back to it. */
 export function openedWorkings(state: State): State {
-  return { ...state, mode: { name: 'workings', page: 0, scroll: 0 }, notice: null };
+  const { mode: from } = state;
+  const { front } = workingsSubject(state, from);
+  return { ...state, mode: { name: 'workings', page: front, scroll: 0, line: null, from }, notice: null };
 }
 
-/** The pages of the member, and the one that is open. */
-function place(state: State, { page }: Page): { readonly ids: readonly PageId[]; readonly at: number } {
-  const ids = pageIds(memberOf(state), unitsOf(state));
-  return { ids, at: ((page % ids.length) + ids.length) % ids.length };
+/** True for the key that opens the workings from any view. */
+export function opensWorkings(press: KeyPress): boolean {
+  return press.name === 'char' && !press.ctrl && !press.meta && press.char === 'w';
 }
 
-function press(state: State, mode: Page, press: KeyPress): Step {
-  const { ids, at } = place(state, mode);
-  const scroll = scrolled(mode.scroll, press, lastScroll(state, ids[at]!));
+/** The page of a mode, counted round. */
+function pageAt({ ids }: WorkingsSubject, page: number): number {
+  return ((page % ids.length) + ids.length) % ids.length;
+}
+
+function turn(state: State, mode: WorkingsMode, press: KeyPress): Step {
+  const subject = workingsSubject(state, mode.from);
+  const at = pageAt(subject, mode.page);
+  const scroll = scrolled(mode.scroll, press, lastOffset(rowsOf(state, subject, at).length, state.rows));
   if (scroll !== null) return still({ ...state, mode: { ...mode, scroll } });
-  const turn = turned(press);
-  if (turn !== 0) return still({ ...state, mode: { name: 'workings', page: at + turn, scroll: 0 } });
-  if (press.name === 'char' && !press.ctrl && press.char === 'i') {
-    const units = unitsOf(state) === 'us' ? 'si' : 'us';
-    return still(withSession({ ...state, mode: { ...mode, scroll: 0 } }, { ...state.session, units }));
-  }
-  const closes =
-    isCancel(press) || press.name === 'enter' || (press.name === 'char' && /^[wq]$/.test(press.char ?? ''));
-  return still(closes ? { ...state, mode: EXPLORE } : state);
+  const by = turned(press);
+  if (by !== 0) return still({ ...state, mode: { ...mode, page: at + by, scroll: 0 } });
+  const letter = press.name === 'char' && !press.ctrl ? press.char : null;
+  if (letter === 'i') return still(otherUnits(state, mode));
+  if (letter === 'l') return still({ ...state, mode: { ...mode, line: at } });
+  const closes = isCancel(press) || press.name === 'enter' || letter === 'w' || letter === 'q';
+  return still(closes ? { ...state, mode: mode.from } : state);
 }
 
 /** Pages that a key turns: right and Tab one on, left and Shift Tab one back. */
@@ -55,32 +72,50 @@ function turned(press: KeyPress): -1 | 0 | 1 {
   return 0;
 }
 
+function otherUnits(state: State, mode: WorkingsMode): State {
+  const units = unitsOf(state) === 'us' ? 'si' : 'us';
+  const from = inUnits(mode.from);
+  return withSession({ ...state, mode: { ...mode, scroll: 0, from } }, { ...state.session, units });
+}
+
+/** A view to come back to in other units: the strip of handovers is found anew. */
+function inUnits(from: Mode): Mode {
+  return from.name === 'handovers' ? { ...from, strip: null } : from;
+}
+
+/** The list of pages: a line is chosen, Enter opens its page. */
+function choose(state: State, mode: WorkingsMode, line: number, press: KeyPress): State {
+  const { ids } = workingsSubject(state, mode.from);
+  const to = scrolled(line, press, ids.length - 1);
+  if (to !== null) return { ...state, mode: { ...mode, line: to } };
+  if (press.name === 'enter') return { ...state, mode: { ...mode, page: line, scroll: 0, line: null } };
+  const letter = press.name === 'char' && !press.ctrl ? press.char : null;
+  const closes = isCancel(press) || letter === 'l' || letter === 'q' || letter === 'w';
+  return closes ? { ...state, mode: { ...mode, line: null } } : state;
+}
+
 /** Longer rows are tiring to read. */
 const MEASURE = 100;
 
-function rowsOf(state: State, id: PageId): WorkingsRow[] {
-  const { lines } = pageOf(memberOf(state), id, unitsOf(state));
+function rowsOf(state: State, { member, about, ids }: WorkingsSubject, at: number): WorkingsRow[] {
+  const { lines } = pageOf(member, ids[at]!, unitsOf(state), about);
   const safe = lines.map((line) =>
     Object.fromEntries(Object.entries(line).map(([part, text]) => [part, cells(text)])),
   );
   return workingsRows(safe, Math.min(state.columns - 2, MEASURE));
 }
 
-function lastScroll(state: State, id: PageId): number {
-  return lastOffset(rowsOf(state, id).length, state.rows);
-}
-
-function drawWorkings(
+function drawPage(
   state: State,
-  ids: readonly PageId[],
-  at: number,
-  scroll: number,
+  mode: WorkingsMode,
+  subject: WorkingsSubject,
   canvas: Canvas,
   glyphs: Glyphs,
 ): void {
-  const id = ids[at]!;
-  const { title } = pageOf(memberOf(state), id, unitsOf(state));
-  const rows = rowsOf(state, id);
+  const { member, about, ids } = subject;
+  const at = pageAt(subject, mode.page);
+  const { title } = pageOf(member, ids[at]!, unitsOf(state), about);
+  const rows = rowsOf(state, subject, at);
   const lines = rows.map(
     ({ text, is }): TextLine => ({
       text,
@@ -91,8 +126,37 @@ function drawWorkings(
     { keys: 'Esc', does: 'back' },
     ...(lastOffset(rows.length, state.rows) > 0 ? [{ keys: glyphs.upDown, does: 'scroll' }] : []),
     { keys: '←→', does: `page ${at + 1} of ${ids.length}` },
+    { keys: 'l', does: 'list' },
     { keys: 'i', does: 'units' },
     { keys: 'next', does: pageWord(ids[(at + 1) % ids.length]!) },
   ];
-  drawText({ title: `workings: ${title}`, lines, offset: scroll, foot }, canvas, glyphs);
+  drawText({ title: `${headOf(subject)}: ${title}`, lines, offset: mode.scroll, foot }, canvas, glyphs);
+}
+
+/** "workings", "workings of pin 2". */
+function headOf({ label }: WorkingsSubject): string {
+  return label === '' ? 'workings' : `workings of ${label}`;
+}
+
+function drawList(
+  state: State,
+  line: number,
+  subject: WorkingsSubject,
+  canvas: Canvas,
+  glyphs: Glyphs,
+): void {
+  const { member, about, ids } = subject;
+  const lines = ids.map((id, at): TextLine => {
+    const isCheck = (CHECK_IDS as readonly string[]).includes(id);
+    const title = isCheck ? pageOf(member, id, unitsOf(state), about).title : pageWord(id);
+    const mark = at === line ? glyphs.hand : ' ';
+    return { text: ` ${mark} ${cells(title)}`, style: at === line ? 'nowStrong' : 'plain' };
+  });
+  const foot: FootView[] = [
+    { keys: 'Esc', does: 'back' },
+    { keys: glyphs.upDown, does: 'page' },
+    { keys: 'Enter', does: 'open' },
+  ];
+  const offset = windowStart(lines.length, textRows(state.rows), line);
+  drawText({ title: `${headOf(subject)}: every page`, lines, offset, foot }, canvas, glyphs);
 }

@@ -1,8 +1,8 @@
+import type { SketchView } from '../../explore/diagrams/sketch-model.ts';
 import type { Addition } from '../additions.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { SketchView } from '../sketch-model.ts';
 import type { View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { heading, rule, write } from './region.ts';

@@ -1,8 +1,8 @@
 import type { Canvas } from '../draw/canvas.ts';
 import { cells } from '../draw/cells.ts';
-import type { Glyphs } from '../draw/glyphs.ts';
+import type { Glyphs, LineSymbols } from '../draw/glyphs.ts';
 import { curveRows, heightAt, resample } from '../draw/plot.ts';
-import type { ChartView, View } from '../view.ts';
+import type { ChartSeries, ChartView, View } from '../view.ts';
 import { heading, isFree, type Region, rule } from './region.ts';
 import { along, HIGHEST, SCALE_LABELS } from './scale.ts';
 
@@ -13,14 +13,14 @@ const AFTER = 2;
 /** Rows that are not the plot: heading, axis, labels. */
 const AROUND = 3;
 
-/** How ratios stand along the axis: 0 at its foot, 1 at its head. */
-interface RatioScale {
-  along(ratio: number): number;
+/** How figures stand along the axis: 0 at its foot, 1 at its head. */
+interface FigureScale {
+  along(figure: number): number;
   readonly labels: readonly (readonly [number, string])[];
 }
 
-const LOGARITHMIC: RatioScale = { along, labels: SCALE_LABELS };
-const EVEN: RatioScale = {
+const LOGARITHMIC: FigureScale = { along, labels: SCALE_LABELS };
+const EVEN: FigureScale = {
   along: (ratio) => ratio / HIGHEST,
   labels: [
     [0, '0'],
@@ -34,9 +34,21 @@ const EVEN: RatioScale = {
 /** Fewer rows of plot are noise: a layout that has only less shows reach in the rack instead. */
 export const LEAST_CHART_ROWS = 9 + AROUND;
 
+/** The scale of an axis of figures, or that of ratios. */
+function scaleOf({ axis, linear }: ChartView): FigureScale {
+  if (axis === undefined) return linear === true ? EVEN : LOGARITHMIC;
+  const { from, to, even, marks } = axis;
+  const doublings = Math.log2(to / from);
+  return {
+    along: (figure) => (even ? (figure - from) / (to - from) : Math.log2(figure / from) / doublings),
+    labels: marks,
+  };
+}
+
 /**
- * The ratios of the three powers against the knob in hand, logarithmic as the gauges are, each in its own
- * line, with the limit and a bead on each at now. `ruled` lays the heading into a rule.
+ * The chart's lines against the knob in hand, each in its own style, with a bead on each at now: the ratios of the
+ * three powers with their limit and crossovers, or figures on an axis of their own. `ruled` lays the heading into a
+ * rule.
  */
 export function drawChart(
   view: View,
@@ -48,46 +60,104 @@ export function drawChart(
   if (options.ruled) rule(canvas, region, glyphs);
   const { chart } = view;
   if (chart === null) return;
+  const key = keyOf(chart, region.columns - BEFORE - AFTER, glyphs);
+  const above = key === null ? 1 : 2;
   const plot: Region = {
     x: region.x + BEFORE,
-    y: region.y + 1,
+    y: region.y + above,
     columns: region.columns - BEFORE - AFTER,
-    rows: region.rows - AROUND,
+    rows: region.rows - AROUND + 1 - above,
   };
   if (plot.rows < 2 || plot.columns < 8) return;
   const title = cells(chart.title);
   if (options.ruled) heading(canvas, region, plot.x, title);
   else if (title.length <= plot.columns) canvas.put(plot.x, region.y, title, 'quiet');
 
-  const scale = chart.linear === true ? EVEN : LOGARITHMIC;
-  drawRatioAxis(scale, canvas, plot, glyphs);
+  if (key !== null) canvas.put(plot.x, region.y + 1, key, 'quiet');
+
+  const scale = scaleOf(chart);
+  // Figures without an axis of their own are ratios, unless a sentence stands in their place.
+  const isOfRatios = chart.axis === undefined && chart.key === undefined;
+  if (chart.axis !== undefined || isOfRatios) drawFigureAxis(scale, isOfRatios, canvas, plot, glyphs);
   drawKnobAxis(chart, canvas, plot, region, glyphs);
   const now = plot.x + Math.floor(Math.max(0, Math.min(1, chart.now)) * (plot.columns - 1));
   const beads: number[] = [];
-  for (const { power, ratios } of chart.series) {
+  for (const { power, ratios, now: figure } of chart.series) {
     const heights = ratios.map(scale.along);
     const places = resample(heights, plot.columns, plot.rows);
-    const curve = curveRows(places, plot.rows, glyphs.chart.lines[power - 1]!);
+    const curve = curveRows(places, plot.rows, symbolsOf(power, glyphs));
     for (const { column, row, text } of curve) overlay(canvas, plot.x + column, plot.y + row, text);
-    const height = heightAt(heights, chart.now) * (plot.rows - 1);
+    const at = figure === undefined ? heightAt(heights, chart.now) : scale.along(figure);
+    const height = at * (plot.rows - 1);
     if (height > -0.5 && height < plot.rows - 0.5) beads.push(plot.y + plot.rows - 1 - Math.round(height));
-    labelEnds(places, canvas, plot, glyphs.superscripts[power - 1]!);
+    if (chart.axis === undefined && typeof power === 'number')
+      labelEnds(places, canvas, plot, glyphs.superscripts[power - 1]!);
   }
+  for (const [at, figure] of chart.crossovers ?? []) drawCrossover(at, figure, scale, canvas, plot, glyphs);
   for (const y of beads) canvas.put(now, y, glyphs.now, 'nowStrong');
   canvas.put(now, plot.y + plot.rows, glyphs.pointer, 'nowStrong');
 }
 
-function rowOf(ratio: number, scale: RatioScale, plot: Region): number {
-  return plot.y + plot.rows - 1 - Math.round(scale.along(ratio) * (plot.rows - 1));
+/** The longest of the key's texts that fits whole; null where none is told, or none fits. */
+function keyOf({ key }: ChartView, columns: number, glyphs: Glyphs): string | null {
+  const drawn = (text: string) => cells(text).replace(/[─═┄•]/g, (line) => LINE_OF[line]!(glyphs));
+  return key?.map(drawn).find((text) => text.length <= columns) ?? null;
 }
 
-/** The ratio's figures at the left and the line at the limit. */
-function drawRatioAxis(scale: RatioScale, canvas: Canvas, plot: Region, glyphs: Glyphs): void {
+/** The lines that a key speaks of, as they are drawn. */
+const LINE_OF: Readonly<Record<string, (glyphs: Glyphs) => string>> = {
+  '─': ({ powers }) => powers[0],
+  '═': ({ powers }) => powers[1],
+  '┄': ({ chart }) => chart.limit,
+  '•': ({ extreme }) => extreme,
+};
+
+/** The line of a power, of checks outside the powers, of a limit. */
+function symbolsOf(power: ChartSeries['power'], glyphs: Glyphs): LineSymbols {
+  if (power === 'other') return alike(glyphs.extreme);
+  return power === 'limit' ? alike(glyphs.chart.limit) : glyphs.chart.lines[power - 1]!;
+}
+
+function alike(glyph: string): LineSymbols {
+  return Array<string>(LINE_SYMBOLS).fill(glyph) as unknown as LineSymbols;
+}
+
+const LINE_SYMBOLS = 10;
+
+/** From the place where another power comes to govern down to the knob's axis, behind whatever stands there. */
+function drawCrossover(
+  at: number,
+  figure: number,
+  scale: FigureScale,
+  canvas: Canvas,
+  plot: Region,
+  glyphs: Glyphs,
+): void {
+  const top = rowOf(figure, scale, plot);
+  if (!(at >= 0 && at <= 1) || top < plot.y) return;
+  const x = plot.x + Math.round(at * (plot.columns - 1));
+  for (let y = top + 1; y < plot.y + plot.rows; y += 1) {
+    if (canvas.glyphs[y * canvas.columns + x] === ' ') canvas.put(x, y, glyphs.crossover, 'quiet');
+  }
+}
+
+function rowOf(figure: number, scale: FigureScale, plot: Region): number {
+  return plot.y + plot.rows - 1 - Math.round(scale.along(figure) * (plot.rows - 1));
+}
+
+/** The figures at the left and, of ratios, the line at the limit. */
+function drawFigureAxis(
+  scale: FigureScale,
+  limited: boolean,
+  canvas: Canvas,
+  plot: Region,
+  glyphs: Glyphs,
+): void {
   const axis = plot.x - 1;
   for (let y = plot.y; y < plot.y + plot.rows; y += 1) canvas.put(axis, y, glyphs.chart.upright, 'quiet');
   for (const [ratio, label] of scale.labels)
     canvas.putRight(axis - 1, rowOf(ratio, scale, plot), label, 'quiet');
-  canvas.put(plot.x, rowOf(1, scale, plot), glyphs.chart.limit.repeat(plot.columns), 'quiet');
+  if (limited) canvas.put(plot.x, rowOf(1, scale, plot), glyphs.chart.limit.repeat(plot.columns), 'quiet');
 }
 
 /** The knob's axis below the plot, with a tick and a label at each quarter as far as there is room. */

@@ -178,5 +178,6 @@ function footOf(view: CompareView, design: number, typing: boolean) {
     ...(onPin ? [{ keys: 'Delete', does: 'drop' }] : []),
     { keys: '↑↓', does: 'scroll' },
     { keys: 'Esc', does: 'back' },
+    { keys: 'w', does: 'workings' },
   ];
 }

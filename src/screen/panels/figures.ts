@@ -3,11 +3,10 @@ import type { Glyphs } from '../draw/glyphs.ts';
 /** A check passes at this ratio and below; the small part is arithmetic's, not the wood's (contract: 1 + 1e-9). */
 export const PASS = 1 + 1e-9;
 
-/** A ratio of demand to capacity in at most four or five cells. A failing one never reads 1.00. */
+/** A ratio of demand to capacity in at most five cells, six for "untied". A failing one never reads 1.00. */
 export function showRatio(ratio: number | null, glyphs: Glyphs): string {
   if (ratio === null || Number.isNaN(ratio) || ratio < 0) return glyphs.none;
-  // What nothing can meet, such as uplift with no tie-down stated.
-  if (ratio === Number.POSITIVE_INFINITY) return 'none';
+  if (ratio === Number.POSITIVE_INFINITY) return 'untied';
   if (ratio >= 999.5) return '>999';
   if (ratio >= 99.95) return ratio.toFixed(0);
   if (ratio >= 9.995) return ratio.toFixed(1);

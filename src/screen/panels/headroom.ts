@@ -1,4 +1,5 @@
-import { DOTS_ACROSS, DOTS_DOWN, Dots, dotGlyph } from '../draw/braille.ts';
+import { DOTS_ACROSS, DOTS_DOWN, Dots } from '../../sheet/drawing/dots.ts';
+import { dotGlyph } from '../draw/braille.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
@@ -55,6 +56,7 @@ export function drawHeadroom(
           { keys: 'Enter', does: 'type' },
           { keys: 'Delete', does: 'no storey' },
           { keys: 'Esc', does: 'back' },
+          { keys: 'w', does: 'workings' },
         ]
       : [
           { keys: 'Enter', does: 'take it' },

@@ -4,16 +4,21 @@ import type { Glyphs } from '../draw/glyphs.ts';
 import type { View } from '../view.ts';
 import { heading, type Region, rule, write } from './region.ts';
 
-/** " handover  (2) 2x14 is lightest from 14'-4" to 15'-6"; ...": whole, without its label, or not at all. */
+/** " handover  (2) 2x14 is lightest from 14'-4" to 15'-6"; ...": whole, without its label, without its last clauses, or not at all. */
 export function drawHandover(view: View, canvas: Canvas, region: Region): void {
   if (view.handover === null || view.handover === '') return;
   const label = 'handover';
-  const text = cells(view.handover);
   const room = region.columns - 2;
-  if (label.length + 2 + text.length <= room) {
-    canvas.put(region.x + 1, region.y, label, 'quiet');
-    canvas.put(region.x + 1 + label.length + 2, region.y, text);
-  } else write(canvas, region.x + 1, region.y, text, room);
+  const clauses = cells(view.handover).split('; ');
+  for (let count = clauses.length; count > 0; count -= 1) {
+    const text = clauses.slice(0, count).join('; ');
+    if (label.length + 2 + text.length <= room) {
+      canvas.put(region.x + 1, region.y, label, 'quiet');
+      canvas.put(region.x + 1 + label.length + 2, region.y, text);
+      return;
+    }
+    if (write(canvas, region.x + 1, region.y, text, room)) return;
+  }
 }
 
 /** What is assumed and warned, the most worth first, each on a row of its own; one that does not fit is left out. */

@@ -48,6 +48,7 @@ export function drawMoveList(
     { keys: 'Enter', does: 'apply' },
     { keys: 'i', does: 'units' },
     { keys: 'Esc', does: 'back' },
+    { keys: 'w', does: 'workings' },
   ];
   drawKeys(foot, canvas, 1, canvas.columns - 1, canvas.rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);
@@ -65,7 +66,8 @@ function drawSides(
   rule(canvas, region, glyphs);
   const side = Math.min(MOST_SIDE, Math.floor((columns - MARGIN - SIDE_LABEL) / 2));
   const ratio = side >= WIDE_SIDE ? RATIO.wide : RATIO.close;
-  const name = side - 3 * ratio - 2 - 2;
+  // Less the mark of what is in hand and a blank before the next side.
+  const name = side - 3 * ratio - 2 - 1;
   for (const [at, each] of WAYS.entries()) {
     const x = MARGIN + SIDE_LABEL + at * side + 2;
     heading(canvas, region, x, each, 'strong');

@@ -3,15 +3,50 @@ import { cells, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { View } from '../view.ts';
 import { showRatio } from './figures.ts';
-import { heading, type Region, rule, writeRight } from './region.ts';
+import { heading, type Region, rule, write, writeRight } from './region.ts';
+import { drawHeads, drawTableRow, placeColumns } from './table.ts';
 
 const KIND_LEAST = 12;
 const RATIO = 7;
 const COST = 13;
 
-/** The moves beside the gauges, best first: what to change, to what, the ratio after and what it costs. */
+/**
+ * The moves beside the gauges, best first: what to change, to what, the ratio after and what it costs; until they are
+ * found the nearest cures.
+ */
 export function drawMoves(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): void {
   rule(canvas, region, glyphs);
+  if (view.moves == null) drawCures(view, canvas, region, glyphs);
+  else drawTable(view.moves, canvas, region, glyphs);
+}
+
+function drawTable(
+  { columns, rows, none }: NonNullable<View['moves']>,
+  canvas: Canvas,
+  region: Region,
+  glyphs: Glyphs,
+): void {
+  const left = region.x + MARGIN;
+  if (rows.length === 0) {
+    heading(canvas, region, left, 'moves');
+    if (region.rows > 1) write(canvas, left, region.y + 1, none, region.columns - MARGIN, 'quiet');
+    return;
+  }
+  const placed = placeColumns(columns, rows, left, region.columns - MARGIN - 1);
+  drawHeads(columns, placed, canvas, region);
+  const shown = rows.slice(0, region.rows - 1);
+  for (const [at, row] of shown.entries()) {
+    const y = region.y + 1 + at;
+    drawTableRow(row, columns, placed, canvas, y, region.x + region.columns, glyphs);
+    const more = at === shown.length - 1 && rows.length > shown.length;
+    if (more) canvas.put(region.x, y, glyphs.further[1], 'quiet');
+  }
+}
+
+/** Cells left of the table: one for the mark of what is further down. */
+const MARGIN = 1;
+
+function drawCures(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): void {
   const left = region.x + 1;
   const end = region.x + region.columns - 2;
   const ratioEnd = end - COST;

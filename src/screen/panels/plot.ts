@@ -1,5 +1,6 @@
+import { DOTS_ACROSS, DOTS_DOWN, Dots } from '../../sheet/drawing/dots.ts';
 import type { PlotView } from '../diagrams-view.ts';
-import { DOTS_ACROSS, DOTS_DOWN, Dots, dotGlyph } from '../draw/braille.ts';
+import { dotGlyph } from '../draw/braille.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, wrap } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';

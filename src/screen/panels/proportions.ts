@@ -1,8 +1,10 @@
-import { DOTS_ACROSS, DOTS_DOWN, Dots, dotGlyph } from '../draw/braille.ts';
+import type { Band } from '../../explore/usual-proportions.ts';
+import { DOTS_ACROSS, DOTS_DOWN, Dots } from '../../sheet/drawing/dots.ts';
+import { dotGlyph } from '../draw/braille.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { Band, ProportionView } from '../proportion-view.ts';
+import type { ProportionView } from '../proportion-view.ts';
 import type { View } from '../view.ts';
 import { type Axis, columnOf, columnWithin, fitAxis, isOn, TICKS } from './axis.ts';
 import { showRatio } from './figures.ts';
@@ -55,7 +57,11 @@ export function drawProportions(
   const below = plot.y + rows + AXIS_ROWS;
   for (const [at, band] of view.bands.entries()) drawBand(band, canvas, below + at, axis, glyphs);
   write(canvas, 1, below + view.bands.length, cells(view.sources), canvas.columns - 2, 'quiet');
-  drawKeys([{ keys: 'Esc', does: 'back' }], canvas, 1, canvas.columns - 1, canvas.rows - 1, glyphs);
+  const foot = [
+    { keys: 'Esc', does: 'back' },
+    { keys: 'w', does: 'workings' },
+  ];
+  drawKeys(foot, canvas, 1, canvas.columns - 1, canvas.rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);
 }
 

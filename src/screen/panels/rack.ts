@@ -21,14 +21,20 @@ const STOPS_MIXED = 10;
 const STOPS_LEAST = 8;
 const STOPS_MOST = 24;
 const REACH = 10;
+/** Blanks before a price. */
+const PRICE_GAP = 2;
+const PRICE_MOST = 12;
 /** The lit size stands at about this part of the window: most of what is shown is heavier. */
 const LIT_AT = 0.35;
 const NAMES = ['shear', 'bend', 'defl'] as const;
+const PRICE = 'price';
 
 interface Columns {
   readonly label: number;
   /** 0 where the wood has no column of its own: then a label names it where it must. */
   readonly wood: number;
+  /** 0 where nothing has a price, or there is no room. */
+  readonly price: number;
   /** Cells of one ratio: 7 with its name above, less with its power only. */
   readonly ratio: number;
   /** 0 when there is no room for what stops a size. */
@@ -38,51 +44,71 @@ interface Columns {
 
 /** The cells the whole rack takes, so that a layout can give it no more. */
 export function rackColumns(rack: RackView, reach: boolean): number {
-  const { label, wood, stops } = widths(rack);
-  return MARGIN + label + (wood > 0 ? wood + GAP : 0) + WEIGHT + 3 * 7 + 2 + stops + (reach ? REACH : 0) + 2;
+  const { label, wood, price, stops } = widths(rack);
+  const first = MARGIN + label + (wood > 0 ? wood + GAP : 0);
+  return first + WEIGHT + price + 3 * 7 + 2 + stops + (reach ? REACH : 0) + 2;
 }
 
-/** Cells that labels and what stops them want: of all sizes, so that scrolling moves no column. */
-function widths(rack: RackView): { label: number; named: number; wood: number; stops: number } {
+interface Widths {
+  readonly label: number;
+  readonly named: number;
+  readonly wood: number;
+  readonly price: number;
+  readonly stops: number;
+}
+
+/** Cells that the columns of texts want: of all sizes, so that scrolling moves none of them. */
+function widths(rack: RackView): Widths {
   let label = LABEL_LEAST;
   let named = LABEL_LEAST;
   let wood = 0;
+  let price = 0;
   let stops = STOPS;
   for (const row of rack.rows) {
     label = Math.max(label, row.label.length);
     named = Math.max(named, (row.named ?? row.label).length);
     wood = Math.max(wood, (row.wood ?? '').length);
+    if (row.price !== undefined) price = Math.max(price, PRICE.length, row.price.length);
     stops = Math.max(stops, row.stops.length);
   }
   return {
     label: Math.min(label, LABEL_MOST),
     named: wood > 0 ? Math.min(Math.max(named, label), NAMED_MOST) : Math.min(label, LABEL_MOST),
     wood: Math.min(wood, WOOD_MOST),
+    price: price === 0 ? 0 : PRICE_GAP + Math.min(price, PRICE_MOST),
     stops: Math.min(stops, STOPS_MOST),
   };
 }
 
 /**
- * The columns that fit: ratios move closer first, then reach goes, then the woods go into the labels, then what stops
- * a size, then the label is shortened.
+ * The columns that fit: ratios move closer first, then reach goes, then the woods go into the labels, then the prices,
+ * then what stops a size, then the label is shortened.
  */
 function fitColumns(rack: RackView, width: number, wantsReach: boolean): Columns {
+  const { named, price } = widths(rack);
+  const fit = fitPriced(rack, width, wantsReach, price) ?? fitPriced(rack, width, wantsReach, 0);
+  if (fit !== null) return fit;
+  const short = Math.min(named, width - MARGIN - WEIGHT - 3 * 5 - 1);
+  return { label: short, wood: 0, price: 0, ratio: 5, stops: 0, reach: false };
+}
+
+/** With so many cells for prices; null where what stops a size has no room. */
+function fitPriced(rack: RackView, width: number, wantsReach: boolean, price: number): Columns | null {
   const { label, named, wood, stops } = widths(rack);
+  const room = width - MARGIN - WEIGHT - price - 2;
   for (const woods of wood > 0 ? [wood, 0] : [0]) {
     const first = woods > 0 ? label + GAP + woods : named;
     const least = wood > 0 ? STOPS_MIXED : STOPS;
     for (const reach of wantsReach ? [true, false] : [false]) {
       for (const ratio of [7, 6, 5]) {
-        const rest = width - MARGIN - first - WEIGHT - 3 * ratio - (reach ? REACH : 0) - 2;
+        const rest = room - first - 3 * ratio - (reach ? REACH : 0);
         if (rest < least) continue;
-        return { label: first, wood: woods, ratio, stops: Math.min(rest, stops), reach };
+        return { label: first, wood: woods, price, ratio, stops: Math.min(rest, stops), reach };
       }
     }
   }
-  const tight = width - MARGIN - named - WEIGHT - 3 * 5 - 2;
-  if (tight >= STOPS_LEAST) return { label: named, wood: 0, ratio: 5, stops: tight, reach: false };
-  const short = Math.min(named, width - MARGIN - WEIGHT - 3 * 5 - 1);
-  return { label: short, wood: 0, ratio: 5, stops: 0, reach: false };
+  const tight = room - named - 3 * 5;
+  return tight < STOPS_LEAST ? null : { label: named, wood: 0, price, ratio: 5, stops: tight, reach: false };
 }
 
 /**
@@ -151,11 +177,13 @@ function drawHeading(
   const wood = shorten(cells(rack.wood), weightEnd - unit.length - woodAt - 1, glyphs);
   put(woodAt + wood.length - 1, wood);
   put(weightEnd, unit);
+  const figuresEnd = weightEnd + columns.price;
+  if (columns.price > 0) put(figuresEnd, PRICE);
   for (const [power, name] of NAMES.entries()) {
     const text = columns.ratio < 7 ? glyphs.superscripts[power]! : name + glyphs.superscripts[power];
-    put(weightEnd + (power + 1) * columns.ratio, text);
+    put(figuresEnd + (power + 1) * columns.ratio, text);
   }
-  const stopsAt = weightEnd + 3 * columns.ratio + 3;
+  const stopsAt = figuresEnd + 3 * columns.ratio + 3;
   const stops = columns.stops < STOPS_MIXED ? 'stops' : 'stopped by';
   if (columns.stops > 0) put(stopsAt + stops.length - 1, stops);
   if (columns.reach) put(stopsAt + columns.stops + REACH - 2, 'reach');
@@ -188,13 +216,22 @@ function drawRow(
 
   const weightEnd = x + MARGIN + columns.label + WEIGHT - 1;
   writeRight(canvas, x + MARGIN + columns.label, weightEnd, y, cells(row.weight), style);
+  const figuresEnd = weightEnd + columns.price;
+  writeRight(
+    canvas,
+    weightEnd + PRICE_GAP,
+    figuresEnd,
+    y,
+    columns.price > 0 ? cells(row.price ?? '') : '',
+    style,
+  );
   const worst = Math.max(...row.ratios.map((ratio) => ratio ?? 0));
   for (const [power, ratio] of row.ratios.entries()) {
-    const end = weightEnd + (power + 1) * columns.ratio;
+    const end = figuresEnd + (power + 1) * columns.ratio;
     const fails = ratio !== null && ratio > PASS && ratio === worst;
     writeRight(canvas, end - 4, end, y, showRatio(ratio, glyphs), fails ? 'governs' : style);
   }
-  const stopsAt = weightEnd + 3 * columns.ratio + 3;
+  const stopsAt = figuresEnd + 3 * columns.ratio + 3;
   if (columns.stops > 0) {
     const stops = narrowed(cells(isLit ? (rack.litWord ?? 'lightest') : row.stops), columns.stops);
     canvas.put(stopsAt, y, clip(stops, columns.stops, glyphs), style);

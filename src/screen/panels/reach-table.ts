@@ -52,6 +52,7 @@ export function drawReachTable(
     ...(scrolls ? [{ keys: '↑↓', does: `scroll ${view.rows.length} sizes` }] : []),
     { keys: 'i', does: 'units' },
     { keys: 'Esc', does: 'back' },
+    { keys: 'w', does: 'workings' },
   ];
   drawKeys(foot, canvas, 1, columns - 1, rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);

@@ -1,7 +1,7 @@
+import type { SketchLoad, SketchView } from '../../explore/diagrams/sketch-model.ts';
 import { Canvas } from '../draw/canvas.ts';
 import { cells } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { SketchLoad, SketchView } from '../sketch-model.ts';
 import { isFree, type Region } from './region.ts';
 
 /** Rows below the loads: the beam, its supports with the lengths. */

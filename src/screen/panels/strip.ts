@@ -70,7 +70,11 @@ export function drawStrip(
     drawTable(strip, scroll, canvas, glyphs);
   }
   const scrolls = strip !== null && strip.stretches.length > stripRows(rows);
-  const foot = [...(scrolls ? [{ keys: '↑↓', does: 'scroll' }] : []), { keys: 'Esc', does: 'back' }];
+  const foot = [
+    ...(scrolls ? [{ keys: '↑↓', does: 'scroll' }] : []),
+    { keys: 'Esc', does: 'back' },
+    { keys: 'w', does: 'workings' },
+  ];
   drawKeys(foot, canvas, 1, columns - 1, rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);
 }

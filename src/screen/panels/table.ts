@@ -9,6 +9,8 @@ export interface TableColumn {
   readonly align: 'left' | 'right';
   /** Where there is no room those with the greatest number go first; absent: it always stands. */
   readonly spare?: number;
+  /** Of text: to no fewer cells is it shortened as long as another column may go; absent: to 16. */
+  readonly least?: number;
 }
 
 export interface TableRow {
@@ -29,7 +31,7 @@ export interface PlacedColumn {
 }
 
 const GAP = 2;
-/** Texts are shortened to this before a column goes, and to the lesser once none is left that may. */
+/** Texts are shortened to this before a column goes, unless it says otherwise, and to the lesser once none is left that may. */
 const SHORT_TEXT = 16;
 const LEAST_TEXT = 8;
 
@@ -48,7 +50,8 @@ export function placeColumns(
   const isText = (at: number) => columns[at]!.align === 'left' && columns[at]!.spare === undefined;
   const shortest = () =>
     shown.reduce(
-      (sum, at) => sum + (isText(at) ? Math.min(needed[at]!, SHORT_TEXT) : needed[at]!) + GAP,
+      (sum, at) =>
+        sum + (isText(at) ? Math.min(needed[at]!, columns[at]!.least ?? SHORT_TEXT) : needed[at]!) + GAP,
       -GAP,
     );
   while (shortest() > width) {

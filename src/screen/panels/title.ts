@@ -38,8 +38,8 @@ export function drawTitle(view: Pick<View, 'title'>, canvas: Canvas, region: Reg
   const separator = session !== '' && member !== '' ? ' / ' : '';
   const least = Math.min(session.length, LEAST_SESSION);
   const forMember = Math.min(member.length, room - separator.length - least);
-  const forSession = Math.min(session.length, room - separator.length - forMember);
-  const shownSession = shorten(session, forSession, glyphs);
+  const shownMember = shorten(member, forMember, glyphs);
+  const shownSession = shorten(session, room - separator.length - shownMember.length, glyphs);
   canvas.put(names, y, shownSession + separator);
-  canvas.put(names + shownSession.length + separator.length, y, shorten(member, forMember, glyphs), 'strong');
+  canvas.put(names + shownSession.length + separator.length, y, shownMember, 'strong');
 }

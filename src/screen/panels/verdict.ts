@@ -1,13 +1,11 @@
+import { WIDEST } from '../arrange.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, clip } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { View } from '../view.ts';
+import type { CureView, View } from '../view.ts';
 import { showRatio } from './figures.ts';
 import type { Region } from './region.ts';
 import { write } from './region.ts';
-
-/** From this many columns the moves have a panel of their own. */
-const MOVES_BESIDE = 160;
 
 /**
  * The verdict: a word in reverse video, what stops the member, and its cures as whole sentences. On two
@@ -27,18 +25,34 @@ export function drawVerdict(view: View, canvas: Canvas, region: Region, glyphs: 
   const oneRow = region.rows < 2;
   let x = oneRow && reason !== '' ? start + reason.length + 1 : start;
   const y = oneRow ? region.y : region.y + 1;
+  const told: string[] = [];
   for (const cure of verdict.cures) {
     const sentence = cells(cure);
-    if (write(canvas, x, y, sentence, right - x + 1)) x += sentence.length + 1;
-    else break;
+    if (!write(canvas, x, y, sentence, right - x + 1)) break;
+    told.push(sentence);
+    x += sentence.length + 1;
   }
-  if (oneRow && region.columns < MOVES_BESIDE) drawAside(view, canvas, x + 2, right, y, glyphs);
+  if (!oneRow || region.columns >= WIDEST) return;
+  const others = view.cures.filter((cure) => !told.some((sentence) => isToldIn(sentence, cure, glyphs)));
+  drawAside(others, canvas, x + 2, right, y, glyphs);
 }
 
-/** "deepen 0.93 · a ply more 0.87" at the right end: as many moves, best first, as fit whole. */
-function drawAside(view: View, canvas: Canvas, from: number, end: number, y: number, glyphs: Glyphs): void {
+/** True where a sentence of the verdict has named the size or the span of a cure: "Lightest cure: 4x16, 0.90." */
+function isToldIn(sentence: string, { label, ratio }: CureView, glyphs: Glyphs): boolean {
+  return [`${label}, ${showRatio(ratio, glyphs)}`, `to ${label}.`].some((text) => sentence.includes(text));
+}
+
+/** "deepen 0.93 · a ply more 0.87" at the right end: as many cures, best first, as fit whole. */
+function drawAside(
+  cures: readonly CureView[],
+  canvas: Canvas,
+  from: number,
+  end: number,
+  y: number,
+  glyphs: Glyphs,
+): void {
   let text = '';
-  for (const cure of view.cures) {
+  for (const cure of cures) {
     const item = `${cells(cure.kind)} ${showRatio(cure.ratio, glyphs)}`;
     const longer = text === '' ? item : `${text} · ${item}`;
     if (longer.length > end - from + 1) break;

@@ -14,7 +14,7 @@ export interface OpenOptions {
   readonly stdin?: NodeJS.ReadStream;
   /** Default process.stdout; must be a terminal. */
   readonly stdout?: NodeJS.WriteStream;
-  /** Default process.env; TERM is looked at. */
+  /** Default process.env; TERM and Ink's own INK_SCREEN_READER are looked at. */
   readonly env?: Readonly<Record<string, string | undefined>>;
 }
 
@@ -54,6 +54,9 @@ export async function openScreen(
   if (!stdin.isTTY) return { kind: 'refused', fault: 'stdin is not a terminal' };
   if (!stdout.isTTY) return { kind: 'refused', fault: 'stdout is not a terminal' };
 
+  const byEar = env.INK_SCREEN_READER === 'true';
+  // A dumb terminal has no second screen; what is read by ear stays, to be gone back to.
+  const wholeScreen = env.TERM !== 'dumb' && !byEar;
   const tree = (): ReactElement => <Suspender>{draw(sizeOf(stdout))}</Suspender>;
   let instance: Instance | null = null;
   let failure: Error | null = null;
@@ -62,7 +65,7 @@ export async function openScreen(
   // while the size changed may have wrapped or been cut where nobody keeps account of it: begin on an empty screen.
   const onResize = (): void => {
     instance?.clear();
-    if (env.TERM !== 'dumb') stdout.write(EMPTY_SCREEN);
+    if (wholeScreen) stdout.write(EMPTY_SCREEN);
     instance?.rerender(tree());
   };
   // Left to Node, the error would be printed on the alternate screen and vanish with it.
@@ -80,8 +83,8 @@ export async function openScreen(
     instance = render(tree(), {
       stdin,
       stdout,
-      // A dumb terminal has no second screen.
-      alternateScreen: env.TERM !== 'dumb',
+      alternateScreen: wholeScreen,
+      isScreenReaderEnabled: byEar,
       incrementalRendering: true,
       maxFps: FRAMES_PER_SECOND,
       exitOnCtrlC: false,

@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { Dots, dotGlyph } from '../../../src/screen/draw/braille.ts';
+import { dotGlyph } from '../../../src/screen/draw/braille.ts';
 import { isSingleWidth } from '../../../src/screen/terminal/single-width.ts';
+import { Dots } from '../../../src/sheet/drawing/dots.ts';
 import { ascii, unicode } from '../panels/support.ts';
 
 /** The glyphs of a field of dots, row by row. */

@@ -55,8 +55,12 @@ describe('cells', () => {
 
 describe('shorten, clip and wrap', () => {
   it('ends a name that is too long with the mark of what is left out', () => {
-    expect(shorten('Boathouse at Alder Cove', 12, unicode)).toBe('Boathouse a…');
-    expect(shorten('Boathouse at Alder Cove', 11, unicode)).toBe('Boathouse…');
+    expect(shorten('Boathouse at Alder Cove', 12, unicode)).toBe('Boathouse…');
+    expect(shorten('Boathouse at Alder Cove', 13, unicode)).toBe('Boathouse at…');
+    expect(shorten('2x12 + brace, 8 ft', 9, unicode)).toBe('2x12…');
+    // Within a word where whole ones would leave less than half.
+    expect(shorten('A boathouse', 8, unicode)).toBe('A boath…');
+    expect(shorten('Boathouse', 5, unicode)).toBe('Boat…');
     expect(shorten('Boathouse', 9, unicode)).toBe('Boathouse');
     expect(shorten('Boathouse', 0, unicode)).toBe('');
   });

@@ -26,7 +26,7 @@ describe('the title', () => {
 
   it('shortens the session first, then the member, and stays in its row', () => {
     expect(title(longNames, 80)).toBe(
-      ' thrice  The long re… / Ridge ·  [31mgirder  over the la…  120 of 500  not kept',
+      ' thrice  The long… / Ridge ·  [31mgirder  over the…        120 of 500  not kept',
     );
   });
 });
@@ -46,8 +46,8 @@ describe('the verdict', () => {
     expect(verdict(failing, 60, 2)[1]).toBe('         Lightest cure: (2) 2x14, 0.93.');
   });
 
-  it('takes one row on wide screens, with as many moves at the right as fit whole', () => {
-    expect(verdict(failing, 120, 1)[0]).toMatch(/shorten to 13'-3"\. {3}deepen 0\.93 · a ply more 0\.87$/);
+  it('takes one row on wide screens, with as many cures that it has not told at the right as fit whole', () => {
+    expect(verdict(failing, 120, 1)[0]).toMatch(/shorten to 13'-3"\. {4}a ply more 0\.87 · widen 1\.10$/);
     expect(verdict(passing, 120, 1)[0]).toMatch(/^ {2}PASSES {2}Bending is nearest, at 0\.93\. It would/);
   });
 });
@@ -74,12 +74,14 @@ describe('the foot', () => {
 });
 
 describe('handover, remarks and moves', () => {
-  it('stand whole or not at all', () => {
+  it('stand whole, or without the last clauses, or not at all', () => {
     const handover = (columns: number) =>
       drawn(columns, 1, (canvas, region) => drawHandover(failing, canvas, region)).rows[0];
     expect(handover(80)).toMatch(/^ handover {2}\(2\) 2x14 is lightest .* above, 4x14$/);
     expect(handover(72)).toMatch(/^ \(2\) 2x14 is lightest .* above, 4x14$/);
-    expect(handover(60)).toBe('');
+    expect(handover(60)).toBe(` (2) 2x14 is lightest from 14'-4" to 15'-6"; below, 3x14`);
+    expect(handover(56)).toBe(` handover  (2) 2x14 is lightest from 14'-4" to 15'-6"`);
+    expect(handover(40)).toBe('');
   });
 
   it('take the next remark that fits when the first does not', () => {

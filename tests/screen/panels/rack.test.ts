@@ -62,7 +62,39 @@ describe('the rack', () => {
     const rows = drawn(54, 3, (canvas, region, glyphs) =>
       drawRack(longNames, canvas, region, glyphs, plain),
     ).rows;
-    expect(rows[0]).toBe(' LVL 2.0E typical set…  lb/ft    ¹    ²    ³  stops');
+    expect(rows[0]).toBe(' LVL 2.0E typical…      lb/ft    ¹    ²    ³  stops');
     expect(rows[1]).toContain('(3) LVL 1-3/4x11-7/8  7.8 0.40 1.28 0.64  slender');
+  });
+
+  describe('where something on it has a price', () => {
+    const priced = failing.rack.rows.map((row, at) => ({
+      ...row,
+      price: at % 3 === 0 ? '—' : `${(1234.5 + at).toFixed(2)}`,
+    }));
+
+    it('has a column of prices beside the weights, a dash where there is none', () => {
+      expect(rack({ rows: priced }, 4, 64)).toEqual([
+        ' DF-L No.2   lb/ft    price shear¹  bend²  defl³  stopped by',
+        ' ●  (2) 2x12   7.8        —   0.40   1.28   0.64  bending',
+        '    4x12       9.1  1241.50   0.34   1.10   0.55  bending',
+        '  ◆ (2) 2x14   9.2  1242.50   0.34   0.93   0.39  lightest',
+      ]);
+    });
+
+    it('keeps it while ratios move closer and reach goes, and lets it go before what stops a size', () => {
+      const with80 = rack({ rows: priced }, 3, 54);
+      expect(with80[0]).toContain('price');
+      expect(with80[1]).toMatch(/— +0\.40 1\.28 0\.64 {2}bending$/);
+      const narrow = rack({ rows: priced }, 3, 45);
+      expect(narrow[0]).not.toContain('price');
+      expect(narrow[1]).toMatch(/bending$/);
+      const reach = rack({ rows: priced }, 3, 60, { reach: true, ruled: true });
+      expect(reach[0]).toContain('price');
+      expect(reach[0]).not.toContain('reach');
+    });
+
+    it('has no such column where nothing has', () => {
+      expect(rack({}, 3)[0]).not.toContain('price');
+    });
   });
 });

@@ -44,6 +44,7 @@ const gauges = fc
 const rackRow = fc.record({
   label: words(3),
   weight: fc.constantFrom('7.8', '112.4', ''),
+  price: fc.constantFrom('43.20', '1234.50', '—', '1000000000.00'),
   ratios: fc.tuple(ratio, ratio, ratio),
   passes: fc.boolean(),
   stops: words(3),
@@ -54,7 +55,10 @@ const rack = fc
   .record({
     wood: words(3),
     weightUnit: fc.constantFrom('lb/ft', 'kg/m'),
-    rows: fc.array(rackRow, { maxLength: 60 }),
+    rows: fc.oneof(
+      fc.array(rackRow, { maxLength: 60 }),
+      fc.array(rackRow, { maxLength: 60 }).map((rows) => rows.map(({ price: _none, ...row }) => row)),
+    ),
   })
   .chain((found) =>
     fc.record({

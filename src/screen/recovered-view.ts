@@ -1,0 +1,54 @@
+import type { Recovered } from '../files/keeper.ts';
+import { memberChange } from '../session/along-trail.ts';
+import type { Change } from '../session/differences.ts';
+import { pathsOf } from '../session/differences.ts';
+import type { Session, SessionMember } from '../session/session.ts';
+import type { TextLine } from './panels/text.ts';
+import type { State } from './state.ts';
+import { dayAndTime, labelOf, valueText } from './trail-words.ts';
+
+/** In what a session that was not kept differs from what the file holds. */
+export function recoveredLines(state: State, { session, time, isOlder }: Recovered): TextLine[] {
+  const lines: TextLine[] = [];
+  const say = (text: string, style: TextLine['style'] = 'plain') => lines.push({ text, style });
+  const of = state.file === null ? 'a session without a file' : state.file;
+  say(`Changes that were not kept when thrice last ended, noted until ${dayAndTime(time, true).trim()}, of`);
+  say(of, 'quiet');
+  if (isOlder)
+    say('The file has been written since, by somebody else: taking them goes back on that.', 'governs');
+  for (const [at, one] of session.members.entries()) {
+    const was = state.session.members.find(({ member }) => member.name === one.member.name);
+    const told = memberLines(was, one, session);
+    if (told.length === 0) continue;
+    say('');
+    say(nameOf(one, at), 'strong');
+    for (const line of told) say(`  ${line}`);
+  }
+  const names = new Set(session.members.map(({ member }) => member.name));
+  const gone = state.session.members.filter(({ member }) => !names.has(member.name));
+  if (gone.length > 0) {
+    say('');
+    say(`deleted: ${gone.map(({ member }) => member.name).join(', ')}`, 'strong');
+  }
+  return lines;
+}
+
+function nameOf({ member: { name, note } }: SessionMember, at: number): string {
+  return `${at + 1}  ${name}${note === '' ? '' : ` ${note}`}`;
+}
+
+function memberLines(was: SessionMember | undefined, now: SessionMember, session: Session): string[] {
+  if (was === undefined) return ['a new member'];
+  const change = memberChange(was, now, session);
+  const pins = (now.pins?.length ?? 0) - (was.pins?.length ?? 0);
+  return [
+    ...(change === null ? [] : changeLines(change, now)),
+    ...(pins === 0 ? [] : [`pins: ${pins > 0 ? '+' : '−'}${Math.abs(pins)}`]),
+  ];
+}
+
+function changeLines(change: Change, { member }: SessionMember): string[] {
+  return pathsOf(change).map(
+    (path) => `${labelOf(path, member)}: ${valueText(change.from[path])} → ${valueText(change.to[path])}`,
+  );
+}
