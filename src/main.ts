@@ -1,3 +1,4 @@
+import { once } from 'node:events';
 import packageJson from '../package.json' with { type: 'json' };
 import { run } from './commands/program.ts';
 import { STATUS } from './commands/status.ts';
@@ -13,4 +14,7 @@ process.stderr.on('error', () => undefined);
 process.exitCode = await run(process.argv.slice(2), packageJson.version, {
   out: (text) => process.stdout.write(text),
   error: (text) => process.stderr.write(text),
+  drained: async () => {
+    if (process.stdout.writableNeedDrain) await once(process.stdout, 'drain');
+  },
 });

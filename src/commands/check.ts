@@ -1,18 +1,18 @@
+import { type Checked, checkedMember } from '../explore/checked.ts';
 import { crossovers } from '../explore/crossovers.ts';
 import { exponentsOf } from '../explore/exponents.ts';
-import { judge } from '../explore/judge.ts';
 import { powersOf } from '../explore/powers.ts';
-import { ratiosOf } from '../explore/ratios.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
-import { harmless, showQuantity, showRatio, showSmall, showStress, type Units } from '../quantity/index.ts';
-import { reportMember } from '../timber/index.ts';
-import type { Member } from '../timber/member.ts';
-import { CHECK_IDS, type CheckId, type CheckResult, type MemberReport } from '../timber/report.ts';
+import { harmless, showRatio, type Units } from '../quantity/index.ts';
+import { rankingOf } from '../session/index.ts';
+import { lengthsText, measuredText, placeText } from '../timber/member-words.ts';
+import { CHECK_IDS, type CheckId } from '../timber/report.ts';
+import { carriersText, linksJson } from './links.ts';
 import { type Loaded, load, type SessionOptions } from './load.ts';
-import { beside, closing, heading, lengthsText, notChecked, placeText, wrapped } from './prose.ts';
+import { beside, closing, heading, notChecked, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
-import { workingsJson, workingsTexts } from './workings.ts';
+import { pagesJson, type Written, workingsJson, workingsTexts } from './workings.ts';
 
 export interface CheckOptions extends SessionOptions {
   /** The calculation behind each check. */
@@ -28,7 +28,10 @@ export function check(file: string, options: CheckOptions, print: (text: string)
   const results = loaded.members.map(({ member }) => checkedMember(member, loaded.only, words));
   const workings = options.workings === true;
   if (json) {
-    const members = results.map((result) => memberJson(result, workings ? loaded.units : null));
+    const members = results.map((result) => ({
+      ...memberJson(result, workings ? writtenFor(loaded, result) : null),
+      ...linksJson(loaded.session, result.member.name),
+    }));
     const document = { thrice: 1, ...notChecked(loaded.only).json, members };
     print(`${JSON.stringify(document, null, 2)}\n`);
   } else {
@@ -37,32 +40,21 @@ export function check(file: string, options: CheckOptions, print: (text: string)
   return results.every((result) => result.passes) ? STATUS.yes : STATUS.no;
 }
 
-/** A report cut down to the checks asked for. */
-interface Checked {
-  readonly member: Member;
-  readonly report: MemberReport;
-  readonly checks: readonly CheckResult[];
-  readonly passes: boolean;
-  readonly governing: CheckId | null;
-  readonly ratios: Float64Array;
-}
-
-function checkedMember(member: Member, only: readonly CheckId[] | null, units: Units): Checked {
-  const report = reportMember(member, units);
-  const ratios = ratiosOf(member);
-  const unloaded = report.cautions.some((caution) => caution.id === 'unloaded');
-  const { passes, governing } = judge(ratios, only);
-  const checks = report.checks.filter((each) => only === null || only.includes(each.id));
-  return { member, report, checks, passes: passes && !unloaded, governing, ratios };
-}
-
 /** JSON has no Infinity: a ratio that nothing can meet is null. */
 function finite(value: number): number | null {
   return Number.isFinite(value) ? value : null;
 }
 
-/** `workings`: the units to write the calculations in; null leaves them out. */
-function memberJson({ member, report, checks, passes, governing, ratios }: Checked, workings: Units | null) {
+/** How the calculations of a member are written. */
+function writtenFor({ session, units }: Loaded, { checks }: Checked): Written {
+  return { checks: checks.map(({ id }) => id), ranking: rankingOf(session), job: session.members, units };
+}
+
+/** `workings`: how to write the calculations; null leaves them out. */
+function memberJson(
+  { member, report, checks, passes, governing, ratios }: Checked,
+  workings: Written | null,
+) {
   const exponents = exponentsOf(member);
   const spanToDepth = spanToDepthOf(member);
   const [shear, bending, deflection] = powersOf(ratios).map((power) => power.ratio ?? 0);
@@ -92,13 +84,14 @@ function memberJson({ member, report, checks, passes, governing, ratios }: Check
       clause: each.clause,
       factors: Object.fromEntries(each.factors.map(({ symbol, value }) => [symbol, value])),
       exponents: exponents[each.id] ?? null,
-      ...(workings === null ? {} : { workings: workingsJson(member, each.id, workings) }),
+      ...(workings === null ? {} : { workings: workingsJson(member, each.id, workings.units) }),
     })),
     advice: report.advice,
     reactions: report.reactions.map(({ at, byKind, max, min }) => ({ at, byKind, max, min })),
     analysis: report.analysis,
     assumptions: report.assumptions,
     cautions: report.cautions,
+    ...(workings === null ? {} : { workings: pagesJson(member, workings) }),
   };
 }
 
@@ -108,8 +101,8 @@ function memberTexts(loaded: Loaded, results: readonly Checked[], workings: bool
   const lines = [...heading(loaded.session), ...notChecked(loaded.only).lines];
   for (const result of results) {
     lines.push('', ...memberText(result, loaded.units));
-    const ids = result.checks.map(({ id }) => id);
-    if (workings) lines.push(...workingsTexts(result.member, ids, loaded.units));
+    lines.push(...carriersText(loaded.session, result.member.name, loaded.units, '  '));
+    if (workings) lines.push(...workingsTexts(result.member, writtenFor(loaded, result)));
   }
   const failing = results.filter((result) => !result.passes).length;
   if (results.length > 1)
@@ -131,8 +124,8 @@ function memberText({ member, report, checks, passes, governing }: Checked, unit
     .sort((a, b) => CHECK_IDS.indexOf(a.id) - CHECK_IDS.indexOf(b.id))
     .map((each) => [
       `${each.id === governing ? '>' : ' '} ${each.id}`,
-      measured(each, each.demand, units),
-      measured(each, each.capacity, units),
+      measuredText(each, each.demand, units),
+      measuredText(each, each.capacity, units),
       showRatio(each.ratio),
       each.combination,
       placeText(each, units),
@@ -153,17 +146,4 @@ function memberText({ member, report, checks, passes, governing }: Checked, unit
     ...report.cautions.flatMap((caution) => wrapped(`beware: ${caution.text}`, '  ')),
     ...(report.assumptions.length > 0 ? wrapped(`assumed: ${report.assumptions.join('; ')}`, '  ') : []),
   ];
-}
-
-function measured(each: CheckResult, value: number, units: Units): string {
-  switch (each.unit) {
-    case 'psi':
-      return showStress(value, units);
-    case 'in':
-      return showSmall(value, units);
-    case 'lb':
-      return showQuantity('pointLoad', value, units);
-    default:
-      return value.toFixed(1);
-  }
 }

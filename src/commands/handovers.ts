@@ -6,10 +6,11 @@ import type { QuantityKind } from '../quantity/index.ts';
 import { harmless, quoted, showSpanDown, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import type { Member } from '../timber/member.ts';
+import { woodName } from '../timber/member-words.ts';
 import { nearestName } from '../timber/nearest-name.ts';
 import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, given, woodName, wrapped } from './prose.ts';
+import { beside, given, wrapped } from './prose.ts';
 import { woodJson } from './rack.ts';
 import { BadInput, STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -115,10 +116,14 @@ function sweepBy(member: Member, written: unknown, key: string): Sweep {
   );
 }
 
-/** Of which loads the file states where they end. */
+/** Of which loads and links the file states where they end. */
 function loadEnds(written: unknown): { to: boolean }[] {
-  const loads = (written as { readonly loads?: readonly object[] } | undefined)?.loads ?? [];
-  return loads.map((load) => ({ to: Object.hasOwn(load, 'to') }));
+  const record = (written ?? {}) as {
+    readonly loads?: readonly object[];
+    readonly links?: readonly object[];
+  };
+  const placed = [...(record.loads ?? []), ...(record.links ?? [])];
+  return placed.map((each) => ({ to: Object.hasOwn(each, 'to') }));
 }
 
 function end(sweep: Sweep, which: 'from' | 'to', text: string, units: Units): number {

@@ -38,12 +38,17 @@ export function readText(file: string): string {
       throw new BadInput(`${harmless(file)}: is larger than 16 MiB, the most a session may be`);
     return new TextDecoder('utf-8', { fatal: true, ignoreBOM: true }).decode(bytes);
   } catch (error) {
-    if (error instanceof BadInput) throw error;
-    const code = (error as NodeJS.ErrnoException).code;
-    throw new BadInput(
-      `${harmless(file)}: ${WHY[code ?? ''] ?? `could not be read (${code ?? harmless(String(error))})`}`,
-    );
+    throw unreadable(file, error);
   }
+}
+
+/** The fault of a file that could not be read; a BadInput stays what it is. */
+export function unreadable(file: string, error: unknown): BadInput {
+  if (error instanceof BadInput) return error;
+  const code = (error as NodeJS.ErrnoException).code;
+  return new BadInput(
+    `${harmless(file)}: ${WHY[code ?? ''] ?? `could not be read (${code ?? harmless(String(error))})`}`,
+  );
 }
 
 /** A pipe or a device does not tell its size: the reading itself has to end. */
@@ -75,16 +80,25 @@ const WHY: Readonly<Record<string, string>> = {
   ERR_ENCODING_INVALID_ENCODED_DATA: 'is not UTF-8 text',
 };
 
-/** Reads a session for a command: values set, members chosen, units and checks as asked. */
-export function load(file: string, options: SessionOptions): Loaded {
-  const text = readText(file);
-  const set = options.set ?? [];
+/** The session of a file's text, with the values of a member set and its yard list read; BadInput where it has none. */
+export function sessionOf(
+  text: string,
+  file: string,
+  member: string | null = null,
+  set: readonly string[] = [],
+): Session {
   const read =
     set.length === 0
       ? readSession(text, harmless(file))
-      : readSessionWithSets(text, harmless(file), options.member ?? null, set);
+      : readSessionWithSets(text, harmless(file), member, set);
   if (!read.ok) throw new BadInput(read.fault);
-  const session = withBest(withYard(read.session, file, readText), options.best);
+  return withYard(read.session, file, readText);
+}
+
+/** Reads a session for a command: values set, members chosen, units and checks as asked. */
+export function load(file: string, options: SessionOptions): Loaded {
+  const read = sessionOf(readText(file), file, options.member ?? null, options.set ?? []);
+  const session = withBest(read, options.best);
   const members = session.members.filter(
     ({ member }) => options.member === undefined || member.name === options.member,
   );
@@ -121,7 +135,8 @@ function shortened(text: string): string {
   return text.length > NAMES_SHOWN ? `${text.slice(0, NAMES_SHOWN)} ...` : text;
 }
 
-function unitsOf(asked: string | undefined, own: Units): Units {
+/** The units asked for, else a session's own. */
+export function unitsOf(asked: string | undefined, own: Units): Units {
   if (asked === undefined) return own;
   if (asked === 'us' || asked === 'si') return asked;
   throw new BadInput(`--units ${quoted(asked)}: is not a choice of units; us or si would be`);

@@ -1,14 +1,15 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { type Move, type Moves, movesOf } from '../explore/moves/index.ts';
 import { harmless, showInches, showRatio, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import { sizeLabel } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
+import { lengthsText, woodName } from '../timber/member-words.ts';
 import type { CheckId } from '../timber/report.ts';
 import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, given, LINE, lengthsText, woodName, wrapped } from './prose.ts';
-import { moneyText } from './rack.ts';
+import { beside, given, LINE, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
 

@@ -1,11 +1,14 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { type Order, type OrderLine, orderOf } from '../explore/buying/order.ts';
+import { orderText, unpricedText } from '../explore/buying/order-text.ts';
 import { gradeWord } from '../explore/rack/rack.ts';
-import { harmless, showSpan, type Units } from '../quantity/index.ts';
+import { harmless, massNumber, massUnit, type Units } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
 import type { Session } from '../session/session.ts';
+import { woodName } from '../timber/member-words.ts';
 import { load, type SessionOptions } from './load.ts';
-import { closing, heading, woodName, wrapped } from './prose.ts';
-import { moneyText, woodJson } from './rack.ts';
+import { closing, heading, wrapped } from './prose.ts';
+import { woodJson } from './rack.ts';
 import { STATUS } from './status.ts';
 import { table } from './table.ts';
 
@@ -23,7 +26,7 @@ export function order(file: string, options: SessionOptions, print: (text: strin
     const lines = [
       ...heading(loaded.session),
       '',
-      ...orderText(found, loaded.session, loaded.units),
+      ...orderLines(found, loaded.session, loaded.units),
       '',
       ...closing(),
     ];
@@ -46,6 +49,7 @@ function orderJson({ lines, pieces, weight, waste, price, complete }: Order) {
       weight: line.weight,
       boardFeet: line.boardFeet,
       price: line.price,
+      ...(line.priceFrom === null ? {} : { priceFrom: line.priceFrom }),
       total: line.price === null ? null : line.price * line.pieces,
       ...(line.unpriced === null ? {} : { unpriced: line.unpriced }),
     })),
@@ -58,17 +62,20 @@ function orderJson({ lines, pieces, weight, waste, price, complete }: Order) {
   };
 }
 
-function orderText(order: Order, { yard }: Session, units: Units): string[] {
-  const rows = order.lines.map((line) => [
-    harmless(line.member, NAME),
-    String(line.pieces),
-    harmless(`${line.size} ${gradeWord(line.stock)}`, WOOD),
-    line.length === null ? 'none' : showSpan(line.length, units),
-    line.length === null ? '' : `${((100 * line.waste) / line.length).toFixed(0)} %`,
-    weightText(line.weight, units),
-    line.price === null ? 'none' : moneyText(line.price),
-    line.price === null ? '' : moneyText(line.price * line.pieces),
-  ]);
+function orderLines(order: Order, { yard }: Session, units: Units): string[] {
+  const rows = order.lines.map((line) => {
+    const text = orderText(line, units);
+    return [
+      harmless(line.member, NAME),
+      text.pieces,
+      harmless(`${line.size} ${gradeWord(line.stock)}`, WOOD),
+      text.length ?? 'none',
+      text.waste ?? '',
+      text.weight,
+      text.price ?? 'none',
+      text.total ?? '',
+    ];
+  });
   const without = order.lines.filter((line) => line.unpriced !== null);
   const priceOf = order.complete ? 'price of the job' : 'price of those that have one';
   return [
@@ -79,14 +86,14 @@ function orderText(order: Order, { yard }: Session, units: Units): string[] {
         { head: 'size', align: 'left' },
         { head: 'order', align: 'right' },
         { head: 'waste', align: 'right' },
-        { head: units === 'us' ? 'lb each' : 'kg each', align: 'right' },
+        { head: `${massUnit(units)} each`, align: 'right' },
         { head: 'each', align: 'right' },
         { head: 'total', align: 'right' },
       ],
       rows,
     ),
     '',
-    `${order.pieces} pieces, ${weightText(order.weight, units)} ${units === 'us' ? 'lb' : 'kg'}, ${(100 * order.waste).toFixed(0)} % waste`,
+    `${order.pieces} pieces, ${massNumber(order.weight, units)} ${massUnit(units)}, ${(100 * order.waste).toFixed(0)} % waste`,
     order.price === null ? 'no size has a price' : `${priceOf}: ${moneyText(order.price)}`,
     ...without.flatMap((line) => wrapped(`NOT PRICED: ${whyNot(line, units)}`)),
     ...(yard == null
@@ -98,18 +105,6 @@ function orderText(order: Order, { yard }: Session, units: Units): string[] {
 /** Widest texts that leave room for the figures. */
 const NAME = 12;
 const WOOD = 26;
-/** Exact. */
-const KG_PER_LB = 0.45359237;
-
-function weightText(pounds: number, units: Units): string {
-  return (units === 'us' ? pounds : pounds * KG_PER_LB).toFixed(0);
-}
-
 function whyNot(line: OrderLine, units: Units): string {
-  const what = `${harmless(line.member)}, ${line.size} ${woodName(line.stock)}`;
-  if (line.unpriced === 'none long enough') {
-    const longest = line.longest === null ? '' : `; the longest is ${showSpan(line.longest, units)}`;
-    return `${what}: none is stocked ${showSpan(line.needed, units)} long${longest}`;
-  }
-  return `${what}: ${line.unpriced}`;
+  return `${harmless(line.member)}, ${line.size} ${woodName(line.stock)}: ${unpricedText(line, units)}`;
 }

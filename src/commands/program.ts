@@ -5,7 +5,8 @@ import { completion, SHELLS } from './around/completion.ts';
 import { grammarOf } from './around/grammar.ts';
 import { manual } from './around/manual.ts';
 import { type CheckOptions, check } from './check.ts';
-import { explore } from './explore.ts';
+import { type DiffOptions, diff } from './diff.ts';
+import { type ExploreOptions, explore } from './explore.ts';
 import { type HandoverOptions, handovers } from './handovers.ts';
 import type { SessionOptions } from './load.ts';
 import { moves } from './moves.ts';
@@ -13,7 +14,9 @@ import { order } from './order.ts';
 import { closing } from './prose.ts';
 import { rack } from './rack.ts';
 import { reach } from './reach.ts';
+import { type ScheduleOptions, schedule } from './schedule.ts';
 import { schema } from './schema.ts';
+import { type SheetCommandOptions, sheet } from './sheet.ts';
 import { type SpansOptions, spans } from './spans.ts';
 import { BadInput, OutputFailed, STATUS } from './status.ts';
 import type { Streams } from './streams.ts';
@@ -26,13 +29,14 @@ export async function run(args: readonly string[], version: string, streams: Str
     .version(version, '--version', 'print the version')
     .helpOption('--help', 'print this help')
     .argument('[file]', 'session to open in the explorer; without one it asks for a beam')
+    .option('--read-only', 'write nothing: neither the file nor a recovery journal')
     .addHelpText(
       'after',
       `\nExit status: 0 yes, 1 no, 2 bad input, 3 an output could not be written.\n\n${closing().join('\n')}`,
     )
-    .action(async (file: string | undefined, _options: unknown, { args }: Command) => {
+    .action(async (file: string | undefined, options: ExploreOptions, { args }: Command) => {
       if (file !== undefined && args.length > 1) throw unknownCommand(file, program);
-      status = await explore(file ?? null, streams);
+      status = await explore(file ?? null, options, streams);
     });
 
   const onSession = (name: string, what: string, one: boolean) =>
@@ -47,14 +51,14 @@ export async function run(args: readonly string[], version: string, streams: Str
       .option(
         '--set <key=value>',
         'replace one value of the member first, such as spans.0="16 ft"; repeatable',
-        (value: string, before: string[] = []) => [...before, value],
+        several,
       )
       .addOption(new Option('--units <us|si>', "show in these units instead of the session's"))
       .option('--only <checks>', 'these checks alone, such as shear,bending')
       .option('--json', 'print JSON, in lb, in, psi');
 
   onSession('check', 'the checks of each member, what governs, pass or fail', false)
-    .option('--workings', 'the calculation behind each check, line by line')
+    .option('--workings', 'the calculation behind every number, line by line')
     .action((file: string, options: CheckOptions) => {
       status = check(file, options, streams.out);
     });
@@ -92,6 +96,43 @@ export async function run(args: readonly string[], version: string, streams: Str
       status = order(file, options, streams.out);
     },
   );
+  program
+    .command('sheet')
+    .description('the calculation sheet: .pdf, .html, .md or .txt by the name of the output')
+    .argument('<file>', 'session file')
+    .requiredOption('-o, --output <file>', 'where to write it, such as sheet.pdf')
+    .option('--member <name>', 'this member only; repeatable', several)
+    .option('--set <key=value>', 'replace one value of the member first; repeatable', several)
+    .addOption(new Option('--units <us|si>', "show in these units instead of the session's"))
+    .option('--only <checks>', 'these checks alone, such as shear,bending')
+    .addOption(new Option('--paper <a4|letter>', 'the paper of a PDF'))
+    .option('--date <text>', "the date on it, in place of the title block's")
+    .action(async (file: string, options: SheetCommandOptions) => {
+      status = await sheet(file, options, streams.out);
+    });
+  program
+    .command('schedule')
+    .description('a beam schedule (CSV) with sizes and results, row by row')
+    .argument('[file]', 'schedule (- for stdin), or a session to write as one')
+    .option('-o, --output <file>', 'write to this .csv or .json instead of stdout')
+    .option('--session', 'make a session of the rows instead: -o job.json')
+    .option('--columns', 'list the columns that a schedule may have')
+    .option('--threads <n>', 'size on so many cores; all of them where nothing is said')
+    .addOption(new Option('--units <us|si>', 'write the results in these units'))
+    .option('--json', 'print JSON, in lb, in, psi')
+    .action(async (file: string | undefined, options: ScheduleOptions) => {
+      status = await schedule(file, options, streams);
+    });
+  program
+    .command('diff')
+    .description('what changed from one session to another, and what came of it')
+    .argument('<before>', 'session file')
+    .argument('<after>', 'session file')
+    .addOption(new Option('--units <us|si>', "show in these units instead of the second session's"))
+    .option('--json', 'print JSON')
+    .action((before: string, after: string, options: DiffOptions) => {
+      status = diff(before, after, options, streams.out);
+    });
   program
     .command('schema')
     .description('the JSON Schema of the session file')
@@ -131,6 +172,11 @@ export async function run(args: readonly string[], version: string, streams: Str
   } catch (error) {
     return endedBy(error, streams);
   }
+}
+
+/** Gathers an option that may be given more than once. */
+function several(value: string, before: readonly string[] = []): readonly string[] {
+  return [...before, value];
 }
 
 /** No wrong command is worth comparing further. */

@@ -1,8 +1,8 @@
-import { harmless, showSpan, type Units } from '../quantity/index.ts';
+import { harmless, type Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
 import { assumptionsOf } from '../timber/index.ts';
-import type { Member, Stock } from '../timber/member.ts';
-import { CHECK_IDS, type CheckId, type CheckResult } from '../timber/report.ts';
+import type { Member } from '../timber/member.ts';
+import { CHECK_IDS, type CheckId } from '../timber/report.ts';
 
 /** Columns that every terminal has. */
 export const LINE = 80;
@@ -39,23 +39,6 @@ export function given(
     ],
     json: { assumptions, ...(typed.length > 0 ? { typedFactors: member.typedFactors } : {}) },
   };
-}
-
-/** The member's lengths, left to right: "12'-0\", 14'-0\", overhang 4'-0\"", "cantilever 5'-0\"". */
-export function lengthsText({ beam }: Member, units: Units): string {
-  const overhang = (length: number) => (length > 0 ? [`overhang ${showSpan(length, units)}`] : []);
-  const arm = beam.supports === 'cantilever' ? 'cantilever ' : '';
-  return [
-    ...overhang(beam.overhangs.left),
-    ...beam.spans.map((span) => arm + showSpan(span, units)),
-    ...overhang(beam.overhangs.right),
-  ].join(', ');
-}
-
-/** A wood in full: "Douglas Fir-Larch No.2", "glulam 24F-1.8E", "LVL typical 2.0E". */
-export function woodName({ product, species, grade }: Stock): string {
-  const sawn = product !== 'glulam' && product !== 'LVL' && product !== 'custom';
-  return harmless([sawn ? '' : product, sawn ? species : '', grade].filter((part) => part !== '').join(' '));
 }
 
 /** What --only left out, said at the head of the output. */
@@ -103,15 +86,4 @@ export function beside(parts: readonly string[]): string[] {
     }
   }
   return [...lines, line];
-}
-
-/** Places of extremes are shown to the half inch. */
-const PLACE_STEP = 0.5;
-
-/** Where a check is worst: "7'-0"" from the left end, "support 2". */
-export function placeText(each: CheckResult, units: Units): string {
-  if (each.id === 'slenderness') return '';
-  return each.id === 'bearing' || each.id === 'uplift' || each.id === 'notch'
-    ? `support ${each.place + 1}`
-    : showSpan(units === 'us' ? Math.round(each.at / PLACE_STEP) * PLACE_STEP : each.at, units);
 }

@@ -1,3 +1,4 @@
+import { moneyText } from '../explore/buying/money.ts';
 import { ratiosById } from '../explore/judge.ts';
 import { powersOf } from '../explore/powers.ts';
 import { BEST_WORD } from '../explore/rack/best.ts';
@@ -13,14 +14,15 @@ import {
   weightNumber,
   weightUnit,
 } from '../quantity/index.ts';
-import { CHECK_WORD } from '../screen/words.ts';
 import { rankingOf } from '../session/index.ts';
 import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Member, Stock } from '../timber/member.ts';
+import { lengthsText, woodName } from '../timber/member-words.ts';
 import type { CheckId } from '../timber/report.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, given, LINE, lengthsText, woodName, wrapped } from './prose.ts';
+import { beside, given, LINE, wrapped } from './prose.ts';
 import { STATUS } from './status.ts';
 import { type Column, table } from './table.ts';
 
@@ -175,9 +177,4 @@ function choiceMark({ inYard, nonDominated }: RankedSize): string {
 function choiceText(each: RankedSize, units: Units): string {
   if (each.over > 0) return `over by ${showInches(each.over, units)}`;
   return stopsText(each);
-}
-
-/** Money with two decimals; the list says in what. */
-export function moneyText(amount: number): string {
-  return amount.toFixed(2);
 }

@@ -11,13 +11,14 @@ import {
   showSpanDown,
   type Units,
 } from '../quantity/index.ts';
-import { CHECK_WORD } from '../screen/words.ts';
 import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
+import { woodName } from '../timber/member-words.ts';
 import { CHECK_IDS, type CheckId } from '../timber/report.ts';
+import { CHECK_WORD } from '../timber/words.ts';
 import { printAnswer } from './answer.ts';
 import { load, type SessionOptions, theMember } from './load.ts';
-import { beside, given, woodName, wrapped } from './prose.ts';
+import { beside, given, wrapped } from './prose.ts';
 import { woodJson } from './rack.ts';
 import { BadInput, STATUS } from './status.ts';
 import { table } from './table.ts';
@@ -141,6 +142,7 @@ function loadsText(member: Member, units: Units): string {
   const { live, total } = member.limits;
   const parts = [...area, `live l/${live}`, `total l/${total}`, member.service];
   if (member.loads.length > 0) parts.push('its line and point loads');
+  if ((member.links ?? []).length > 0) parts.push('what it carries of other members');
   const several = member.beam.spans.length > 1 ? '; the longest of its spans, all by one factor' : '';
   return `${parts.join(', ')}${several}`;
 }

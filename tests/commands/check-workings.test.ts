@@ -1,4 +1,7 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import type { CheckId } from '../../src/timber/report.ts';
+import { WORKINGS_WORD, type WorkingLine } from '../../src/timber/workings/index.ts';
 import { command, sessionFile, sessionText } from '../support/session.ts';
 
 const two = sessionFile(sessionText({}, { name: 'S', spans: ['10 ft', '12 ft'], bracing: 'ends' }));
@@ -31,7 +34,7 @@ describe('thrice check --workings', () => {
     expect(out).toMatch(/ratio = fb \/ Fb' = 10\.246 MPa \/ 6\.2053 MPa = 1\.651/);
   });
 
-  it('adds an array of lines to each check of the JSON, and changes nothing else in it', async () => {
+  it('adds to each check of the JSON its lines and to each member its other pages, and changes nothing else in it', async () => {
     const plain = JSON.parse((await command('check', two, '--json')).out);
     const full = JSON.parse((await command('check', two, '--json', '--workings')).out);
     for (const member of full.members) {
@@ -40,8 +43,65 @@ describe('thrice check --workings', () => {
         expect(check.workings.at(-1)).toMatchObject({ symbol: 'ratio', clause: check.clause });
         delete check.workings;
       }
+      const pages = member.workings.map(({ page }: { page: string }) => page);
+      for (const page of ['loads', 'reach', 'rack', 'handovers', 'moves', 'buying', 'given'])
+        expect(pages).toContain(page);
+      for (const { title, lines } of member.workings) {
+        expect(title).not.toBe('');
+        expect(lines.length).toBeGreaterThan(0);
+      }
+      delete member.workings;
     }
     expect(full).toEqual(plain);
+  });
+
+  it('writes on its pages the very numbers of the JSON, for any member', async () => {
+    await fc.assert(
+      fc.asyncProperty(
+        fc.record({
+          spans: fc.array(fc.integer({ min: 6, max: 18 }), { minLength: 1, maxLength: 3 }),
+          live: fc.integer({ min: 0, max: 100 }),
+          depth: fc.constantFrom('7.25 in', '11.25 in'),
+        }),
+        async ({ spans, live, depth }) => {
+          const session = sessionText({
+            spans: spans.map((feet) => `${feet} ft`),
+            area: { dead: '12 psf', live: `${live} psf` },
+            section: { width: '1.5 in', depth, plies: 2 },
+          });
+          const { out } = await command('check', sessionFile(session), '--json', '--workings');
+          const [member] = JSON.parse(out).members;
+          const lines = (page: string): WorkingLine[] =>
+            member.workings.find((each: { page: string }) => each.page === page).lines;
+          const all = (page: string, symbol: string) =>
+            lines(page).flatMap((line) => (line.symbol === symbol ? [Number.parseFloat(line.result!)] : []));
+          const near = (shown: number, value: number) =>
+            expect(Math.abs(shown - value)).toBeLessThanOrEqual(5.1e-5 * Math.abs(value));
+          near(all('l/h', 'l/h')[0]!, member.spanToDepth);
+          for (const key of ['max', 'min'] as const) {
+            const shown = all('reactions', key === 'max' ? 'largest' : 'smallest');
+            expect(shown).toHaveLength(member.reactions.length);
+            member.reactions.forEach((each: { max: number; min: number }, at: number) => {
+              near(shown[at]!, each[key]);
+            });
+          }
+          near(all('loads', 'own weight')[0]!, member.section.weight * 12);
+          for (const check of member.checks) {
+            const ratio = check.workings.at(-1).result;
+            if (check.ratio === null) expect(ratio).toBe('untied');
+            else expect(Math.abs(Number(ratio) - check.ratio)).toBeLessThan(5.1e-4);
+            if (check.exponents === null) continue;
+            const from = lines('exponents').findIndex(
+              (line) => line.heading === WORKINGS_WORD[check.id as CheckId],
+            );
+            const shown = lines('exponents').slice(from + 1, from + 5);
+            for (const { symbol, result } of shown)
+              expect(Number(result)).toBeCloseTo(check.exponents[symbol!], 3);
+          }
+        },
+      ),
+      { numRuns: 8 },
+    );
   });
 
   it('writes the sentences of JSON in US units whatever the session shows', async () => {
