@@ -1,17 +1,16 @@
 import { chmod, mkdir, readFile, stat, writeFile } from 'node:fs/promises';
 import { dirname, join, relative } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { fontsWithin } from './fonts.mjs';
 import { segmenter, standIns } from './stand-ins.mjs';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
 const KILOBYTE = 1000;
 
-// Packages written as CommonJS ask for Node's own modules through `require`, and write-file-atomic for its own
-// file name: an ES module has neither.
+// Packages written as CommonJS ask for Node's own modules through `require`, which an ES module has not.
 const BANNER = `#!/usr/bin/env node
 import { createRequire as __createRequire } from 'node:module';
-const require = __createRequire(import.meta.url);
-const __filename = import.meta.filename;`;
+const require = __createRequire(import.meta.url);`;
 
 /** Ink asks for the React developer tools only with DEV=true; the bundle has none. */
 const noDeveloperTools = {
@@ -19,6 +18,22 @@ const noDeveloperTools = {
   setup(builder) {
     builder.onResolve({ filter: /^react-devtools-core$/ }, ({ path }) => ({ path, namespace: 'empty' }));
     builder.onLoad({ filter: /.*/, namespace: 'empty' }, () => ({ contents: 'export default {};' }));
+  },
+};
+
+/** What is loaded only when it is asked for (`await import`), and the file beside the program that holds it. */
+const ASIDE = new Map([
+  ['tinypool', './pool.js'],
+  ['../sheet/index.ts', './sheet.js'],
+  ['./pdf/write-pdf.ts', './sheet-pdf.js'],
+]);
+
+const keepAside = {
+  name: 'keep-aside',
+  setup(builder) {
+    builder.onResolve({ filter: /^[^/]/ }, ({ path, kind }) =>
+      kind === 'dynamic-import' && ASIDE.has(path) ? { path: ASIDE.get(path), external: true } : undefined,
+    );
   },
 };
 
@@ -55,7 +70,8 @@ export async function bundle({ entry, outfile, measures = true }) {
     minify: true,
     legalComments: 'none',
     banner: { js: BANNER },
-    plugins: [noDeveloperTools, ...plugins],
+    plugins: [noDeveloperTools, keepAside, fontsWithin, ...plugins],
+    loader: { '.ttf': 'binary' },
     inject,
     define: {
       'process.env.NODE_ENV': '"production"',
@@ -71,17 +87,33 @@ export async function bundle({ entry, outfile, measures = true }) {
   return { path: output.path, bytes: output.contents.length, metafile };
 }
 
-const OUTPUT = 'dist/thrice.js';
+/** What is published: the program, and beside it what it loads only when it is asked for. */
+const FILES = [
+  { entry: 'src/main.ts', outfile: 'dist/thrice.js' },
+  { entry: 'src/commands/schedule/worker.ts', outfile: 'dist/schedule-worker.js' },
+  { entry: 'node_modules/tinypool/dist/index.js', outfile: 'dist/pool.js' },
+  { entry: 'src/sheet/index.ts', outfile: 'dist/sheet.js' },
+  { entry: 'src/sheet/pdf/write-pdf.ts', outfile: 'dist/sheet-pdf.js' },
+  // The pool looks for its own end of a thread here.
+  { entry: 'node_modules/tinypool/dist/entry/worker.js', outfile: 'dist/entry/worker.js' },
+];
 /** What the last build was made from, a path a line. */
 const SOURCES = 'dist/thrice.js.sources.txt';
+const LICENSES = 'dist/thrice.js.licenses.txt';
 /** The build itself is a source too. */
-const BUILDERS = ['.build/bundle.mjs', '.build/stand-ins.mjs', '.build/licenses.mjs', 'package-lock.json'];
+const BUILDERS = [
+  '.build/bundle.mjs',
+  '.build/fonts.mjs',
+  '.build/stand-ins.mjs',
+  '.build/licenses.mjs',
+  'package-lock.json',
+];
 
 /** Whether the bundle is newer than everything it was made from: asking costs a tenth of building. */
 async function isFresh() {
   try {
     const changed = async (path) => (await stat(join(root, path))).mtimeMs;
-    const built = await changed(OUTPUT);
+    const built = Math.min(...(await Promise.all(FILES.map(({ outfile }) => changed(outfile)))));
     const sources = (await readFile(join(root, SOURCES), 'utf8')).trim().split('\n');
     const times = await Promise.all(sources.map(changed));
     return times.every((time) => time < built);
@@ -93,11 +125,20 @@ async function isFresh() {
 async function buildProgram() {
   if (await isFresh()) return;
   const { collectLicenses } = await import('./licenses.mjs');
-  const { path, bytes, metafile } = await bundle({ entry: 'src/main.ts', outfile: OUTPUT });
-  const sources = Object.keys(metafile.inputs).filter((input) => !input.startsWith('empty:'));
+  const built = await Promise.all(FILES.map(bundle));
+  const inputs = new Set(built.flatMap(({ metafile }) => Object.keys(metafile.inputs)));
+  const sources = [...inputs].filter((input) => !input.startsWith('empty:'));
   await writeFile(join(root, SOURCES), `${[...BUILDERS, ...sources].join('\n')}\n`);
-  await writeFile(`${path}.licenses.txt`, await collectLicenses(metafile, root));
-  console.log(`${relative(process.cwd(), path)} ${Math.round(bytes / KILOBYTE)} kB`);
+  await writeFile(
+    join(root, LICENSES),
+    await collectLicenses(
+      built.map(({ metafile }) => metafile),
+      root,
+    ),
+  );
+  for (const { path, bytes } of built) {
+    console.log(`${relative(process.cwd(), path)} ${Math.round(bytes / KILOBYTE)} kB`);
+  }
 }
 
 if (process.argv[1] === fileURLToPath(import.meta.url)) {

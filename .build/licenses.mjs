@@ -4,10 +4,10 @@ import { join } from 'node:path';
 const PACKAGE = /^(.*node_modules\/((?:@[^/]+\/)?[^/]+))\//;
 const LICENSE_FILE = /^(licen[cs]e|copying|notice)/i;
 
-/** The licence texts of every package whose code is in the bundle, from esbuild's metafile. */
-export async function collectLicenses(metafile, root) {
+/** The licence texts of every package whose code is in the bundles, from esbuild's metafiles. */
+export async function collectLicenses(metafiles, root) {
   const folders = new Map();
-  for (const { inputs } of Object.values(metafile.outputs)) {
+  for (const { inputs } of metafiles.flatMap(({ outputs }) => Object.values(outputs))) {
     for (const [path, { bytesInOutput }] of Object.entries(inputs)) {
       const [, folder, name] = PACKAGE.exec(path) ?? [];
       if (name !== undefined && bytesInOutput > 0) folders.set(name, join(root, folder));

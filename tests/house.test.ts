@@ -12,9 +12,10 @@ const MAY_IMPORT: Readonly<Record<string, readonly string[]>> = {
   timber: ['quantity', 'statics', 'loads'],
   explore: ['quantity', 'statics', 'loads', 'timber'],
   session: ['quantity', 'statics', 'loads', 'timber', 'explore'],
+  files: ['quantity', 'session'],
   sheet: ['quantity', 'statics', 'loads', 'timber', 'explore', 'session'],
-  screen: ['quantity', 'statics', 'loads', 'timber', 'explore', 'session', 'sheet'],
-  commands: ['quantity', 'statics', 'loads', 'timber', 'explore', 'session', 'sheet', 'screen'],
+  screen: ['quantity', 'statics', 'loads', 'timber', 'explore', 'session', 'files', 'sheet'],
+  commands: ['quantity', 'statics', 'loads', 'timber', 'explore', 'session', 'files', 'sheet', 'screen'],
   'main.ts': ['commands'],
 };
 

@@ -1,3 +1,6 @@
+import { copyFileSync, mkdtempSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { basename, join } from 'node:path';
 import { spawn } from '@lydell/node-pty';
 
 /** The terminal all benches are run in. */
@@ -28,6 +31,12 @@ export interface WatchedProgram {
   quit(): Promise<void>;
 }
 
+function copyOf(file: string): string {
+  const copy = join(mkdtempSync(join(tmpdir(), 'thrice-bench-')), basename(file));
+  copyFileSync(file, copy);
+  return copy;
+}
+
 /** Starts `node` with these arguments; resolves at its first frame. */
 export async function watch(args: readonly string[]): Promise<WatchedProgram> {
   const { PATH = '', HOME = '' } = process.env;
@@ -40,7 +49,9 @@ export async function watch(args: readonly string[]): Promise<WatchedProgram> {
     COLORFGBG: '15;0',
   };
   const began = performance.now();
-  const pty = spawn(process.execPath, [...args], { name: env.TERM, cols: COLUMNS, rows: ROWS, env });
+  // A killed program leaves a recovery journal, which the next would ask about.
+  const own = args.map((arg) => (arg.endsWith('.json') ? copyOf(arg) : arg));
+  const pty = spawn(process.execPath, own, { name: env.TERM, cols: COLUMNS, rows: ROWS, env });
   let written = '';
   let last = began;
   let ended = false;

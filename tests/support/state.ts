@@ -1,3 +1,4 @@
+import { restOf } from '../../src/screen/rest.ts';
 import type { State } from '../../src/screen/state.ts';
 import type { KeyPress } from '../../src/screen/terminal/key-press.ts';
 import { type Event, update } from '../../src/screen/update.ts';
@@ -74,4 +75,14 @@ export function afterEvents(
     effects.push(...step.effects);
   }
   return { state: now, effects };
+}
+
+/** The state once nothing is left to work out. */
+export function atRest(state: State): State {
+  let now = state;
+  for (let step = 0; restOf(now) !== null; step += 1) {
+    if (step > 4) throw new Error('it never comes to rest');
+    now = afterEvents(now, { type: 'settle' }).state;
+  }
+  return now;
 }

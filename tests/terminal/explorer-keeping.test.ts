@@ -33,11 +33,13 @@ describe('keeping', () => {
     session.press('s');
     await session.until(KEPT);
     expect(membersIn(file)).toEqual(twin.state().session.members.map(({ member }) => member));
-    expect(readdirSync(dirname(file))).toEqual(['job.json']);
+    expect(readdirSync(dirname(file))).toEqual(['job.json', 'job.json.bak', 'job.json.lock']);
+    expect(readFileSync(`${file}.bak`).equals(before)).toBe(true);
 
     // Kept: q leaves without a question, and the file opens again as it was left.
     session.press('q');
     expect(await session.exit()).toEqual(ENDED_WELL);
+    expect(readdirSync(dirname(file))).toEqual(['job.json', 'job.json.bak']);
     const again = await opened(file);
     again.press('tab');
     const knobs = (screen: readonly string[]) => screen.slice(4, 16).map((row) => row.slice(3, 23));
@@ -90,7 +92,14 @@ describe('keeping', () => {
     chmodSync(dirname(file), 0o555);
     chmodSync(file, 0o444);
     const before = readFileSync(file, 'utf8');
-    const session = await opened(file, { program: PROGRAM_OF_NO_PRIVILEGE, columns: 120, rows: 36 });
+    const state = mkdtempSync(join(tmpdir(), 'thrice-state-'));
+    chmodSync(state, 0o777);
+    const session = await opened(file, {
+      program: PROGRAM_OF_NO_PRIVILEGE,
+      columns: 120,
+      rows: 36,
+      env: { XDG_STATE_HOME: state },
+    });
     session.press('right', 's');
     await session.until('not kept: ');
     const screen = await session.settle();
@@ -98,6 +107,11 @@ describe('keeping', () => {
     expect(screen.join('\n')).toMatch(/► span +15'-3"/);
     expect(screen[0]).toMatch(/not kept$/);
     expect(readFileSync(file, 'utf8')).toBe(before);
+    // The journal stands where the program may write.
+    await expect
+      .poll(() => readdirSync(join(state, 'thrice')).filter((name) => /job\.json\.journal$/.test(name)))
+      .toHaveLength(1);
+    expect(readdirSync(dirname(file))).toEqual(['job.json']);
     chmodSync(dirname(file), 0o755);
   });
 });

@@ -1,9 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import { knobInHand } from '../../src/screen/state.ts';
+import { ABSURD } from '../support/absurd.ts';
 import { BOATHOUSE, SAMPLES } from '../support/samples.ts';
 import { command } from '../support/session.ts';
 import { type Twin, twinOf } from '../support/twin.ts';
-import { ABSURD, agrees, opened, sampleCopy, started } from './explorer.ts';
+import { agrees, opened, sampleCopy, started } from './explorer.ts';
 import type { TerminalSession } from './harness.ts';
 
 const SIZES = [

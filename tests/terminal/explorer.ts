@@ -2,7 +2,7 @@ import { copyFileSync, mkdtempSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { expect, onTestFinished } from 'vitest';
-import { BOATHOUSE } from '../support/samples.ts';
+import { BOATHOUSE, SAMPLES } from '../support/samples.ts';
 import type { Twin } from '../support/twin.ts';
 import { type OpenOptions, open, type TerminalSession } from './harness.ts';
 
@@ -10,9 +10,9 @@ import { type OpenOptions, open, type TerminalSession } from './harness.ts';
 const FOOT = '? keys';
 
 /** A copy of a sample session, in a folder of its own, that a test may change. */
-export function sampleCopy(): string {
+export function sampleCopy(sample = BOATHOUSE.file): string {
   const file = join(mkdtempSync(join(tmpdir(), 'thrice-explorer-')), 'job.json');
-  copyFileSync(BOATHOUSE.file, file);
+  copyFileSync(sample, file);
   return file;
 }
 
@@ -23,9 +23,10 @@ export function started(args: readonly string[], options: OpenOptions = {}): Ter
   return session;
 }
 
-/** The same, on a session file and with its first frame drawn. */
+/** The same, on a session file and with its first frame drawn; a sample is opened as a copy, nothing is left beside it. */
 export async function opened(file: string, options: OpenOptions = {}): Promise<TerminalSession> {
-  const session = started([file], options);
+  const isSample = SAMPLES.some((sample) => sample.file === file);
+  const session = started([isSample ? sampleCopy(file) : file], options);
   await session.until(FOOT);
   return session;
 }
@@ -40,6 +41,3 @@ export async function agrees(session: TerminalSession, twin: Twin): Promise<stri
   }
   return wanted;
 }
-
-/** What no one should ever read on a screen. */
-export const ABSURD = /NaN|undefined|Infinity|null|\[object/;

@@ -1,4 +1,7 @@
 import { execFileSync } from 'node:child_process';
+import { mkdtempSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { type IPty, spawn } from '@lydell/node-pty';
 import xterm from '@xterm/headless';
@@ -62,6 +65,8 @@ export interface TerminalSession {
   resize(columns: number, rows: number): void;
   /** Everything the program has written so far. */
   written(): string;
+  /** Process id of the program itself. */
+  pid(): number;
   /** Sends a signal to the program itself. */
   signal(name: NodeJS.Signals): void;
   /** Waits for the program to end by itself. */
@@ -84,7 +89,16 @@ const sleep = (ms: number): Promise<void> => new Promise((resolve) => setTimeout
 /** Nothing of the machine's own environment decides how the program looks; above all not CI, NO_COLOR. */
 function childEnv(added: OpenOptions['env']): Record<string, string> {
   const { PATH = '', HOME = '', TMPDIR } = process.env;
-  const env = { PATH, HOME, TMPDIR, TERM: 'xterm-256color', LANG: 'C.UTF-8', ...added };
+  const env = {
+    PATH,
+    HOME,
+    TMPDIR,
+    // What the program keeps of its own stays out of this machine's home, and of the next test.
+    XDG_STATE_HOME: added?.XDG_STATE_HOME ?? mkdtempSync(join(tmpdir(), 'thrice-state-')),
+    TERM: 'xterm-256color',
+    LANG: 'C.UTF-8',
+    ...added,
+  };
   return Object.fromEntries(
     Object.entries(env).filter((pair): pair is [string, string] => pair[1] !== undefined),
   );
@@ -165,6 +179,11 @@ export function open(options: OpenOptions = {}): TerminalSession {
         .join('\n')}`,
     );
 
+  const programPid = (): number => {
+    const children = execFileSync('pgrep', ['-P', String(pty.pid)], { encoding: 'utf8' });
+    return Number(children.trim().split('\n')[0]);
+  };
+
   return {
     press: (...keys) => pty.write(keys.map(keyBytes).join('')),
     write: (bytes) => pty.write(bytes),
@@ -215,11 +234,9 @@ export function open(options: OpenOptions = {}): TerminalSession {
       pty.resize(columns, rows);
     },
     written: () => written,
-    signal(name) {
-      const pids = execFileSync('pgrep', ['-P', String(pty.pid)], { encoding: 'utf8' })
-        .trim()
-        .split('\n');
-      process.kill(Number(pids[0]), name);
+    pid: programPid,
+    signal: (name) => {
+      process.kill(programPid(), name);
     },
     async exit(ms = PATIENCE_MS) {
       const deadline = performance.now() + ms;
