@@ -1,6 +1,7 @@
 import { existsSync } from 'node:fs';
 import { setTimeout } from 'node:timers/promises';
 import { openKeeper } from '../files/keeper.ts';
+import { readSettings, withSettings } from '../files/settings.ts';
 import { stateFolder } from '../files/state-folder.ts';
 import { whyNot } from '../files/why.ts';
 import { harmless } from '../quantity/index.ts';
@@ -31,6 +32,8 @@ export async function explore(
       'the explorer needs a terminal on stdin and stdout; without one use thrice check, rack, reach, moves, handovers, spans, order, schedule, sheet, diff or schema (thrice --help)',
     );
   }
+  const { settings, fault } = readSettings();
+  const env = withSettings(process.env, settings);
   const text = file === null ? '' : readText(file);
   const session = file === null ? null : sessionOf(text, file);
   const copy = (text: string): void => {
@@ -46,7 +49,18 @@ export async function explore(
     read: (journal) => readJournal(journal, file),
   });
   const end = await openScreen(
-    openExplorer({ file, session, env: process.env, copy, keeper, readYard, writeSheet }),
+    openExplorer({
+      file,
+      session,
+      env,
+      units: settings.units,
+      told: fault,
+      copy,
+      keeper,
+      readYard,
+      writeSheet,
+    }),
+    { env },
   ).finally(() => keeper.close());
   if (end.kind === 'failed') {
     streams.error(`thrice: stopped by a fault of its own: ${harmless(end.error.message, 200)}\n`);

@@ -1,7 +1,9 @@
+import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import envPaths from 'env-paths';
 import * as z from 'zod/mini';
-import { quoted } from '../quantity/index.ts';
+import { harmless, quoted } from '../quantity/index.ts';
+import { codeOf } from './write-whole.ts';
 
 /** What somebody wants of every session; each may be left out, and none is ever needed. */
 export interface Settings {
@@ -23,9 +25,23 @@ const SHAPE = z.strictObject({
 });
 const KEYS = Object.keys(SHAPE.shape);
 
-/** Where the platform keeps settings: ~/.config/thrice/settings.json or what XDG_CONFIG_HOME says, and the like. */
-export function settingsFile(): string {
-  return join(envPaths('thrice', { suffix: '' }).config, 'settings.json');
+/**
+ * The settings that the platform keeps for this user: in ~/.config/thrice/settings.json or where XDG_CONFIG_HOME says,
+ * and where other systems have such files. What cannot be read is told in a line.
+ */
+export function readSettings(): { settings: Settings; fault: string | null } {
+  const file = join(envPaths('thrice', { suffix: '' }).config, 'settings.json');
+  try {
+    return settingsOf(readFileSync(file, 'utf8'), file);
+  } catch (error) {
+    return ['ENOENT', 'ENOTDIR'].includes(codeOf(error) ?? '')
+      ? settingsOf(null, file)
+      : { settings: {}, fault: refusal(file, `it could not be read (${codeOf(error)})`) };
+  }
+}
+
+function refusal(file: string, why: string): string {
+  return `settings not taken: ${harmless(file)}: ${why}`;
 }
 
 /**
@@ -34,7 +50,7 @@ export function settingsFile(): string {
  */
 export function settingsOf(text: string | null, file: string): { settings: Settings; fault: string | null } {
   if (text === null) return { settings: {}, fault: null };
-  const refused = (what: string) => ({ settings: {}, fault: `settings not taken: ${file}: ${what}` });
+  const refused = (what: string) => ({ settings: {}, fault: refusal(file, what) });
   let document: unknown;
   try {
     document = JSON.parse(text);
@@ -42,10 +58,10 @@ export function settingsOf(text: string | null, file: string): { settings: Setti
     return refused('it is not JSON');
   }
   const parsed = SHAPE.safeParse(document);
-  return parsed.success ? { settings: parsed.data, fault: null } : refused(whyNot(document));
+  return parsed.success ? { settings: parsed.data, fault: null } : refused(faultOf(document));
 }
 
-function whyNot(document: unknown): string {
+function faultOf(document: unknown): string {
   if (typeof document !== 'object' || document === null || Array.isArray(document))
     return 'it is not an object';
   for (const [key, value] of Object.entries(document)) {

@@ -1,5 +1,6 @@
 import type { ReactElement } from 'react';
 import type { Keeper } from '../files/keeper.ts';
+import type { Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
 import { chooseGlyphs } from './draw/glyphs.ts';
 import { chooseTheme } from './draw/theme.ts';
@@ -14,6 +15,10 @@ export interface ExplorerOptions {
   /** null: ask for a beam first. */
   readonly session: Session | null;
   readonly env: Readonly<Record<string, string | undefined>>;
+  /** Of a beam that is begun without a file; left out: US. */
+  readonly units?: Units | undefined;
+  /** Said on the first screen; null: nothing. */
+  readonly told: string | null;
   /** Sends text to the clipboard, where the terminal takes that. */
   readonly copy: (text: string) => void;
   /** Writes the session, its recovery journal, and nothing where it may not. */
@@ -32,6 +37,8 @@ export function openExplorer({
   file,
   session,
   env,
+  units = 'us',
+  told,
   copy,
   keeper,
   readYard,
@@ -40,7 +47,7 @@ export function openExplorer({
   const theme = chooseTheme(env);
   const glyphs = chooseGlyphs(env);
   const initial = (size: Size): State => ({
-    session: session ?? EMPTY,
+    session: session ?? { ...EMPTY, units },
     kept: session,
     file,
     member: 0,
@@ -50,7 +57,7 @@ export function openExplorer({
     ghost: null,
     readOnly: keeper.readOnly,
     mode: firstMode(session, keeper),
-    notice: keeper.notice === null ? null : { text: keeper.notice, refusal: true },
+    notice: noticeOf(keeper.notice ?? told),
     settled: false,
     ...size,
   });
@@ -104,6 +111,10 @@ export function openExplorer({
       />
     );
   };
+}
+
+function noticeOf(text: string | null): State['notice'] {
+  return text === null ? null : { text, refusal: true };
 }
 
 /** What was not kept is asked about before anything else. */
