@@ -41,7 +41,7 @@ export function readSettings(): { settings: Settings; fault: string | null } {
 }
 
 function refusal(file: string, why: string): string {
-  return `settings not taken: ${harmless(file)}: ${why}`;
+  return `settings not taken: ${why} (${harmless(file)})`;
 }
 
 /**

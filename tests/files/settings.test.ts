@@ -24,7 +24,7 @@ describe('settings', () => {
     ['{"colour":"red"}', 'there is no setting "colour"; there are theme, glyphs, units, screenReader'],
     ['{"__proto__":1}', 'there is no setting "__proto__"; there are theme, glyphs, units, screenReader'],
   ])('%s is told and not taken', (text, why) => {
-    expect(of(text)).toEqual({ settings: {}, fault: `settings not taken: settings.json: ${why}` });
+    expect(of(text)).toEqual({ settings: {}, fault: `settings not taken: ${why} (settings.json)` });
   });
 
   test('what the environment says wins', () => {
