@@ -1,7 +1,9 @@
 import type { Beam, BeamLoad } from '../statics/beam.ts';
 import type { LoadKind } from './kinds.ts';
 
-export type CombinationSet = 'ASCE 7-16' | 'ASCE 7-22';
+/** Editions whose load combinations are known. */
+export const COMBINATION_SETS = ['ASCE 7-16', 'ASCE 7-22'] as const;
+export type CombinationSet = (typeof COMBINATION_SETS)[number];
 
 /** A line or point load of one kind. */
 export type AppliedLoad = BeamLoad & { readonly kind: LoadKind };

@@ -2,7 +2,9 @@ import type { Found } from './bar.ts';
 import type { Term, TermGroup, VolumeMoment, VolumeMoments } from './effects.ts';
 import type { Envelope } from './envelope.ts';
 import type { PatternBook } from './pattern-book.ts';
+import { isPressedSpan } from './pressed-span.ts';
 import { slopedLength, slopeStretch } from './slope.ts';
+import { termValue } from './term-value.ts';
 import { type MomentPlace, type VolumeCase, VolumeSearch, type Weights } from './volume-search.ts';
 import { MomentCase, type Stretch, stretchesOf } from './zero-moment.ts';
 
@@ -37,13 +39,8 @@ export function momentGroup(
 ): TermGroup {
   const { duration, lateralCase } = group;
   const terms = found.map((term) => source.book.term(term));
-  return {
-    duration,
-    lateralCase,
-    place: place.field,
-    terms,
-    volume: new Volume(source, place, found, terms),
-  };
+  const volume = new Volume(source, place, found, terms);
+  return { duration, lateralCase, place: place.field, terms, volume };
 }
 
 /** Own weights are searched for by stretches up to these parts of the heaviest: the nearer they are the fewer cases. */
@@ -58,6 +55,7 @@ class Volume implements VolumeMoments {
   readonly #known: readonly MomentCase[];
   /** What was found by root and stretch of own weights. */
   readonly #found = new Map<number, Searched[]>();
+  #isPressed: boolean | null = null;
 
   constructor(source: MomentSource, place: MomentPlace, found: readonly Found[], terms: readonly Term[]) {
     const { e } = source;
@@ -70,6 +68,9 @@ class Volume implements VolumeMoments {
   }
 
   worst(root: number, w: number, over = 0): VolumeMoment | null {
+    const { field, sign, combinations } = this.#place;
+    this.#isPressed ??= sign > 0 && isPressedSpan(this.#source.e, combinations);
+    if (this.#isPressed) return this.#largest(root, w, over);
     const { loading } = this.#source.e.parts;
     const { weights, cases } = this.#foundAt(root, w);
     const part = weights.heavy === weights.light ? 0 : (w - weights.light) / (weights.heavy - weights.light);
@@ -89,12 +90,20 @@ class Volume implements VolumeMoments {
     const { one, stretch } = worst;
     const { moment, at } = stretch;
     const { combination, pattern } = one;
-    const place = this.#place.field;
     const still = { base: moment, perWeight: 0, valueAt: null, placeAt: null };
     return this.#moment(
       stretch,
-      this.#source.book.term({ ...still, combination, pattern, at, place, piece: 0 }),
+      this.#source.book.term({ ...still, combination, pattern, at, place: field, piece: 0 }),
     );
+  }
+
+  /** The largest moment, where all lengths are the whole span. */
+  #largest(root: number, w: number, over: number): VolumeMoment | null {
+    const term = this.#terms.reduce((most, each) => (termValue(each, w) > termValue(most, w) ? each : most));
+    const moment = termValue(term, w);
+    const length = this.longest;
+    if (!(moment * length ** (1 / root) > over)) return null;
+    return { moment, length, at: term.placeAt === null ? term.at : term.placeAt(w), term };
   }
 
   of(term: number, w: number): VolumeMoment | null {

@@ -3,7 +3,7 @@ import { assumptionsOf } from './assumptions.ts';
 import { cautionsOf, SUGGESTED_FREQUENCY } from './cautions.ts';
 import { explainChecks } from './checks/explain.ts';
 import { firstFrequency } from './checks/frequency.ts';
-import { prepare } from './checks/prepare.ts';
+import { type Prepared, prepare } from './checks/prepare.ts';
 import { analyse } from './checks/reactions.ts';
 import { woodOf } from './checks/wood.ts';
 import { lookUp } from './look-up.ts';
@@ -15,8 +15,15 @@ import { sectionWeight } from './section-weight.ts';
 import { sizeLabel } from './size-label.ts';
 import { standingDepth, standingWidth } from './standing.ts';
 
-/** Every check of a member with its words, sizes in them in `units`: the same numbers as `rate`, to the last bit. */
-export function reportMember(member: Member, units: Units = 'us'): MemberReport {
+/**
+ * Every check of a member with its words, sizes in them in `units`: the same numbers as `rate`, to the last bit.
+ * `ready` is the member prepared, by who has it already.
+ */
+export function reportMember(
+  member: Member,
+  units: Units = 'us',
+  ready: Prepared | null = null,
+): MemberReport {
   const { section, stock } = member;
   const refused = refusal(member);
   const values = lookUp(stock, section);
@@ -45,7 +52,7 @@ export function reportMember(member: Member, units: Units = 'us'): MemberReport 
       cautions,
     };
   }
-  const prepared = prepare(member);
+  const prepared = ready ?? prepare(member);
   const wood = woodOf(member);
   const { checks, passes } = explainChecks(prepared, wood, section, units);
   const EI = wood.at.E * wood.at.inertia;

@@ -239,6 +239,21 @@ test('a glulam bends upward with its negative value', () => {
   expect(hogging.capacity).toBeCloseTo(1450, 9);
 });
 
+test('an upward load of next to nothing asks no bracing of the bottom edge', () => {
+  const slender = memberOf({
+    area: NO_AREA,
+    selfWeight: false,
+    section: { width: 1.5, depth: 11.25, plies: 1, flat: false },
+  });
+  const lifted = (load: number) => ({
+    ...slender,
+    tiedDown: [1, 1],
+    loads: [{ type: 'point', kind: 'dead', at: 84, load }] as const,
+  });
+  expect(ratioOf(lifted(-1), 'slenderness')).toBeGreaterThan(0);
+  expect(ratioOf(lifted(-1e-12), 'slenderness')).toBeNaN();
+});
+
 test('the slenderness limit stands at RB 50: just under passes, just over fails', () => {
   // RB = sqrt(1.63 lu d + 3 d²)/b for 7 <= lu/d; b 1.5, d 11.25 gives RB 50 at lu = (5625/11.25 - 33.75)/1.63.
   const lu = ((50 * 1.5) ** 2 / 11.25 - 3 * 11.25) / 1.63;

@@ -242,7 +242,8 @@ function removeOverhang(member: Member, side: Side): Edit {
 }
 
 function removeTieDown(member: Member, index: number): Edit {
-  if (!(member.tiedDown?.[index] ?? 0)) return { fault: `support ${index + 1} is untied: there is no tie-down to take off` };
+  if (!(member.tiedDown?.[index] ?? 0))
+    return { fault: `support ${index + 1} is untied: there is no tie-down to take off` };
   const tiedDown = member.tiedDown!.map((force, at) => (at === index ? 0 : force));
   const changed = { ...member, tiedDown: tiedDown.some((force) => force > 0) ? tiedDown : null };
   return settled(member, changed, `tiedDown.${index}`);

@@ -3,16 +3,17 @@ import { beamFields, beamLength, MOST_LOADS } from '../../statics/index.ts';
 import type { Member } from '../../timber/member.ts';
 import type { Edit } from '../beam-edits/edit-beam.ts';
 import { type Job, linksOf } from './job.ts';
-import { carriersOf } from './who.ts';
+import { allCarriers } from './who.ts';
 
 /** Between repeated reactions of members whose own spacing nobody stated, in (common practice, no source). */
 const USUAL_SPACING = 16;
 
 /** The members that one could carry, in the order of the job: all but itself and those that carry it, however far down. */
 export function couldCarry(job: Job, carrier: string): Member[] {
+  const carriers = allCarriers(job);
   const below = new Set([carrier]);
   // A set gives out what is added while it is walked.
-  for (const name of below) for (const landing of carriersOf(job, name)) below.add(landing.carrier);
+  for (const name of below) for (const landing of carriers.get(name) ?? []) below.add(landing.carrier);
   return job.members.map(({ member }) => member).filter(({ name }) => !below.has(name));
 }
 

@@ -17,6 +17,20 @@ export function carriersOf(job: Job, name: string): Landing[] {
   return job.members.flatMap(({ member }) => landingsOn(member).filter(({ link }) => link.member === name));
 }
 
+/** Where the reactions of every member land that some member carries, by its name: `carriersOf` of all of them at once. */
+export function allCarriers(job: Job): ReadonlyMap<string, readonly Landing[]> {
+  const carriers = new Map<string, Landing[]>();
+  for (const { member } of job.members) {
+    for (const landing of landingsOn(member)) {
+      const { member: name } = landing.link;
+      const others = carriers.get(name);
+      if (others === undefined) carriers.set(name, [landing]);
+      else others.push(landing);
+    }
+  }
+  return carriers;
+}
+
 /** The reactions of other members that land on a member: whom it carries. */
 export function carriedBy(job: Job, name: string): Landing[] {
   const found = job.members.find(({ member }) => member.name === name);

@@ -1,5 +1,5 @@
 import type { Units } from '../../quantity/index.ts';
-import { reportMember } from '../../timber/index.ts';
+import { prepare, prepareLike, reportMember } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import type { MemberReport } from '../../timber/report.ts';
 import { type RackSize, rackOf, takeSize } from './rack.ts';
@@ -21,7 +21,9 @@ export function sized(member: Member, units: Units): Sized {
   const lightest = rack.sizes[rack.lightest] ?? null;
   const nearest = lightest ?? nearestOf(rack.sizes);
   const taken = nearest === null ? member : takeSize(member, nearest.size);
-  return { lightest, nearest, member: taken, report: reportMember(taken, units) };
+  // The rack has searched the loads already.
+  const ready = prepareLike(prepare(member), taken);
+  return { lightest, nearest, member: taken, report: reportMember(taken, units, ready) };
 }
 
 /** The size with the fewest ratios that nothing can meet and the least worst of the others; the lightest of equals. */

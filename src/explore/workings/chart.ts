@@ -1,3 +1,4 @@
+import { beamLength } from '../../statics/index.ts';
 import { lineLoadOf, sectionWeight } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { figuresOf, plain, ratioText, WORKINGS_WORD, type WorkingLine } from '../../timber/workings/index.ts';
@@ -64,8 +65,10 @@ function powersText(member: Member): string {
   return texts.length === 0 ? 'no power is checked' : texts.join(', ');
 }
 
-function weightLines({ units, ranking }: Asked, marks: readonly Mark[]): WorkingLine[] {
+function weightLines({ member, units, ranking }: Asked, marks: readonly Mark[]): WorkingLine[] {
   const f = figuresOf(units);
+  const weight = sectionWeight(member, member.section);
+  const length = beamLength(member.beam);
   const word = BEST_WORD[ranking.best];
   return [
     { heading: `weight: of this size, and of the ${word} that passes` },
@@ -82,6 +85,16 @@ function weightLines({ units, ranking }: Asked, marks: readonly Mark[]): Working
             : `${word} ${sizeName(rack, lit.size)}, ${f.weight(lit.weight)}`,
       };
     }),
+    ...(Number.isFinite(weight)
+      ? [
+          {
+            symbol: 'in all, now',
+            formula: 'own weight x length',
+            numbers: `${f.line(weight)} x ${f.span(length)}`,
+            result: f.force(weight * length),
+          },
+        ]
+      : []),
   ];
 }
 

@@ -1,5 +1,4 @@
-import { reportMember } from '../../timber/index.ts';
-import type { Member } from '../../timber/member.ts';
+import { explainChecks } from '../../timber/index.ts';
 import {
   type Figures,
   figuresOf,
@@ -13,7 +12,7 @@ import {
 import { pieceLength } from '../buying/buying.ts';
 import { powersOf } from '../powers.ts';
 import { BEST_WORD } from '../rack/best.ts';
-import { hasSize, sizeName, takeSize } from '../rack/rack.ts';
+import { hasSize, type Lot, lotsOf, sectionOf, sizeName } from '../rack/rack.ts';
 import { type RankedRack, type RankedSize, rankedRack } from '../rack/ranked.ts';
 import { refusedWord } from '../rack/refused-word.ts';
 import type { Asked } from './about.ts';
@@ -25,6 +24,7 @@ export function rackLines({ member, units, ranking }: Asked): WorkingLine[] {
   const word = BEST_WORD[rack.best];
   const current = rack.sizes.find(({ size }) => hasSize(member, size));
   const lit = rack.sizes[rack.lit];
+  const lots = lotsOf(member, rack.woods);
   return [
     {
       note:
@@ -43,7 +43,7 @@ export function rackLines({ member, units, ranking }: Asked): WorkingLine[] {
           result: sizeName(rack, lit.size),
           note: `${f.weight(lit.weight)}, worst ratio ${ratioText(lit.worst)}${governingText(lit)}`,
         },
-    ...rack.sizes.flatMap((each) => sizeLines(f, member, rack, each)),
+    ...rack.sizes.flatMap((each) => sizeLines(f, rack, each, lots[rack.woods.indexOf(each.size.stock)]!)),
     ...(ranking.shop === null
       ? []
       : [{ note: `prices are those of pieces for ${f.span(pieceLength(member))}: see what to buy` }]),
@@ -54,7 +54,7 @@ function governingText({ governing }: RankedSize): string {
   return governing === null ? '' : `, ${WORKINGS_WORD[governing]}`;
 }
 
-function sizeLines(f: Figures, member: Member, rack: RankedRack, each: RankedSize): WorkingLine[] {
+function sizeLines(f: Figures, rack: RankedRack, each: RankedSize, lot: Lot): WorkingLine[] {
   const { size, weight, refused, governing, worst, passes, nonDominated, inYard, price, clear } = each;
   const lines: WorkingLine[] = [{ heading: sizeName(rack, size) }];
   if (Number.isFinite(weight)) lines.push(...weightLines(f, size.width * size.depth * size.plies, weight));
@@ -62,7 +62,7 @@ function sizeLines(f: Figures, member: Member, rack: RankedRack, each: RankedSiz
   if (price !== null) lines.push({ symbol: 'price of a member', result: plain(price) });
   if (clear !== null) lines.push({ symbol: 'clear height below it', result: f.size(clear) });
   if (refused !== null) return [...lines, { note: `not a choice: ${refusedWord(refused)}` }];
-  const { checks } = reportMember(takeSize(member, size), f.units);
+  const { checks } = explainChecks(lot.prepared, lot.wood, sectionOf(lot.member, size), f.units);
   const shown = new Set([...powersOf(each.ratios).map(({ check }) => check), governing]);
   for (const check of checks) {
     if (!shown.has(check.id)) continue;

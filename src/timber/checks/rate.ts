@@ -21,6 +21,8 @@ export const NOTCH = at('notch');
 
 /** An upward reaction under this is rounding of the statics, lb. */
 export const NO_UPLIFT = 1e-6;
+/** A moment up to this is none, lb.in: the edge that it presses on needs no holding. */
+const NO_MOMENT = 1e-6;
 
 /**
  * All checks of a member in all combinations and patterns, for one wood and section: fills `ratios` in the order of
@@ -116,7 +118,7 @@ function rateBending(
   for (let g = 0; g < set.count; g += 1) {
     const moment = groupDemand(set, g, w);
     // A group that no longer bends this way at this weight has nothing to check.
-    if (moment <= 0) continue;
+    if (moment <= NO_MOMENT) continue;
     const RB = groupSlenderness(set, g, wood);
     const ratio = bendingRatio(set, g, wood, Fb, { moment, length: NO_LENGTH }, RB);
     if (!(ratio <= ratios[id]!)) first = g;
@@ -143,7 +145,7 @@ function rateVolume(
 ): void {
   const { volume } = set.groups[g]!;
   const moment = groupDemand(set, g, w);
-  if (volume === null || moment <= 0) return;
+  if (volume === null || moment <= NO_MOMENT) return;
   if (bendingRatio(set, g, wood, Fb, { moment, length: volume.longest }) <= ratios[id]!) return;
   const worst = worstByVolume(set, g, wood, Fb, w, ratios[id]!);
   if (worst !== null) raise(ratios, id, bendingRatio(set, g, wood, Fb, worst), governing, g);

@@ -12,7 +12,7 @@ export { type DiagramPlace, diagramLines } from './diagrams.ts';
 export { type Figures, figuresOf, plain, ratioText, sumText } from './figures.ts';
 export { weightLines } from './line-loads.ts';
 export { fieldName } from './places.ts';
-export { measured, ratioLine } from './result.ts';
+export { ratioLine } from './result.ts';
 export {
   BASIS_IDS,
   type BasisId,

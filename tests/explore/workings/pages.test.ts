@@ -15,6 +15,7 @@ import { spanTable } from '../../../src/explore/reach/span-table.ts';
 import { scatterCOV, scatterOf } from '../../../src/explore/scatter/scatter.ts';
 import { type About, ALONE, EXPLORED_IDS, pageIds, pageOf } from '../../../src/explore/workings/index.ts';
 import { beamLength } from '../../../src/statics/index.ts';
+import { sectionWeight } from '../../../src/timber/index.ts';
 import type { Member } from '../../../src/timber/member.ts';
 import { CHECK_IDS } from '../../../src/timber/report.ts';
 import { plain, ratioText, WORKINGS_WORD, type WorkingLine } from '../../../src/timber/workings/index.ts';
@@ -312,6 +313,8 @@ describe('the numbers of a page are those of the view', () => {
     fc.assert(
       fc.property(member, (each) => {
         const all = lines(each, 'charts');
+        const weight = sectionWeight(each, each.section) * beamLength(each.beam);
+        expect(line(all, 'in all, now').result).toBe(`${plain(weight)} lb`);
         const { factor, carries, asked: loads } = capacityOf(each);
         if (!(loads > 0) || !(factor > 0) || !Number.isFinite(factor)) return;
         expect(line(all, 'factor').result).toBe(plain(factor));
