@@ -91,6 +91,9 @@ const EXAMPLES: Readonly<Record<string, string>> = {
   rack: '"rack": [ { "product": "LVL", "grade": "typical 2.0E" } ]',
   factors: '"factors": { "CL": { "value": 0.95, "reason": "..." } }',
   reason: '"reason": "why it has this value"',
+  links: '"links": [ { "member": "J1", "end": "right", "every": "16 in" } ]',
+  member: '"member": "J1"',
+  end: '"end": "right"',
   loads: '"loads": [ { "kind": "snow", "point": "850 lb", "at": "5 ft" } ]',
 };
 

@@ -1,5 +1,15 @@
-export { newMember, newSession } from './new-member.ts';
-export { rankingOf } from './ranking.ts';
+export {
+  freeName,
+  fullFault,
+  nameFault,
+  toldName,
+  withDuplicate,
+  withMemberAfter,
+  withMemberAt,
+} from './edit-members.ts';
+export { MEMBER_KINDS, type MemberKind, memberOfKind } from './member-kinds.ts';
+export { newMember, newSession, USUAL_STOCK } from './new-member.ts';
+export { bestChoices, rankingOf } from './ranking.ts';
 export { readSession } from './read.ts';
 export { schemaJson } from './schema-json.ts';
 export type { Session, SessionMember, SessionRead } from './session.ts';

@@ -1,4 +1,4 @@
-import { ASSUMED_KEYS, LIMITS_BY_USE, type Member, type Use } from '../timber/member.ts';
+import { ASSUMED_KEYS, LIMITS_BY_USE, type Member, type Stock, type Use } from '../timber/member.ts';
 import { DEFAULT_BEARING } from './read-member.ts';
 import type { Session } from './session.ts';
 import { startingLoads } from './usual-loads.ts';
@@ -6,6 +6,15 @@ import { startingLoads } from './usual-loads.ts';
 /** A dressed 2x10 (PS 20): the size a new member begins with; the caller picks one that passes. */
 const TWO_BY = 1.5;
 const NOMINAL_TEN = 9.25;
+
+/** The wood a new member begins with where the session prefers none. */
+export const USUAL_STOCK: Stock = {
+  product: 'dimension lumber',
+  species: 'Douglas Fir-Larch',
+  grade: 'No.2',
+  values: null,
+  valuesFrom: null,
+};
 
 /** A member on bearings with the usual loads of its use and every other value at its default. Spans and tributary in in. */
 export function newMember(use: Use, spans: readonly number[], tributary: number, name = 'B1'): Member {
@@ -29,13 +38,7 @@ export function newMember(use: Use, spans: readonly number[], tributary: number,
     combinations: 'ASCE 7-16',
     liveReduction: null,
     slope: 0,
-    stock: {
-      product: 'dimension lumber',
-      species: 'Douglas Fir-Larch',
-      grade: 'No.2',
-      values: null,
-      valuesFrom: null,
-    },
+    stock: USUAL_STOCK,
     rack: null,
     section: { width: TWO_BY, depth: NOMINAL_TEN, plies: 1, flat: false },
     maxDepth: null,

@@ -1,5 +1,5 @@
 import type { Shop } from '../explore/buying/yard.ts';
-import { type Best, BY_WEIGHT, type Ranking } from '../explore/rack/best.ts';
+import { type Best, BESTS, BY_WEIGHT, type Ranking } from '../explore/rack/best.ts';
 import type { Session, YardList } from './session.ts';
 
 const SHOPS = new WeakMap<object, { readonly prices: Session['prices']; readonly shop: Shop }>();
@@ -15,6 +15,12 @@ export function rankingOf(session: Pick<Session, 'best' | 'yard' | 'prices'>): R
   const ranking = known.get(best) ?? { best, shop };
   known.set(best, ranking);
   return ranking;
+}
+
+/** What may count as best in a session: price where something has one. */
+export function bestChoices(session: Pick<Session, 'best' | 'yard' | 'prices'>): readonly Best[] {
+  const { shop } = rankingOf(session);
+  return BESTS.filter((each) => each !== 'price' || shop !== null);
 }
 
 /** A yard list whose file has not been read says nothing of what there is. */

@@ -254,7 +254,8 @@ function readLoad(load: LoadFile, whole: number, path: Path): AppliedLoad {
   return { type: 'point', kind, at: place('at', 0), load: read('pointLoad', load.point) };
 }
 
-function readStock(file: MemberFile['stock'], path: Path): Stock {
+/** A wood that fits the schema; throws SessionFault where it names none. */
+export function readStock(file: MemberFile['stock'], path: Path): Stock {
   const named = file.product !== 'custom' && file.product !== 'LVL';
   if (named && file.grade === undefined) {
     throw new SessionFault([...path, 'grade'], 'missing; write "grade": "No.2" or what is stamped on it');

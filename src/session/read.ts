@@ -1,14 +1,14 @@
 import { linkFault, resolved } from '../explore/links/index.ts';
 import type { CombinationSet } from '../loads/loading.ts';
 import { quoted } from '../quantity/index.ts';
-import type { Member } from '../timber/member.ts';
+import type { Member, Stock } from '../timber/member.ts';
 import { stockFault, stockNameFault } from '../timber/refusal.ts';
 import { explainIssues } from './explain-issue.ts';
 import { faultLine, type Path, SessionFault } from './fault.ts';
 import { readPins } from './pins.ts';
 import { readPrices, readYard } from './read-buying.ts';
 import { readJson } from './read-json.ts';
-import { readMember } from './read-member.ts';
+import { readMember, readStock } from './read-member.ts';
 import { FORMAT, type SessionFile, sessionSchema } from './schema.ts';
 import type { Session, SessionMember, SessionRead } from './session.ts';
 import { isTooLarge } from './too-large.ts';
@@ -77,6 +77,7 @@ export function readUnlinked(document: unknown): Session {
     ...(file.best === undefined ? {} : { best: file.best }),
     ...(file.yard === undefined ? {} : { yard: readYard(file.yard) }),
     ...(file.prices === undefined ? {} : { prices: readPrices(file.prices) }),
+    ...(file.stock === undefined ? {} : { stock: readNamedStock(file.stock, ['stock']) }),
     ...(file.sheet === undefined ? {} : { sheet: file.sheet }),
     members: file.members.map((_, i) => readOne(file, raw.members[i], i, combinations)),
     written: top,
@@ -99,12 +100,7 @@ function readOne(
       : fault.reason;
     throw new SessionFault([...path, ...key.split('.')], reason);
   }
-  for (const [at, stock] of (member.rack ?? []).entries()) {
-    const unknown = stockNameFault(stock);
-    if (unknown === null) continue;
-    const key = unknown.path.slice('stock.'.length);
-    throw new SessionFault([...path, 'rack', at, key], unknown.reason);
-  }
+  for (const [at, stock] of (member.rack ?? []).entries()) checkNamed(stock, [...path, 'rack', at]);
   const pins = readPins(file.members[index]!, written, combinations, path);
   const trail = readTrail(file.members[index]!.trail);
   return {
@@ -113,6 +109,19 @@ function readOne(
     ...(pins === undefined ? {} : { pins }),
     ...(trail === undefined ? {} : { trail }),
   };
+}
+
+function readNamedStock(file: NonNullable<SessionFile['stock']>, path: Path): Stock {
+  const stock = readStock(file, path);
+  checkNamed(stock, path);
+  return stock;
+}
+
+/** Throws SessionFault where no table has the wood. */
+function checkNamed(stock: Stock, path: Path): void {
+  const unknown = stockNameFault(stock);
+  if (unknown === null) return;
+  throw new SessionFault([...path, unknown.path.slice('stock.'.length)], unknown.reason);
 }
 
 /** The member that a raw record says, as the only one of a session; null where it cannot be read. */

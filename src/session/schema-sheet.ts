@@ -1,13 +1,10 @@
 import * as z from 'zod/mini';
 import type { PARTS } from './schema.ts';
-import { PAPERS } from './session.ts';
-
-/** Entries of a title block take one line of a page. */
-const ENTRY_LENGTH = 120;
+import { MAX_SHEET_ENTRY, PAPERS } from './session.ts';
 
 /** `sheet`: the title block of the calculation sheet, each entry of which may be left out, and its paper. */
 export function sheet({ text }: typeof PARTS) {
-  const entry = z.optional(text(0, ENTRY_LENGTH));
+  const entry = z.optional(text(0, MAX_SHEET_ENTRY));
   return z
     .strictObject({
       firm: entry,

@@ -1,12 +1,13 @@
 import * as z from 'zod/mini';
 import { BESTS } from '../explore/rack/best.ts';
 import { LOAD_KINDS } from '../loads/kinds.ts';
+import { COMBINATION_SETS } from '../loads/loading.ts';
 import { isHarmful, parseQuantity, type QuantityKind, quoted } from '../quantity/index.ts';
 import { FACTOR_SYMBOLS, PRODUCTS, STOCK_VALUES } from '../timber/member.ts';
 import { prices, yard } from './schema-buying.ts';
 import { sheet } from './schema-sheet.ts';
 import { trail } from './schema-trail.ts';
-import { MAX_LOADS, MAX_MEMBERS, MAX_PINS, MAX_RACK, MAX_SPANS } from './session.ts';
+import { MAX_LOADS, MAX_MEMBERS, MAX_NAME, MAX_PINS, MAX_RACK, MAX_SPANS, MAX_TITLE } from './session.ts';
 
 /** The format's version, the value of the key `thrice`. */
 export const FORMAT = 1;
@@ -27,8 +28,6 @@ const MAX_COUNT = 10_000;
 const MAX_LIMIT = 10_000;
 const LEAST_FACTOR = 0.01;
 const MOST_FACTOR = 10;
-const NAME_LENGTH = 60;
-const NOTE_LENGTH = 500;
 const SLOPE = /^(\d+(?:\.\d+)?|\.\d+) ?: ?(\d+(?:\.\d+)?|\.\d+)$/;
 const STEEPEST = 2;
 
@@ -59,12 +58,15 @@ export function readSlope(text: string): number {
 function build() {
   return z.strictObject({
     thrice: z.literal(FORMAT),
-    title: z.optional(text(0, NOTE_LENGTH)),
+    title: z.optional(text(0, MAX_TITLE)),
     units: z.optional(z.enum(['us', 'si'])),
-    combinations: z.optional(z.enum(['ASCE 7-16', 'ASCE 7-22'])),
+    combinations: z.optional(z.enum(COMBINATION_SETS)),
     best: z.optional(z.enum(BESTS)),
     yard: z.optional(yard(PARTS)),
     prices: z.optional(prices(PARTS)),
+    stock: z.optional(
+      stock().register(z.globalRegistry, { description: 'the wood that new members begin with' }),
+    ),
     sheet: z.optional(sheet(PARTS)),
     members: z.array(memberWithPins()).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
   });
@@ -82,7 +84,7 @@ function memberWithPins() {
       z
         .array(
           z.strictObject({
-            note: z.optional(text(0, NOTE_LENGTH)),
+            note: z.optional(text(0, MAX_TITLE)),
             design: z.omit(member(), { name: true, note: true, count: true }),
           }),
         )
@@ -117,8 +119,8 @@ function member() {
   const ends = <T extends z.ZodMiniType>(of: T) => z.optional(z.strictObject({ left: of, right: of }));
 
   return z.strictObject({
-    name: text(1, NAME_LENGTH),
-    note: z.optional(text(0, NOTE_LENGTH)),
+    name: text(1, MAX_NAME),
+    note: z.optional(text(0, MAX_TITLE)),
     use: z.optional(z.enum(USES)),
     count: z.optional(z.int().check(z.minimum(1), z.maximum(MAX_COUNT))),
     spans: z.array(span).check(z.minLength(1), z.maxLength(MAX_SPANS)),
@@ -200,7 +202,7 @@ function link() {
     quantity('length', 0, (MAX_SPANS + 2) * LONGEST, '0 ft to the length of the member'),
   );
   return z.strictObject({
-    member: text(1, NAME_LENGTH),
+    member: text(1, MAX_NAME),
     end: z
       .union([z.enum(['left', 'right']), z.int().check(z.minimum(0), z.maximum(MAX_SPANS))])
       .register(z.globalRegistry, {
@@ -250,8 +252,8 @@ function stock() {
   const values = each(STOCK_VALUES, () => stress);
   return z.strictObject({
     product: z.enum(PRODUCTS),
-    species: z.optional(text(0, NAME_LENGTH)),
-    grade: z.optional(text(0, NAME_LENGTH)),
+    species: z.optional(text(0, MAX_NAME)),
+    grade: z.optional(text(0, MAX_NAME)),
     values: z.optional(
       z.strictObject({
         ...values,
@@ -259,7 +261,7 @@ function stock() {
         COV: z.optional(z.number().check(z.minimum(0), z.maximum(0.5))),
       }),
     ),
-    valuesFrom: z.optional(text(1, NOTE_LENGTH)),
+    valuesFrom: z.optional(text(1, MAX_TITLE)),
   });
 }
 
@@ -269,7 +271,7 @@ function factors() {
     z.optional(
       z.strictObject({
         value: z.number().check(z.minimum(LEAST_FACTOR), z.maximum(MOST_FACTOR)),
-        reason: text(1, NOTE_LENGTH),
+        reason: text(1, MAX_TITLE),
       }),
     );
   return z.strictObject(each(FACTOR_SYMBOLS, typed)).register(z.globalRegistry, {

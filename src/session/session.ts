@@ -2,7 +2,7 @@ import type { PriceRow, YardRow } from '../explore/buying/yard.ts';
 import type { Best } from '../explore/rack/best.ts';
 import type { CombinationSet } from '../loads/loading.ts';
 import type { Units } from '../quantity/index.ts';
-import type { Member } from '../timber/member.ts';
+import type { Member, Stock } from '../timber/member.ts';
 import type { Change } from './differences.ts';
 
 /** A job: its members, and how it wants to be shown and combined. */
@@ -19,6 +19,8 @@ export interface Session {
   readonly yard?: YardList | null;
   /** What woods cost where the yard list does not say. */
   readonly prices?: readonly PriceRow[];
+  /** The wood that new members begin with; absent: `USUAL_STOCK`. */
+  readonly stock?: Stock;
   /** The title block of the calculation sheet, and its paper; absent: nothing filled in. */
   readonly sheet?: SheetKeys;
   /** The raw top of the file it was read from, without its members; absent for a session that was never a file. */
@@ -92,6 +94,10 @@ export type SessionRead =
 /** Largest file and counts that are read (contract, "Session file"). */
 export const MAX_BYTES = 16 * 1024 * 1024;
 export const MAX_MEMBERS = 500;
+/** Characters of a member's name, of a title or a note, and of an entry of the title block. */
+export const MAX_NAME = 60;
+export const MAX_TITLE = 500;
+export const MAX_SHEET_ENTRY = 120;
 export const MAX_SPANS = 6;
 export const MAX_LOADS = 100;
 /** Characters of the name of a yard list's file, and lines of a list; bounds of this program's own. */

@@ -2,7 +2,7 @@ import { STOCK_VALUES, type Stock } from '../timber/member.ts';
 import { keeper, present, type Raw, rawAt } from './keep.ts';
 
 /** Values that are plain numbers, without a unit. */
-const WITHOUT_UNIT: readonly string[] = ['G', 'COV'];
+export const WITHOUT_UNIT: readonly string[] = ['G', 'COV'];
 
 /** The `stock` object of a member, as writeMember says. `stress` writes a stress. */
 export function writeStock(

@@ -1,9 +1,9 @@
-import type { Units } from '../quantity/index.ts';
+import { type Units, writeQuantity } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
 import { SessionFault } from './fault.ts';
 import { present, type Raw, rawAt } from './keep.ts';
 import { writePins } from './pins.ts';
-import { readMember } from './read-member.ts';
+import { readMember, readStock } from './read-member.ts';
 import { FORMAT, type MemberFile } from './schema.ts';
 import { MAX_TRAIL, type Session, type SessionMember } from './session.ts';
 import { isTooLarge } from './too-large.ts';
@@ -11,6 +11,7 @@ import { writeTrail } from './trail.ts';
 import { writePrices, writeYard } from './write-buying.ts';
 import { writeJson } from './write-json.ts';
 import { writeMember } from './write-member.ts';
+import { writeStock } from './write-stock.ts';
 
 /**
  * The session as the text of its file. Every value that has not changed keeps the user's own text; what was absent and
@@ -42,6 +43,7 @@ export function sessionDocument(session: Session, trails = MAX_TRAIL): unknown {
     best: stated('best', session.best ?? 'weight', 'weight'),
     yard: writeYard(session),
     prices: writePrices(session),
+    stock: writeNewStock(session),
     sheet: session.sheet,
     members: session.members.map((one) =>
       present({
@@ -51,6 +53,14 @@ export function sessionDocument(session: Session, trails = MAX_TRAIL): unknown {
       }),
     ),
   });
+}
+
+/** The wood of new members, its values as the user wrote them while unchanged. */
+function writeNewStock({ stock, units, written }: Session): Raw | undefined {
+  if (stock === undefined) return undefined;
+  const raw = rawAt(written, 'stock');
+  const before = raw === undefined ? undefined : readStock(raw as MemberFile['stock'], ['stock']);
+  return writeStock(stock, raw, before, (value) => writeQuantity('stress', value, units));
 }
 
 /** Records by the member that they are of: at a change all members but one are as they were. */

@@ -1,7 +1,8 @@
 import { KIND_WORD, LOAD_KINDS } from '../../loads/kinds.ts';
 import type { QuantityKind } from '../../quantity/index.ts';
-import { FACTOR_SYMBOLS, STOCK_VALUES } from '../../timber/member.ts';
+import { FACTOR_SYMBOLS, STOCK_VALUES, type StockValue } from '../../timber/member.ts';
 import type { Path } from '../fault.ts';
+import { WITHOUT_UNIT } from '../write-stock.ts';
 
 /** What stands in the cells of a column. */
 export type CellKind =
@@ -38,6 +39,19 @@ const flag: CellKind = { is: 'flag' };
 const length: CellKind = { is: 'quantity', of: 'length' };
 const areaLoad: CellKind = { is: 'quantity', of: 'areaLoad' };
 const stress: CellKind = { is: 'quantity', of: 'stress' };
+
+/** Of Douglas Fir-Larch No.2 (NDS Supplement, Table 4A, from memory). */
+const VALUE_EXAMPLE: Readonly<Record<StockValue, string>> = {
+  Fb: '900 psi',
+  FbNeg: '900 psi',
+  Fv: '180 psi',
+  Fcperp: '625 psi',
+  E: '1600000 psi',
+  Emin: '580000 psi',
+  EyMin: '580000 psi',
+  G: '0.5',
+  COV: '0.25',
+};
 
 /** Every column that a beam schedule may have, in the order it is written. Only span and wood have no default. */
 export const SCHEDULE_COLUMNS: readonly ScheduleColumn[] = [
@@ -110,9 +124,13 @@ export const SCHEDULE_COLUMNS: readonly ScheduleColumn[] = [
   column('species', ['stock', 'species'], text, 'Douglas Fir-Larch', 'as its table names it', ['wood']),
   column('grade', ['stock', 'grade'], text, 'No.2', 'grade, or stress class of glulam'),
   ...STOCK_VALUES.map((key) =>
-    key === 'G' || key === 'COV'
-      ? column(key, ['stock', 'values', key], number, key === 'G' ? '0.5' : '0.25', 'typed over the table')
-      : column(key, ['stock', 'values', key], stress, '900 psi', 'typed over the table'),
+    column(
+      key,
+      ['stock', 'values', key],
+      WITHOUT_UNIT.includes(key) ? number : stress,
+      VALUE_EXAMPLE[key],
+      'typed over the table',
+    ),
   ),
   column('values from', ['stock', 'valuesFrom'], text, 'report in hand', 'where typed values were read'),
   column(

@@ -1,8 +1,10 @@
 /** A record of a CSV text, with the line that it begins on, from 1. */
 export type CsvRecord =
   | { readonly line: number; readonly cells: readonly string[] }
-  /** One that is longer than any row: its cells are not kept. */
-  | { readonly line: number; readonly tooLong: true; readonly lastLine: number };
+  /** One that is no row, and what is wrong with it. */
+  | { readonly line: number; readonly broken: Broken };
+
+export type Broken = 'too long' | 'open quote';
 
 /** Characters of a record at most; a cell cannot be longer either. */
 export const LONGEST_RECORD = 64 * 1024;
@@ -15,8 +17,9 @@ type Delimiter = (typeof DELIMITERS)[number];
  * quotes in them; lines that end in LF, CRLF or CR; comma, semicolon or tab between cells, whichever the first line
  * holds most of. Forgiving where people's tables are not strict: a quote inside a cell that does not begin with one (the
  * inch mark of 14'-6") is that mark, and so is what follows a closing quote. Blanks around a cell that is not quoted are
- * dropped, and so are empty lines. A record that is too long is told of and skipped up to the next line end, so that a
- * quote that is never closed does not take the rest of the text with it.
+ * dropped, and so are empty lines. A record that is too long, or has a quote that is not closed within that length, is
+ * told of and given up at its next line end, so that it does not take the rest of the text with it (csv-parse, which
+ * reads yard lists, cannot go on behind such a record).
  */
 export class CsvReader {
   #delimiter: Delimiter | null = null;
@@ -24,8 +27,8 @@ export class CsvReader {
   #rest = '';
   /** The line that it begins on. */
   #line = 1;
-  /** Where a record that is too long began; null while none is. */
-  #skipping: number | null = null;
+  /** The record that is given up, whose line end has not been found; null while there is none. */
+  #givenUp: { readonly line: number; readonly broken: Broken } | null = null;
   /** A carriage return at the end of a piece: the line feed may begin the next one. */
   #held = '';
 
@@ -48,28 +51,27 @@ export class CsvReader {
     const records: CsvRecord[] = [];
     let from = 0;
     for (;;) {
-      if (this.#skipping !== null) {
+      if (this.#givenUp !== null) {
         const end = lineEnd(this.#rest, from);
         if (end < 0 && !ended) {
           from = this.#rest.length;
           break;
         }
-        records.push({ line: this.#skipping, tooLong: true, lastLine: this.#line });
-        this.#skipping = null;
+        records.push(this.#givenUp);
+        this.#givenUp = null;
         from = end < 0 ? this.#rest.length : this.#pastLineEnd(end);
       }
       if (from >= this.#rest.length) break;
       this.#delimiter ??= delimiterOf(this.#rest, ended);
       if (this.#delimiter === null) break;
       const record = readRecord(this.#rest, from, this.#delimiter, ended);
-      if (record === 'too long') {
-        this.#skipping = this.#line;
-        const passed = from + LONGEST_RECORD;
-        this.#line += countLines(this.#rest, from, passed);
-        from = passed;
+      if (record === null) break;
+      if ('broken' in record) {
+        this.#givenUp = { line: this.#line, broken: record.broken };
+        this.#line += countLines(this.#rest, from, record.from);
+        from = record.from;
         continue;
       }
-      if (record === null) break;
       const line = this.#line;
       this.#line += countLines(this.#rest, from, record.end);
       from = record.end >= this.#rest.length ? this.#rest.length : this.#pastLineEnd(record.end);
@@ -102,35 +104,30 @@ function delimiterOf(text: string, ended: boolean): Delimiter | null {
   return DELIMITERS.toSorted((a, b) => counts.get(b)! - counts.get(a)!)[0]!;
 }
 
-/** The record that begins at `from` and the place of the line end behind it; null where the text does not hold all of it. */
-function readRecord(
-  text: string,
-  from: number,
-  delimiter: Delimiter,
-  ended: boolean,
-): { readonly cells: string[]; readonly end: number } | 'too long' | null {
+type Found =
+  /** `end`: of the line end behind it, or of the text. */
+  | { readonly cells: string[]; readonly end: number }
+  /** `from`: where to look for the line end that it is given up at. */
+  | { readonly broken: Broken; readonly from: number };
+
+/** The record that begins at `from`; null where the text does not hold all of it yet. */
+function readRecord(text: string, from: number, delimiter: Delimiter, ended: boolean): Found | null {
   const last = from + LONGEST_RECORD;
-  const incomplete = () => (text.length > last ? 'too long' : null);
+  const tooLong: Found = { broken: 'too long', from: last };
   const cells: string[] = [];
   for (let at = from; ; ) {
     const start = skipBlanks(text, at, delimiter);
-    let cell: string;
-    let end: number;
-    if (text[start] === '"') {
-      const close = closingQuote(text, start + 1, last);
-      if (close < 0 && (!ended || text.length > last)) return incomplete();
-      // A quote that is never closed: all that follows it is the cell.
-      const inner = text.slice(start + 1, close < 0 ? text.length : close).replaceAll('""', '"');
-      end = cellEnd(text, close < 0 ? text.length : close + 1, delimiter);
-      cell = inner + text.slice(close + 1, end).trim();
-      if (close < 0) cell = inner;
-    } else {
-      end = cellEnd(text, start, delimiter);
-      cell = text.slice(start, end).trim();
-    }
-    if (end > last) return 'too long';
-    cells.push(cell);
-    if (end >= text.length) return ended ? { cells, end } : incomplete();
+    const isQuoted = text[start] === '"';
+    const close = isQuoted ? closingQuote(text, start + 1, last) : start;
+    if (close < 0) return ended || text.length > last ? { broken: 'open quote', from: start } : null;
+    const end = cellEnd(text, isQuoted ? close + 1 : start, delimiter);
+    if (end > last) return tooLong;
+    cells.push(
+      isQuoted
+        ? text.slice(start + 1, close).replaceAll('""', '"') + text.slice(close + 1, end).trim()
+        : text.slice(start, end).trim(),
+    );
+    if (end >= text.length) return ended ? { cells, end } : null;
     if (text[end] !== delimiter) return { cells, end };
     at = end + 1;
   }

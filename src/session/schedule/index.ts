@@ -1,5 +1,5 @@
 export { SCHEDULE_COLUMNS } from './columns.ts';
-export { CsvReader, type CsvRecord, csvLine, LONGEST_RECORD } from './csv-records.ts';
+export { type Broken, CsvReader, type CsvRecord, csvLine, LONGEST_RECORD } from './csv-records.ts';
 export { guarded } from './guard.ts';
 export { readScheduleHead, type ScheduleHead } from './head.ts';
 export { type RowRead, readScheduleRow } from './row.ts';
