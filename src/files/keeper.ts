@@ -1,23 +1,14 @@
 import { accessSync, constants, existsSync, readFileSync, statSync } from 'node:fs';
-import { dirname, resolve } from 'node:path';
+import { hostname } from 'node:os';
+import { basename, dirname, resolve } from 'node:path';
 import { harmless } from '../quantity/index.ts';
 import { writeSession } from '../session/index.ts';
 import type { Session } from '../session/session.ts';
-import {
-  type Journal,
-  journalBeside,
-  makeFolderOf,
-  readJournal,
-  removeJournal,
-  setJournalAside,
-  untitledIn,
-  untitledJournal,
-  untitledWithJournal,
-  writeJournal,
-} from './journal.ts';
-import { type Holder, type LockTry, takeLock } from './lock.ts';
+import { makeFolderOf, readJournal, removeJournal, setJournalAside, writeJournal } from './journal.ts';
+import { type Holder, lockOf, takeLock } from './lock.ts';
+import { backupOf, openFile, openUntitled, type Place, placeOf } from './place.ts';
 import { whyNot } from './why.ts';
-import { codeOf, remove, throughLinks, unfinishedOf, writeWhole } from './write-whole.ts';
+import { codeOf, throughLinks, writeWhole } from './write-whole.ts';
 
 /** Keeps the session of the explorer: its file, the recovery journal, the lock. */
 export interface Keeper {
@@ -80,9 +71,6 @@ export interface KeeperOptions {
   readonly read: (text: string) => Session | null;
 }
 
-/** The version before the last save. */
-export const backupOf = (file: string): string => `${file}.bak`;
-
 /** Why --read-only keeps nothing. */
 export const NOT_WRITTEN = 'not kept: opened with --read-only, which writes nothing';
 
@@ -93,15 +81,6 @@ const LATEST = 600;
 export function openKeeper(options: KeeperOptions): Keeper {
   if (options.readOnly) return readOnlyKeeper(options);
   return new FileKeeper(options);
-}
-
-/** Where a session is kept. */
-interface Place {
-  /** The file, by its whole path and through all links; null where it has none. */
-  readonly file: string | null;
-  readonly journal: Journal;
-  /** What the locks are of, the best first. */
-  readonly locked: readonly string[];
 }
 
 class FileKeeper implements Keeper {
@@ -131,7 +110,7 @@ class FileKeeper implements Keeper {
     if (opened.lock.kind === 'taken') this.release = opened.lock.release;
     this.isElsewhere = opened.lock.kind === 'held';
     if (opened.lock.kind === 'held')
-      this.told = `${heldText(opened.lock.by)}: read-only here; A keeps a copy under another name`;
+      this.told = `${heldText(file ?? '', opened.lock.by)}: read-only, A keeps a copy`;
     this.recovered = this.isElsewhere ? null : this.findRecovered(read);
     this.unanswered = this.recovered !== null;
     process.on('exit', this.onExit);
@@ -189,7 +168,7 @@ class FileKeeper implements Keeper {
     const missing = missingFolder(name);
     if (missing !== null) return missing;
     const lock = takeLock(file);
-    if (lock.kind === 'held') return failed(`not kept: ${harmless(name)} is ${heldText(lock.by)}`);
+    if (lock.kind === 'held') return failed(`not kept: ${harmless(name)} is ${heldText(file, lock.by)}`);
     try {
       writeWhole(file, text, { fresh: true });
     } catch (error) {
@@ -199,6 +178,7 @@ class FileKeeper implements Keeper {
     this.leavePlace();
     this.place = placeOf(file, this.stateFolder);
     this.isElsewhere = false;
+    this.unanswered = false;
     if (lock.kind === 'taken') this.release = lock.release;
     return { kind: 'saved' };
   }
@@ -210,7 +190,7 @@ class FileKeeper implements Keeper {
     const missing = missingFolder(name);
     if (missing !== null) return missing;
     const lock = takeLock(file);
-    if (lock.kind === 'held') return failed(`not kept: ${harmless(name)} is ${heldText(lock.by)}`);
+    if (lock.kind === 'held') return failed(`not kept: ${harmless(name)} is ${heldText(file, lock.by)}`);
     if (lock.kind === 'taken') this.release = lock.release;
     const there = contentOf(file);
     if (there !== null) {
@@ -324,71 +304,6 @@ function readOnlyKeeper({ file, text, stateFolder }: KeeperOptions): Keeper {
   };
 }
 
-interface Opened {
-  readonly place: Place;
-  readonly lock: LockTry;
-}
-
-function openFile(name: string, stateFolder: string | null): Opened {
-  const file = throughLinks(name);
-  // A pipe or a device has nothing beside it, and cannot be written back to.
-  if (!isOrdinary(file)) return newUntitled(stateFolder);
-  const place = placeOf(file, stateFolder);
-  const lock = firstLock(place.locked);
-  // What a killed program had not finished.
-  if (lock.kind === 'taken') {
-    for (const each of [file, backupOf(file), ...place.journal.places]) remove(unfinishedOf(each));
-  }
-  return { place, lock };
-}
-
-/** The newest session without a file that a program left behind, else a new one. */
-function openUntitled(stateFolder: string | null): Opened {
-  for (const base of stateFolder === null ? [] : untitledWithJournal(stateFolder)) {
-    const lock = takeLock(base);
-    if (lock.kind === 'taken') return { place: untitledPlace(base), lock };
-  }
-  return newUntitled(stateFolder);
-}
-
-/** Its lock is taken with the first thing worth a journal: until then nothing is written. */
-function newUntitled(stateFolder: string | null): Opened {
-  const place =
-    stateFolder === null
-      ? { file: null, journal: { places: [] }, locked: [] }
-      : untitledPlace(untitledIn(stateFolder));
-  return { place, lock: { kind: 'impossible' } };
-}
-
-function untitledPlace(base: string): Place {
-  return { file: null, journal: untitledJournal(base), locked: [base] };
-}
-
-function placeOf(file: string, stateFolder: string | null): Place {
-  const journal = journalBeside(file, stateFolder);
-  return { file, journal, locked: [file, ...journal.places.slice(1)] };
-}
-
-/** The lock of the file; in the folder for state where the file's own may not be written. */
-function firstLock([beside, inState]: readonly string[]): LockTry {
-  const lock = takeLock(beside!);
-  if (lock.kind !== 'impossible' || inState === undefined) return lock;
-  try {
-    makeFolderOf(inState);
-  } catch {
-    return lock;
-  }
-  return takeLock(inState);
-}
-
-function isOrdinary(file: string): boolean {
-  try {
-    return statSync(file).isFile();
-  } catch {
-    return false;
-  }
-}
-
 function contentOf(file: string): Buffer | null {
   try {
     return readFileSync(file);
@@ -407,6 +322,9 @@ function failed(reason: string): SaveOutcome {
   return { kind: 'failed', reason };
 }
 
-function heldText(by: Holder | null): string {
-  return by === null ? 'open elsewhere' : `open elsewhere (process ${by.pid} on ${harmless(by.host)})`;
+function heldText(file: string, by: Holder | null): string {
+  if (by === null) return 'open elsewhere';
+  // Whether a process of another machine still runs nobody here can tell.
+  const ifNot = by.host === hostname() ? '' : `; if it is not, remove ${harmless(basename(lockOf(file)))}`;
+  return `open elsewhere (process ${by.pid} on ${harmless(by.host)}${ifNot})`;
 }

@@ -1,11 +1,11 @@
-import { BEST_WORD, BESTS } from '../explore/rack/best.ts';
-import { rankingOf } from '../session/index.ts';
+import { BEST_WORD } from '../explore/rack/best.ts';
+import { bestChoices, rankingOf } from '../session/index.ts';
 import { refused, type State, withSession } from './state.ts';
 
 /** The state with the next measure counting as best; price alone is passed over where nothing has one. */
 export function nextBest(state: State): State {
-  const { best, shop } = rankingOf(state.session);
-  const choices = BESTS.filter((each) => each !== 'price' || shop !== null);
+  const { best } = rankingOf(state.session);
+  const choices = bestChoices(state.session);
   const next = choices[(choices.indexOf(best) + 1) % choices.length]!;
   if (next === best) return refused(state, 'there is nothing else to choose by');
   const text = `best is now the ${WORD[next]}; rack, lit size, moves and handovers follow`;

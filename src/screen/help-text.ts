@@ -1,6 +1,7 @@
 import { BUYING_BINDINGS } from './buying-keys.ts';
 import { DIAGRAM_BINDINGS } from './diagram-keys.ts';
 import { BINDINGS, WORDS } from './keys.ts';
+import { MEMBERS_BINDINGS } from './members-keys.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
 
 export interface HelpSection {
@@ -88,6 +89,15 @@ const OTHER_VIEWS: readonly HelpSection[] = [
     ],
   },
   {
+    title: 'in the settings of the session',
+    lines: [
+      ['←→', 'the choice before, the next'],
+      ['Enter', 'type it, where it is typed; the next choice elsewhere'],
+      ['Delete', 'none of it'],
+      ['Tab', 'back'],
+    ],
+  },
+  {
     title: 'in the headroom view',
     lines: [
       ['↑↓ ←→ [ ] { }', 'choose a height and nudge it, as the knobs'],
@@ -112,6 +122,10 @@ export function helpSections(): readonly HelpSection[] {
     {
       title: 'in the buying view',
       lines: BUYING_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
+    },
+    {
+      title: 'in the list of members',
+      lines: MEMBERS_BINDINGS.map((binding) => [binding.keys, binding.help] as const),
     },
     ...OTHER_VIEWS,
     { title: 'words', lines: WORDS },

@@ -22,6 +22,7 @@ export type Action =
   | 'pin'
   | 'headroom'
   | 'links'
+  | 'members'
   | 'buying'
   | 'reach'
   | 'handovers'
@@ -204,6 +205,13 @@ export const BINDINGS: readonly Binding[] = [
     action: 'links',
     help: 'links: the reactions of other members that this one carries, and what carries it',
     foot: 'links',
+  },
+  {
+    keys: 'j',
+    presses: ['j'],
+    action: 'members',
+    help: 'the job: every member with what governs it; add, name, move, delete; Tab: what is set for all of them',
+    foot: 'members',
   },
   {
     keys: 'o',

@@ -15,6 +15,7 @@ import { sizeLabel } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
+import type { Question } from './panels/prompt.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
 import { type LinksMode, memberOf, type State, unitsOf } from './state.ts';
 import type { FootView } from './view.ts';
@@ -36,8 +37,8 @@ export interface LinksView {
   /** The row in hand; -1 where there is none. */
   readonly inHand: number;
   readonly foot: readonly FootView[];
-  /** What is typed: the words before the field, what may be typed or why that may not be. */
-  readonly question: { readonly asks: string; readonly told: string; readonly isFault: boolean } | null;
+  /** What is typed; null while nothing is. */
+  readonly question: Question | null;
 }
 
 const COLUMNS: readonly TableColumn[] = [
@@ -197,5 +198,6 @@ function footOf({ choosing }: LinksMode, line: LinkLine | null): FootView[] {
           { keys: 't', does: 'once or repeated' },
         ]
       : [];
-  return [back, add, ...own, { keys: 'g', does: 'go to it' }, keys];
+  const workings = { keys: 'w', does: 'workings' };
+  return [back, add, ...own, { keys: 'g', does: 'go to it' }, workings, keys];
 }

@@ -5,8 +5,18 @@ import type { Session } from '../session/session.ts';
 import { chooseGlyphs } from './draw/glyphs.ts';
 import { chooseTheme } from './draw/theme.ts';
 import { Explorer } from './explorer.tsx';
-import { START } from './modes/start.ts';
-import { type Effect, EXPLORE, type Mode, type SheetAnswer, type State, type YardAnswer } from './state.ts';
+import { startWith } from './modes/start.ts';
+import {
+  type Effect,
+  EXPLORE,
+  type Mode,
+  type Offers,
+  type Opened,
+  type OpenAnswer,
+  type SheetAnswer,
+  type State,
+  type YardAnswer,
+} from './state.ts';
 import type { Size } from './terminal/open.tsx';
 import type { Event } from './update.ts';
 
@@ -23,11 +33,23 @@ export interface ExplorerOptions {
   readonly copy: (text: string) => void;
   /** Writes the session, its recovery journal, and nothing where it may not. */
   readonly keeper: Keeper;
+  /** What an empty start offers, and what opens it; null where there is a session. */
+  readonly opening: { readonly offers: Offers; open(what: Opened): FoundSession } | null;
   /** Writes a calculation sheet, by and by. */
   readonly writeSheet: (wanted: SheetWanted) => Promise<SheetAnswer['outcome']>;
   /** Reads a yard list by its name, for a session of this file. */
   readonly readYard: (name: string, session: Session, file: string | null) => YardAnswer;
 }
+
+/** A session that was opened in place of an empty start, with what keeps it; null: as before, it has no file. */
+export type FoundSession =
+  | {
+      readonly ok: true;
+      readonly file: string | null;
+      readonly session: Session;
+      readonly keeper: Keeper | null;
+    }
+  | { readonly ok: false; readonly fault: string };
 
 /** A sheet as the screen asks for it. */
 export type SheetWanted = Extract<Effect, { readonly do: 'write-sheet' }>;
@@ -40,10 +62,12 @@ export function openExplorer({
   units = 'us',
   told,
   copy,
-  keeper,
+  keeper: first,
+  opening,
   readYard,
   writeSheet,
 }: ExplorerOptions): (size: Size) => ReactElement {
+  let keeper = first;
   const theme = chooseTheme(env);
   const glyphs = chooseGlyphs(env);
   const initial = (size: Size): State => ({
@@ -56,17 +80,30 @@ export function openExplorer({
     future: [],
     ghost: null,
     readOnly: keeper.readOnly,
-    mode: firstMode(session, keeper),
+    mode: firstMode(session, keeper, opening?.offers ?? NO_OFFERS),
     notice: noticeOf(keeper.notice ?? told),
     settled: false,
     ...size,
   });
-  let first: State | null = null;
+  let begun: State | null = null;
   let tell: (event: Event) => void = () => undefined;
+  const listenToKeeper = () => keeper.listen((text) => tell({ type: 'told', text, refusal: true }));
+  const opened = (found: FoundSession): OpenAnswer => {
+    if (!found.ok) return found;
+    const { session, file, keeper: its } = found;
+    if (its === null)
+      return { ok: true, session, file, readOnly: keeper.readOnly, recovered: null, notice: null };
+    keeper.close();
+    keeper = its;
+    listenToKeeper();
+    const { readOnly, recovered, notice } = its;
+    return { ok: true, session, file, readOnly, recovered, notice };
+  };
   const perform = (effect: Effect): Event | null => {
     if (effect.do === 'copy') copy(effect.text);
     if (effect.do === 'read-yard')
       return { type: 'yard', answer: readYard(effect.name, effect.session, effect.file) };
+    if (effect.do === 'open' && opening !== null) return { type: 'opened', answer: opened(opening.open(effect.what)) };
     if (effect.do === 'write-sheet') {
       const { file } = effect;
       void writeSheet(effect).then((outcome) => tell({ type: 'sheet', answer: { file, outcome } }));
@@ -91,17 +128,17 @@ export function openExplorer({
   };
   const listen = (happen: (event: Event) => void): (() => void) => {
     tell = happen;
-    keeper.listen((text) => happen({ type: 'told', text, refusal: true }));
+    listenToKeeper();
     return () => {
       tell = () => undefined;
       keeper.close();
     };
   };
   return (size) => {
-    first ??= initial(size);
+    begun ??= initial(size);
     return (
       <Explorer
-        initial={first}
+        initial={begun}
         columns={size.columns}
         rows={size.rows}
         theme={theme}
@@ -118,10 +155,12 @@ function noticeOf(text: string | null): State['notice'] {
 }
 
 /** What was not kept is asked about before anything else. */
-function firstMode(session: Session | null, { recovered }: Keeper): Mode {
-  const after = session === null ? START : EXPLORE;
+function firstMode(session: Session | null, { recovered }: Keeper, offers: Offers): Mode {
+  const after = session === null ? startWith(offers) : EXPLORE;
   return recovered === null ? after : { name: 'recovered', recovered, scroll: 0, after };
 }
+
+const NO_OFFERS: Offers = { samples: [], files: [] };
 
 /** Before the first question is answered there is no member to show. */
 const EMPTY: Session = { title: '', units: 'us', combinations: 'ASCE 7-16', members: [] };

@@ -50,7 +50,7 @@ export function backTo(state: State, design: Member, what: string): State {
   const back = withMember(state, { ...design, name, note, count });
   if (back.session === state.session) return back;
   const notice = { text: `back to ${what}; u undoes it`, refusal: false };
-  return { ...back, ghost: { knob: 'pins', member: before }, notice };
+  return { ...back, doing: `back to ${what}`, ghost: { knob: 'pins', member: before }, notice };
 }
 
 /** Designs that say the same, whatever they are called and whatever others bring them by now. */

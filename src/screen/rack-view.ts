@@ -2,18 +2,10 @@ import { moneyText } from '../explore/buying/money.ts';
 import { powersOf } from '../explore/powers.ts';
 import { BEST_WORD } from '../explore/rack/best.ts';
 import { gradeWord, hasSize, type Rack, sizeName } from '../explore/rack/rack.ts';
-import type { RankedSize } from '../explore/rack/ranked.ts';
-import { refusedWord } from '../explore/rack/refused-word.ts';
+import { stopsWord } from '../explore/rack/stops-word.ts';
 import type { Reach } from '../explore/reach/reach.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
-import {
-  showInches,
-  showSpan,
-  showSpanDown,
-  type Units,
-  weightNumber,
-  weightUnit,
-} from '../quantity/index.ts';
+import { showSpan, showSpanDown, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import {
   isSawn,
   nominalOf,
@@ -24,7 +16,6 @@ import {
   timberNominalOf,
 } from '../timber/index.ts';
 import type { Member, Stock } from '../timber/member.ts';
-import { CHECK_WORD } from '../timber/words.ts';
 import type { Answer } from './answer.ts';
 import type { RackView, RulerView } from './view.ts';
 
@@ -89,13 +80,6 @@ export function rackView(member: Member, answer: Answer, units: Units, settled: 
 function woodOfRow(rack: Rack, size: Size): { readonly wood: string; readonly named: string } {
   const wood = gradeWord(size.stock);
   return { wood, named: isSawn(size.product) ? `${size.label} ${wood}` : sizeName(rack, size) };
-}
-
-function stopsWord({ refused, passes, governing, over, inYard }: RankedSize, units: Units): string {
-  if (over > 0) return `over by ${showInches(over, units)}`;
-  if (passes && inYard === false) return 'not in yard';
-  if (refused !== null) return refusedWord(refused);
-  return passes || governing === null ? '' : CHECK_WORD[governing];
 }
 
 /** To the inch below, which fits a column: `15'-10"`. */

@@ -1,5 +1,6 @@
 import type { NewLoad } from '../explore/beam-edits/edit-beam.ts';
 import type { YardRow } from '../explore/buying/yard.ts';
+import type { Judgement } from '../explore/judge.ts';
 import { knobsOf } from '../explore/knobs/knobs.ts';
 import { linkFault, resolved } from '../explore/links/index.ts';
 import type { ReadOnly, Recovered, RecoveredAnswer } from '../files/keeper.ts';
@@ -96,6 +97,8 @@ export type Mode =
   | HandoversMode
   | HeadroomMode
   | LinksMode
+  | MembersMode
+  | SettingsMode
   | BuyingMode
   | SheetMode
   | { readonly name: 'copy' }
@@ -250,17 +253,80 @@ export interface MovesMode {
   readonly way: 'deepen' | 'widen';
 }
 
-/** The three questions of an empty start. */
+/** What the list of members is sorted by; the order of the file stays as it is. */
+export const MEMBER_SORTS = ['file', 'name', 'ratio', 'size', 'weight'] as const;
+export type MemberSort = (typeof MEMBER_SORTS)[number];
+
+/** The members of the session; the one in hand is the state's. */
+export interface MembersMode {
+  readonly name: 'members';
+  /** Name of the member that Escape leads back to. */
+  readonly from: string;
+  readonly sort: MemberSort;
+  /** Only members that hold these words are listed; empty: all. */
+  readonly filter: string;
+  readonly asks: MembersQuestion | null;
+  /** What members came to so far; those that are not in it are still to be worked out. */
+  readonly judged: ReadonlyMap<Member, Judgement>;
+}
+
+export type MembersQuestion =
+  | { readonly of: 'filter' | 'name'; readonly edit: Edit; readonly fault: string | null }
+  /** Whether the member in hand shall go, though others carry it. */
+  | { readonly of: 'delete' };
+
+/** What is set for the whole session. */
+export interface SettingsMode {
+  readonly name: 'settings';
+  /** Index of the setting in hand. */
+  readonly line: number;
+  readonly typing: { readonly edit: Edit; readonly fault: string | null } | null;
+  /** Where Escape leads back to. */
+  readonly back: Mode;
+}
+
+/** What an empty start offers to open. */
+export interface Offers {
+  readonly samples: readonly SampleOffer[];
+  /** Session files of the folder that the program was started in. */
+  readonly files: readonly string[];
+}
+
+export interface SampleOffer {
+  readonly title: string;
+  readonly members: number;
+}
+
+/** An empty start, or the same questions of a member to be added. */
 export interface StartMode {
   readonly name: 'start';
-  readonly step: 'use' | 'span' | 'tributary';
-  /** Index into the uses offered. */
-  readonly use: number;
+  readonly step: 'choose' | 'span' | 'width' | 'file';
+  /** Index of the line in hand: what kind of member it shall be, or what shall be opened. */
+  readonly line: number;
   readonly edit: Edit;
   /** in */
   readonly span: number;
   readonly fault: string | null;
+  readonly offers: Offers;
+  /** The list that the member is added to; null: there is no session yet. */
+  readonly addTo: MembersMode | null;
 }
+
+/** A sample by its place among those offered, or a file by its name. */
+export type Opened = { readonly sample: number } | { readonly file: string };
+
+/** What came of opening it: the session with what its keeper found, or why it could not be read. */
+export type OpenAnswer =
+  | {
+      readonly ok: true;
+      readonly session: Session;
+      /** null: a sample, which is no file. */
+      readonly file: string | null;
+      readonly readOnly: ReadOnly | null;
+      readonly recovered: Recovered | null;
+      readonly notice: string | null;
+    }
+  | { readonly ok: false; readonly fault: string };
 
 /** The mode of the one screen; every other mode comes back to it with Escape. */
 export const EXPLORE: Mode = { name: 'explore' };
@@ -304,6 +370,8 @@ export type Effect =
       readonly session: Session;
       readonly file: string | null;
     }
+  /** Open a sample or another file in place of the empty start. */
+  | { readonly do: 'open'; readonly what: Opened }
   /** Write the calculation sheet of these members; `over`: also over a file that is there. */
   | {
       readonly do: 'write-sheet';

@@ -3,11 +3,13 @@ import { watching } from './carriers.ts';
 import { withYardAnswer } from './modes/buying.ts';
 import { rulesOf } from './modes/index.ts';
 import { withSheetAnswer } from './modes/sheet.ts';
+import { withOpened } from './modes/start.ts';
 import { rested } from './rest.ts';
 import {
   type Effect,
   isKept,
   memberOf,
+  type OpenAnswer,
   refused,
   type SheetAnswer,
   type State,
@@ -37,6 +39,8 @@ export type Event =
   | { readonly type: 'told'; readonly text: string; readonly refusal: boolean }
   /** A sheet was asked for. */
   | { readonly type: 'sheet'; readonly answer: SheetAnswer }
+  /** A sample or a file was asked for. */
+  | { readonly type: 'opened'; readonly answer: OpenAnswer }
   /** A yard list was asked for. */
   | { readonly type: 'yard'; readonly answer: YardAnswer }
   /** The frame is on the screen and no key waits: the rest may be worked out. */
@@ -83,6 +87,8 @@ function next(state: State, event: Event): Step {
       return still(withSheetAnswer(state, event.answer));
     case 'yard':
       return still(withYardAnswer(state, event.answer));
+    case 'opened':
+      return still(withOpened(state, event.answer));
     case 'save-failed':
       return still(refused(state, event.reason));
     case 'changed-on-disk':

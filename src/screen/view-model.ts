@@ -100,8 +100,10 @@ export function titleOf(state: State): View['title'] {
 }
 
 function keptText(state: State): string {
-  if (state.readOnly === 'asked') return 'read-only';
-  return isKept(state) ? 'kept' : 'not kept';
+  const { readOnly = null } = state;
+  if (readOnly === 'asked') return 'read-only';
+  if (!isKept(state)) return 'not kept';
+  return readOnly === null ? 'kept' : 'read-only';
 }
 
 function cureView(member: Member, answer: Answer, cure: Cure, units: Units): CureView {
@@ -172,6 +174,7 @@ const FOOT_ORDER: readonly Action[] = [
   'add',
   'diagrams',
   'wood',
+  'members',
   'next-member',
   'best',
   'reach',

@@ -82,6 +82,8 @@ function inHand(state: State, from: Mode): InHand {
         return { before: memberThen(state, at - 1), front: 'change' };
       return { member: then, before: memberThen(state, at - 1), label: 'then', front: 'change' };
     }
+    case 'members':
+      return {};
     case 'wood':
       return { member: from.draft, before: memberOf(state), label: 'as chosen', front: 'design values' };
     case 'headroom':

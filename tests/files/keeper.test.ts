@@ -8,6 +8,7 @@ import {
   renameSync,
   rmSync,
   symlinkSync,
+  utimesSync,
   writeFileSync,
 } from 'node:fs';
 import { hostname, tmpdir } from 'node:os';
@@ -266,10 +267,9 @@ describe('the recovery journal', () => {
     const first = opened();
     first.note(titled('One'));
     first.close();
-    const FAR = new Date('2099-01-01');
+    const LATER = new Date('2099-01-01');
     writeFileSync(file, writeSession(titled('Theirs')));
-    vi.setSystemTime(FAR);
-    // The disk's clock counts, not this one.
+    utimesSync(file, LATER, LATER);
     expect(opened().recovered?.isOlder).toBe(true);
   });
 
@@ -347,6 +347,13 @@ describe('a file that is open elsewhere', () => {
     keeper.close();
     expect(titleIn(`${file}.journal`)).toBe('Theirs');
     expect(existsSync(`${file}.lock`)).toBe(true);
+  });
+
+  it('on another machine says what to do where that has left it behind', () => {
+    writeFileSync(`${file}.lock`, JSON.stringify({ pid: 12, host: 'far', began: null }));
+    expect(opened().notice).toBe(
+      'open elsewhere (process 12 on far; if it is not, remove job.json.lock): read-only, A keeps a copy',
+    );
   });
 
   it('is noticed through a link too', () => {

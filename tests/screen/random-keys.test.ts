@@ -6,11 +6,11 @@ import { memberOf, type State } from '../../src/screen/state.ts';
 import { viewOf } from '../../src/screen/view-model.ts';
 import { readSession, writeSession } from '../../src/session/index.ts';
 import { reportMember } from '../../src/timber/index.ts';
+import { ABSURD } from '../support/absurd.ts';
 import { anyKeys } from '../support/keys.ts';
 import { SAMPLES } from '../support/samples.ts';
 import { afterEvents, pressing } from '../support/state.ts';
 import { twinOf } from '../support/twin.ts';
-import { ABSURD } from '../support/absurd.ts';
 
 const SIZES = [
   [60, 18],

@@ -82,6 +82,7 @@ describe('the trail', () => {
   });
 
   it.each([
+    ['p right c right enter', 'back to pin 1'],
     ['x', 'size'],
     ['n right', 'plies'],
     ['g right', 'grade'],
@@ -91,6 +92,12 @@ describe('the trail', () => {
   ])('of the keys %s tells %s', (keys, what) => {
     const state = at(stateOf([{ spans: [`16'-6"`] }]), NOON, ...keys.split(' '));
     expect(told(state).at(-1)).toContain(what);
+  });
+
+  it('tells a move by its kind', () => {
+    const state = at(stateOf([{ spans: ['16 ft'] }]), NOON, 'm', 'enter');
+    expect(told(state)).toHaveLength(1);
+    expect(state.notice?.text.startsWith(`${told(state)[0]}: `)).toBe(true);
   });
 
   it('tells undo and redo too, and an undo leaves what it took back told', () => {

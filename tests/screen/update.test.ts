@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { knobsOf } from '../../src/explore/knobs/knobs.ts';
 import { lightestOf } from '../../src/explore/rack/rack.ts';
-import { START } from '../../src/screen/modes/start.ts';
+import { startWith } from '../../src/screen/modes/start.ts';
 import { isKept, memberOf } from '../../src/screen/state.ts';
 import { afterEvents, pressing, stateOf } from '../support/state.ts';
 
@@ -206,7 +206,7 @@ describe('the lit size', () => {
 describe('an empty start', () => {
   it('shows a sized beam pressing three keys besides digits', () => {
     const { state } = pressing(
-      stateOf([{}], { mode: START, file: null, kept: null }),
+      stateOf([{}], { mode: startWith({ samples: [], files: [] }), file: null, kept: null }),
       'enter',
       ...'14',
       'enter',
@@ -224,7 +224,7 @@ describe('an empty start', () => {
   });
 
   it('says what is wrong with an answer and asks again', () => {
-    const { state } = pressing(stateOf([{}], { mode: START }), 'enter', 'x', 'enter');
+    const { state } = pressing(stateOf([{}], { mode: startWith({ samples: [], files: [] }) }), 'enter', 'x', 'enter');
     expect(state.mode).toMatchObject({ name: 'start', step: 'span', fault: expect.stringContaining('x') });
   });
 });

@@ -1,9 +1,7 @@
-import { drawExplorer } from '../layout.ts';
-import { drawPrompt } from '../panels/prompt.ts';
 import { EXPLORE, type State, type Step, still } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { viewOf } from '../view-model.ts';
 import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { asking } from './question.ts';
 import { openSaveAs } from './save-as.ts';
 
 type Changed = ModeOf<'changed-on-disk'>;
@@ -11,15 +9,10 @@ type Changed = ModeOf<'changed-on-disk'>;
 /** The question before a file is written that somebody else has written meanwhile; both are kept. */
 export const changedOnDisk: ModeRules<Changed> = {
   press,
-  draw(state, _mode, canvas, glyphs) {
-    drawExplorer(viewOf(state), canvas, glyphs);
-    drawPrompt(
-      canvas,
-      'The file was changed by somebody else.',
-      'A keep as another  o over it (theirs to .bak)  Esc back',
-    );
-    return null;
-  },
+  draw: asking(
+    'The file was changed by somebody else.',
+    'A keep as another  o over it (theirs to .bak)  Esc back',
+  ),
 };
 
 function press(state: State, { thenLeave }: Changed, press: KeyPress): Step {

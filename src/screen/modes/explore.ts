@@ -34,6 +34,7 @@ import { opened } from './entry.ts';
 import { openHandovers } from './handovers.ts';
 import { openHeadroom } from './headroom.ts';
 import { openLinks } from './links.ts';
+import { openMembers } from './members.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { openMoves } from './moves.ts';
 import { openReach } from './reach.ts';
@@ -123,6 +124,8 @@ function act(state: State, action: Action): Step {
       return still(openHeadroom(state));
     case 'links':
       return still(openLinks(state));
+    case 'members':
+      return still(openMembers(state));
     case 'pin':
       return still(pinned(state));
     case 'compare':

@@ -1,9 +1,10 @@
-import type { Step as NudgeSize, Turn } from '../../explore/knobs/knob.ts';
+import type { Turn } from '../../explore/knobs/knob.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
 import { headroomInHand, headroomView, inStorey } from '../headroom-view.ts';
-import { type Action, actionOf, startsEntry } from '../keys.ts';
+import { actionOf, startsEntry } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
+import { nudgeOf } from '../nudges.ts';
 import { drawHeadroom } from '../panels/headroom.ts';
 import { EXPLORE, type HeadroomMode, memberOf, type State, still, unitsOf, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
@@ -36,15 +37,6 @@ export function openHeadroom(state: State): State {
   return { ...state, mode, notice: null };
 }
 
-const NUDGES: Readonly<Partial<Record<Action, readonly [1 | -1, NudgeSize]>>> = {
-  'nudge-less': [-1, 'normal'],
-  'nudge-more': [1, 'normal'],
-  'fine-less': [-1, 'fine'],
-  'fine-more': [1, 'fine'],
-  'coarse-less': [-1, 'coarse'],
-  'coarse-more': [1, 'coarse'],
-};
-
 function press(state: State, mode: HeadroomMode, press: KeyPress): State {
   const closes = isCancel(press) || (press.name === 'char' && !press.ctrl && /^[hq]$/.test(press.char ?? ''));
   if (closes) return { ...state, mode: EXPLORE };
@@ -60,8 +52,8 @@ function press(state: State, mode: HeadroomMode, press: KeyPress): State {
   if (action === 'knob-down') return move(1);
   if (action === 'type') return { ...state, mode: { ...mode, edit: editOf(''), fault: null } };
   if (action === 'remove') return without(state, mode);
-  const nudge = action === null ? undefined : NUDGES[action];
-  if (nudge === undefined) return state;
+  const nudge = nudgeOf(action);
+  if (nudge === null) return state;
   return turned(state, mode, knobs[index]!.nudge(inStorey(state), ...nudge, unitsOf(state)));
 }
 

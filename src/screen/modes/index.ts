@@ -12,12 +12,14 @@ import { headroom } from './headroom.ts';
 import { help } from './help.ts';
 import { leaving } from './leaving.ts';
 import { links } from './links.ts';
+import { members } from './members.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
 import { moves } from './moves.ts';
 import { proportions } from './proportions.ts';
 import { reach } from './reach.ts';
 import { recovered } from './recovered.ts';
 import { saveAs } from './save-as.ts';
+import { settings } from './settings.ts';
 import { sheet } from './sheet.ts';
 import { start } from './start.ts';
 import { trail } from './trail.ts';
@@ -44,6 +46,8 @@ const RULES: { readonly [N in Mode['name']]: ModeRules<ModeOf<N>> } = {
   copy,
   leaving,
   links,
+  members,
+  settings,
   'changed-on-disk': changedOnDisk,
   recovered,
   sheet,

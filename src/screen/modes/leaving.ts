@@ -1,19 +1,13 @@
-import { drawExplorer } from '../layout.ts';
-import { drawPrompt } from '../panels/prompt.ts';
 import { EXPLORE, type State, type Step, still } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { viewOf } from '../view-model.ts';
 import type { ModeOf, ModeRules } from './mode.ts';
+import { asking } from './question.ts';
 import { openSaveAs, save } from './save-as.ts';
 
 /** The question before changes are lost. */
 export const leaving: ModeRules<ModeOf<'leaving'>> = {
   press,
-  draw(state, _mode, canvas, glyphs) {
-    drawExplorer(viewOf(state), canvas, glyphs);
-    drawPrompt(canvas, 'Not everything is kept.', 's keep and leave  A elsewhere  d leave anyway  Esc stay');
-    return null;
-  },
+  draw: asking('Not everything is kept.', 's keep and leave  A elsewhere  d leave anyway  Esc stay'),
 };
 
 function press(state: State, _mode: ModeOf<'leaving'>, press: KeyPress): Step {

@@ -1,16 +1,17 @@
 import { removeAt } from '../../explore/beam-edits/edit-beam.ts';
 import { basisOf } from '../../explore/diagrams/diagram-model.ts';
 import { sketchOf } from '../../explore/diagrams/sketch-model.ts';
-import type { Step as NudgeSize, Turn } from '../../explore/knobs/knob.ts';
+import type { Turn } from '../../explore/knobs/knob.ts';
 import { couldCarry, withLink, withNextEnd, withOtherRepeat } from '../../explore/links/index.ts';
 import { reactionRange } from '../../loads/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
 import { redo, undo } from '../history.ts';
-import { type Action, actionOf, startsEntry } from '../keys.ts';
+import { actionOf, startsEntry } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
 import { type LinkLine, linesOf, linksView, memberNamed } from '../links-view.ts';
+import { nudgeOf } from '../nudges.ts';
 import { drawLinks } from '../panels/links.ts';
 import {
   EXPLORE,
@@ -64,15 +65,6 @@ function inHand(state: State, mode: LinksMode): LinkLine | null {
   return view.lines[view.inHand] ?? null;
 }
 
-const NUDGES: Readonly<Partial<Record<Action, readonly [1 | -1, NudgeSize]>>> = {
-  'nudge-less': [-1, 'normal'],
-  'nudge-more': [1, 'normal'],
-  'fine-less': [-1, 'fine'],
-  'fine-more': [1, 'fine'],
-  'coarse-less': [-1, 'coarse'],
-  'coarse-more': [1, 'coarse'],
-};
-
 function press(state: State, mode: LinksMode, press: KeyPress): State {
   const letter = press.name === 'char' && !press.ctrl ? press.char : null;
   if (isCancel(press) || letter === 'K' || letter === 'q') {
@@ -106,8 +98,8 @@ function press(state: State, mode: LinksMode, press: KeyPress): State {
     case 'remove':
       return line?.is === 'link' ? without(state, mode, line) : refused(state, OTHERS);
     default: {
-      const nudge = action === null ? undefined : NUDGES[action];
-      if (nudge === undefined || line === null) return state;
+      const nudge = nudgeOf(action);
+      if (nudge === null || line === null) return state;
       if (line.is !== 'link') return refused(state, OTHERS);
       return turned(state, line.knob.nudge(memberOf(state), ...nudge, unitsOf(state)));
     }

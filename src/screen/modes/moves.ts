@@ -79,6 +79,7 @@ function applied(state: State, mode: MovesMode): State {
   const before = memberOf(state);
   return {
     ...withMember(back, move.member),
+    doing: move.kind,
     ghost: { knob: 'moves', member: before },
     notice: { text: `${move.kind}: ${move.label}; u undoes it`, refusal: false },
   };

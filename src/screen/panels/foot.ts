@@ -1,6 +1,7 @@
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, clip } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
+import type { Notice } from '../state.ts';
 import type { FootView, View } from '../view.ts';
 import type { Region } from './region.ts';
 
@@ -9,7 +10,7 @@ const ALL_KEYS = '?';
 const GAP = 2;
 
 /** The keys that matter now, or the message of the moment in their place. */
-export function drawFoot(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): void {
+export function drawFoot(view: Pick<View, 'notice' | 'foot'>, canvas: Canvas, region: Region, glyphs: Glyphs): void {
   if (view.notice === null) {
     drawKeys(view.foot, canvas, region.x + 1, region.x + region.columns - 1, region.y, glyphs);
     return;
@@ -21,6 +22,19 @@ export function drawFoot(view: View, canvas: Canvas, region: Region, glyphs: Gly
   canvas.put(region.x + 1, region.y, text, view.notice.style);
   if (always !== undefined)
     drawKeys([always], canvas, region.x + 1 + text.length + GAP, end, region.y, glyphs);
+}
+
+/** The foot of a view of its own, on the last row. */
+export function drawLastRow(
+  notice: Notice | null,
+  foot: readonly FootView[],
+  canvas: Canvas,
+  glyphs: Glyphs,
+): void {
+  const told =
+    notice === null ? null : ({ text: notice.text, style: notice.refusal ? 'governs' : 'strong' } as const);
+  const region = { x: 0, y: canvas.rows - 1, columns: canvas.columns, rows: 1 };
+  drawFoot({ notice: told, foot }, canvas, region, glyphs);
 }
 
 /** Keys and what they do from `x` up to but not at `end`: whole items, dropped from the end, `?` always kept. */

@@ -1,11 +1,11 @@
 import type { SketchView } from '../../explore/diagrams/sketch-model.ts';
 import type { Canvas } from '../draw/canvas.ts';
-import { cells, clip, keepToGlyphs, shorten } from '../draw/cells.ts';
+import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { LinksView } from '../links-view.ts';
 import type { View } from '../view.ts';
 import { drawFoot } from './foot.ts';
-import type { Place } from './prompt.ts';
+import { drawQuestion, type Place } from './prompt.ts';
 import { rule } from './region.ts';
 import { drawSketch, WITH_REACTIONS } from './sketch.ts';
 import { drawHeads, drawTableRow, placeColumns, windowStart } from './table.ts';
@@ -66,17 +66,4 @@ export function drawLinks(
     drawFoot({ ...screen, foot: view.foot }, canvas, { x: 0, y: rows - 1, columns, rows: 1 }, glyphs);
   keepToGlyphs(canvas, glyphs);
   return place;
-}
-
-function drawQuestion(
-  { asks, told, isFault }: NonNullable<LinksView['question']>,
-  canvas: Canvas,
-  glyphs: Glyphs,
-): Place {
-  const { columns, rows } = canvas;
-  canvas.put(1, rows - BELOW, clip(cells(told), columns - 2, glyphs), isFault ? 'governs' : 'quiet');
-  const question = shorten(cells(asks), Math.floor(columns / 2), glyphs);
-  canvas.put(1, rows - 1, question, 'governsStrong');
-  const column = question.length + 3;
-  return { row: rows - 1, column, width: Math.max(1, columns - column - 1) };
 }

@@ -1,39 +1,65 @@
-import { showSpan } from '../../quantity/index.ts';
 import type { Canvas } from '../draw/canvas.ts';
+import { cells, clip, keepToGlyphs, shorten, wrap } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import { loadsText, STARTS } from '../starts.ts';
-import type { StartMode } from '../state.ts';
-import type { Place } from './prompt.ts';
+import type { StartRow, StartView } from '../starts.ts';
+import { drawKeys } from './foot.ts';
+import { drawPrompt, type Place } from './prompt.ts';
+import { windowStart } from './table.ts';
 
 const LEFT = 3;
-const FIELD = 20;
+/** Cells of the key, and of the names before what is said of them. */
+const KEY = 3;
+const NAME = 28;
+/** Title and a blank row; a blank row, two of what is asked or told, and the foot. */
+const ABOVE = 2;
+const BELOW = 4;
+/** Rows of what is wrong. */
+const FAULT_ROWS = 2;
 
-/** The three questions of an empty start: use, span, tributary width. */
-export function drawStart(mode: StartMode, canvas: Canvas, glyphs: Glyphs): Place | null {
+/** What a start offers, and the question of the moment; gives the place of the field being typed into. */
+export function drawStart(view: StartView, canvas: Canvas, glyphs: Glyphs): Place | null {
+  const { columns, rows } = canvas;
   canvas.put(1, 0, 'thrice', 'strong');
-  canvas.put(9, 0, 'a beam to begin with');
-  canvas.put(LEFT, 2, 'What is it part of?', mode.step === 'use' ? 'strong' : 'quiet');
-  STARTS.forEach(({ use, label }, index) => {
-    const chosen = index === mode.use;
-    const style = chosen ? 'now' : mode.step === 'use' ? 'plain' : 'quiet';
-    canvas.put(LEFT, 3 + index, `${chosen ? glyphs.hand : ' '} ${index + 1}  ${label}`, style);
-    canvas.put(LEFT + 36, 3 + index, loadsText(use), 'quiet');
+  canvas.put(9, 0, view.title);
+  const shown = Math.max(1, rows - ABOVE - BELOW);
+  const from = windowStart(view.rows.length, shown, view.inHand);
+  view.rows.slice(from, from + shown).forEach((row, at) => {
+    const index = from + at;
+    drawRow(row, index === view.inHand, view.question !== null, canvas, ABOVE + at, glyphs);
+    if (index !== view.inHand && at === 0 && from > 0) canvas.put(1, ABOVE, glyphs.further[0], 'quiet');
+    if (at === shown - 1 && index < view.rows.length - 1) canvas.put(1, ABOVE + at, glyphs.further[1], 'quiet');
   });
-  const row = 4 + STARTS.length;
+  const fault = view.fault === null ? [] : wrap(cells(view.fault), columns - 2, FAULT_ROWS, glyphs);
+  const faultFrom = rows - 1 - (view.question === null ? 0 : 1) - fault.length;
   let place: Place | null = null;
-  const question = (y: number, text: string, step: StartMode['step'], answer: string | null) => {
-    canvas.put(LEFT, y, text, mode.step === step ? 'strong' : 'quiet');
-    if (mode.step === step) place = { row: y, column: LEFT + 36, width: FIELD };
-    else if (answer !== null) canvas.put(LEFT + 36, y, answer);
-  };
-  question(row, 'How far does it span?', 'span', mode.span > 0 ? showSpan(mode.span, 'us') : null);
-  question(row + 1, 'What width does it carry?', 'tributary', null);
-  if (mode.fault !== null) canvas.put(LEFT, row + 3, mode.fault, 'governs');
-  const hint =
-    mode.step === 'use'
-      ? 'arrows or 1 to 4 choose, Enter goes on, Esc leaves'
-      : `in feet, or any unit: 14-6, 14'6", 14.5, 4.4m; Enter goes on, Esc goes back`;
-  canvas.put(LEFT, row + 4, hint, 'quiet');
-  canvas.put(LEFT, canvas.rows - 1, 'or open a session: thrice FILE', 'quiet');
+  if (view.question === null) drawKeys(view.foot, canvas, 1, columns - 1, rows - 1, glyphs);
+  else place = drawPrompt(canvas, view.question.asks, clip(cells(view.question.hint), columns - 2, glyphs));
+  fault.forEach((text, at) => {
+    canvas.put(1, faultFrom + at, text, 'governs');
+  });
+  keepToGlyphs(canvas, glyphs);
   return place;
+}
+
+function drawRow(
+  row: StartRow,
+  inHand: boolean,
+  answered: boolean,
+  canvas: Canvas,
+  y: number,
+  glyphs: Glyphs,
+): void {
+  if ('heading' in row) {
+    canvas.put(1, y, row.heading, 'quiet');
+    return;
+  }
+  const style = inHand ? 'nowStrong' : answered ? 'quiet' : 'plain';
+  if (inHand) canvas.put(1, y, glyphs.hand, 'nowStrong');
+  canvas.put(LEFT, y, row.key, 'quiet');
+  const x = LEFT + KEY;
+  const room = canvas.columns - x - 1;
+  const name = shorten(cells(row.text), row.about === '' ? room : Math.min(room, NAME), glyphs);
+  canvas.put(x, y, name, style);
+  const about = x + Math.max(NAME, name.length) + 2;
+  if (row.about !== '') canvas.put(about, y, clip(cells(row.about), canvas.columns - about - 1, glyphs), 'quiet');
 }

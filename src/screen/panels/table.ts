@@ -7,7 +7,7 @@ import { heading, type Region } from './region.ts';
 export interface TableColumn {
   readonly head: string;
   readonly align: 'left' | 'right';
-  /** Where there is no room those with the greatest number go first; absent: it always stands. */
+  /** Where there is no room those with the greatest number go first, texts with a `least` once they are as short as that; absent: it always stands. */
   readonly spare?: number;
   /** Of text: to no fewer cells is it shortened as long as another column may go; absent: to 16. */
   readonly least?: number;
@@ -47,7 +47,10 @@ export function placeColumns(
   );
   let shown = columns.map((_, at) => at);
   const total = () => shown.reduce((sum, at) => sum + needed[at]! + GAP, -GAP);
-  const isText = (at: number) => columns[at]!.align === 'left' && columns[at]!.spare === undefined;
+  const isText = (at: number) => {
+    const { align, spare, least } = columns[at]!;
+    return align === 'left' && (spare === undefined || least !== undefined);
+  };
   const shortest = () =>
     shown.reduce(
       (sum, at) =>
