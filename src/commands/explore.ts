@@ -1,6 +1,6 @@
 import { existsSync } from 'node:fs';
 import { setTimeout } from 'node:timers/promises';
-import { openKeeper } from '../files/keeper.ts';
+import { type Keeper, openKeeper } from '../files/keeper.ts';
 import { readSettings, withSettings } from '../files/settings.ts';
 import { stateFolder } from '../files/state-folder.ts';
 import { whyNot } from '../files/why.ts';
@@ -11,6 +11,7 @@ import { clipboardSequence } from '../screen/terminal/clipboard.ts';
 import { openScreen } from '../screen/terminal/open.tsx';
 import type { Session } from '../session/session.ts';
 import { readText, sessionOf } from './load.ts';
+import { openingOf } from './opening.ts';
 import { writeSheetFile } from './sheet.ts';
 import { BadInput, STATUS } from './status.ts';
 import type { Streams } from './streams.ts';
@@ -41,13 +42,16 @@ export async function explore(
     if (sequence !== null) process.stdout.write(sequence);
   };
   const readYard = (name: string, job: Session, at: string | null) => openYard(name, job, at, readText);
-  const keeper = openKeeper({
-    file,
-    text,
-    readOnly,
-    stateFolder: stateFolder(process.env),
-    read: (journal) => readJournal(journal, file),
-  });
+  const keeperOf = (file: string | null, text: string): Keeper =>
+    openKeeper({
+      file,
+      text,
+      readOnly,
+      stateFolder: stateFolder(process.env),
+      read: (journal) => readJournal(journal, file),
+    });
+  const keeper = keeperOf(file, text);
+  const opening = file === null ? await openingOf(keeperOf) : null;
   const end = await openScreen(
     openExplorer({
       file,
@@ -57,6 +61,7 @@ export async function explore(
       told: fault,
       copy,
       keeper,
+      opening,
       readYard,
       writeSheet,
     }),

@@ -14,7 +14,6 @@ import { MOST_THREADS, usualThreads } from './schedule/threads.ts';
 import { sessionOf } from './schedule/to-session.ts';
 import { BadInput, OutputFailed, STATUS } from './status.ts';
 import type { Streams } from './streams.ts';
-import { table } from './table.ts';
 
 export interface ScheduleOptions {
   /** File to write; absent or "-": stdout. */
@@ -57,7 +56,9 @@ export async function schedule(
     const { session, units: own } = load(file, options);
     tally = await into(output, streams, (sink) => scheduleFrom(session, sink, format, units ?? own));
   } else {
-    const progress = process.stderr.isTTY ? progressLine(streams.error) : NO_PROGRESS;
+    // On the terminal that the rows are printed to it would stand between them.
+    const isSeen = process.stderr.isTTY && (output !== undefined || !process.stdout.isTTY);
+    const progress = isSeen ? progressLine(streams.error) : NO_PROGRESS;
     const source = openSource(file, process.stdin);
     try {
       tally = await into(output, streams, (sink) =>
@@ -181,23 +182,21 @@ function columnTexts(): string[] {
       'Columns of a schedule, in any order; only span and the wood (species, grade) are needed. A unit may stand in each cell or in brackets at the head: span (ft). Several in one cell have a semicolon between them. An empty cell says nothing. What is not said is assumed, and listed beside each row.',
     ),
     '',
-    ...table(
-      [
-        { head: 'column', align: 'left' },
-        { head: 'such as', align: 'left' },
-        { head: 'says', align: 'left' },
-      ],
-      SCHEDULE_COLUMNS.map(({ head, example, says }) => [head, example, says]),
-    ),
+    ...SCHEDULE_COLUMNS.flatMap(({ head, says, example }) => entry(head, `${says}; such as ${example}`)),
     '',
     'What is added to each row:',
     '',
-    ...table(
-      [
-        { head: 'column', align: 'left' },
-        { head: 'says', align: 'left' },
-      ],
-      RESULT_COLUMNS.map(({ head, says }) => [head('us'), says]),
-    ),
+    ...RESULT_COLUMNS.flatMap(({ head, says }) => entry(head('us'), says)),
   ];
+}
+
+/** Room for the longest head and two blanks. */
+const HEAD_WIDTH = 25;
+
+/** A name, and beside it what it says, in lines of 80 columns. */
+function entry(name: string, text: string): string[] {
+  const indent = ' '.repeat(HEAD_WIDTH);
+  return wrapped(text, indent).map((line, at) =>
+    at === 0 ? name.padEnd(HEAD_WIDTH) + line.slice(HEAD_WIDTH) : line,
+  );
 }

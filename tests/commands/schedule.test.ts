@@ -1,3 +1,5 @@
+import { spawn } from 'node:child_process';
+import { once } from 'node:events';
 import { chmodSync, existsSync, mkdtempSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -223,7 +225,7 @@ describe('thrice schedule', () => {
     ['has a unit of something else', 'span (psf)\n', 'column "span (psf)"'],
     ['is UTF-16', new Uint8Array([0xff, 0xfe, 0x73, 0, 0x70, 0]), 'is not UTF-8 text'],
     ['is a picture', new Uint8Array([0x89, 0x50, 0x4e, 0x47, 0x0d, 0x0a, 0xff]), /not UTF-8|no column/],
-    ['has a head without end', `span,${'x'.repeat(100_000)}`, 'the head is longer than 64 KiB'],
+    ['has a head without end', `span,${'x'.repeat(100_000)}`, 'the row is longer than 64 KiB'],
   ])('refuses a schedule that %s, on one line', async (_, text, saying) => {
     const { status, out, error } = await command('schedule', scheduleFile(text));
     expect({ status, out }).toEqual({ status: 2, out: '' });
@@ -266,6 +268,18 @@ describe('thrice schedule', () => {
     expect(bundled('schedule', file, '-o', output).status).toBe(2);
     expect(readFileSync(output, 'utf8')).toBe('mine');
     expect(readdirSync(join(output, '..'))).toEqual(['out.csv']);
+  });
+
+  test('leaves nothing behind when it is ended from outside', async () => {
+    const output = join(folder(), 'out.csv');
+    const program = spawn(process.execPath, [BUNDLE, 'schedule', '-', '-o', output], { stdio: 'pipe' });
+    program.stdin.write(beams(10));
+    const list = () => readdirSync(join(output, '..'));
+    await expect.poll(list, { timeout: 20_000 }).toEqual([expect.stringMatching(/^out\.csv\.\d+\.part$/)]);
+    const ended = once(program, 'exit');
+    program.kill('SIGTERM');
+    expect(await ended).toEqual([143, null]);
+    expect(list()).toEqual([]);
   });
 
   test('says with status 3 that an output cannot be written', () => {
@@ -347,7 +361,8 @@ describe('thrice schedule', () => {
   test('lists its columns', async () => {
     const { status, out } = await command('schedule', '--columns');
     expect(status).toBe(0);
-    for (const name of ['span', 'tributary', 'ratio bending', 'fault']) expect(out).toContain(`\n${name}`);
+    for (const name of ['span', 'tributary', 'ratio bending', 'fault']) expect(out).toContain(`\n${name} `);
+    expect(Math.max(...out.split('\n').map((line) => line.length))).toBeLessThanOrEqual(80);
   });
 });
 

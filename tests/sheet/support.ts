@@ -53,7 +53,8 @@ export interface Page {
 
 /** What a reader of its own finds in a PDF. */
 export async function readPdf(bytes: Uint8Array) {
-  const document = await getDocument({ data: bytes.slice(), useSystemFonts: false, verbosity: 0 }).promise;
+  const document = await getDocument({ data: Uint8Array.from(bytes), useSystemFonts: false, verbosity: 0 })
+    .promise;
   const pages: Page[] = [];
   for (let number = 1; number <= document.numPages; number += 1) {
     const page = await document.getPage(number);

@@ -1,11 +1,11 @@
 import { harmless } from '../../quantity/index.ts';
-import { type CsvRecord, LONGEST_RECORD } from '../../session/schedule/index.ts';
+import type { CsvRecord } from '../../session/schedule/index.ts';
 import { BadInput } from '../status.ts';
 import { inGroups, inOrder, lookAhead } from './in-order.ts';
 import type { Progress } from './progress.ts';
 import type { Source } from './read-records.ts';
 import type { Sink } from './sink.ts';
-import { headLine, type Job, readHead, type SizedBatch } from './size-rows.ts';
+import { BROKEN_WORD, headLine, type Job, readHead, type SizedBatch } from './size-rows.ts';
 import { ALONE, onThreads } from './threads.ts';
 
 /** How many rows there were of each sort. */
@@ -63,7 +63,7 @@ export async function begin(
   const at = (fault: string) => new BadInput(`${harmless(source.name)}: ${fault}`);
   if (head === undefined)
     throw at('is empty; its first line names its columns: thrice schedule --columns lists them');
-  if ('tooLong' in head) throw at(`line ${head.line}: the head is longer than ${LONGEST_RECORD / 1024} KiB`);
+  if ('broken' in head) throw at(`line ${head.line}: ${BROKEN_WORD[head.broken]}`);
   if (head.cells.some((cell) => /[\0\uFFFD]/.test(cell)))
     throw at('is not UTF-8 text; save the schedule as CSV in UTF-8');
   const read = readHead(head.cells);

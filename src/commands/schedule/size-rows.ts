@@ -1,6 +1,7 @@
 import { type Sized, sized } from '../../explore/rack/sized.ts';
 import { harmless, type Units } from '../../quantity/index.ts';
 import {
+  type Broken,
   type CsvRecord,
   csvLine,
   guarded,
@@ -106,7 +107,8 @@ function sizeRecord(
   units: Units,
 ): { readonly name: string; readonly outcome: Outcome } {
   const otherwise = `line ${record.line}`;
-  if ('tooLong' in record) return { name: otherwise, outcome: { is: 'bad', fault: tooLongText(record) } };
+  if ('broken' in record)
+    return { name: otherwise, outcome: { is: 'bad', fault: BROKEN_WORD[record.broken] } };
   const read = readScheduleRow(head, record.cells, otherwise);
   if (!read.ok) {
     const at = head.columns.find(({ column }) => column.head === 'name')?.at;
@@ -114,7 +116,13 @@ function sizeRecord(
     return { name, outcome: { is: 'bad', fault: read.fault } };
   }
   const { member } = read.member;
-  return { name: member.name, outcome: outcomeOf(member, read.sized, units) };
+  try {
+    return { name: member.name, outcome: outcomeOf(member, read.sized, units) };
+  } catch (error) {
+    // A fault of this program's own with one beam in a hundred thousand is no reason to lose the others.
+    const fault = `could not be sized by a fault of the program: ${harmless(String(error))}`;
+    return { name: member.name, outcome: { is: 'bad', fault } };
+  }
 }
 
 /** Sizes a member; `own` where it has a size already, which is judged beside. */
@@ -124,14 +132,10 @@ export function outcomeOf(member: Member, own: boolean, units: Units): Outcome {
   return { is: 'sized', sized: found, own: own ? ownSize(known) : null };
 }
 
-export function tooLongText({
-  line,
-  lastLine,
-}: {
-  readonly line: number;
-  readonly lastLine: number;
-}): string {
-  const kilobytes = LONGEST_RECORD / 1024;
-  const lines = lastLine === line ? '' : ` (up to line ${lastLine})`;
-  return `the row is longer than ${kilobytes} KiB${lines}; is a quote opened and not closed?`;
-}
+const KIBIBYTES = LONGEST_RECORD / 1024;
+
+/** What is wrong with a record that is no row. */
+export const BROKEN_WORD: Readonly<Record<Broken, string>> = {
+  'too long': `the row is longer than ${KIBIBYTES} KiB; it is not read`,
+  'open quote': `a quote is opened and not closed within ${KIBIBYTES} KiB; close it or take it out`,
+};

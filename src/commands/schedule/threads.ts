@@ -20,6 +20,9 @@ export const ALONE: Sizer = {
 /** So that no thread waits while results are written. */
 const AHEAD = 3;
 
+/** A row leaves little behind: more room for young values would only be filled before it is cleared. */
+const YOUNG_MB = 24;
+
 /** On so many threads, each of which loads the worker that stands beside the program. */
 export async function onThreads(threads: number): Promise<Sizer> {
   const { Tinypool } = await import('tinypool');
@@ -27,6 +30,7 @@ export async function onThreads(threads: number): Promise<Sizer> {
     filename: new URL('schedule-worker.js', import.meta.url).href,
     minThreads: threads,
     maxThreads: threads,
+    resourceLimits: { maxYoungGenerationSizeMb: YOUNG_MB },
   });
   return {
     size: (batch) => pool.run(batch) as Promise<SizedBatch>,

@@ -6,7 +6,7 @@ import { BadInput } from '../status.ts';
 import type { Source } from './read-records.ts';
 import type { Tally } from './run.ts';
 import { begin } from './run.ts';
-import { outcomeOf, readHead, tooLongText } from './size-rows.ts';
+import { BROKEN_WORD, outcomeOf, readHead } from './size-rows.ts';
 
 /**
  * The rows of a schedule as the members of a session: each with the size it has, or with the lightest that passes, or
@@ -28,8 +28,8 @@ export async function sessionOf(
   };
   for await (const group of groups) {
     for (const record of group) {
-      if ('tooLong' in record) {
-        bad(record.line, tooLongText(record));
+      if ('broken' in record) {
+        bad(record.line, BROKEN_WORD[record.broken]);
         continue;
       }
       const row = readScheduleRow(read.head, record.cells, `line ${record.line}`, 'unresolved');

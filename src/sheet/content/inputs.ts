@@ -3,6 +3,7 @@ import type { Units } from '../../quantity/index.ts';
 import { borneText, linkText } from '../../timber/link-words.ts';
 import type { Member } from '../../timber/member.ts';
 import type { Block, Fact, Facts } from '../sheet.ts';
+import { left, right } from './columns.ts';
 
 /** Keys that stand elsewhere on the sheet. */
 const ELSEWHERE = ['name', 'note', 'loads', 'links', 'pins', 'trail', 'rack'];
@@ -103,12 +104,7 @@ function loadTable(loads: readonly LoadRecord[]): Block[] {
     {
       kind: 'table',
       caption: 'Typed loads, numbered as in the sketch',
-      columns: [
-        { head: 'no.', align: 'right' },
-        { head: 'kind', align: 'left' },
-        { head: 'load', align: 'left' },
-        { head: 'from the left end', align: 'left' },
-      ],
+      columns: [right('no.'), left('kind'), left('load'), left('from the left end')],
       rows: loads.map((load, at) => ({
         cells: [String(at + 1), KIND_WORD[load.kind], sizeOf(load), placeOf(load)],
       })),
@@ -135,10 +131,7 @@ function linkTable(links: readonly Link[], units: Units): Block[] {
     {
       kind: 'table',
       caption: 'Carried: reactions of other members of this job',
-      columns: [
-        { head: 'reaction of', align: 'left' },
-        { head: 'brings, largest by kind', align: 'left' },
-      ],
+      columns: [left('reaction of'), left('brings, largest by kind')],
       rows: links.map((link) => ({ cells: [linkText(link, units), borneText(link, units)] })),
     },
   ];

@@ -6,6 +6,7 @@ import { CHECK_IDS } from '../../timber/report.ts';
 import { CHECK_WORD } from '../../timber/words.ts';
 import { WORKINGS_WORD } from '../../timber/workings/index.ts';
 import type { Block, Fact, Row, Section } from '../sheet.ts';
+import { left, right } from './columns.ts';
 import type { Job } from './make-sheet.ts';
 import { ratioOf, unloaded } from './member-facts.ts';
 
@@ -78,14 +79,14 @@ function memberTable({ units }: Job, checked: readonly Checked[], ids: readonly 
     kind: 'table',
     caption: 'Members',
     columns: [
-      { head: 'member', align: 'left' },
-      { head: 'pieces', align: 'right' },
-      { head: 'size', align: 'left' },
-      { head: 'wood', align: 'left' },
-      { head: 'lengths', align: 'left' },
-      { head: 'ratio', align: 'right' },
-      { head: 'governs', align: 'left' },
-      { head: 'verdict', align: 'left' },
+      left('member'),
+      right('pieces'),
+      left('size'),
+      left('wood'),
+      left('lengths'),
+      right('ratio'),
+      left('governs'),
+      left('verdict'),
     ],
     rows: checked.map(
       (each, at): Row => ({

@@ -3,17 +3,10 @@ import { checkedMember } from '../../explore/checked.ts';
 import { powersOf } from '../../explore/powers.ts';
 import { BEST_WORD } from '../../explore/rack/best.ts';
 import { gradeWord, hasSize } from '../../explore/rack/rack.ts';
-import { type RankedSize, rankedRack } from '../../explore/rack/ranked.ts';
-import { refusedWord } from '../../explore/rack/refused-word.ts';
+import { rankedRack } from '../../explore/rack/ranked.ts';
+import { stopsWord } from '../../explore/rack/stops-word.ts';
 import { KIND_LETTER, LOAD_KINDS } from '../../loads/index.ts';
-import {
-  showInches,
-  showQuantity,
-  showRatio,
-  showSpan,
-  weightNumber,
-  weightUnit,
-} from '../../quantity/index.ts';
+import { showQuantity, showRatio, showSpan, weightNumber, weightUnit } from '../../quantity/index.ts';
 import { rankingOf } from '../../session/index.ts';
 import type { SessionMember } from '../../session/session.ts';
 import { lengthsText, measuredText, placeText, woodName } from '../../timber/member-words.ts';
@@ -21,12 +14,10 @@ import { CHECK_IDS, PASS_LIMIT } from '../../timber/report.ts';
 import { CHECK_WORD } from '../../timber/words.ts';
 import { factorText } from '../../timber/workings/figures.ts';
 import { WORKINGS_WORD } from '../../timber/workings/index.ts';
-import type { Block, Column, Row } from '../sheet.ts';
+import type { Block, Row } from '../sheet.ts';
+import { left, right } from './columns.ts';
 import type { Job } from './make-sheet.ts';
 import { ratioOf } from './member-facts.ts';
-
-const left = (head: string): Column => ({ head, align: 'left' });
-const right = (head: string): Column => ({ head, align: 'right' });
 
 const ALL_SPANS = 'all spans';
 
@@ -161,7 +152,7 @@ export function rackTable({ session, units }: Job, { member }: Checked): Block[]
           return ratio === null ? '' : showRatio(ratio);
         }),
         each.refused === null ? showRatio(each.worst) : '',
-        stopsText(each, units),
+        stopsWord(each, units),
         mark.join(', '),
       ],
       strong: at === chosen || at === lit,
@@ -177,13 +168,6 @@ export function rackTable({ session, units }: Job, { member }: Checked): Block[]
       rows,
     },
   ];
-}
-
-function stopsText({ refused, passes, governing, over, inYard }: RankedSize, units: Job['units']): string {
-  if (over > 0) return `over by ${showInches(over, units)}`;
-  if (refused !== null) return refusedWord(refused);
-  if (passes) return inYard === false ? 'not in yard' : '';
-  return governing === null ? 'no load' : CHECK_WORD[governing];
 }
 
 /** The designs set aside, beside the one at hand. */

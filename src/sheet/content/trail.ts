@@ -2,6 +2,7 @@ import { pathsOf } from '../../session/differences.ts';
 import type { SessionMember, TrailEntry } from '../../session/session.ts';
 import { trailOf } from '../../session/trail.ts';
 import type { Block, Row } from '../sheet.ts';
+import { left } from './columns.ts';
 import { valueText } from './inputs.ts';
 
 /** Changes that are told one by one, the last ones. */
@@ -18,12 +19,7 @@ export function trailBlocks(session: SessionMember): Block[] {
     blocks.push({
       kind: 'table',
       caption: 'What was done to this member, oldest first',
-      columns: [
-        { head: 'when, UTC', align: 'left' },
-        { head: 'what', align: 'left' },
-        { head: 'from', align: 'left' },
-        { head: 'to', align: 'left' },
-      ],
+      columns: [left('when, UTC'), left('what'), left('from'), left('to')],
       rows: shown.map(rowOf),
     });
   }

@@ -27,8 +27,9 @@ export function drawDiagram(view: DiagramView, columns: number): Drawing {
   const x = (at: number) => MARGIN + at * (columns - 2 * MARGIN);
   const top = Math.max(0, ...view.most);
   const bottom = Math.min(0, ...view.least);
-  const scale = top > bottom ? HEIGHT / (top - bottom) : 0;
-  const y = (value: number) => 1.2 + (top - value) * scale;
+  // Nothing at all is drawn on the zero line.
+  const range = top - bottom || 1;
+  const y = (value: number) => 1.2 + HEIGHT * ((top - value) / range);
   const last = view.most.length - 1;
   const along = (values: readonly number[]) =>
     values.map((value, index): Point => [x(index / last), y(value)]);

@@ -1,3 +1,4 @@
+import { safe } from '../safe.ts';
 import { brailleGlyph, DOTS_ACROSS, DOTS_DOWN, Dots } from './dots.ts';
 import { type Dash, type Drawing, leftOf, type Point } from './drawing.ts';
 
@@ -26,7 +27,8 @@ export function inDots({ columns, rows, shapes }: Drawing): string[] {
     if (shape.kind !== 'label') continue;
     const row = cells[Math.min(rows - 1, Math.max(0, Math.round(shape.at[1])))]!;
     const left = Math.max(0, Math.round(leftOf(shape)));
-    for (const [at, glyph] of [...shape.text].entries()) if (left + at < columns) row[left + at] = glyph;
+    for (const [at, glyph] of [...safe(shape.text)].entries())
+      if (left + at < columns) row[left + at] = glyph;
   }
   return cells.map((row) => row.join('').trimEnd());
 }

@@ -44,7 +44,7 @@ export function drawProportions(view: ProportionsView, columns: number): Drawing
       ],
       'quiet',
     ),
-    ...heads.shapes.map((shape) => shape),
+    ...heads.shapes,
     ...heads.uprights.map(({ at, dash }) =>
       line(
         [
@@ -135,7 +135,8 @@ function headsOf(
     label(text, [places[index]!.from, rows - 1 - lanes[index]!], 'start', index === 0 ? 'strong' : 'plain'),
   );
   const uprights = heads.flatMap(({ at, dash }) => (dash === null ? [] : [{ at, dash }]));
-  return { rows: rows + 0.2, shapes, uprights };
+  // Half a row for the figure at the top of the axis.
+  return { rows: rows + 0.6, shapes, uprights };
 }
 
 function circle(x: number, y: number, shown: boolean): Shape[] {

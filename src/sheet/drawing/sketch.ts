@@ -29,9 +29,24 @@ export interface Sketched {
 
 /** A member to scale, its depth too, with its loads above, reactions and lengths below. `slimness`: depth over length. */
 export function drawSketch(view: SketchView, slimness: number, columns: number): Sketched {
-  const full = above(view, columns, MARGIN, false);
-  const longest = Math.max(0, ...view.loads.map(({ type, brief }) => (type === 'point' ? brief.length : 0)));
-  const loads = full ?? above(view, columns, Math.max(MARGIN, longest + 2), true)!;
+  const widest = (text: (load: SketchLoad) => string) =>
+    MARGIN / 2 + Math.max(0, ...view.loads.map((load) => (load.type === 'point' ? text(load).length : 0)));
+  const wide = Math.min(
+    columns / 6,
+    widest(({ label: text }) => text),
+  );
+  const loads =
+    above(view, columns, MARGIN, false) ??
+    above(view, columns, Math.max(MARGIN, wide), false) ??
+    above(
+      view,
+      columns,
+      Math.max(
+        MARGIN,
+        widest(({ brief }) => shortened(brief)),
+      ),
+      true,
+    )!;
   const { x } = loads;
   const deep = Math.min(THICKEST, Math.max(THINNEST, (slimness * (x(1) - x(0))) / ROW));
   const beam: Point[] = [
@@ -52,6 +67,13 @@ export function drawSketch(view: SketchView, slimness: number, columns: number):
   };
 }
 
+/** So much of a name that the beam keeps its width; the tables have it whole. */
+function shortened(brief: string): string {
+  return brief.length > LONGEST ? `${brief.slice(0, LONGEST - 1)}…` : brief;
+}
+
+const LONGEST = 16;
+
 interface Above {
   /** Column of a place from 0 to 1. */
   readonly x: (place: number) => number;
@@ -63,7 +85,10 @@ interface Above {
 /** The loads, the last rows down to the beam; null where the figures do not fit, asked for not `brief`. */
 function above(view: SketchView, columns: number, margin: number, brief: boolean): Above | null {
   const x = (place: number) => margin + place * (columns - 2 * margin);
-  const text = (load: SketchLoad) => (brief ? load.brief : load.label);
+  const text = (load: SketchLoad): string => {
+    if (!brief) return load.label;
+    return load.type === 'point' ? shortened(load.brief) : load.brief;
+  };
   const points = view.loads.filter(({ type }) => type === 'point');
   const lines = view.loads.filter(({ type }) => type === 'line');
   const flags = flagLanes(points.map((load) => ({ at: x(load.from), width: text(load).length })));

@@ -1,7 +1,7 @@
 import type { WorkingLine } from '../../timber/workings/index.ts';
 import { ROW } from '../drawing/drawing.ts';
+import { safe, safeLine } from '../safe.ts';
 import type { Block, Fact, Facts, Picture, Section, Verdict } from '../sheet.ts';
-import { safe, safeLine } from '../write/safe.ts';
 import type { Element, Pages, Style } from './pages.ts';
 import { COLUMNS, columnOf, drawPicture } from './picture.ts';
 import { tableBlock } from './table.ts';

@@ -44,6 +44,11 @@ export class SheetDocument extends PDFDocument {
     if (day === null) delete (this as unknown as Within).info.CreationDate;
   }
 
+  /** The layout is this program's own: pdfkit, which would measure every text twice, need not. */
+  override widthOfString(): number {
+    return 0;
+  }
+
   /** In place of pdfkit's own, which asks for a date and writes the title as it is. */
   _addInfo(): void {
     const { appendXML } = this as unknown as Within;

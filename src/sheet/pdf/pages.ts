@@ -1,6 +1,6 @@
 import type { Paper } from '../../session/session.ts';
+import { safe } from '../safe.ts';
 import type { Fact } from '../sheet.ts';
-import { safe } from '../write/safe.ts';
 import { SheetDocument } from './document.ts';
 import { Face } from './face.ts';
 import { bold, regular } from './font-files.ts';
@@ -85,7 +85,7 @@ export class Pages {
     };
     if (this.#running.length > 0) {
       if (first === null) this.artifact(draw);
-      else this.marked(first, 'P', draw);
+      else this.marked(this.within(first, 'P'), 'P', draw);
       this.artifact(() => this.rule(this.top - 6, 0.5));
     }
     this.y = this.top;

@@ -1,5 +1,5 @@
 import { type Drawing, type Ink, type Point, ROW, type Shape } from '../drawing/drawing.ts';
-import { safe } from '../write/safe.ts';
+import { safe } from '../safe.ts';
 import type { Pages } from './pages.ts';
 
 /** Columns of a drawing that takes the width of a page. */

@@ -1,6 +1,6 @@
+import { safe } from '../safe.ts';
 import type { Row, Table } from '../sheet.ts';
 import { columnWidths } from '../write/column-widths.ts';
-import { safe } from '../write/safe.ts';
 import type { Element, Pages, Style } from './pages.ts';
 
 const SIZE = 8;

@@ -1,4 +1,4 @@
-import { safe } from './safe.ts';
+import { safe } from '../safe.ts';
 
 const ENTITIES: Readonly<Record<string, string>> = {
   '&': '&amp;',

@@ -1,7 +1,7 @@
 import { inDots } from '../drawing/in-dots.ts';
+import { safe, safeLine } from '../safe.ts';
 import type { Block, Fact, Row, Section, Sheet, Table } from '../sheet.ts';
 import { workingsRows } from '../workings-rows.ts';
-import { safe, safeLine } from './safe.ts';
 import { LINE } from './text.ts';
 
 /** The sheet as Markdown (CommonMark with tables), its drawings in braille. */

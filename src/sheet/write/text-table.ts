@@ -4,6 +4,8 @@ import { columnWidths } from './column-widths.ts';
 
 /** Blanks between two columns. */
 const GAP = 2;
+/** What a level that was closed in on may lack. */
+const HAIR = 1e-6;
 /** A longer word does not keep its column from giving way. */
 const LONG_WORD = 12;
 
@@ -24,7 +26,7 @@ export function textTable(
     return { wanted, least };
   });
   const room = width - GAP * (columns.length - 1);
-  const widths = columnWidths(wishes, room).map((each) => Math.max(1, Math.floor(each)));
+  const widths = columnWidths(wishes, room).map((each) => Math.max(1, Math.floor(each + HAIR)));
   const lines = (cells: readonly string[]): string[] => {
     const broken = cells.map((cell, at) => wrapText(cell, widths[at]!));
     const height = Math.max(1, ...broken.map((each) => each.length));

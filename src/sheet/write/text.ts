@@ -1,7 +1,7 @@
 import { inDots } from '../drawing/in-dots.ts';
+import { safe, safeLine } from '../safe.ts';
 import type { Block, Fact, Section, Sheet } from '../sheet.ts';
 import { workingsRows, wrapText } from '../workings-rows.ts';
-import { safe, safeLine } from './safe.ts';
 import { textTable } from './text-table.ts';
 
 /** Columns that every terminal and printer has. */

@@ -1,5 +1,5 @@
-import { harmless } from '../../quantity/index.ts';
-import type { WorkingLine } from '../../timber/workings/index.ts';
+import { harmless } from '../quantity/index.ts';
+import type { WorkingLine } from '../timber/workings/index.ts';
 
 /** A sheet leaves nothing out: a note may be as long as the session file lets it be, a calculation longer. */
 const LONGEST = 100_000;
