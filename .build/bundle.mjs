@@ -24,6 +24,7 @@ const noDeveloperTools = {
 /** What is loaded only when it is asked for (`await import`), and the file beside the program that holds it. */
 const ASIDE = new Map([
   ['tinypool', './pool.js'],
+  ['../session/samples.ts', './samples.js'],
   ['../sheet/index.ts', './sheet.js'],
   ['./pdf/write-pdf.ts', './sheet-pdf.js'],
 ]);
@@ -92,6 +93,7 @@ const FILES = [
   { entry: 'src/main.ts', outfile: 'dist/thrice.js' },
   { entry: 'src/commands/schedule/worker.ts', outfile: 'dist/schedule-worker.js' },
   { entry: 'node_modules/tinypool/dist/index.js', outfile: 'dist/pool.js' },
+  { entry: 'src/session/samples.ts', outfile: 'dist/samples.js' },
   { entry: 'src/sheet/index.ts', outfile: 'dist/sheet.js' },
   { entry: 'src/sheet/pdf/write-pdf.ts', outfile: 'dist/sheet-pdf.js' },
   // The pool looks for its own end of a thread here.

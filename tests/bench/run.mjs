@@ -7,7 +7,7 @@ import { existsSync } from 'node:fs';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { build } from 'esbuild';
 
-const BENCHES = ['start', 'frame', 'held', 'core', 'beams', 'explore', 'links', 'rows'];
+const BENCHES = ['start', 'frame', 'held', 'core', 'beams', 'explore', 'links', 'rows', 'sheet'];
 
 const root = fileURLToPath(new URL('../../', import.meta.url));
 /** Not under dist/, which is what gets published. */

@@ -1,4 +1,7 @@
 import { spawnSync } from 'node:child_process';
+import { mkdtempSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { describe, expect, test } from 'vitest';
 import { BOATHOUSE } from '../support/samples.ts';
@@ -34,6 +37,7 @@ describe('the network', () => {
     ['schema'],
     ['completion', 'bash'],
     ['manual'],
+    ['sheet', BOATHOUSE.file, '-o', join(mkdtempSync(join(tmpdir(), 'thrice-sheet-')), 'sheet.pdf')],
   ])('thrice %s asks for none', (...args) => {
     const { status, stderr, stdout } = guarded(BUNDLE, ...args);
     expect(stderr).not.toContain('socket');
