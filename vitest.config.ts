@@ -8,6 +8,7 @@ console.log(`property tests start from seed ${seed}`);
 export default defineConfig({
   test: {
     include: ['tests/**/*.test.{ts,tsx}'],
+    globalSetup: ['tests/support/tally-run.ts'],
     setupFiles: ['tests/support/seed.ts'],
     env: { THRICE_SEED: String(seed) },
     // Generous: property tests and pseudo-terminals share slow machines.

@@ -1,4 +1,4 @@
-import { readdirSync } from 'node:fs';
+import { closeSync, openSync, readdirSync, readSync, statSync } from 'node:fs';
 import { homedir } from 'node:os';
 import type { Keeper } from '../files/keeper.ts';
 import type { FoundSession } from '../screen/open-explorer.tsx';
@@ -7,7 +7,7 @@ import type { Session } from '../session/session.ts';
 import { readText, sessionOf } from './load.ts';
 import { BadInput } from './status.ts';
 
-/** More files of a folder are not offered: their names can be typed. */
+/** More files of a folder are not looked at: their names can be typed. */
 const MOST_FILES = 200;
 
 /** What an empty start offers, and how it is opened; `keeperOf` takes a file that was read in keeping. */
@@ -47,12 +47,31 @@ function withFault(open: () => FoundSession): FoundSession {
 /** The session files of the folder at hand, by name; none where it may not be read. */
 function filesHere(): string[] {
   try {
-    return readdirSync('.', { withFileTypes: true })
-      .filter((entry) => !entry.isDirectory() && entry.name.endsWith('.json') && !entry.name.startsWith('.'))
-      .map(({ name }) => name)
+    return readdirSync('.')
+      .filter((name) => name.endsWith('.json') && !name.startsWith('.'))
       .sort()
-      .slice(0, MOST_FILES);
+      .slice(0, MOST_FILES)
+      .filter(isSession);
   } catch {
     return [];
+  }
+}
+
+/** The key that every session begins with stands within so many bytes. */
+const HEAD = 1024;
+
+/** By its first bytes; a pipe or a device is not looked into. */
+function isSession(name: string): boolean {
+  try {
+    if (!statSync(name).isFile()) return false;
+    const head = new Uint8Array(HEAD);
+    const file = openSync(name, 'r');
+    try {
+      return Buffer.from(head.subarray(0, readSync(file, head))).includes('"thrice"');
+    } finally {
+      closeSync(file);
+    }
+  } catch {
+    return false;
   }
 }

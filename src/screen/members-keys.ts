@@ -92,9 +92,7 @@ export const MEMBERS_BINDINGS: readonly {
   { keys: '?', presses: { '?': 'help' }, help: 'every key and every word', foot: 'keys' },
 ];
 
-const BY_PRESS = new Map(
-  MEMBERS_BINDINGS.flatMap(({ presses }) => Object.entries(presses)),
-);
+const BY_PRESS = new Map(MEMBERS_BINDINGS.flatMap(({ presses }) => Object.entries(presses)));
 
 /** What a press asks for in the list of members; null where it is bound to nothing. */
 export function membersActionOf(press: KeyPress): MembersAction | null {

@@ -1,5 +1,5 @@
-import type { Judgement } from '../explore/judge.ts';
 import { isQuick } from '../explore/is-quick.ts';
+import type { Judgement } from '../explore/judge.ts';
 import { allCarriers, endText, type Landing, linksOf, whoLoses } from '../explore/links/index.ts';
 import { showInches, showRatio, showSpan, type Units, weightNumber, weightUnit } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
@@ -28,8 +28,8 @@ export interface MembersView {
 }
 
 /** Members worked out in one go, so that no key waits long; one that takes long counts as several. */
-const AT_ONCE = 40;
-const SLOW = 8;
+const AT_ONCE = 30;
+const SLOW = 5;
 
 /** The list with the next members worked out, those nearest to the one in hand first. */
 export function withJudged(state: State, mode: MembersMode): MembersMode {
@@ -55,9 +55,14 @@ export function withJudged(state: State, mode: MembersMode): MembersMode {
   return { ...mode, judged };
 }
 
-/** Whether members are still to be worked out. */
-export function isUnjudged(state: State, { judged }: MembersMode): boolean {
-  return state.session.members.some(({ member }) => !judged.has(member));
+/** How many members are still to be worked out. */
+export function unjudged(state: State, { judged }: MembersMode): number {
+  return state.session.members.filter(({ member }) => !judged.has(member)).length;
+}
+
+/** The list with what a key has changed worked out; where much is, that waits until no key does. */
+export function withChanged(state: State, mode: MembersMode): MembersMode {
+  return unjudged(state, mode) > AT_ONCE ? mode : withJudged(state, mode);
 }
 
 /** Indices of the members that are listed, in the order of the list. */
@@ -96,7 +101,13 @@ const SORT_WORD: Readonly<Record<MemberSort, string>> = {
 
 function holds(member: Member, { judged }: MembersMode, words: readonly string[]): boolean {
   if (words.length === 0) return true;
-  const text = [member.name, member.note, sizeOf(member), shortWood(member.stock), ...stands(judged.get(member))]
+  const text = [
+    member.name,
+    member.note,
+    sizeOf(member),
+    shortWood(member.stock),
+    ...stands(judged.get(member)),
+  ]
     .join(' ')
     .toLowerCase();
   return words.every((word) => text.includes(word));
@@ -118,8 +129,8 @@ function stands(judgement: Judgement | undefined): readonly [string, string, str
 function columnsOf(units: Units): readonly TableColumn[] {
   return [
     { head: 'member', align: 'left', least: 8 },
-    { head: 'note', align: 'left', spare: 2, least: 12 },
-    { head: 'size', align: 'left', least: 12 },
+    { head: 'note', align: 'left', spare: 1, least: 12 },
+    { head: 'size', align: 'left', least: 17 },
     { head: 'wood', align: 'left', spare: 6, least: 10 },
     { head: 'spans', align: 'left', spare: 5, least: 8 },
     { head: weightUnit(units), align: 'right', spare: 4 },
@@ -127,7 +138,7 @@ function columnsOf(units: Units): readonly TableColumn[] {
     { head: 'ratio', align: 'right' },
     { head: '', align: 'left', least: 6 },
     { head: 'carries', align: 'left', spare: 3, least: 10 },
-    { head: 'carried by', align: 'left', spare: 1, least: 10 },
+    { head: 'carried by', align: 'left', spare: 2, least: 10 },
   ];
 }
 
@@ -196,7 +207,11 @@ function statusOf(state: State, mode: MembersMode, count: number): string {
   return [
     total,
     ...(open > 0 ? [`${open} still to work out`] : []),
-    failing === 0 ? (open > 0 ? 'none fails so far' : 'all pass') : `${failing} ${failing === 1 ? 'fails' : 'fail'}`,
+    failing === 0
+      ? open > 0
+        ? 'none fails so far'
+        : 'all pass'
+      : `${failing} ${failing === 1 ? 'fails' : 'fail'}`,
     SORT_WORD[mode.sort],
     ...(mode.filter.trim() === '' ? [] : [`${count} with "${mode.filter.trim()}"`]),
   ].join('; ');
@@ -213,10 +228,19 @@ function notesOf(
   const carried = (carriers.get(member.name) ?? []).map(
     ({ carrier, link }) => `${carrier} (${endText(link.end)})`,
   );
-  return [
-    `${member.name} carries ${carries.length === 0 ? 'no other' : carries.join(', ')}`,
-    `it is carried by ${carried.length === 0 ? 'no other' : carried.join(', ')}`,
-  ];
+  return [`${member.name} carries ${counted(carries)}`, `it is carried by ${counted(carried)}`];
+}
+
+/** "J1 left end, J2 right end twice"; "no other" for none. */
+function counted(texts: readonly string[]): string {
+  if (texts.length === 0) return 'no other';
+  const times = (text: string) => texts.filter((each) => each === text).length;
+  return [...new Set(texts)]
+    .map((text) => {
+      const count = times(text);
+      return count === 1 ? text : `${text} ${count === 2 ? 'twice' : `${count} times`}`;
+    })
+    .join(', ');
 }
 
 function questionOf(state: State, { asks }: MembersMode): MembersView['question'] {

@@ -11,8 +11,8 @@ import {
   EXPLORE,
   type Mode,
   type Offers,
-  type Opened,
   type OpenAnswer,
+  type Opened,
   type SheetAnswer,
   type State,
   type YardAnswer,
@@ -103,7 +103,8 @@ export function openExplorer({
     if (effect.do === 'copy') copy(effect.text);
     if (effect.do === 'read-yard')
       return { type: 'yard', answer: readYard(effect.name, effect.session, effect.file) };
-    if (effect.do === 'open' && opening !== null) return { type: 'opened', answer: opened(opening.open(effect.what)) };
+    if (effect.do === 'open' && opening !== null)
+      return { type: 'opened', answer: opened(opening.open(effect.what)) };
     if (effect.do === 'write-sheet') {
       const { file } = effect;
       void writeSheet(effect).then((outcome) => tell({ type: 'sheet', answer: { file, outcome } }));

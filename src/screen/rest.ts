@@ -1,7 +1,7 @@
 import { isQuick } from '../explore/is-quick.ts';
 import { watched } from './carriers.ts';
 import { isAroundMissing, stripOf, withAround } from './handover-now.ts';
-import { isUnjudged, withJudged } from './members-view.ts';
+import { unjudged, withJudged } from './members-view.ts';
 import { isMovesMissing, withMoves } from './moves-beside.ts';
 import { stripRows } from './panels/strip.ts';
 import { windowStart } from './panels/table.ts';
@@ -12,7 +12,7 @@ export function restOf(state: State): { readonly ms: number } | null {
   if (!state.settled) return { ms: state.session.members.length > 0 && isQuick(memberOf(state)) ? 0 : IDLE };
   if (state.mode.name === 'handovers') return state.mode.strip === null ? { ms: 0 } : null;
   if (state.session.members.length === 0) return null;
-  if (state.mode.name === 'members' && isUnjudged(state, state.mode)) return { ms: 0 };
+  if (state.mode.name === 'members' && unjudged(state, state.mode) > 0) return { ms: 0 };
   return state.watch !== undefined || isAroundMissing(state) || isMovesMissing(state) ? { ms: IDLE } : null;
 }
 
@@ -23,7 +23,7 @@ const IDLE = 60;
 export function rested(state: State): State {
   if (!state.settled) return { ...state, settled: true };
   if (state.mode.name === 'handovers') return state.mode.strip === null ? withStrip(state) : state;
-  if (state.mode.name === 'members' && isUnjudged(state, state.mode))
+  if (state.mode.name === 'members' && unjudged(state, state.mode) > 0)
     return { ...state, mode: withJudged(state, state.mode) };
   if (state.watch !== undefined) return watched(state);
   if (isAroundMissing(state)) return withAround(state);

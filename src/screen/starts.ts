@@ -68,10 +68,10 @@ export function startView(mode: StartMode, units: Units): StartView {
 }
 
 const HEADING: Readonly<Record<StartLine['is'], string>> = {
-  kind: 'new, from what it is part of',
-  sample: 'open a sample',
-  file: 'open a file',
-  path: 'open a file',
+  kind: 'New. What is it part of?',
+  sample: 'Open a sample',
+  file: 'Open a file',
+  path: 'Open a file',
 };
 
 function rowOf(line: StartLine, at: number, { offers }: StartMode, units: Units): StartRow {

@@ -24,7 +24,9 @@ export function freeName({ members }: Session, mark: string): string {
 
 /** Why no member can be added; null where one can. */
 export function fullFault({ members }: Session): string | null {
-  return members.length < MAX_MEMBERS ? null : `a session has ${MAX_MEMBERS} members at most: delete one first`;
+  return members.length < MAX_MEMBERS
+    ? null
+    : `a session has ${MAX_MEMBERS} members at most: delete one first`;
 }
 
 /** The session with a new member behind the one of this index. */
@@ -32,8 +34,9 @@ export function withMemberAfter(session: Session, index: number, one: SessionMem
   return { ...session, members: session.members.toSpliced(index + 1, 0, one) };
 }
 
-/** A name's number, and the blanks before it. */
-const NUMBERED = /\s*\d+$/;
+const NUMBER = /\d+$/;
+/** Words, to which a number is set apart. */
+const WORDS = /\s\S*\D$/;
 
 /**
  * The session with a copy of a member behind it, called by the next free number. It carries what the other does and
@@ -41,9 +44,9 @@ const NUMBERED = /\s*\d+$/;
  */
 export function withDuplicate(session: Session, index: number): Session {
   const { member, written } = session.members[index]!;
-  const stem = member.name.replace(NUMBERED, '');
-  const gap = /\s/.test(stem) ? ' ' : '';
-  const name = freeName(session, stem === '' ? 'B' : stem + gap);
+  const stem = member.name.replace(NUMBER, '');
+  const mark = WORDS.test(stem.trimEnd()) ? `${stem.trimEnd()} ` : stem;
+  const name = freeName(session, mark.trim() === '' ? 'B' : mark);
   return withMemberAfter(session, index, { member: { ...member, name }, written });
 }
 

@@ -1,7 +1,7 @@
 import type { Knob } from '../explore/knobs/knob.ts';
 import { woodKnobs } from '../explore/knobs/wood.ts';
-import { nearestSection } from '../explore/rack/choose-wood.ts';
 import { BEST_WORD } from '../explore/rack/best.ts';
+import { nearestSection } from '../explore/rack/choose-wood.ts';
 import { COMBINATION_SETS } from '../loads/loading.ts';
 import { isHarmful } from '../quantity/index.ts';
 import { checkStock } from '../timber/index.ts';
@@ -79,12 +79,25 @@ function titleEntry(key: Exclude<keyof SheetKeys, 'paper'>, label: string, about
   };
 }
 
+/** The order of the entries in the file. */
+const SHEET_KEYS = [
+  'firm',
+  'job',
+  'jobNumber',
+  'by',
+  'checkedBy',
+  'revision',
+  'date',
+  'paper',
+] as const satisfies readonly (keyof SheetKeys)[];
+
 /** A title block in which nothing is filled in is none. */
 function withSheet<K extends keyof SheetKeys>(session: Session, key: K, value: SheetKeys[K]): Session {
   const { sheet: before, ...rest } = session;
-  const { [key]: _was, ...others } = before ?? {};
-  const sheet = value === undefined ? others : { ...others, [key]: value };
-  return Object.keys(sheet).length === 0 ? rest : { ...rest, sheet };
+  const after = { ...before, [key]: value };
+  const stated = SHEET_KEYS.filter((each) => after[each] !== undefined);
+  if (stated.length === 0) return rest;
+  return { ...rest, sheet: Object.fromEntries(stated.map((each) => [each, after[each]])) };
 }
 
 /** A member to choose the wood on: of any size that the wood comes in. */
@@ -98,7 +111,10 @@ function sampleOf(session: Session): Member {
 function wood(key: 'product' | 'species' | 'grade', about: string): JobSetting {
   const path = `stock.${key}`;
   const knobOf = (member: Member): Knob | undefined => woodKnobs(member).find((knob) => knob.key === path);
-  const turned = (session: Session, turn: (knob: Knob, member: Member) => ReturnType<Knob['nudge']>): Changed => {
+  const turned = (
+    session: Session,
+    turn: (knob: Knob, member: Member) => ReturnType<Knob['nudge']>,
+  ): Changed => {
     const member = sampleOf(session);
     const knob = knobOf(member);
     if (knob === undefined) return { fault: `${member.stock.product} has no ${key} to choose` };

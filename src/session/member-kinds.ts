@@ -37,10 +37,10 @@ const FLOOR = {
 } as const;
 const ROOF = { ...FLOOR, use: 'roof', area: startingLoads('roof') } as const;
 
-/** What can be added, from the floor up and out. */
+/** What can be added: a floor, a roof, what stands outside. */
 export const MEMBER_KINDS: readonly MemberKind[] = [
-  { ...FLOOR, name: 'joist', mark: 'J', spacing: JOIST_SPACING },
   { ...FLOOR, name: 'girder', mark: 'G' },
+  { ...FLOOR, name: 'joist', mark: 'J', spacing: JOIST_SPACING },
   { ...FLOOR, name: 'header', mark: 'H' },
   { ...ROOF, name: 'rafter', mark: 'R', spacing: RAFTER_SPACING },
   { ...ROOF, name: 'ridge', mark: 'RB' },

@@ -1,5 +1,5 @@
 import type { Shop } from '../explore/buying/yard.ts';
-import { type Best, BESTS, BY_WEIGHT, type Ranking } from '../explore/rack/best.ts';
+import { BESTS, type Best, BY_WEIGHT, type Ranking } from '../explore/rack/best.ts';
 import type { Session, YardList } from './session.ts';
 
 const SHOPS = new WeakMap<object, { readonly prices: Session['prices']; readonly shop: Shop }>();

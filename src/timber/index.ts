@@ -7,6 +7,7 @@ export { governingField } from './checks/governing-field.ts';
 export { lineLoadOf } from './checks/line-load.ts';
 export {
   deadFactorOf,
+  forgetPrepared,
   type Prepared,
   type PrepareOptions,
   prepare,

@@ -1,4 +1,5 @@
 import type * as FileSystem from 'node:fs';
+import { tally } from '../support/tally.ts';
 
 /** How the disk fails; nothing of it while a test has not said so. */
 const how = {
@@ -15,18 +16,23 @@ const how = {
 };
 const HEALTHY = { ...how };
 
+function fail(as: Partial<typeof how>): void {
+  tally('faults injected');
+  Object.assign(how, HEALTHY, as);
+}
+
 export const failing = {
   dieAfter(limits: { readonly steps?: number; readonly bytes?: number }): void {
-    Object.assign(how, HEALTHY, limits);
+    fail(limits);
   },
   fullAfter(room: number): void {
-    Object.assign(how, HEALTHY, { room });
+    fail({ room });
   },
   takes(most: number): void {
-    Object.assign(how, HEALTHY, { most });
+    fail({ most });
   },
   withoutLinks(): void {
-    Object.assign(how, HEALTHY, { links: false });
+    fail({ links: false });
   },
   /** A healthy disk again; gives how many steps were asked for. */
   stop(): number {

@@ -4,6 +4,7 @@ import type { KeyPress } from '../../src/screen/terminal/key-press.ts';
 import { type Event, update } from '../../src/screen/update.ts';
 import { readSession } from '../../src/session/index.ts';
 import { sessionText } from './session.ts';
+import { tally } from './tally.ts';
 
 type Part = Readonly<Record<string, unknown>>;
 
@@ -69,6 +70,7 @@ export function afterEvents(
 ): { state: State; effects: ReturnType<typeof update>['effects'] } {
   let now = state;
   const effects: ReturnType<typeof update>['effects'][number][] = [];
+  tally('keys pressed', events.filter(({ type }) => type === 'key').length);
   for (const event of events) {
     const step = update(now, event);
     now = step.state;

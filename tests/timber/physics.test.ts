@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { scaleLengths, scaleLoads } from '../../src/explore/scale.ts';
 import { readSession } from '../../src/session/index.ts';
+import { beamFields } from '../../src/statics/beam.ts';
 import { prepare, rate, woodOf } from '../../src/timber/index.ts';
 import type { Member, Stock } from '../../src/timber/member.ts';
 import { CHECK_IDS, type CheckId } from '../../src/timber/report.ts';
@@ -279,7 +280,7 @@ describe('of any member', () => {
       fc.property(anyMember, size(0.5, 2), (member, by) => {
         const { beam, limits, bracing, bracingBottom } = member;
         const likewise = (held: Member['bracing']) => (typeof held === 'number' ? held * by : held);
-        const small: Member = {
+        const free: Member = {
           ...heavy(member),
           stock: TYPED,
           selfWeight: false,
@@ -291,6 +292,16 @@ describe('of any member', () => {
           limits: { ...limits, liveMax: null },
           typedFactors: { ...member.typedFactors, Cb: { value: 1, reason: 'has a length in it' } },
         };
+        // An edge counts as pressed by a moment in lb.in that does not grow: where next to nothing presses one, hold it.
+        const asked = ratiosOf(free);
+        const small: Member = {
+          ...free,
+          bracing: asked.bending < 1e-6 ? 'continuous' : bracing,
+          bracingBottom: asked['bending-hogging'] < 1e-6 ? 'continuous' : bracingBottom,
+        };
+        // Fields of several lengths: one that hardly anything presses may have the longest.
+        const several = beamFields(beam).length > 1;
+        const apart = several && [small.bracing, small.bracingBottom].includes('ends');
         const large: Member = {
           ...scaleLengths(small, by),
           tributary: small.tributary * by,
@@ -302,11 +313,11 @@ describe('of any member', () => {
           ),
           section: { ...small.section, width: small.section.width * by, depth: small.section.depth * by },
           tiedDown: small.tiedDown!.map((force) => force * by * by),
-          bracing: likewise(bracing),
-          bracingBottom: likewise(bracingBottom),
+          bracing: likewise(small.bracing),
+          bracingBottom: likewise(small.bracingBottom),
         };
         expect(large.beam.spans.length).toBe(beam.spans.length);
-        expectAlike(ratiosOf(small), ratiosOf(large));
+        expectAlike(ratiosOf(small), ratiosOf(large), apart ? ['slenderness'] : []);
       }),
       { numRuns: 100 },
     );

@@ -1,5 +1,3 @@
-import { performance } from 'node:perf_hooks';
-
 const EVERY_MS = 200;
 const CLEAR = '\r\u001b[K';
 

@@ -105,9 +105,10 @@ export class RowWriter {
   }
 
   async write({ text }: Pick<SizedBatch, 'text'>): Promise<void> {
-    if (text === '') return;
+    if (text.length === 0) return;
     const between = this.#any ? ',\n' : '\n';
-    await this.#sink.write(this.#job.format === 'json' ? between + text : text);
+    if (this.#job.format === 'json') await this.#sink.write(between);
+    await this.#sink.write(text);
     this.#any = true;
   }
 

@@ -9,7 +9,7 @@ import type { Streams } from '../streams.ts';
 
 /** Where an output goes, piece by piece. Every step throws OutputFailed where it cannot be done. */
 export interface Sink {
-  readonly write: (text: string) => Promise<void>;
+  readonly write: (text: string | Uint8Array) => Promise<void>;
   /** All has been written. */
   readonly finish: () => Promise<void>;
   /** It is not to be: nothing half written stays. */
@@ -17,9 +17,10 @@ export interface Sink {
 }
 
 export function stdoutSink(streams: Streams): Sink {
+  const decoder = new TextDecoder();
   return {
     async write(text) {
-      streams.out(text);
+      streams.out(typeof text === 'string' ? text : decoder.decode(text));
       await streams.drained?.();
     },
     finish: async () => undefined,

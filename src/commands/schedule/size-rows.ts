@@ -1,4 +1,4 @@
-import { type Sized, sized } from '../../explore/rack/sized.ts';
+import { sized } from '../../explore/rack/sized.ts';
 import { harmless, type Units } from '../../quantity/index.ts';
 import {
   type Broken,
@@ -10,6 +10,7 @@ import {
   readScheduleRow,
   type ScheduleHead,
 } from '../../session/schedule/index.ts';
+import { forgetPrepared } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { knownWood } from './known-wood.ts';
 import { type Outcome, ownSize, RESULT_COLUMNS, resultJson } from './results.ts';
@@ -30,7 +31,8 @@ export interface Batch {
 
 /** What became of them: their part of the output, and how many there were of each sort. */
 export interface SizedBatch {
-  readonly text: string;
+  /** As text, or in UTF-8 where it comes from another thread. */
+  readonly text: string | Uint8Array;
   readonly passing: number;
   readonly failing: number;
   readonly bad: readonly { readonly line: number; readonly fault: string }[];
@@ -128,8 +130,9 @@ function sizeRecord(
 /** Sizes a member; `own` where it has a size already, which is judged beside. */
 export function outcomeOf(member: Member, own: boolean, units: Units): Outcome {
   const known = knownWood(member);
-  const found: Sized = sized(known, units);
-  return { is: 'sized', sized: found, own: own ? ownSize(known) : null };
+  const outcome: Outcome = { is: 'sized', sized: sized(known, units), own: own ? ownSize(known) : null };
+  forgetPrepared(known);
+  return outcome;
 }
 
 const KIBIBYTES = LONGEST_RECORD / 1024;

@@ -1,4 +1,4 @@
-import { boardFeet, refusal, sectionWeight, standingDepth } from '../../timber/index.ts';
+import { boardFeet, prepare, refusal, sectionWeight, standingDepth } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import type { CheckId } from '../../timber/report.ts';
 import { memberPrice, pieceLength } from '../buying/buying.ts';
@@ -18,11 +18,13 @@ export interface Outcome extends Judgement {
 /** Rates members that are like one. */
 export function judgeLike(member: Member, only: readonly CheckId[] | null): (changed: Member) => Outcome {
   const ratiosOf = ratiosLike(member);
+  // What carries nothing does not pass, and no move takes its loads away.
+  const { loaded } = prepare(member);
   return (changed) => {
     const ratios = ratiosOf(changed);
     const judgement = judge(ratios, only);
     const refused = refusal(changed) ?? overLimit(changed, changed.section);
-    return { ratios, refused, ...judgement, passes: judgement.passes && refused === null };
+    return { ratios, refused, ...judgement, passes: judgement.passes && loaded && refused === null };
   };
 }
 

@@ -8,7 +8,8 @@ const SHEET = { columns: 80, rows: 400 } as const;
 /** Here the wood's choices and what they bring stand one below the other, as they are to be read. */
 const WOOD_COLUMNS = 60;
 
-const GLYPHS = glyphsOf('unicode');
+/** Those that the views are read with. */
+export const GLYPHS = glyphsOf('unicode');
 /** Glyphs that mean something where they stand alone. */
 const MARKS: readonly (readonly [string, string])[] = [
   [GLYPHS.hand, 'in hand:'],

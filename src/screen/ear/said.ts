@@ -3,9 +3,10 @@ import { showRatio } from '../../quantity/index.ts';
 import { rankingOf } from '../../session/index.ts';
 import { CHECK_WORD } from '../../timber/words.ts';
 import { type Answer, answerOf } from '../answer.ts';
+import { drawState } from '../draw-state.ts';
 import { memberOf, type State } from '../state.ts';
 import { viewOf } from '../view-model.ts';
-import { rowWords } from './rows.ts';
+import { GLYPHS, rowWords } from './rows.ts';
 import { sentence, spelled } from './spelled.ts';
 import { changeWords, knobWords, titleWords, verdictWords, viewWords } from './view-words.ts';
 
@@ -21,10 +22,10 @@ export function saidAfter(before: State | null, after: State): string[] {
   return [...changed(before, after), ...notice];
 }
 
-/** What is being typed, with the field it is for; empty where nothing is. */
+/** What is being typed, of a knob with its name; empty where nothing is. */
 export function typedLine(state: State): string {
   const { mode } = state;
-  if (mode.name !== 'entry') return '';
+  if (mode.name !== 'entry') return drawState(state, GLYPHS).entry?.value ?? '';
   const view = viewOf(state);
   return `${view.knobs[view.knob]!.label}: ${mode.edit.text}`;
 }

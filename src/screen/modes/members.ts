@@ -1,17 +1,11 @@
 import { renamed, whoLoses, withoutMember } from '../../explore/links/index.ts';
-import {
-  fullFault,
-  nameFault,
-  toldName,
-  withDuplicate,
-  withMemberAt,
-} from '../../session/index.ts';
+import { fullFault, nameFault, toldName, withDuplicate, withMemberAt } from '../../session/index.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
 import { redo, undo } from '../history.ts';
 import { drawTooSmall } from '../layout.ts';
 import { type MembersAction, membersActionOf } from '../members-keys.ts';
-import { listed, membersView, withJudged } from '../members-view.ts';
+import { listed, membersView, withChanged, withJudged } from '../members-view.ts';
 import { drawMembers } from '../panels/members.ts';
 import {
   EXPLORE,
@@ -69,16 +63,16 @@ export function openMembers(state: State): State {
     asks: null,
     judged: new Map(),
   };
-  return looked(inMode(state, mode));
+  return inMode(state, withJudged(state, mode));
 }
 
 function inMode(state: State, mode: MembersMode): State {
   return { ...state, mode, notice: null };
 }
 
-/** With the next members worked out while the list is what is looked at. */
+/** With what a key has changed worked out, while the list is what is looked at. */
 function looked(state: State): State {
-  return state.mode.name === 'members' ? { ...state, mode: withJudged(state, state.mode) } : state;
+  return state.mode.name === 'members' ? { ...state, mode: withChanged(state, state.mode) } : state;
 }
 
 function press(state: State, mode: MembersMode, press: KeyPress): Step {
@@ -95,7 +89,13 @@ function press(state: State, mode: MembersMode, press: KeyPress): Step {
 function closed(state: State, { from }: MembersMode): State {
   const at = state.session.members.findIndex(({ member }) => member.name === from);
   const member = at < 0 ? state.member : at;
-  return { ...state, member, ghost: member === state.member ? state.ghost : null, mode: EXPLORE, notice: null };
+  return {
+    ...state,
+    member,
+    ghost: member === state.member ? state.ghost : null,
+    mode: EXPLORE,
+    notice: null,
+  };
 }
 
 function inHand(state: State, mode: MembersMode, member: number): State {
@@ -175,7 +175,10 @@ function duplicate(state: State): State {
 /** Past its neighbour in the list, which may have others of the file between. */
 function move(state: State, mode: MembersMode, by: 1 | -1): State {
   if (mode.sort !== 'file')
-    return refused(state, `it is listed ${mode.sort === 'name' ? 'by name' : `by ${mode.sort}`}: o goes back to the order of the file, which this moves it in`);
+    return refused(
+      state,
+      `it is listed ${mode.sort === 'name' ? 'by name' : `by ${mode.sort}`}: o goes back to the order of the file, which this moves it in`,
+    );
   const order = listed(state, mode);
   const to = order[order.indexOf(state.member) + by];
   if (to === undefined) return refused(state, by < 0 ? 'it is the first already' : 'it is the last already');
@@ -200,7 +203,10 @@ function deleted(state: State, mode: MembersMode): State {
   const member = Math.min(last, neighbour > state.member ? neighbour - 1 : neighbour);
   const next = { ...withSession(state, withoutMember(state.session, name)), member, ghost: null };
   const links = losing === 0 ? '' : ` with ${losing} ${losing === 1 ? 'link' : 'links'} to it`;
-  return told({ ...next, mode: { ...mode, asks: null } }, `${toldName(name)} is gone${links}; u brings it back`);
+  return told(
+    { ...next, mode: { ...mode, asks: null } },
+    `${toldName(name)} is gone${links}; u brings it back`,
+  );
 }
 
 function typing(state: State, mode: MembersMode, asks: MembersQuestion): State {
@@ -213,7 +219,9 @@ function atListed(state: State): State {
   if (state.mode.name !== 'members') return state;
   const order = listed(state, state.mode);
   const [first] = order;
-  return first === undefined || order.includes(state.member) ? state : { ...state, member: first, ghost: null };
+  return first === undefined || order.includes(state.member)
+    ? state
+    : { ...state, member: first, ghost: null };
 }
 
 function answer(state: State, mode: MembersMode, asks: MembersQuestion, press: KeyPress): State {
@@ -225,7 +233,11 @@ function answer(state: State, mode: MembersMode, asks: MembersQuestion, press: K
   return edit === null ? state : typing(state, mode, { ...asks, edit, fault: null });
 }
 
-function named(state: State, mode: MembersMode, asks: MembersQuestion & { readonly of: 'name' | 'filter' }): State {
+function named(
+  state: State,
+  mode: MembersMode,
+  asks: MembersQuestion & { readonly of: 'name' | 'filter' },
+): State {
   const { name: before } = memberOf(state);
   const name = asks.edit.text.trim();
   const fault = nameFault(state.session, name, before);

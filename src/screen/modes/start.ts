@@ -1,5 +1,5 @@
-import { takeSize } from '../../explore/rack/rack.ts';
 import { nearestSection } from '../../explore/rack/choose-wood.ts';
+import { takeSize } from '../../explore/rack/rack.ts';
 import { bestOf } from '../../explore/rack/ranked.ts';
 import { parseQuantity, showSpan, type Units } from '../../quantity/index.ts';
 import {
@@ -12,7 +12,9 @@ import {
   USUAL_STOCK,
   withMemberAfter,
 } from '../../session/index.ts';
+import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { drawTooSmall } from '../layout.ts';
 import { drawStart } from '../panels/start.ts';
 import { startLines, startView } from '../starts.ts';
 import {
@@ -33,7 +35,16 @@ import { isCancel, type ModeRules, scrolled } from './mode.ts';
 
 /** An empty start with what there is to open. */
 export function startWith(offers: Offers): StartMode {
-  return { name: 'start', step: 'choose', line: 0, edit: editOf(''), span: 0, fault: null, offers, addTo: null };
+  return {
+    name: 'start',
+    step: 'choose',
+    line: 0,
+    edit: editOf(''),
+    span: 0,
+    fault: null,
+    offers,
+    addTo: null,
+  };
 }
 
 /** The same questions of a member that is added to the list. */
@@ -62,6 +73,10 @@ export const start: ModeRules<StartMode> = {
       ? state
       : { ...state, mode: { ...mode, edit: inserted(mode.edit, text), fault: null } },
   draw(state, mode, canvas, glyphs) {
+    if (isTooSmall(canvas.columns, canvas.rows)) {
+      drawTooSmall(canvas);
+      return null;
+    }
     const place = drawStart(startView(mode, unitsOf(state)), canvas, glyphs);
     return place === null ? null : { ...place, value: mode.edit.text, cursor: mode.edit.cursor };
   },
@@ -73,7 +88,9 @@ function asking(state: State, mode: StartMode, next: Partial<StartMode>): Step {
 
 function choose(state: State, mode: StartMode, press: KeyPress): Step {
   if (isCancel(press) || (press.name === 'char' && press.char === 'q'))
-    return mode.addTo === null ? { state, effects: [{ do: 'leave' }] } : still({ ...state, mode: mode.addTo });
+    return mode.addTo === null
+      ? { state, effects: [{ do: 'leave' }] }
+      : still({ ...state, mode: mode.addTo });
   const lines = startLines(mode);
   const line = scrolled(mode.line, press, lines.length - 1);
   if (line !== null) return asking(state, mode, { line, fault: null });
@@ -106,7 +123,8 @@ const RANGE = { span: { least: 12, most: 1200 }, width: { least: 1, most: 1200 }
 function answer(state: State, mode: StartMode): Step {
   const text = mode.edit.text.trim();
   if (mode.step === 'file') {
-    if (text === '') return asking(state, mode, { fault: 'type the name of a session file, such as job.json' });
+    if (text === '')
+      return asking(state, mode, { fault: 'type the name of a session file, such as job.json' });
     return opening(state, mode, { file: text });
   }
   const kind = kindOf(mode);
@@ -152,7 +170,10 @@ function made(state: State, mode: StartMode, kind: MemberKind, width: number): S
     const first = { session: begun, kept: null, member: 0, knob: 'spans.0', notice: null };
     return { ...state, ...first, mode: EXPLORE };
   }
-  const next = withSession(state, withMemberAfter(session, state.member, { member: sized, written: undefined }));
+  const next = withSession(
+    state,
+    withMemberAfter(session, state.member, { member: sized, written: undefined }),
+  );
   if (next.session === session) return { ...next, mode: mode.addTo };
   const text = `${sized.name} added${best === null ? ', and no size passes' : ''}; Enter opens it, u undoes it`;
   return {

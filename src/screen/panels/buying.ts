@@ -2,13 +2,11 @@ import type { BuyingView } from '../buying-view.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, clip, keepToGlyphs, shorten, wrap } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { Notice } from '../state.ts';
-import type { View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import type { Place } from './prompt.ts';
 import { rule } from './region.ts';
 import { drawHeads, drawTableRow, placeColumns, windowStart } from './table.ts';
-import { drawTitle } from './title.ts';
+import { drawBegun, type Framed } from './title.ts';
 
 /** Title, two rows of what it goes by, heads. */
 const ABOVE = 4;
@@ -25,17 +23,10 @@ const MOST_COLUMNS = 130;
 /** The words before a field take no more than this part of the row. */
 const ASKS = 0.4;
 
-interface Screen {
-  readonly title: View['title'];
-  readonly notice: Notice | null;
-}
-
 /** Every size of the rack with what it takes to buy; gives the place of the field being typed into. */
-export function drawBuying(screen: Screen, view: BuyingView, canvas: Canvas, glyphs: Glyphs): Place | null {
-  canvas.glyphs.fill(' ');
-  canvas.styles.fill(0);
+export function drawBuying(screen: Framed, view: BuyingView, canvas: Canvas, glyphs: Glyphs): Place | null {
   const { columns } = canvas;
-  drawTitle(screen, canvas, { x: 0, y: 0, columns, rows: 1 }, glyphs);
+  drawBegun(screen, canvas, glyphs);
   view.status.forEach((text, at) => {
     canvas.put(1, 1 + at, clip(cells(text), columns - 2, glyphs), 'quiet');
   });
@@ -72,7 +63,7 @@ function drawSizes(view: BuyingView, canvas: Canvas, glyphs: Glyphs): void {
 }
 
 /** The size in hand in full, and below it the keys or the message of the moment. */
-function drawNote({ notice }: Screen, view: BuyingView, canvas: Canvas, width: number, glyphs: Glyphs): null {
+function drawNote({ notice }: Framed, view: BuyingView, canvas: Canvas, width: number, glyphs: Glyphs): null {
   const { columns, rows } = canvas;
   wrap(cells(view.note), width, noteRows(canvas), glyphs).forEach((text, at) => {
     canvas.put(1, rows - below(canvas) + at, text);

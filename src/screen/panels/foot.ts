@@ -10,7 +10,12 @@ const ALL_KEYS = '?';
 const GAP = 2;
 
 /** The keys that matter now, or the message of the moment in their place. */
-export function drawFoot(view: Pick<View, 'notice' | 'foot'>, canvas: Canvas, region: Region, glyphs: Glyphs): void {
+export function drawFoot(
+  view: Pick<View, 'notice' | 'foot'>,
+  canvas: Canvas,
+  region: Region,
+  glyphs: Glyphs,
+): void {
   if (view.notice === null) {
     drawKeys(view.foot, canvas, region.x + 1, region.x + region.columns - 1, region.y, glyphs);
     return;

@@ -2,13 +2,11 @@ import type { Canvas } from '../draw/canvas.ts';
 import { cells, clip, keepToGlyphs } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { MembersView } from '../members-view.ts';
-import type { Notice } from '../state.ts';
-import type { View } from '../view.ts';
 import { drawLastRow } from './foot.ts';
 import { drawQuestion, type Place } from './prompt.ts';
 import { rule } from './region.ts';
 import { drawHeads, drawTableRow, placeColumns, windowStart } from './table.ts';
-import { drawTitle } from './title.ts';
+import { drawBegun, type Framed } from './title.ts';
 
 /** Title, status, heads. */
 const ABOVE = 3;
@@ -19,18 +17,11 @@ const MOST_COLUMNS = 180;
 /** Most rows of who loses what. */
 const MOST_NOTES = 8;
 
-interface Screen {
-  readonly title: View['title'];
-  readonly notice: Notice | null;
-}
-
 /** The members of a session, one a row, and who carries whom; gives the place of the field being typed into. */
-export function drawMembers(screen: Screen, view: MembersView, canvas: Canvas, glyphs: Glyphs): Place | null {
-  canvas.glyphs.fill(' ');
-  canvas.styles.fill(0);
+export function drawMembers(screen: Framed, view: MembersView, canvas: Canvas, glyphs: Glyphs): Place | null {
   const { columns, rows } = canvas;
   const width = Math.min(columns, MOST_COLUMNS);
-  drawTitle(screen, canvas, { x: 0, y: 0, columns, rows: 1 }, glyphs);
+  drawBegun(screen, canvas, glyphs);
   canvas.put(1, 1, clip(cells(view.status), columns - 2, glyphs), 'quiet');
   const heads = { x: 0, y: ABOVE - 1, columns, rows: 1 };
   rule(canvas, heads, glyphs);
@@ -46,7 +37,15 @@ export function drawMembers(screen: Screen, view: MembersView, canvas: Canvas, g
     else if (at === 0 && from > 0) canvas.put(1, y, glyphs.further[0], 'quiet');
     else if (at === shown - 1 && from + shown < view.rows.length)
       canvas.put(1, y, glyphs.further[1], 'quiet');
-    drawTableRow({ ...row, style: held ? 'nowStrong' : row.style }, view.columns, placed, canvas, y, columns, glyphs);
+    drawTableRow(
+      { ...row, style: held ? 'nowStrong' : row.style },
+      view.columns,
+      placed,
+      canvas,
+      y,
+      columns,
+      glyphs,
+    );
   });
   drawNotes(view, canvas, glyphs);
   const place = view.question === null ? null : drawQuestion(view.question, canvas, glyphs);

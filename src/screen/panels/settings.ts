@@ -3,12 +3,11 @@ import { cells, clip, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { SettingsRow, SettingsView } from '../settings-view.ts';
 import type { Notice } from '../state.ts';
-import type { View } from '../view.ts';
 import { drawLastRow } from './foot.ts';
 import type { Place } from './prompt.ts';
 import { rule } from './region.ts';
 import { windowStart } from './table.ts';
-import { drawTitle } from './title.ts';
+import { drawBegun, type Framed } from './title.ts';
 
 /** Title, rule. */
 const ABOVE = 2;
@@ -20,17 +19,15 @@ const VALUE = 18;
 const VALUE_CELLS = 36;
 const WIDE = 110;
 
-interface Screen {
-  readonly title: View['title'];
-  readonly notice: Notice | null;
-}
-
 /** What is set for the whole session, one setting a row; gives the place of the field being typed into. */
-export function drawSettings(screen: Screen, view: SettingsView, canvas: Canvas, glyphs: Glyphs): Place | null {
-  canvas.glyphs.fill(' ');
-  canvas.styles.fill(0);
+export function drawSettings(
+  screen: Framed,
+  view: SettingsView,
+  canvas: Canvas,
+  glyphs: Glyphs,
+): Place | null {
   const { columns, rows } = canvas;
-  drawTitle(screen, canvas, { x: 0, y: 0, columns, rows: 1 }, glyphs);
+  drawBegun(screen, canvas, glyphs);
   rule(canvas, { x: 0, y: 1, columns, rows: 1 }, glyphs);
   const shown = Math.max(1, rows - ABOVE - BELOW);
   const from = windowStart(view.rows.length, shown, view.inHand);
@@ -38,9 +35,9 @@ export function drawSettings(screen: Screen, view: SettingsView, canvas: Canvas,
     const held = from + at === view.inHand;
     drawRow(row, held, canvas, ABOVE + at, glyphs);
     if (held) canvas.put(1, ABOVE + at, glyphs.hand, 'nowStrong');
-    else if (at === 0 && from > 0) canvas.put(1, ABOVE + at, glyphs.further[0], 'quiet');
+    else if (at === 0 && from > 0) canvas.put(0, ABOVE + at, glyphs.further[0], 'quiet');
     else if (at === shown - 1 && from + shown < view.rows.length)
-      canvas.put(1, ABOVE + at, glyphs.further[1], 'quiet');
+      canvas.put(0, ABOVE + at, glyphs.further[1], 'quiet');
   });
   drawBelow(screen.notice, view, canvas, glyphs);
   keepToGlyphs(canvas, glyphs);
@@ -50,7 +47,7 @@ export function drawSettings(screen: Screen, view: SettingsView, canvas: Canvas,
 
 function drawRow(row: SettingsRow, held: boolean, canvas: Canvas, y: number, glyphs: Glyphs): void {
   if ('heading' in row) {
-    canvas.put(1, y, row.heading, 'quiet');
+    canvas.put(2, y, row.heading, 'quiet');
     return;
   }
   const wide = canvas.columns >= WIDE;

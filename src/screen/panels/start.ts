@@ -7,9 +7,8 @@ import { drawPrompt, type Place } from './prompt.ts';
 import { windowStart } from './table.ts';
 
 const LEFT = 3;
-/** Cells of the key, and of the names before what is said of them. */
+/** Cells of the key. */
 const KEY = 3;
-const NAME = 28;
 /** Title and a blank row; a blank row, two of what is asked or told, and the foot. */
 const ABOVE = 2;
 const BELOW = 4;
@@ -25,9 +24,16 @@ export function drawStart(view: StartView, canvas: Canvas, glyphs: Glyphs): Plac
   const from = windowStart(view.rows.length, shown, view.inHand);
   view.rows.slice(from, from + shown).forEach((row, at) => {
     const index = from + at;
-    drawRow(row, index === view.inHand, view.question !== null, canvas, ABOVE + at, glyphs);
-    if (index !== view.inHand && at === 0 && from > 0) canvas.put(1, ABOVE, glyphs.further[0], 'quiet');
-    if (at === shown - 1 && index < view.rows.length - 1) canvas.put(1, ABOVE + at, glyphs.further[1], 'quiet');
+    drawRow(
+      row,
+      { inHand: index === view.inHand, answered: view.question !== null, name: nameCells(view, row) },
+      canvas,
+      ABOVE + at,
+      glyphs,
+    );
+    if (index !== view.inHand && at === 0 && from > 0) canvas.put(0, ABOVE, glyphs.further[0], 'quiet');
+    if (at === shown - 1 && index < view.rows.length - 1)
+      canvas.put(0, ABOVE + at, glyphs.further[1], 'quiet');
   });
   const fault = view.fault === null ? [] : wrap(cells(view.fault), columns - 2, FAULT_ROWS, glyphs);
   const faultFrom = rows - 1 - (view.question === null ? 0 : 1) - fault.length;
@@ -41,16 +47,22 @@ export function drawStart(view: StartView, canvas: Canvas, glyphs: Glyphs): Plac
   return place;
 }
 
+/** Cells of the names before what is said of them: of the numbered lines, or of the others. */
+function nameCells({ rows }: StartView, of: StartRow): number {
+  const numbered = (row: StartRow) => 'key' in row && row.key !== '';
+  const names = rows.filter((row) => 'text' in row && row.about !== '' && numbered(row) === numbered(of));
+  return Math.max(0, ...names.map((row) => ('text' in row ? cells(row.text).length : 0)));
+}
+
 function drawRow(
   row: StartRow,
-  inHand: boolean,
-  answered: boolean,
+  { inHand, answered, name: cellsOfName }: { inHand: boolean; answered: boolean; name: number },
   canvas: Canvas,
   y: number,
   glyphs: Glyphs,
 ): void {
   if ('heading' in row) {
-    canvas.put(1, y, row.heading, 'quiet');
+    canvas.put(2, y, row.heading, 'quiet');
     return;
   }
   const style = inHand ? 'nowStrong' : answered ? 'quiet' : 'plain';
@@ -58,8 +70,8 @@ function drawRow(
   canvas.put(LEFT, y, row.key, 'quiet');
   const x = LEFT + KEY;
   const room = canvas.columns - x - 1;
-  const name = shorten(cells(row.text), row.about === '' ? room : Math.min(room, NAME), glyphs);
-  canvas.put(x, y, name, style);
-  const about = x + Math.max(NAME, name.length) + 2;
-  if (row.about !== '') canvas.put(about, y, clip(cells(row.about), canvas.columns - about - 1, glyphs), 'quiet');
+  canvas.put(x, y, shorten(cells(row.text), Math.min(room, cellsOfName), glyphs), style);
+  const about = x + cellsOfName + 2;
+  if (row.about !== '')
+    canvas.put(about, y, clip(cells(row.about), canvas.columns - about - 1, glyphs), 'quiet');
 }

@@ -64,7 +64,10 @@ export function placeColumns(
     shown = shown.filter((at) => at !== first);
   }
   while (total() > width) {
-    const texts = shown.filter((at) => isText(at) && needed[at]! > LEAST_TEXT);
+    const longer = (least: (at: number) => number) =>
+      shown.filter((at) => isText(at) && needed[at]! > least(at));
+    const spared = longer((at) => columns[at]!.least ?? SHORT_TEXT);
+    const texts = spared.length > 0 ? spared : longer(() => LEAST_TEXT);
     if (texts.length === 0) break;
     const widest = texts.reduce((a, b) => (needed[b]! > needed[a]! ? b : a));
     needed[widest]! -= 1;

@@ -1,6 +1,7 @@
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
+import type { Notice } from '../state.ts';
 import type { View } from '../view.ts';
 import type { Region } from './region.ts';
 import { writeRight } from './region.ts';
@@ -10,6 +11,19 @@ const PROGRAM = 'thrice';
 const LEAST_SESSION = 12;
 /** From this many columns the method stands in the title, and the position says what it counts. */
 const WIDE = 100;
+
+/** What every view of its own shows beside what it is about. */
+export interface Framed {
+  readonly title: View['title'];
+  readonly notice: Notice | null;
+}
+
+/** An empty canvas with the title on its first row. */
+export function drawBegun(view: Pick<Framed, 'title'>, canvas: Canvas, glyphs: Glyphs): void {
+  canvas.glyphs.fill(' ');
+  canvas.styles.fill(0);
+  drawTitle(view, canvas, { x: 0, y: 0, columns: canvas.columns, rows: 1 }, glyphs);
+}
 
 /** One row: the program, the session and member at hand, the method, the place in the list, kept or not. */
 export function drawTitle(view: Pick<View, 'title'>, canvas: Canvas, region: Region, glyphs: Glyphs): void {

@@ -156,16 +156,14 @@ export class Pages {
     this.#bookmark?.addItem(safe(text), { top: this.y });
   }
 
-  /** A place on the page leads to a section. */
+  /** A place on the page leads to a section; `link` is the element of the text there. */
   leadTo(
-    element: Element,
+    link: Element,
     id: string,
     [x, y, width, height]: readonly [number, number, number, number],
     says: string,
   ): void {
-    const link = this.within(element, 'Link');
     this.doc.goTo(x, y, width, height, id, { structParent: link, Contents: new String(safe(says)) } as never);
-    link.end();
   }
 
   /** The lines below, now that the number of pages is known, and the bytes. */

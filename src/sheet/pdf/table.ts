@@ -80,6 +80,8 @@ export function tableBlock(pages: Pages, parent: Element, table: Table): void {
     const cells = row.cells.map((_, at) =>
       at === 0 ? pages.within(rowElement, 'TH', { scope: 'Row' } as never) : pages.within(rowElement, 'TD'),
     );
+    const link = row.leadsTo === undefined ? null : pages.within(cells[0]!, 'Link');
+    const owners = link === null ? cells : [link, ...cells.slice(1)];
     for (let done = 0; done < lines.height; ) {
       const whole = lines.height * leading + 2 * PADDING;
       // A row that fits on a page is not torn.
@@ -91,10 +93,10 @@ export function tableBlock(pages: Pages, parent: Element, table: Table): void {
       const fit = Math.max(1, Math.floor((pages.bottom - pages.y - 2 * PADDING) / leading));
       const to = Math.min(lines.height, done + fit);
       const top = pages.y;
-      slice(lines, style, done, to, cells);
-      if (done === 0 && row.leadsTo !== undefined) {
-        const { leadsTo } = row;
-        pages.leadTo(cells[0]!, leadsTo, [lefts[0]!, top, widths[0]!, pages.y - top], row.cells[0]!);
+      slice(lines, style, done, to, owners);
+      if (done === 0 && link !== null) {
+        const place = [lefts[0]!, top, widths[0]!, pages.y - top] as const;
+        pages.leadTo(link, row.leadsTo!, place, row.cells[0]!);
       }
       done = to;
     }

@@ -68,6 +68,11 @@ export function prepare(member: Member, options: PrepareOptions = {}): Prepared 
   return prepared;
 }
 
+/** Lets go of what was prepared for a member that is done with: in a run over many the collector comes late to it. */
+export function forgetPrepared(member: Member): void {
+  KNOWN.delete(member);
+}
+
 function searched(member: Member, heaviest: number): Prepared {
   return withEffects(
     member,

@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import {
+  allCarriers,
   borneOf,
   borneText,
   carriedBy,
@@ -290,6 +291,9 @@ describe('the links of a job', () => {
     expect(carriersOf(job, 'J1').map(({ carrier, index }) => [carrier, index])).toEqual([['G1', 0]]);
     expect(carriedBy(job, 'G2').map(({ link }) => link.member)).toEqual(['G1']);
     expect(carriersOf(job, 'G2')).toEqual([]);
+    const all = allCarriers(job);
+    for (const { member } of job.members)
+      expect(all.get(member.name) ?? []).toEqual(carriersOf(job, member.name));
     expect(whoLoses(job, 'J1', 'us')).toEqual(['G1 loses J1 right end every 16": D 72, L 240 plf']);
     expect(whoLoses(job, 'G1', 'si')).toEqual([
       `G2 loses G1 left end at 1.524 m: D ${((6 * 84 * 4.4482216152605) / 1000).toFixed(2)}, L ${((20 * 84 * 4.4482216152605) / 1000).toFixed(2)} kN`,

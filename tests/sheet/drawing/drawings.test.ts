@@ -45,7 +45,7 @@ describe('the drawings of a sheet', () => {
           }
         },
       ),
-      { numRuns: 40 },
+      { numRuns: 25 },
     );
   });
 
