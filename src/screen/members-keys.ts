@@ -7,6 +7,7 @@ export type MembersAction =
   | 'add'
   | 'duplicate'
   | 'rename'
+  | 'note'
   | 'delete'
   | 'up'
   | 'down'
@@ -47,6 +48,12 @@ export const MEMBERS_BINDINGS: readonly {
     presses: { n: 'rename' },
     help: 'name it otherwise; links to it and its trail go along',
     foot: 'name',
+  },
+  {
+    keys: 'e',
+    presses: { e: 'note' },
+    help: 'write a note on it: what it is, where it stands',
+    foot: 'note',
   },
   {
     keys: 'Delete',

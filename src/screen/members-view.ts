@@ -248,13 +248,13 @@ function questionOf(state: State, { asks }: MembersMode): MembersView['question'
   const { name } = memberOf(state);
   if (asks.of === 'delete')
     return { asks: `delete ${name}?`, told: 'Enter deletes it, Esc leaves it', isFault: false };
-  const told =
-    asks.of === 'name'
-      ? 'Enter names it so, Esc leaves the old name'
-      : 'words of the name, note, size, wood or what governs; Enter keeps the filter, Esc clears it';
-  return {
-    asks: asks.of === 'name' ? `${name} shall be called` : 'filter',
-    told: asks.fault ?? told,
-    isFault: asks.fault !== null,
-  };
+  const [asked, told] = {
+    name: [`${name} shall be called`, 'Enter names it so, Esc leaves the old name'],
+    note: [`note on ${name}`, 'what it is, where it stands; Enter writes it, Esc leaves the old note'],
+    filter: [
+      'filter',
+      'words of the name, note, size, wood or what governs; Enter keeps the filter, Esc clears it',
+    ],
+  }[asks.of] as [string, string];
+  return { asks: asked, told: asks.fault ?? told, isFault: asks.fault !== null };
 }

@@ -271,7 +271,7 @@ export interface MembersMode {
 }
 
 export type MembersQuestion =
-  | { readonly of: 'filter' | 'name'; readonly edit: Edit; readonly fault: string | null }
+  | { readonly of: 'filter' | 'name' | 'note'; readonly edit: Edit; readonly fault: string | null }
   /** Whether the member in hand shall go, though others carry it. */
   | { readonly of: 'delete' };
 

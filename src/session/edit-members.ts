@@ -12,6 +12,12 @@ export function nameFault({ members }: Session, name: string, own: string | null
   return `${quoted(name)} is the name of another member; names must differ`;
 }
 
+/** Why a text of so many characters at most may not stand in a file; null where it may. */
+export function textFault(text: string, most: number): string | null {
+  if (text.length > most) return `at most ${most} characters stand here, and this has ${text.length}`;
+  return isHarmful(text) ? 'holds control or invisible characters; leave them out' : null;
+}
+
 /** The first of J1, J2, J3 ... that no member has; the mark is cut where its number would not fit. */
 export function freeName({ members }: Session, mark: string): string {
   const taken = new Set(members.map(({ member }) => member.name));

@@ -2,6 +2,7 @@ export {
   freeName,
   fullFault,
   nameFault,
+  textFault,
   toldName,
   withDuplicate,
   withMemberAfter,

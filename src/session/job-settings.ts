@@ -3,10 +3,9 @@ import { woodKnobs } from '../explore/knobs/wood.ts';
 import { BEST_WORD } from '../explore/rack/best.ts';
 import { nearestSection } from '../explore/rack/choose-wood.ts';
 import { COMBINATION_SETS } from '../loads/loading.ts';
-import { isHarmful } from '../quantity/index.ts';
 import { checkStock } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
-import { withCombinations } from './edit-members.ts';
+import { textFault, withCombinations } from './edit-members.ts';
 import { newMember, USUAL_STOCK } from './new-member.ts';
 import { bestChoices } from './ranking.ts';
 import { MAX_SHEET_ENTRY, MAX_TITLE, PAPERS, type Session, type SheetKeys } from './session.ts';
@@ -59,11 +58,6 @@ function choice<T extends string>(
   };
 }
 
-function typedFault(text: string, most: number): string | null {
-  if (text.length > most) return `at most ${most} characters stand here, and this has ${text.length}`;
-  return isHarmful(text) ? 'holds control or invisible characters; leave them out' : null;
-}
-
 function titleEntry(key: Exclude<keyof SheetKeys, 'paper'>, label: string, about: string): JobSetting {
   return {
     key: `sheet.${key}`,
@@ -72,7 +66,7 @@ function titleEntry(key: Exclude<keyof SheetKeys, 'paper'>, label: string, about
     part: 'title block',
     show: ({ sheet }) => sheet?.[key] ?? '',
     enter(session, text) {
-      const fault = typedFault(text, MAX_SHEET_ENTRY);
+      const fault = textFault(text, MAX_SHEET_ENTRY);
       return fault === null ? { session: withSheet(session, key, text) } : { fault };
     },
     clear: (session) => withSheet(session, key, undefined),
@@ -151,7 +145,7 @@ const SETTINGS: readonly JobSetting[] = [
     part: 'session',
     show: ({ title }) => title,
     enter(session, text) {
-      const fault = typedFault(text, MAX_TITLE);
+      const fault = textFault(text, MAX_TITLE);
       return fault === null ? { session: { ...session, title: text } } : { fault };
     },
     clear: (session) => ({ ...session, title: '' }),

@@ -144,6 +144,8 @@ function ofMember(state: State, mode: MembersMode, action: MembersAction): State
       return duplicate(state);
     case 'rename':
       return typing(state, mode, { of: 'name', edit: editOf(memberOf(state).name), fault: null });
+    case 'note':
+      return typing(state, mode, { of: 'note', edit: editOf(memberOf(state).note), fault: null });
     case 'delete':
       return askDelete(state, mode);
     case 'up':
