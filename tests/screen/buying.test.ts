@@ -9,11 +9,10 @@ import { memberOf, type State } from '../../src/screen/state.ts';
 import { rankingOf, readSession, writeSession } from '../../src/session/index.ts';
 import type { Session } from '../../src/session/session.ts';
 import { command, sessionFile } from '../support/session.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { afterEvents, pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii, unicode } from './panels/support.ts';
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const text = (state: State, columns = 120, rows = 36) => shown(state, columns, rows).join('\n');
 /** On one line, as the words follow each other. */
 const unwrapped = (state: State) => text(state).replace(/\s+/g, ' ');
@@ -55,17 +54,7 @@ describe('the buying view', () => {
     'buying-typing': () => pressing(opened(stateOf()), 'p', ...keys('1.2')).state,
     'buying-fault': () => typing(opened(inYard()), 'y', '2x13; DF-L; No.2'),
   };
-  for (const [name, view] of Object.entries(VIEWS)) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const lines = shown({ ...view(), columns, rows }, columns, rows);
-        await expect(`${lines.join('\n')}\n`).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept(VIEWS);
 
   it('stands at any size from 60 x 18 to 220 x 60, in ASCII and in SI', () => {
     for (const view of Object.values(VIEWS)) {

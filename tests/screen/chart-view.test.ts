@@ -3,14 +3,12 @@ import { capacityOf } from '../../src/explore/capacity.ts';
 import { knobsOf } from '../../src/explore/knobs/knobs.ts';
 import { ratiosOf } from '../../src/explore/ratios.ts';
 import { crossoversOf } from '../../src/screen/chart-view.ts';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State } from '../../src/screen/state.ts';
 import { viewOf } from '../../src/screen/view-model.ts';
+import { shown } from '../support/shown.ts';
 import { afterEvents, pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii } from './panels/support.ts';
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const chart = (state: State) => viewOf(state).chart!;
 const weight = (part = {}) => pressing(stateOf([part]), 'C').state;
 const capacity = (part = {}) => pressing(stateOf([part]), 'C', 'C').state;

@@ -2,16 +2,14 @@ import { describe, expect, it } from 'vitest';
 import { handoversOf } from '../../src/explore/handovers/handovers.ts';
 import { sweepsOf } from '../../src/explore/handovers/sweep.ts';
 import { rankedRack } from '../../src/explore/rack/ranked.ts';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { restOf } from '../../src/screen/rest.ts';
-import { type HandoversMode, memberOf, type State } from '../../src/screen/state.ts';
+import { type HandoversMode, memberOf } from '../../src/screen/state.ts';
 import { viewOf } from '../../src/screen/view-model.ts';
 import { rankingOf } from '../../src/session/index.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { atRest, pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii } from './panels/support.ts';
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const onLive = () => ({ ...stateOf(), knob: 'area.live' });
 const PSF = 1 / 144;
 
@@ -84,21 +82,10 @@ describe('the handovers beside the rack', () => {
 });
 
 describe('the strip of handovers', () => {
-  for (const [name, from] of Object.entries({
-    'handovers-span': () => stateOf(),
-    'handovers-live': onLive,
-  })) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const state = atRest(pressing({ ...from(), columns, rows }, 'H').state);
-        const text = `${shown(state, columns, rows).join('\n')}\n`;
-        await expect(text).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept({
+    'handovers-span': (size) => atRest(pressing({ ...stateOf(), ...size }, 'H').state),
+    'handovers-live': (size) => atRest(pressing({ ...onLive(), ...size }, 'H').state),
+  });
 
   it('opens at once, is found after the frame and is what the core finds', () => {
     const open = pressing(stateOf(), 'H').state;

@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { clearHeight } from '../../src/explore/headroom.ts';
-import { drawState } from '../../src/screen/draw-state.ts';
-import { type HeadroomMode, memberOf, type State } from '../../src/screen/state.ts';
+import { type HeadroomMode, memberOf } from '../../src/screen/state.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii } from './panels/support.ts';
 
 /** 9'-0" less 7'-6", 1 1/2", 9 1/4" and 5/8" leave 6 5/8" (by hand). */
 const TIGHT = {
@@ -17,8 +17,6 @@ const TIGHT = {
 };
 const FLUSH = { headroom: { ...TIGHT.headroom, clear: '7 ft', beam: 'flush' } };
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const open = (part: Record<string, unknown> = {}, ...keys: string[]) =>
   pressing(stateOf([part]), 'h', ...keys).state;
 
@@ -28,17 +26,7 @@ describe('the headroom view', () => {
     'headroom-flush': () => open(FLUSH, 'down', '9'),
     'headroom-usual': () => open(),
   };
-  for (const [name, view] of Object.entries(views)) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const text = `${shown(view(), columns, rows).join('\n')}\n`;
-        await expect(text).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept(views);
 
   it('says what is left, and by how much the beam and every size too deep are over', () => {
     const text = shown(open(TIGHT), 120, 60).join('\n');

@@ -1,10 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State } from '../../src/screen/state.ts';
 import { writeSession } from '../../src/session/index.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { afterEvents, press, pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii } from './panels/support.ts';
 
 const JOIST = {
   name: 'J1',
@@ -33,8 +33,6 @@ const SILL = {
 /** Joist, girder, sill, and a beam apart. */
 const house = (member = 0) =>
   stateOf([JOIST, GIRDER, SILL, { name: 'B4', links: undefined }], { member, settled: true });
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const text = (state: State) => shown(state, 120, 36).join('\n');
 const settle = (state: State, times = 4) =>
   afterEvents(state, ...Array.from({ length: times }, () => ({ type: 'settle' }) as const)).state;
@@ -46,17 +44,7 @@ describe('the links view', () => {
     'links-typing': () => pressing(house(2), 'K', '5').state,
     'links-none': () => pressing(house(3), 'K').state,
   };
-  for (const [name, view] of Object.entries(views)) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const lines = `${shown(view(), columns, rows).join('\n')}\n`;
-        await expect(lines).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept(views);
 
   it('fits every screen, also without signs', () => {
     for (const [columns, rows] of [

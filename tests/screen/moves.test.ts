@@ -1,16 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import { movesOf } from '../../src/explore/moves/index.ts';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { type MovesMode, memberOf, type State } from '../../src/screen/state.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii } from './panels/support.ts';
 
 const FAILING = { spans: ['16 ft'] };
 const UNLOADED = { area: {} };
 
 const open = (part: Record<string, unknown> = FAILING) => pressing(stateOf([part]), 'm').state;
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const mode = (state: State) => state.mode as MovesMode;
 
 describe('the moves view', () => {
@@ -19,17 +17,7 @@ describe('the moves view', () => {
     'moves-side': () => pressing(open(), 'up', 'right').state,
     'moves-unloaded': () => open(UNLOADED),
   };
-  for (const [name, view] of Object.entries(views)) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const text = `${shown(view(), columns, rows).join('\n')}\n`;
-        await expect(text).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept(views);
 
   it('applies the best move with two keys, and one key undoes it', () => {
     const start = stateOf([FAILING]);

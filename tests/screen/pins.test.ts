@@ -1,13 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { pinsOf } from '../../src/screen/pins.ts';
 import { type CompareMode, isKept, memberOf, type State } from '../../src/screen/state.ts';
 import { readSession, writeSession } from '../../src/session/index.ts';
+import { shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii } from './panels/support.ts';
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const mode = (state: State) => state.mode as CompareMode;
 /** Three designs pinned: as it was, deeper, in glulam; the last at hand and nudged. */
 const three = () =>

@@ -1,15 +1,12 @@
 import { describe, expect, it } from 'vitest';
 import { Canvas } from '../../src/screen/draw/canvas.ts';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { drawProportions } from '../../src/screen/panels/proportions.ts';
 import { type ProportionView, proportionView } from '../../src/screen/proportion-view.ts';
-import type { State } from '../../src/screen/state.ts';
 import { titleOf } from '../../src/screen/view-model.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const open = (part: Record<string, unknown> = {}) => pressing(stateOf([part]), '=').state;
 const pinned = () => pressing(stateOf(), 'p', 'd', 'right', 'p', 'left', 'left', '=').state;
 /** What is drawn of a view made by hand. */
@@ -21,20 +18,7 @@ const drawn = (view: Partial<ProportionView>) => {
 };
 
 describe('the proportion chart', () => {
-  for (const [name, view] of Object.entries({
-    'proportions-simple': () => open(),
-    'proportions-pins': pinned,
-  })) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const text = `${shown(view(), columns, rows).join('\n')}\n`;
-        await expect(text).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept({ 'proportions-simple': () => open(), 'proportions-pins': pinned });
 
   it('names the three laws, the crossovers, now and where the member stands to', () => {
     const text = shown(open(), 120, 36).join('\n');

@@ -6,11 +6,9 @@ import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State } from '../../src/screen/state.ts';
 import type { Session } from '../../src/session/session.ts';
 import { CHECK_WORD } from '../../src/timber/words.ts';
+import { framesAreKept, shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';
-
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 
 const ANY = { product: null, species: null, grade: null };
 /** A yard of three sizes, each at a price of its own. */
@@ -29,18 +27,10 @@ function inYard(): State {
 }
 
 describe('the reach table', () => {
-  for (const [name, view] of Object.entries({ 'reach-simple': () => stateOf(), 'reach-yard': inYard })) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        const state = pressing({ ...view(), columns, rows }, 'e').state;
-        const text = `${shown(state, columns, rows).join('\n')}\n`;
-        await expect(text).toMatchFileSnapshot(`./frames/${name}-${columns}x${rows}.txt`);
-      });
-    }
-  }
+  framesAreKept({
+    'reach-simple': (size) => pressing({ ...stateOf(), ...size }, 'e').state,
+    'reach-yard': (size) => pressing({ ...inYard(), ...size }, 'e').state,
+  });
 
   it('tells the longest span of every size and what stops it there', () => {
     const state = pressing(stateOf([{}], { columns: 100, rows: 60 }), 'e').state;

@@ -1,13 +1,11 @@
 import { describe, expect, it } from 'vitest';
-import { drawState } from '../../src/screen/draw-state.ts';
 import { scatterRemarks } from '../../src/screen/scatter-text.ts';
-import { memberOf, type State } from '../../src/screen/state.ts';
+import { memberOf } from '../../src/screen/state.ts';
 import { viewOf } from '../../src/screen/view-model.ts';
+import { shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
-import { ascii, frame, unicode } from './panels/support.ts';
+import { ascii, unicode } from './panels/support.ts';
 
-const shown = (state: State, columns: number, rows: number, glyphs = unicode) =>
-  frame(drawState({ ...state, columns, rows }, glyphs).canvas);
 const CUSTOM = {
   stock: {
     product: 'custom',

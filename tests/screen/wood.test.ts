@@ -6,6 +6,7 @@ import { drawState } from '../../src/screen/draw-state.ts';
 import { memberOf, type State, type WoodMode } from '../../src/screen/state.ts';
 import { rankingOf } from '../../src/session/index.ts';
 import { checkStock } from '../../src/timber/index.ts';
+import { framesAreKept } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';
 
@@ -39,18 +40,7 @@ describe('the wood view', () => {
     'wood-typing': () => pressing(at(open(MIXED), 'factors.CL'), ...keys('0.9'), 'enter').state,
     'wood-forbidden': () => open({ service: 'wet' }, ...keys('LVL'), 'enter'),
   };
-  for (const [name, view] of Object.entries(views)) {
-    for (const [columns, rows] of [
-      [80, 24],
-      [120, 36],
-    ] as const) {
-      it(`shows ${name} at ${columns}x${rows} as in its frame`, async () => {
-        await expect(text(view(), columns, rows)).toMatchFileSnapshot(
-          `./frames/${name}-${columns}x${rows}.txt`,
-        );
-      });
-    }
-  }
+  framesAreKept(views);
 
   it('stands in 60 x 18 cells and in ASCII, with nothing beyond the edge', async () => {
     await expect(text(open(MIXED), 60, 18)).toMatchFileSnapshot('./frames/wood-product-60x18.txt');
