@@ -2,15 +2,17 @@ import { execFileSync } from 'node:child_process';
 import { defineConfig } from 'vitest/config';
 
 const seed = seedOfProperties();
+/** Of the runs of costly properties, see tests/support/runs.ts; `npm run fuzz` takes them all. */
+const share = Number(process.env.THRICE_RUNS ?? 1 / 3);
 // Vitest reads this file once in its main process.
-console.log(`property tests start from seed ${seed}`);
+console.log(`property tests start from seed ${seed}; costly ones take ${Math.round(100 * share)} % of their runs`);
 
 export default defineConfig({
   test: {
     include: ['tests/**/*.test.{ts,tsx}'],
     globalSetup: ['tests/support/tally-run.ts'],
     setupFiles: ['tests/support/seed.ts'],
-    env: { THRICE_SEED: String(seed) },
+    env: { THRICE_SEED: String(seed), THRICE_RUNS: String(share) },
     // Generous: property tests and pseudo-terminals share slow machines.
     testTimeout: 60_000,
   },

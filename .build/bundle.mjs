@@ -1,6 +1,8 @@
+import { execFile } from 'node:child_process';
 import { chmod, mkdir, readFile, stat, writeFile } from 'node:fs/promises';
 import { dirname, join, relative } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { promisify } from 'node:util';
 import { fontsWithin } from './fonts.mjs';
 import { segmenter, standIns } from './stand-ins.mjs';
 
@@ -83,9 +85,15 @@ export async function bundle({ entry, outfile, measures = true }) {
   });
   const [output] = outputFiles;
   await mkdir(dirname(output.path), { recursive: true });
-  await writeFile(output.path, output.contents);
+  const code = inAscii(output.text);
+  await writeFile(output.path, code);
   await chmod(output.path, 0o755);
-  return { path: output.path, bytes: output.contents.length, metafile };
+  return { path: output.path, bytes: code.length, metafile };
+}
+
+/** One character beyond ASCII, such as in a pattern, makes the engine read and hold the whole file at two bytes each. */
+function inAscii(code) {
+  return code.replace(/[^\0-\x7f]/g, (unit) => `\\u${unit.charCodeAt(0).toString(16).padStart(4, '0')}`);
 }
 
 /** What is published: the program, and beside it what it loads only when it is asked for. */
@@ -102,6 +110,8 @@ const FILES = [
 /** What the last build was made from, a path a line. */
 const SOURCES = 'dist/thrice.js.sources.txt';
 const LICENSES = 'dist/thrice.js.licenses.txt';
+/** The manual page, as the program itself prints it. */
+const MANUAL = 'dist/thrice.1';
 /** The build itself is a source too. */
 const BUILDERS = [
   '.build/bundle.mjs',
@@ -115,7 +125,8 @@ const BUILDERS = [
 async function isFresh() {
   try {
     const changed = async (path) => (await stat(join(root, path))).mtimeMs;
-    const built = Math.min(...(await Promise.all(FILES.map(({ outfile }) => changed(outfile)))));
+    const outputs = [...FILES.map(({ outfile }) => outfile), MANUAL];
+    const built = Math.min(...(await Promise.all(outputs.map(changed))));
     const sources = (await readFile(join(root, SOURCES), 'utf8')).trim().split('\n');
     const times = await Promise.all(sources.map(changed));
     return times.every((time) => time < built);
@@ -138,6 +149,8 @@ async function buildProgram() {
       root,
     ),
   );
+  const { stdout } = await promisify(execFile)(process.execPath, [join(root, FILES[0].outfile), 'manual']);
+  await writeFile(join(root, MANUAL), stdout);
   for (const { path, bytes } of built) {
     console.log(`${relative(process.cwd(), path)} ${Math.round(bytes / KILOBYTE)} kB`);
   }

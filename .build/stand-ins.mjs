@@ -12,6 +12,7 @@ const PACKAGES = new Map([
 
 /** Modules inside Ink, and what takes their place. */
 const INK_MODULES = new Map([
+  ['./dom.js', inTerminal('ink-dom.ts')],
   ['./output.js', inTerminal('ink-output.ts')],
   ['./line-update.js', inTerminal('ink-line-update.ts')],
   ['./sanitize-ansi.js', inTerminal('ink-sanitize.ts')],
@@ -40,7 +41,7 @@ export const standIns = {
       );
       return;
     }
-    build.onResolve({ filter: /^\.\/(line-update|output|sanitize-ansi)\.js$/ }, ({ path, importer }) =>
+    build.onResolve({ filter: /^\.\/(dom|line-update|output|sanitize-ansi)\.js$/ }, ({ path, importer }) =>
       importer.includes(INK_BUILD) ? standInFor(INK_MODULES.get(path), importer) : undefined,
     );
   },

@@ -1,3 +1,4 @@
+import './commands/working-folder.ts';
 import { once } from 'node:events';
 import packageJson from '../package.json' with { type: 'json' };
 import { run } from './commands/program.ts';

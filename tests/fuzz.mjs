@@ -4,7 +4,9 @@
  */
 import { spawnSync } from 'node:child_process';
 import { randomInt } from 'node:crypto';
-import { readdirSync, readFileSync } from 'node:fs';
+import { mkdtempSync, readdirSync, readFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
 const root = fileURLToPath(new URL('..', import.meta.url));
@@ -22,17 +24,19 @@ const files = readdirSync(`${root}tests`, { recursive: true, encoding: 'utf8' })
   .map((file) => `tests/${file}`)
   .filter((file) => within.length === 0 || within.some((part) => file.startsWith(part)));
 
+// Each round tells the sums of all rounds so far.
+const tally = join(mkdtempSync(join(tmpdir(), 'thrice-fuzz-')), 'counts');
 const end = Date.now() + Number(minutes) * 60_000;
 let rounds = 0;
 while (Date.now() < end) {
   const seed = String(randomInt(2 ** 31));
   const { status } = spawnSync('npx', ['vitest', 'run', '--reporter=dot', ...files], {
     cwd: root,
-    env: { ...process.env, THRICE_SEED: seed },
+    env: { ...process.env, THRICE_SEED: seed, THRICE_RUNS: '1' },
     stdio: 'inherit',
   });
   if (status !== 0) {
-    console.error(`failed from seed ${seed}; again: THRICE_SEED=${seed} npx vitest run FILE`);
+    console.error(`failed from seed ${seed}; again: THRICE_SEED=${seed} THRICE_RUNS=1 npx vitest run FILE`);
     process.exit(1);
   }
   rounds += 1;

@@ -21,6 +21,9 @@ import { type SpansOptions, spans } from './spans.ts';
 import { BadInput, OutputFailed, STATUS } from './status.ts';
 import type { Streams } from './streams.ts';
 
+/** Columns that what an option does is wrapped into beside its longest name, so that no help is wider than 80. */
+const LEAST_HELP_WIDTH = 30;
+
 /** Runs the command that the arguments name and gives its exit status. */
 export async function run(args: readonly string[], version: string, streams: Streams): Promise<number> {
   let status: number = STATUS.yes;
@@ -28,6 +31,7 @@ export async function run(args: readonly string[], version: string, streams: Str
     .description('Settles timber beam proportions: nudge a beam, see the lightest size that passes.')
     .version(version, '--version', 'print the version')
     .helpOption('--help', 'print this help')
+    .configureHelp({ minWidthToWrap: LEAST_HELP_WIDTH })
     .argument('[file]', 'session to open in the explorer; without one it asks for a beam')
     .option('--read-only', 'write nothing: neither the file nor a recovery journal')
     .addHelpText(

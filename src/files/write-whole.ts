@@ -11,6 +11,7 @@ import {
   rmSync,
   type Stats,
   statSync,
+  writeFileSync,
   writeSync,
 } from 'node:fs';
 import { dirname, resolve } from 'node:path';
@@ -29,13 +30,19 @@ export const unfinishedOf = (file: string): string => `${file}.new`;
 
 /**
  * Writes a file whole or not at all, whenever the program or the machine stops: all of it to another name beside it,
- * down to the disk, then in one step under its own name. Throws the system's error; the file is then as it was.
+ * down to the disk, then in one step under its own name. Throws the system's error; the file is then as it was. What is
+ * no plain file (a pipe, a device) is written to as it is.
  */
 export function writeWhole(file: string, content: string | Uint8Array, options: WriteOptions = {}): void {
   const whole = throughLinks(file);
+  const there = statOf(whole);
+  if (there?.isCharacterDevice() || there?.isFIFO()) {
+    writeFileSync(whole, content);
+    return;
+  }
   const unfinished = unfinishedOf(whole);
   try {
-    writeAll(unfinished, content, statOf(options.like ?? whole));
+    writeAll(unfinished, content, options.like === undefined ? there : statOf(options.like));
     if (options.fresh === true) putInFreePlace(unfinished, whole);
     else renameSync(unfinished, whole);
   } catch (error) {

@@ -1,4 +1,19 @@
-import { DEFLECTION, MOMENT, type Order, pieceValue, SHEAR, STRIDE } from '../statics/piece.ts';
+import {
+  DEFLECTION,
+  M0,
+  M1,
+  MOMENT,
+  type Order,
+  pieceValue,
+  Q0,
+  QE,
+  S0,
+  S1,
+  SHEAR,
+  STRIDE,
+  V0,
+  V1,
+} from '../statics/piece.ts';
 import { type Quantity, responseOf } from '../statics/response.ts';
 import type { States } from '../statics/states.ts';
 import type { Combination } from './combinations.ts';
@@ -51,7 +66,7 @@ export function makeUp(loading: Loading, w: number, demand: Demanded): MakeUp | 
     for (let step = 0; step < STEPS; step += 1) {
       for (const read of readersAt(parts, demand, at)) {
         const shares = sharesOf(parts, w, demand, sign, read);
-        const sum = shares.reduce((total, { factor, value }) => total + factor * value, 0);
+        const sum = sumOf(shares);
         if (Math.abs(sum - demand.value) <= SAME * Math.abs(demand.value)) return { at, shares };
       }
       const next = placeUnder(parts, w, demand, sign, at);
@@ -71,22 +86,69 @@ export interface DemandedAt extends Pick<Demanded, 'combination' | 'deadFactor'>
   readonly sign: 1 | -1;
 }
 
+/** A value of a curve, and what each kind of load brings to it: signed as the curve is. */
+export interface MadeUpAt {
+  readonly value: number;
+  readonly shares: readonly Share[];
+}
+
 /**
- * What the largest or smallest value of a curve at one place is made of, under one combination and the pattern that is
- * worst there: shares positive where they add to `sign` times the value. At a jump of shear the side that tells more.
+ * The largest or smallest value of a curve at one place under one combination and the pattern that is worst there, and
+ * what it is made of. At a jump of shear the side that tells more. What is but rounding is left out: what is nothing at
+ * a support or a free end comes out as nothing.
  */
-export function makeUpAt(loading: Loading, w: number, demand: DemandedAt): Share[] {
+export function makeUpAt(loading: Loading, w: number, demand: DemandedAt): MadeUpAt {
   const parts = solveParts(loading);
-  let shares: Share[] = [];
+  const { sign } = demand;
+  let made: MadeUpAt = { value: 0, shares: [] };
   let most = Number.NEGATIVE_INFINITY;
   for (let place = 0; place < parts.grid.first.length - 1; place += 1) {
+    const rounding = ROUNDING * sumOf(sharesOf(parts, w, demand, 1, sizeIn(parts, demand.quantity, place)));
     for (const read of readersAt(parts, { ...demand, place }, demand.at)) {
-      const each = sharesOf(parts, w, demand, demand.sign, read);
-      const sum = each.reduce((total, { factor, value }) => total + factor * value, 0);
-      if (sum > most) [shares, most] = [each, sum];
+      const shares = sharesOf(parts, w, demand, sign, read).filter(({ value }) => Math.abs(value) > rounding);
+      const sum = sumOf(shares);
+      const told = Math.abs(sum) > rounding ? sum : 0;
+      if (told <= most) continue;
+      most = told;
+      made = {
+        value: told === 0 ? 0 : sign * told,
+        shares: shares.map((share) => ({ ...share, value: sign * share.value })),
+      };
     }
   }
-  return shares;
+  return made;
+}
+
+function sumOf(shares: readonly Share[]): number {
+  return shares.reduce((total, { factor, value }) => total + factor * value, 0);
+}
+
+/** As a share of what a number is summed from: rounding stays under a hundredth of it. */
+const ROUNDING = 1e-13;
+
+/** Reads what the values of a quantity in one field are summed from, in its unit: rounding goes by that. */
+function sizeIn({ grid, loading }: LoadParts, quantity: Quantity, place: number): Read {
+  const [from, to] = [grid.first[place]!, grid.first[place + 1]!];
+  const length = grid.edges[to]! - grid.edges[from]!;
+  const stretch = quantity === 'deflection' ? slopeStretch(loading.slope) ** 2 : 1;
+  return ({ data, reactions }) => {
+    const largest = (...items: readonly number[]): number => {
+      let most = 0;
+      for (let p = from; p < to; p += 1)
+        for (const item of items) most = Math.max(most, Math.abs(data[STRIDE * p + item]!));
+      return most;
+    };
+    // A point load at a support shows in its reaction alone.
+    let force = largest(V0, V1) + reactions.reduce((sum, reaction) => sum + Math.abs(reaction), 0);
+    for (let p = from; p < to; p += 1) {
+      const even = Math.max(Math.abs(data[STRIDE * p + Q0]!), Math.abs(data[STRIDE * p + QE]!));
+      force += even * (grid.edges[p + 1]! - grid.edges[p]!);
+    }
+    const bending = largest(M0, M1) + length * force;
+    if (quantity === 'shear') return bending / length;
+    if (quantity === 'moment') return bending;
+    return stretch * length * (largest(S0, S1) + length * bending);
+  };
 }
 
 type Read = (states: States) => number;

@@ -23,7 +23,9 @@ export function answerText(state: State): readonly [string, string, string] {
   const what = [
     `${sizeLabel(member.section, member.stock.product)} ${shortWood(member.stock)}`,
     `span ${spans}`,
-    `tributary ${showSpan(member.tributary, units)}`,
+    member.spacing === null
+      ? `tributary ${showSpan(member.tributary, units)}`
+      : `spacing ${showQuantity('length', member.spacing, units)}`,
     ...loads,
     ...others,
     ...carried,

@@ -8,6 +8,7 @@ import { type RankedRack, rankedRack } from '../explore/rack/ranked.ts';
 import { ratiosOf } from '../explore/ratios.ts';
 import { lazyReaches, type Reaches } from '../explore/reach/reaches.ts';
 import { spanToDepthOf } from '../explore/span-to-depth.ts';
+import { Lately } from '../quantity/lately.ts';
 import { reportMember } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_IDS, type CheckId, type MemberReport } from '../timber/report.ts';
@@ -31,11 +32,14 @@ export interface Answer extends Judgement {
   readonly reaches: Reaches;
 }
 
-const KNOWN = new WeakMap<Ranking, WeakMap<Member, Answer>>();
+/** The member in hand, its ghosts and pins: an answer that has found its reaches holds half a megabyte. */
+const MOST_MEMBERS = 16;
+const MOST_RANKINGS = 4;
+const KNOWN = new Lately<Ranking, Lately<Member, Answer>>(MOST_RANKINGS);
 
 /** The answer for a member; the same object for the same member and the same of what counts as best. */
 export function answerOf(member: Member, ranking: Ranking = BY_WEIGHT): Answer {
-  const answers = KNOWN.get(ranking) ?? new WeakMap<Member, Answer>();
+  const answers = KNOWN.get(ranking) ?? new Lately<Member, Answer>(MOST_MEMBERS);
   KNOWN.set(ranking, answers);
   const known = answers.get(member);
   if (known !== undefined) return known;

@@ -7,6 +7,7 @@ import { gradeWord, hasSize, takeSize } from '../explore/rack/rack.ts';
 import type { RankedSize } from '../explore/rack/ranked.ts';
 import { refusedWord } from '../explore/rack/refused-word.ts';
 import { massUnit, showRatio, showSpan, type Units } from '../quantity/index.ts';
+import { Lately } from '../quantity/lately.ts';
 import { rankingOf } from '../session/index.ts';
 import type { Session } from '../session/session.ts';
 import { PRICE_EXAMPLES, YARD_PARTS } from '../session/yard-text.ts';
@@ -17,7 +18,7 @@ import { type Answer, answerOf } from './answer.ts';
 import { BUYING_BINDINGS } from './buying-keys.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
 import { type BuyingMode, type BuyingQuestion, memberOf, type State, unitsOf } from './state.ts';
-import type { FootView } from './view.ts';
+import { ALL_KEYS, type FootView } from './view.ts';
 
 /** A size that could be bought for the member in hand. */
 export interface BuyingChoice {
@@ -214,7 +215,8 @@ function sourcesText({ yard, prices }: Session): string {
   return [...typed, list].join('; ');
 }
 
-const ORDERS = new WeakMap<Session, Order>();
+const MOST_ORDERS = 4;
+const ORDERS = new Lately<Session, Order>(MOST_ORDERS);
 
 function jobOf(session: Session): Order {
   const known = ORDERS.get(session);
@@ -283,6 +285,7 @@ function footOf({ asks }: BuyingMode): FootView[] {
     ...bound.slice(0, first),
     { keys: 'Esc', does: 'back' },
     ...bound.slice(first),
+    ALL_KEYS,
   ];
 }
 

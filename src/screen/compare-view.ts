@@ -13,6 +13,7 @@ import {
   weightNumber,
   weightUnit,
 } from '../quantity/index.ts';
+import { Lately } from '../quantity/lately.ts';
 import { rankingOf } from '../session/index.ts';
 import { sizeLabel, woodOf } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
@@ -50,7 +51,9 @@ const SHORT_WORD: Readonly<Partial<Record<CheckId, string>>> = {
   slenderness: 'slender',
 };
 
-const KNOWN = new WeakMap<Member, Map<string, string>>();
+/** The member in hand and its pins. */
+const MOST_MEMBERS = 64;
+const KNOWN = new Lately<Member, Map<string, string>>(MOST_MEMBERS);
 
 export function compareView(state: State): CompareView {
   const pins = pinsOf(state);

@@ -18,7 +18,7 @@ import { showSpan } from '../quantity/index.ts';
 import { DOTS_ACROSS } from '../sheet/drawing/dots.ts';
 import { beamLength } from '../statics/index.ts';
 import { memberOf, type State, unitsOf } from './state.ts';
-import type { FootView } from './view.ts';
+import { ALL_KEYS, type FootView } from './view.ts';
 
 /** Everything one frame of the diagrams shows, in the user's units; curves in base units, drawn by their scale. */
 export interface DiagramsView {
@@ -99,6 +99,7 @@ const FOOT: readonly FootView[] = [
   { keys: 'i', does: 'units' },
   { keys: 'w', does: 'workings' },
   { keys: 'Shift', does: 'x10' },
+  ALL_KEYS,
 ];
 
 type Basis = ReturnType<typeof basisOf>;

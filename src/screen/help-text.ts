@@ -1,24 +1,75 @@
 import { BUYING_BINDINGS } from './buying-keys.ts';
 import { DIAGRAM_BINDINGS } from './diagram-keys.ts';
-import { BINDINGS, WORDS } from './keys.ts';
+import { type Action, BINDINGS, WORDS } from './keys.ts';
 import { MEMBERS_BINDINGS } from './members-keys.ts';
+import type { HelpSection } from './panels/help.ts';
+import type { Mode } from './state.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
 
-export interface HelpSection {
-  readonly title: string;
-  /** Term and what it means. */
-  readonly lines: readonly (readonly [string, string])[];
-}
+const EVERY_VIEW = 'in every view';
+
+/** The view of each mode: the section that holds its keys, and the key of the explorer that says what it is. */
+const VIEWS: Partial<Record<Mode['name'], { readonly title: string; readonly opens?: Action }>> = {
+  workings: { title: 'in the workings', opens: 'workings' },
+  diagrams: { title: 'in the diagrams', opens: 'diagrams' },
+  wood: { title: 'in the wood view', opens: 'wood' },
+  add: { title: 'adding', opens: 'add' },
+  moves: { title: 'in the moves', opens: 'moves' },
+  compare: { title: 'comparing pins', opens: 'compare' },
+  handovers: { title: 'in the handovers', opens: 'handovers' },
+  headroom: { title: 'in the headroom view', opens: 'headroom' },
+  links: { title: 'in the links view', opens: 'links' },
+  members: { title: 'in the list of members', opens: 'members' },
+  settings: { title: 'in the settings of the session' },
+  buying: { title: 'in the buying view', opens: 'buying' },
+  copy: { title: 'in the answer to copy', opens: 'copy' },
+  proportions: { title: 'in the proportions', opens: 'proportions' },
+  reach: { title: 'in the reach', opens: 'reach' },
+  trail: { title: 'in the trail', opens: 'trail' },
+  recovered: { title: 'when not everything was kept' },
+  leaving: { title: 'when something is not kept on leaving' },
+  'changed-on-disk': { title: 'when somebody else has written the file' },
+  start: { title: 'at the start' },
+};
 
 /** Keys that the other views and the fields have, beside those they share with the explorer. */
 const OTHER_VIEWS: readonly HelpSection[] = [
   {
-    title: 'in every view',
+    title: EVERY_VIEW,
     lines: [
       ['Esc', 'back; the key that opened it leaves it too'],
       ['↑↓ PgUp PgDn', 'scroll, or choose a line; Home and End go to its ends'],
       ['i', 'inches or SI, where figures are shown'],
+      ['?', 'these keys and words, those of the view at hand first; Esc leads back to it'],
       ['w', 'workings of what the view shows, of the move or pin in hand; Esc leads back to it'],
+    ],
+  },
+  {
+    title: 'at the start',
+    lines: [
+      [
+        'this view',
+        'a new member from what it is for, its span and the width it carries; a sample, or a file, to open',
+      ],
+      ['↑↓ Enter', 'choose a line and take it; the number beside a line takes it at once'],
+      ['Esc', 'a question back; at the first one, leave'],
+    ],
+  },
+  {
+    title: 'when something is not kept on leaving',
+    lines: [
+      ['s', 'keep and leave'],
+      ['A', 'keep under another name and leave'],
+      ['d', 'leave anyway'],
+      ['Esc', 'stay'],
+    ],
+  },
+  {
+    title: 'when somebody else has written the file',
+    lines: [
+      ['A', 'keep yours under another name'],
+      ['o', 'keep yours over theirs, which stays as NAME.bak'],
+      ['Esc', 'back, nothing is written'],
     ],
   },
   {
@@ -107,8 +158,22 @@ const OTHER_VIEWS: readonly HelpSection[] = [
   },
 ];
 
-/** Every key and every word of the program, and the cautions. */
-export function helpSections(): readonly HelpSection[] {
+/** Every key and every word of the program, and the cautions; what the view at hand is and can do comes first. */
+export function helpSections(view: Mode['name'] = 'explore'): readonly HelpSection[] {
+  const all = allSections();
+  const here = VIEWS[view];
+  if (here === undefined) return all;
+  const { title, opens } = here;
+  const about = BINDINGS.find(({ action }) => action === opens)?.help;
+  const own = all.find((section) => section.title === title)?.lines ?? [];
+  return [
+    { title, lines: about === undefined ? own : [['this view', about], ...own] },
+    ...all.filter((section) => section.title === EVERY_VIEW),
+    ...all.filter((section) => section.title !== EVERY_VIEW && section.title !== title),
+  ];
+}
+
+function allSections(): readonly HelpSection[] {
   return [
     { title: 'keys', lines: BINDINGS.map((binding) => [binding.keys, binding.help] as const) },
     {

@@ -18,7 +18,7 @@ import { answerOf } from './answer.ts';
 import type { Question } from './panels/prompt.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
 import { type LinksMode, memberOf, type State, unitsOf } from './state.ts';
-import type { FootView } from './view.ts';
+import { ALL_KEYS, type FootView } from './view.ts';
 
 /** A line that can be taken in hand. */
 export type LinkLine =
@@ -184,10 +184,9 @@ function questionOf(state: State, { typing }: LinksMode): LinksView['question'] 
 
 function footOf({ choosing }: LinksMode, line: LinkLine | null): FootView[] {
   const back = { keys: 'Esc', does: 'back' };
-  if (choosing) return [{ keys: '↑↓', does: 'choose' }, { keys: 'Enter', does: 'carry it' }, back];
+  if (choosing) return [{ keys: '↑↓', does: 'choose' }, { keys: 'Enter', does: 'carry it' }, back, ALL_KEYS];
   const add = { keys: 'a', does: 'carry another' };
-  const keys = { keys: '?', does: 'keys' };
-  if (line === null) return [back, add, keys];
+  if (line === null) return [back, add, ALL_KEYS];
   const own =
     line.is === 'link'
       ? [
@@ -199,5 +198,5 @@ function footOf({ choosing }: LinksMode, line: LinkLine | null): FootView[] {
         ]
       : [];
   const workings = { keys: 'w', does: 'workings' };
-  return [back, add, ...own, { keys: 'g', does: 'go to it' }, workings, keys];
+  return [back, add, ...own, { keys: 'g', does: 'go to it' }, workings, ALL_KEYS];
 }

@@ -8,6 +8,7 @@ export type MembersAction =
   | 'duplicate'
   | 'rename'
   | 'note'
+  | 'count'
   | 'delete'
   | 'up'
   | 'down'
@@ -19,7 +20,6 @@ export type MembersAction =
   | 'undo'
   | 'redo'
   | 'units'
-  | 'help'
   | 'workings';
 
 /** Every key of the list of members that no other list has. */
@@ -54,6 +54,12 @@ export const MEMBERS_BINDINGS: readonly {
     presses: { e: 'note' },
     help: 'write a note on it: what it is, where it stands',
     foot: 'note',
+  },
+  {
+    keys: 'c',
+    presses: { c: 'count' },
+    help: 'how many of it there are: buying goes by it',
+    foot: 'count',
   },
   {
     keys: 'Delete',
@@ -96,7 +102,7 @@ export const MEMBERS_BINDINGS: readonly {
   { keys: 's', presses: { s: 'save' }, help: 'keep the session in its file', foot: 'keep' },
   { keys: 'w', presses: { w: 'workings' }, help: 'workings of what governs it', foot: 'workings' },
   { keys: 'i', presses: { i: 'units' }, help: 'inches or SI', foot: 'units' },
-  { keys: '?', presses: { '?': 'help' }, help: 'every key and every word', foot: 'keys' },
+  { keys: '?', presses: {}, help: 'every key and every word', foot: 'keys' },
 ];
 
 const BY_PRESS = new Map(MEMBERS_BINDINGS.flatMap(({ presses }) => Object.entries(presses)));

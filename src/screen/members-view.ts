@@ -137,6 +137,7 @@ function columnsOf(units: Units): readonly TableColumn[] {
     { head: 'governs', align: 'left', least: 11 },
     { head: 'ratio', align: 'right' },
     { head: '', align: 'left', least: 6 },
+    { head: 'count', align: 'right', spare: 7 },
     { head: 'carries', align: 'left', spare: 3, least: 10 },
     { head: 'carried by', align: 'left', spare: 2, least: 10 },
   ];
@@ -181,6 +182,7 @@ function rowOf(
       member.spacing === null ? spans : `${spans} @ ${showInches(member.spacing, units)}`,
       weightNumber(sectionWeight(member, member.section), units),
       ...stands(judgement),
+      String(member.count),
       namesText(linksOf(member).map((link) => link.member)),
       namesText((carriers.get(member.name) ?? []).map(({ carrier }) => carrier)),
     ],
@@ -250,6 +252,7 @@ function questionOf(state: State, { asks }: MembersMode): MembersView['question'
     return { asks: `delete ${name}?`, told: 'Enter deletes it, Esc leaves it', isFault: false };
   const [asked, told] = {
     name: [`${name} shall be called`, 'Enter names it so, Esc leaves the old name'],
+    count: [`how many of ${name}`, 'a whole number; buying goes by it'],
     note: [`note on ${name}`, 'what it is, where it stands; Enter writes it, Esc leaves the old note'],
     filter: [
       'filter',

@@ -1,5 +1,6 @@
 import type { Recovered } from '../files/keeper.ts';
 import { memberChange } from '../session/along-trail.ts';
+import { compareSessions } from '../session/compare.ts';
 import type { Change } from '../session/differences.ts';
 import { pathsOf } from '../session/differences.ts';
 import type { Session, SessionMember } from '../session/session.ts';
@@ -12,10 +13,19 @@ export function recoveredLines(state: State, { session, time, isOlder }: Recover
   const lines: TextLine[] = [];
   const say = (text: string, style: TextLine['style'] = 'plain') => lines.push({ text, style });
   const of = state.file === null ? 'a session without a file' : state.file;
-  say(`Changes that were not kept when thrice last ended, noted until ${dayAndTime(time, true).trim()}, of`);
+  say('Changes that were not kept when thrice last ended, of');
   say(of, 'quiet');
+  say(`noted until ${dayAndTime(time, true).trim()}`, 'quiet');
   if (isOlder)
     say('The file has been written since, by somebody else: taking them goes back on that.', 'governs');
+  const { top, reordered } = compareSessions(state.session, session, session.units);
+  if (state.session.members.length > 0 && (top.length > 0 || reordered)) {
+    say('');
+    say('the whole session', 'strong');
+    for (const { path, from, to } of top)
+      say(`  ${path.replaceAll('.', ' ')}: ${valueText(from)} → ${valueText(to)}`);
+    if (reordered) say('  members stand in another order');
+  }
   for (const [at, one] of session.members.entries()) {
     const was = state.session.members.find(({ member }) => member.name === one.member.name);
     const told = memberLines(was, one, session);

@@ -1,6 +1,6 @@
 import { type JobSetting, jobSettings } from '../session/job-settings.ts';
 import type { SettingsMode, State } from './state.ts';
-import type { FootView } from './view.ts';
+import { ALL_KEYS, type FootView } from './view.ts';
 
 export type SettingsRow =
   | { readonly heading: string }
@@ -54,6 +54,6 @@ function footOf({ turn, clear }: JobSetting, typing: boolean): FootView[] {
     ...(clear === undefined ? [] : [{ keys: 'Delete', does: 'none' }]),
     { keys: 'u', does: 'undo' },
     { keys: 'Esc', does: 'back' },
-    { keys: '?', does: 'keys' },
+    ALL_KEYS,
   ];
 }

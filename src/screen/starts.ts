@@ -3,7 +3,7 @@ import { showInches, showQuantity, showSpan, type Units } from '../quantity/inde
 import { MEMBER_KINDS, type MemberKind } from '../session/index.ts';
 import { LIMITS_BY_USE } from '../timber/member.ts';
 import type { StartMode } from './state.ts';
-import type { FootView } from './view.ts';
+import { ALL_KEYS, type FootView } from './view.ts';
 
 /** A line of the start that can be taken in hand. */
 export type StartLine =
@@ -61,6 +61,7 @@ export function startView(mode: StartMode, units: Units): StartView {
       { keys: '↑↓', does: 'choose' },
       { keys: 'Enter', does: 'take it' },
       { keys: 'Esc', does: mode.addTo === null ? 'leave' : 'back' },
+      ...(mode.step === 'choose' ? [ALL_KEYS] : []),
     ],
     fault: mode.fault,
     question: questionOf(mode, units),

@@ -87,7 +87,7 @@ export type Mode =
   | { readonly name: 'changed-on-disk'; readonly thenLeave: boolean }
   | RecoveredMode
   | TrailMode
-  | { readonly name: 'help'; readonly scroll: number }
+  | HelpMode
   | WorkingsMode
   | DiagramsMode
   | WoodMode
@@ -106,6 +106,14 @@ export type Mode =
   | { readonly name: 'reach'; readonly scroll: number }
   | { readonly name: 'leaving' }
   | StartMode;
+
+/** Every key and every word. */
+export interface HelpMode {
+  readonly name: 'help';
+  readonly scroll: number;
+  /** The view that is explained first, and that Escape leads back to. */
+  readonly from: Mode;
+}
 
 /** Where the calculation sheet shall be written. */
 export interface SheetMode {
@@ -270,8 +278,15 @@ export interface MembersMode {
   readonly judged: ReadonlyMap<Member, Judgement>;
 }
 
+/** What is typed in the list: of the list, or of the member in hand. */
+export interface TypedQuestion {
+  readonly of: 'filter' | 'name' | 'note' | 'count';
+  readonly edit: Edit;
+  readonly fault: string | null;
+}
+
 export type MembersQuestion =
-  | { readonly of: 'filter' | 'name' | 'note'; readonly edit: Edit; readonly fault: string | null }
+  | TypedQuestion
   /** Whether the member in hand shall go, though others carry it. */
   | { readonly of: 'delete' };
 

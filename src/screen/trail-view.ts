@@ -3,6 +3,7 @@ import { knobsOf } from '../explore/knobs/knobs.ts';
 import { linkFault, resolved } from '../explore/links/index.ts';
 import { ratiosOf } from '../explore/ratios.ts';
 import { showRatio, type Units } from '../quantity/index.ts';
+import { Lately } from '../quantity/lately.ts';
 import { memberFrom, recordsAlong } from '../session/along-trail.ts';
 import { pathsOf } from '../session/differences.ts';
 import type { Raw } from '../session/keep.ts';
@@ -37,7 +38,9 @@ interface Story {
   readonly members: (Member | null | undefined)[];
 }
 
-const STORIES = new WeakMap<SessionMember, Story>();
+/** One is read at a time; going back along the trail changes none. */
+const MOST_STORIES = 4;
+const STORIES = new Lately<SessionMember, Story>(MOST_STORIES);
 
 /** The member in hand as it stood after so many entries of its trail; null where the trail does not lead there. */
 export function memberThen(state: State, at: number): Member | null {

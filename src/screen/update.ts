@@ -1,6 +1,7 @@
 import { isQuick } from '../explore/is-quick.ts';
 import { watching } from './carriers.ts';
 import { withYardAnswer } from './modes/buying.ts';
+import { openedHelp, opensHelp } from './modes/help.ts';
 import { rulesOf } from './modes/index.ts';
 import { withSheetAnswer } from './modes/sheet.ts';
 import { withOpened } from './modes/start.ts';
@@ -76,6 +77,7 @@ function journaled(state: State, step: Step): Step {
 function next(state: State, event: Event): Step {
   switch (event.type) {
     case 'key':
+      if (opensHelp(state, event.press)) return still(openedHelp(state));
       return rulesOf(state.mode).press(state, state.mode, event.press);
     case 'paste':
       return still(rulesOf(state.mode).paste?.(state, state.mode, event.text) ?? state);

@@ -192,6 +192,8 @@ const FOOT_ORDER: readonly Action[] = [
   'help',
 ];
 
+const BY_ACTION = new Map(BINDINGS.toReversed().map((binding) => [binding.action, binding]));
+
 /** Knobs whose object Delete takes out. */
 const REMOVABLE = /^(loads|overhangs)\./;
 
@@ -199,7 +201,7 @@ function footOf(knob: Knob, units: Units): FootView[] {
   const order: readonly Action[] = REMOVABLE.test(knob.key)
     ? ['type', 'remove', ...FOOT_ORDER.slice(1)]
     : FOOT_ORDER;
-  const bound = order.map((action) => BINDINGS.find((binding) => binding.action === action)!);
+  const bound = order.map((action) => BY_ACTION.get(action)!);
   return [
     { keys: '↑↓', does: 'knob' },
     { keys: '←→', does: `nudge ${knob.stepText(units)}` },

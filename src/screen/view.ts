@@ -207,6 +207,9 @@ export interface FootView {
   readonly does: string;
 }
 
+/** On the foot of every view that is not being typed into. */
+export const ALL_KEYS: FootView = { keys: '?', does: 'keys' };
+
 export interface EntryView {
   /** The text as typed so far. */
   readonly text: string;

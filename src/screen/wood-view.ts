@@ -23,7 +23,7 @@ import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import type { Style } from './draw/canvas.ts';
 import { memberOf, type State, unitsOf, type WoodMode } from './state.ts';
-import type { FootView, View } from './view.ts';
+import { ALL_KEYS, type FootView, type View } from './view.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
 
 /** Everything one frame of the wood view shows. */
@@ -97,10 +97,10 @@ export function woodViewOf(state: State, mode: WoodMode): WoodView {
       ...(refused === null ? reportLines(draft, ranking, units) : []),
     ],
     scroll: mode.scroll,
-    foot: WOOD_BINDINGS.filter((binding) => binding.foot !== '').map(({ keys, foot }) => ({
-      keys,
-      does: foot,
-    })),
+    foot: [
+      ...WOOD_BINDINGS.filter(({ foot }) => foot !== '').map(({ keys, foot }) => ({ keys, does: foot })),
+      ...(mode.edit === null ? [ALL_KEYS] : []),
+    ],
   };
 }
 

@@ -83,7 +83,7 @@ function inHand(state: State, from: Mode): InHand {
       return { member: then, before: memberThen(state, at - 1), label: 'then', front: 'change' };
     }
     case 'members':
-      return {};
+      return { label: memberOf(state).name };
     case 'wood':
       return { member: from.draft, before: memberOf(state), label: 'as chosen', front: 'design values' };
     case 'headroom':

@@ -1,7 +1,7 @@
 import type { CombinationSet } from '../loads/loading.ts';
 import { harmless, isHarmful, quoted } from '../quantity/index.ts';
 import type { Member } from '../timber/member.ts';
-import { MAX_MEMBERS, MAX_NAME, type Session, type SessionMember } from './session.ts';
+import { MAX_COUNT, MAX_MEMBERS, MAX_NAME, type Session, type SessionMember } from './session.ts';
 
 /** Why a member may not be called so, with the way out; null where it may. `own`: its name now, null for a new one. */
 export function nameFault({ members }: Session, name: string, own: string | null): string | null {
@@ -16,6 +16,13 @@ export function nameFault({ members }: Session, name: string, own: string | null
 export function textFault(text: string, most: number): string | null {
   if (text.length > most) return `at most ${most} characters stand here, and this has ${text.length}`;
   return isHarmful(text) ? 'holds control or invisible characters; leave them out' : null;
+}
+
+/** How many of a member a text says, or why it says none. */
+export function readCount(text: string): { readonly count: number } | { readonly fault: string } {
+  const count = /^\d{1,6}$/.test(text) ? Number(text) : 0;
+  if (count >= 1 && count <= MAX_COUNT) return { count };
+  return { fault: `${quoted(text)} is no whole number from 1 to ${MAX_COUNT}` };
 }
 
 /** The first of J1, J2, J3 ... that no member has; the mark is cut where its number would not fit. */

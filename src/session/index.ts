@@ -2,6 +2,7 @@ export {
   freeName,
   fullFault,
   nameFault,
+  readCount,
   textFault,
   toldName,
   withDuplicate,

@@ -1,5 +1,6 @@
 import type { CombinationSet } from '../loads/loading.ts';
 import { fromUnit } from '../quantity/index.ts';
+import { FARTHEST_APART } from '../timber/factors/repetitive.ts';
 import type { Member, Stock, Use } from '../timber/member.ts';
 import { withStock } from '../timber/with-stock.ts';
 import { newMember } from './new-member.ts';
@@ -17,9 +18,6 @@ export interface MemberKind {
   readonly area: Member['area'];
   readonly service: Member['service'];
 }
-
-/** Members side by side at most so far apart share their loads (NDS 4.3.9), in. */
-const REPETITIVE_SPACING = 24;
 
 /** Spacings, and the dead load of bare deck boards, are common practice, no source. */
 const JOIST_SPACING = 16;
@@ -78,7 +76,7 @@ export function memberOfKind(
     area: kind.area,
     combinations: job.combinations,
     service: kind.service,
-    repetitive: kind.spacing !== null && width <= REPETITIVE_SPACING,
+    repetitive: kind.spacing !== null && width <= FARTHEST_APART,
     assumed: plain.assumed.filter((key) => key !== 'service' || kind.service === 'dry'),
   };
   return withStock(member, job.stock);

@@ -7,7 +7,16 @@ import { FACTOR_SYMBOLS, PRODUCTS, STOCK_VALUES } from '../timber/member.ts';
 import { prices, yard } from './schema-buying.ts';
 import { sheet } from './schema-sheet.ts';
 import { trail } from './schema-trail.ts';
-import { MAX_LOADS, MAX_MEMBERS, MAX_NAME, MAX_PINS, MAX_RACK, MAX_SPANS, MAX_TITLE } from './session.ts';
+import {
+  MAX_COUNT,
+  MAX_LOADS,
+  MAX_MEMBERS,
+  MAX_NAME,
+  MAX_PINS,
+  MAX_RACK,
+  MAX_SPANS,
+  MAX_TITLE,
+} from './session.ts';
 
 /** The format's version, the value of the key `thrice`. */
 export const FORMAT = 1;
@@ -24,7 +33,6 @@ const HEAVIEST_AREA = 2000 / 144;
 const HEAVIEST_LINE = 1e6 / FEET;
 const HEAVIEST_POINT = 1e7;
 const MAX_PLIES = 4;
-const MAX_COUNT = 10_000;
 const MAX_LIMIT = 10_000;
 const LEAST_FACTOR = 0.01;
 const MOST_FACTOR = 10;
@@ -68,9 +76,12 @@ function build() {
       stock().register(z.globalRegistry, { description: 'the wood that new members begin with' }),
     ),
     sheet: z.optional(sheet(PARTS)),
-    members: z.array(memberWithPins()).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
+    members: z.array(memberWithPins(member())).check(z.minLength(1), z.maxLength(MAX_MEMBERS)),
   });
 }
+
+const text = shared(makeText);
+const quantity = shared(makeQuantity);
 
 /** What the schemas of other files are put together from. */
 export const PARTS = {
@@ -78,14 +89,14 @@ export const PARTS = {
   length: (least: number, most: number, words: string) => quantity('length', least, most, words),
 };
 
-function memberWithPins() {
-  return z.extend(member(), {
+function memberWithPins(one: ReturnType<typeof member>) {
+  return z.extend(one, {
     pins: z.optional(
       z
         .array(
           z.strictObject({
             note: z.optional(text(0, MAX_TITLE)),
-            design: z.omit(member(), { name: true, note: true, count: true }),
+            design: z.omit(one, { name: true, note: true, count: true }),
           }),
         )
         .check(z.maxLength(MAX_PINS))
@@ -115,6 +126,7 @@ function member() {
   const anyWidth = z.optional(width);
   const limit = z.optional(z.number().check(z.minimum(1), z.maximum(MAX_LIMIT)));
   const held = z.optional(bracing());
+  const wood = stock();
   /** Something of each end, either of which may be left out. */
   const ends = <T extends z.ZodMiniType>(of: T) => z.optional(z.strictObject({ left: of, right: of }));
 
@@ -159,9 +171,9 @@ function member() {
       }),
     ),
     slope: z.optional(slope()),
-    stock: stock(),
+    stock: wood,
     rack: z.optional(
-      z.array(stock()).check(z.minLength(1), z.maxLength(MAX_RACK)).register(z.globalRegistry, {
+      z.array(wood).check(z.minLength(1), z.maxLength(MAX_RACK)).register(z.globalRegistry, {
         description: "woods that stand on the rack together; the member's own is always among them",
       }),
     ),
@@ -280,7 +292,7 @@ function factors() {
 }
 
 /** A text that can be printed on one line. */
-function text(least: number, most: number) {
+function makeText(least: number, most: number) {
   return z.string().check(
     z.minLength(least),
     z.maxLength(most),
@@ -295,11 +307,22 @@ function text(least: number, most: number) {
 }
 
 /** A quantity with its unit, as text, within bounds in base units. */
-function quantity(kind: QuantityKind, least: number, most: number, words: string) {
+function makeQuantity(kind: QuantityKind, least: number, most: number, words: string) {
   return z
     .string()
     .check(z.check<string>(({ value, issues }) => inBounds(kind, value, least, most, words, issues)))
     .register(z.globalRegistry, { description: `${DESCRIPTIONS[kind]}; ${words}` });
+}
+
+/** A schema is never changed: one of each kind and bounds serves everywhere. */
+function shared<A extends readonly (string | number)[], S>(make: (...of: A) => S): (...of: A) => S {
+  const known = new Map<string, S>();
+  return (...of) => {
+    const key = of.join('|');
+    const made = known.get(key) ?? make(...of);
+    known.set(key, made);
+    return made;
+  };
 }
 
 const DESCRIPTIONS: Readonly<Record<QuantityKind, string>> = {

@@ -94,6 +94,8 @@ export type SessionRead =
 /** Largest file and counts that are read (contract, "Session file"). */
 export const MAX_BYTES = 16 * 1024 * 1024;
 export const MAX_MEMBERS = 500;
+/** How many of a member there may be. */
+export const MAX_COUNT = 10_000;
 /** Characters of a member's name, of a title or a note, and of an entry of the title block. */
 export const MAX_NAME = 60;
 export const MAX_TITLE = 500;

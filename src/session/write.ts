@@ -1,11 +1,12 @@
 import { type Units, writeQuantity } from '../quantity/index.ts';
+import { Lately } from '../quantity/lately.ts';
 import type { Member } from '../timber/member.ts';
 import { SessionFault } from './fault.ts';
 import { present, type Raw, rawAt } from './keep.ts';
 import { writePins } from './pins.ts';
 import { readMember, readStock } from './read-member.ts';
 import { FORMAT, type MemberFile } from './schema.ts';
-import { MAX_TRAIL, type Session, type SessionMember } from './session.ts';
+import { MAX_MEMBERS, MAX_TRAIL, type Session, type SessionMember } from './session.ts';
 import { isTooLarge } from './too-large.ts';
 import { writeTrail } from './trail.ts';
 import { writePrices, writeYard } from './write-buying.ts';
@@ -64,7 +65,9 @@ function writeNewStock({ stock, units, written }: Session): Raw | undefined {
 }
 
 /** Records by the member that they are of: at a change all members but one are as they were. */
-const RECORDS = new WeakMap<Member, { readonly of: unknown; readonly units: Units; readonly record: Raw }>();
+const RECORDS = new Lately<Member, { readonly of: unknown; readonly units: Units; readonly record: Raw }>(
+  MAX_MEMBERS,
+);
 
 /** A member's own record: all that its file holds of it but its pins and its trail. */
 export function memberRecord(one: Pick<SessionMember, 'member' | 'written'>, units: Units): Raw {

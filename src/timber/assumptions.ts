@@ -7,6 +7,7 @@ import {
   SQ_IN_PER_SQ_FT,
 } from '../loads/reduction.ts';
 import { showQuantity, type Units } from '../quantity/index.ts';
+import { FARTHEST_APART, REPETITIVE_PLIES } from './factors/repetitive.ts';
 import { temperatureIn } from './factors/temperature.ts';
 import { feetIn, inchesIn } from './factors/wording.ts';
 import { borneText, linkText } from './link-words.ts';
@@ -23,6 +24,7 @@ export function assumptionsOf(member: Member, units: Units = 'us'): string[] {
   for (const key of ['bearing', 'seasoned', 'service', 'temperature'] as const) {
     if (assumed.includes(key)) sentences.push(SENTENCE[key](member, units));
   }
+  if (couldBeRepetitive(member)) sentences.push('not counted as repetitive, Cr 1');
   // Without area loads the width carries nothing.
   if (assumed.includes('tributary') && Object.values(member.area).some((load) => load > 0)) {
     sentences.push(`tributary width ${feetIn(member.tributary, units)}`);
@@ -37,6 +39,13 @@ export function assumptionsOf(member: Member, units: Units = 'us'): string[] {
     sentences.push(`carries ${linkText(link, units)}: ${borneText(link, units)}`);
   }
   return sentences;
+}
+
+/** Whether Cr is left out of a row of boards near enough to share load: nobody has stated that they do (NDS 4.3.9). */
+function couldBeRepetitive({ stock: { product }, spacing, section, repetitive }: Member): boolean {
+  const isBoard = product === 'dimension lumber' || product === 'machine stress rated';
+  const isNear = spacing !== null && spacing <= FARTHEST_APART;
+  return isBoard && isNear && section.plies < REPETITIVE_PLIES && !repetitive;
 }
 
 /** What became of the floor live-load reduction that was asked for. */

@@ -1,9 +1,12 @@
-/** The known name that is the fewest edits away; null where none is near. */
+/** The known name that holds this one between its slashes ("No.1/No.2"), or is the fewest edits away; null where none is near. */
 export function nearestName(name: string, known: readonly string[]): string | null {
+  const asked = name.toLowerCase();
+  const holder = known.find((candidate) => candidate.toLowerCase().split('/').includes(asked));
+  if (holder !== undefined) return holder;
   let best: string | null = null;
   let least = Infinity;
   for (const candidate of known) {
-    const edits = distance(name.toLowerCase(), candidate.toLowerCase());
+    const edits = distance(asked, candidate.toLowerCase());
     if (edits < least) {
       least = edits;
       best = candidate;

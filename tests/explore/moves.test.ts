@@ -6,10 +6,11 @@ import type { Best } from '../../src/explore/rack/best.ts';
 import { ratiosOf } from '../../src/explore/ratios.ts';
 import { sectionWeight, standingDepth } from '../../src/timber/index.ts';
 import { CHECK_IDS } from '../../src/timber/report.ts';
+import { runs } from '../support/runs.ts';
 import { memberOf } from '../support/session.ts';
 import { anyPart, withSets } from './choice-members.ts';
 
-const RUNS = { numRuns: 40 };
+const RUNS = { numRuns: runs(40) };
 const kindsOf = (moves: readonly Move[]) => moves.map((move) => move.kind);
 
 describe('moves of any member', () => {

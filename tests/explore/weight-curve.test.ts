@@ -5,6 +5,7 @@ import type { Ranking } from '../../src/explore/rack/best.ts';
 import { rankedRack } from '../../src/explore/rack/ranked.ts';
 import { weightCurve } from '../../src/explore/weight-curve.ts';
 import { sectionWeight } from '../../src/timber/index.ts';
+import { runs } from '../support/runs.ts';
 import { memberOf } from '../support/session.ts';
 import { anyPart } from './choice-members.ts';
 
@@ -36,7 +37,7 @@ describe('weights along a knob', () => {
           expect(near(best[at]!, sizes[lit]?.weight ?? Number.NaN)).toBe(true);
         }
       }),
-      { numRuns: 40 },
+      { numRuns: runs(40) },
     );
   });
 });

@@ -6,6 +6,7 @@ import type { Loading } from '../../src/loads/loading.ts';
 import { termValue } from '../../src/loads/term-value.ts';
 import { beamFields, beamLength } from '../../src/statics/beam.ts';
 import type { Quantity } from '../../src/statics/response.ts';
+import { runs } from '../support/runs.ts';
 import { type Case, everyCase } from './brute-force.ts';
 import { anyCarrier, anyMember, member, PSF } from './members.ts';
 
@@ -109,15 +110,15 @@ function checkAgainstBruteForce(loading: Loading): void {
 
 describe('effects', () => {
   test('agree with every combination under every pattern, solved one by one, on random members', () => {
-    fc.assert(fc.property(anyMember(2, 5), checkAgainstBruteForce), { numRuns: 60 });
+    fc.assert(fc.property(anyMember(2, 5), checkAgainstBruteForce), { numRuns: runs(60) });
   });
 
   test('agree with it on members of up to four spans with few loads', () => {
-    fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: 12 });
+    fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: runs(12) });
   });
 
   test('agree with it on members that carry others, which press and lift by their own patterns', () => {
-    fc.assert(fc.property(anyCarrier(2, 2), checkAgainstBruteForce), { numRuns: 40 });
+    fc.assert(fc.property(anyCarrier(2, 2), checkAgainstBruteForce), { numRuns: runs(40) });
   });
 
   test('keep a term that governs at middling own weights only, neither at none nor at the heaviest', () => {

@@ -4,6 +4,7 @@ import { compileEffects } from '../../src/loads/compile.ts';
 import type { TermGroup } from '../../src/loads/effects.ts';
 import type { Loading } from '../../src/loads/loading.ts';
 import { beamFields, beamLength } from '../../src/statics/beam.ts';
+import { runs } from '../support/runs.ts';
 import { everyCase } from './brute-force.ts';
 import { anyCarrier, anyMember, member } from './members.ts';
 import { momentsOf } from './zero-moments.ts';
@@ -46,15 +47,15 @@ function worst(group: TermGroup, root: number, w: number): number {
 
 describe('moments judged by the volume factor', () => {
   test('are the worst of every combination under every pattern, each worked out by plain statics', () => {
-    fc.assert(fc.property(anyMember(3, 2), checkAgainstBruteForce), { numRuns: 40 });
+    fc.assert(fc.property(anyMember(3, 2), checkAgainstBruteForce), { numRuns: runs(40) });
   });
 
   test('are so on members of up to four spans', () => {
-    fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: 6 });
+    fc.assert(fc.property(anyMember(4, 1), checkAgainstBruteForce), { numRuns: runs(6) });
   });
 
   test('are so on members that carry others', () => {
-    fc.assert(fc.property(anyCarrier(2, 2), checkAgainstBruteForce), { numRuns: 20 });
+    fc.assert(fc.property(anyCarrier(2, 2), checkAgainstBruteForce), { numRuns: runs(20) });
   });
 
   test('need not be the largest moment', () => {

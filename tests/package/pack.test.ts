@@ -33,6 +33,16 @@ describe('npm pack', () => {
     expect(files.some((file) => file.endsWith('licenses.txt'))).toBe(true);
   });
 
+  test('takes the manual page that man looks for, as the program prints it', () => {
+    const { man } = JSON.parse(readFileSync(join(ROOT, 'package.json'), 'utf8')) as { man: string };
+    expect(files).toContain(man);
+    const page = readFileSync(join(folder, 'node_modules/thrice', man), 'utf8');
+    expect(page).toBe(
+      execFileSync(join(folder, 'node_modules/.bin/thrice'), ['manual'], { encoding: 'utf8' }),
+    );
+    expect(page).toMatch(/^\.TH THRICE 1 /);
+  });
+
   test('installs from a clean folder, without a network and without other packages, and runs', () => {
     expect(readdirSync(join(folder, 'node_modules')).filter((name) => !name.startsWith('.'))).toEqual([
       'thrice',

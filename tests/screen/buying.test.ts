@@ -259,6 +259,13 @@ describe('the figures on the screen', () => {
     await fc.assert(checked, { numRuns: 60 });
   });
 
+  it('stand beside the name of the size in full where the terminal has the columns', () => {
+    const dear = { ...ANY, size: '2x14', lengths: [], price: { amount: 49.29, per: 'foot' } } as const;
+    const part = { ...MIXED, count: 6, spans: ['20 ft'] };
+    const state = opened(inYard(part, { file: 'yard.csv', rows: [dear] }));
+    expect(text(state, 220)).toContain('(2) LVL 1-3/4x11-7/8 ');
+  });
+
   it('are those of the order, to the letter, for every row', () => {
     const state = inYard({ count: 4 });
     for (const { at, line } of onScreen(state)) {

@@ -82,7 +82,7 @@ describe('the list of members', () => {
       const { passes, governing, worst } = answerOf(member);
       expect(mode(state).judged.get(member)).toEqual({ passes, governing, worst });
     }
-    expect(text(state)).toMatch(/G1 .* FAILS +J1/);
+    expect(text(state)).toMatch(/G1 .* FAILS +1 +J1/);
     expect(text(state)).toContain('4 members; 1 fails; in the order of the file');
   });
 
@@ -140,7 +140,7 @@ describe('the list of members', () => {
     const list = pressing(house(), 'j', 'down').state;
     const workings = pressing(list, 'w').state;
     expect(workings.mode.name).toBe('workings');
-    expect(memberOf(workings).name).toBe('G1');
+    expect(text(workings)).toMatch(/^ workings of G1: bending/);
     expect(pressing(workings, 'escape').state.mode.name).toBe('members');
     expect(pressing(list, 'K').state.mode.name).toBe('links');
   });
@@ -229,6 +229,31 @@ describe('a member of the list', () => {
     expect(names(pressing(state, 'escape').state)[0]).toBe('J1');
   });
 
+  it('gets a note and a count, and keeps the old ones where they may not be', () => {
+    const state = pressing(
+      house(),
+      'j',
+      'e',
+      'ctrl+u',
+      ...typed('west side'),
+      'enter',
+      'c',
+      '1',
+      '8',
+      'enter',
+    ).state;
+    expect(memberOf(state)).toMatchObject({ note: 'west side', count: 18 });
+    expect(trailOf(state.session.members[0]!).entries).toHaveLength(2);
+    expect(shown(state, 220, 60).join('\n')).toMatch(/J1 +west side .* 18 /);
+    expect(memberOf(pressing(state, 'u', 'u').state)).toMatchObject({ note: 'joists', count: 1 });
+    for (const count of ['0', '1.5', 'x', '10001', '-1'])
+      expect(mode(pressing(state, 'c', ...count, 'enter').state).asks, count).toMatchObject({
+        fault: `"${count}" is no whole number from 1 to 10000`,
+      });
+    const same = pressing(state, 'c', 'enter', 'e', 'enter').state;
+    expect(same.session).toBe(state.session);
+  });
+
   it('of a hostile name is shown cut and without its controls', () => {
     const state = pressing(
       stateOf([{ name: `${'鯨'.repeat(30)} ${'W'.repeat(20)}`, note: 'x'.repeat(400) }, {}]),
@@ -303,6 +328,8 @@ it('whatever is done in the list, the file reads back, a member is in hand, and 
     '2',
     '9',
     'd',
+    'c',
+    'e',
     'n',
     'x',
     'delete',

@@ -333,6 +333,21 @@ describe('what was recovered', () => {
     expect(isKept(pressing(state, 'u').state)).toBe(true);
   });
 
+  it('tells what is set for the whole session too', () => {
+    const kept = stateOf();
+    const session = { ...kept.session, title: 'Bakery', best: 'depth' as const };
+    const recovered = { session, time: NOON, isOlder: false };
+    const screen = screenOf({
+      ...kept,
+      columns: 60,
+      mode: { name: 'recovered', recovered, scroll: 0, after: { name: 'explore' } },
+    });
+    expect(screen).toMatch(/noted until .*\d\d:\d\d$/m);
+    expect(screen).toMatch(/the whole session\n {3}title: .* → Bakery\n/);
+    expect(screen).toMatch(/best: .* → depth/);
+    expect(screenOf(lost())).not.toContain('the whole session');
+  });
+
   it('is dropped, set aside or left for later, each with a key of its own; nothing else does anything', () => {
     expect(pressing(lost(), 'd').effects).toEqual([{ do: 'answer-recovered', answer: 'drop' }]);
     expect(pressing(lost(), 'escape').effects).toEqual([{ do: 'answer-recovered', answer: 'set aside' }]);

@@ -224,7 +224,12 @@ describe('an empty start', () => {
   });
 
   it('says what is wrong with an answer and asks again', () => {
-    const { state } = pressing(stateOf([{}], { mode: startWith({ samples: [], files: [] }) }), 'enter', 'x', 'enter');
+    const { state } = pressing(
+      stateOf([{}], { mode: startWith({ samples: [], files: [] }) }),
+      'enter',
+      'x',
+      'enter',
+    );
     expect(state.mode).toMatchObject({ name: 'start', step: 'span', fault: expect.stringContaining('x') });
   });
 });

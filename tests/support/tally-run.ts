@@ -8,7 +8,10 @@ export default function setup(): () => void {
   // `npm run fuzz` names one file for all its rounds: each tells the sums so far.
   process.env.THRICE_TALLY ??= join(mkdtempSync(join(tmpdir(), 'thrice-tally-')), 'counts');
   const file = process.env.THRICE_TALLY;
-  return () => console.log(tallied(file));
+  return () => {
+    const sums = tallied(file);
+    if (sums !== '') console.log(sums);
+  };
 }
 
 /** "12 sessions fuzzed, 300 keys pressed": the sums of a file of counts. */
@@ -17,7 +20,7 @@ function tallied(file: string): string {
   const sums = COUNTED.map(
     (what) => [what, counts.reduce((sum, count) => sum + (count[what] ?? 0), 0)] as const,
   ).filter(([, sum]) => sum > 0);
-  return sums.length === 0 ? 'nothing counted' : sums.map(([what, sum]) => `${sum} ${what}`).join(', ');
+  return sums.map(([what, sum]) => `${sum} ${what}`).join(', ');
 }
 
 function linesOf(file: string): string[] {

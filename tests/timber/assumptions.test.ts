@@ -52,3 +52,13 @@ test('a live-load reduction says what stays of the load, or why nothing is taken
   expect(last(101, 600)).toBe('floor live load not reduced: over 100 psf, ASCE 7 4.7.3');
   expect(last(101, 600, 'si')).toBe('floor live load not reduced: over 4.79 kPa, ASCE 7 4.7.3');
 });
+
+test('boards near enough to share load say so where nobody has stated that they do (NDS 4.3.9)', () => {
+  const told = (part: Parameters<typeof memberOf>[0]) =>
+    assumptionsOf(memberOf(part)).includes('not counted as repetitive, Cr 1');
+  expect(told({ spacing: 16 })).toBe(true);
+  expect(told({ spacing: 24 })).toBe(true);
+  expect(told({ spacing: 25 })).toBe(false);
+  expect(told({ spacing: null })).toBe(false);
+  expect(told({ spacing: 16, repetitive: true })).toBe(false);
+});

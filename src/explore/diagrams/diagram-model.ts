@@ -7,6 +7,7 @@ import {
   curves,
 } from '../../loads/index.ts';
 import { fromUnit, showMoment, showQuantity, showSmall, showSpan, type Units } from '../../quantity/index.ts';
+import { Lately } from '../../quantity/lately.ts';
 import { beamFields, beamLength, supportPlaces } from '../../statics/index.ts';
 import {
   adjusted,
@@ -42,8 +43,10 @@ interface Basis {
   readonly patterns: readonly string[];
 }
 
-const BASES = new WeakMap<Member, Basis>();
-const CURVES = new WeakMap<Member, Map<string, Curves>>();
+/** The member in hand and its ghosts. */
+const MOST_MEMBERS = 16;
+const BASES = new Lately<Member, Basis>(MOST_MEMBERS);
+const CURVES = new Lately<Member, Map<string, Curves>>(MOST_MEMBERS);
 
 /** The basis of a member's curves; the same object for the same member. */
 export function basisOf(member: Member): Basis {

@@ -57,7 +57,7 @@ function segmentsOf(
   first: number,
   turns: readonly { readonly value: number; readonly lit: number }[],
 ): Segment[] {
-  const narrow = 10 * CLOSE * Math.max(Math.abs(from), Math.abs(to));
+  const narrow = narrowest(from, to);
   const segments: Segment[] = [];
   let start = from;
   let lit = first;
@@ -78,6 +78,11 @@ function segmentsOf(
   const last = segments[segments.length - 1]!;
   segments[segments.length - 1] = { ...last, to };
   return segments;
+}
+
+/** The narrowest stretch of a range that is told apart from its neighbour. */
+function narrowest(from: number, to: number): number {
+  return 10 * CLOSE * Math.max(Math.abs(from), Math.abs(to));
 }
 
 /**
@@ -160,7 +165,7 @@ function turnsRound(left: Reading, here: Reading, right: Reading, index: number)
 /** The lit size with its neighbours along a knob. */
 export interface Around {
   readonly size: Size | null;
-  /** Where it takes over, and from which size (null: none passes); absent where it does so nowhere in the range. */
+  /** Where it takes over, and from which size (null: none passes); null where it does so nowhere before the end. */
   readonly below: Neighbour | null;
   /** Where it hands over, and to which size. */
   readonly above: Neighbour | null;
@@ -176,7 +181,10 @@ export interface Neighbour {
 const FIRST = 1 / 32;
 const LONGER = 1.6;
 
-/** From where to where the size lit now stays the best as one knob moves between its ends, and what comes next. */
+/**
+ * From where to where the size lit now stays the best as one knob moves between its ends, and what comes next. What is
+ * lit at an end alone, as nothing is where the last load goes, is no neighbour.
+ */
 export function aroundOf(
   member: Member,
   knob: { readonly put: Put; readonly least: number; readonly most: number },
@@ -186,6 +194,7 @@ export function aroundOf(
   const along = alongOf(member, knob.put, ranking, only);
   const here = along.read(now);
   const seen = [here];
+  const narrow = narrowest(knob.least, knob.most);
   const next = (end: number, by: 1 | -1): Neighbour | null => {
     let last = here;
     let step = FIRST * Math.max(Math.abs(now), (knob.most - knob.least) * CLOSE);
@@ -196,6 +205,7 @@ export function aroundOf(
         const reading = along.read(place);
         if (reading.lit !== here.lit) {
           const { after } = turningPoint(along, last, reading, seen);
+          if (Math.abs(end - after.value) <= narrow) return null;
           return { at: after.value, size: along.sizes[after.lit] ?? null };
         }
         last = reading;

@@ -7,7 +7,7 @@ export interface Turn {
   readonly after: Reading;
 }
 
-/** Places are found to this share of the larger end. */
+/** Places are found to this share of the larger of the two ends. */
 export const CLOSE = 1e-9;
 const ROUNDS = 200;
 /** Readings that a guess is led by at most: beside the two ends the nearest others. */
@@ -28,10 +28,10 @@ const MUCH = 0.8;
  */
 export function turningPoint(along: Along, from: Reading, to: Reading, seen: Reading[] = []): Turn {
   let { before, after } = within(from, to, seen);
+  const close = CLOSE * Math.max(Math.abs(from.value), Math.abs(to.value));
   let wider = 1;
   for (let round = 0; round < ROUNDS; round += 1) {
     const apart = Math.abs(after.value - before.value);
-    const close = CLOSE * Math.max(Math.abs(before.value), Math.abs(after.value));
     if (apart <= close) break;
     const value = aimed(before, after, seen, close, wider) ?? (before.value + after.value) / 2;
     if (value === before.value || value === after.value) break;

@@ -1,3 +1,4 @@
+import { Lately } from '../../quantity/lately.ts';
 import {
   deadFactorOf,
   type Prepared,
@@ -99,7 +100,8 @@ interface Kept extends Shelf {
   readonly service: Member['service'];
 }
 
-const SHELVES = new WeakMap<Stock, Kept>();
+const MOST_SHELVES = 64;
+const SHELVES = new Lately<Stock, Kept>(MOST_SHELVES);
 
 /** The order of a rack, which a nudge of span or load leaves as it is: kept until woods or moisture change. */
 function shelfOf(member: Member): Shelf {

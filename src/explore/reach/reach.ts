@@ -19,6 +19,8 @@ export interface Reach {
 
 /** Lengths tried before the place is narrowed: close enough that no pass and fail hides between two of them. */
 const LENGTHS_TRIED = 25;
+/** Those and a few asked for beside them; a length on the way to one section's reach is never met again. */
+const LENGTHS_KEPT = 32;
 /** The answer is within this share of the true length, on the safe side. */
 const CLOSE = 1e-9;
 
@@ -31,8 +33,8 @@ export interface ReachFinder {
 
 /**
  * Finds reaches of sections under the loads of one member. All spans, overhangs and load positions move by
- * one factor; bearings and typed unbraced lengths keep their size. Lengths already looked at are kept, so
- * that asking for a whole rack prepares each of them once. Sections of another wood may be asked for too, where it
+ * one factor; bearings and typed unbraced lengths keep their size. Lengths that every section is tried at are
+ * kept, so that asking for a whole rack prepares each of them once. Sections of another wood may be asked for too, where it
  * takes the same part of dead load in the total deflection.
  */
 export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[] | null = null): ReachFinder {
@@ -41,14 +43,16 @@ export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[]
   const preparedAt = new Map<number, ReturnType<typeof prepare>>();
   const ratios = new Float64Array(CHECK_IDS.length);
   let asked = wood;
+  const prepareAt = (span: number) =>
+    preparedAt.get(span) ?? prepareScaled(here, scaleLengths(member, span / longest), span / longest);
   const worstAt = (section: Section, span: number) => {
-    let prepared = preparedAt.get(span);
-    if (prepared === undefined) {
-      prepared = prepareScaled(here, scaleLengths(member, span / longest), span / longest);
-      if (preparedAt.size < 4096) preparedAt.set(span, prepared);
-    }
-    rate(prepared, asked, section, ratios);
+    rate(prepareAt(span), asked, section, ratios);
     return judge(ratios, only);
+  };
+  /** The same at a length that other sections will be tried at too. */
+  const worstAtShared = (section: Section, span: number) => {
+    if (preparedAt.size < LENGTHS_KEPT) preparedAt.set(span, prepareAt(span));
+    return worstAt(section, span);
   };
   const lawful = new Map<Wood, boolean>();
   const byLaw = (of: Wood): boolean => {
@@ -66,12 +70,12 @@ export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[]
     }
     asked = of;
     let from = REACH_FROM;
-    let low = worstAt(section, from);
+    let low = worstAtShared(section, from);
     if (!low.passes) return { span: 0, stops: low.governing };
     const growth = (REACH_TO / REACH_FROM) ** (1 / (LENGTHS_TRIED - 1));
     for (let at = 1; at < LENGTHS_TRIED; at += 1) {
       const to = at === LENGTHS_TRIED - 1 ? REACH_TO : REACH_FROM * growth ** at;
-      const high = worstAt(section, to);
+      const high = worstAtShared(section, to);
       if (!high.passes) return narrowed(section, from, low.worst, to, high.worst);
       from = to;
       low = high;
@@ -81,7 +85,7 @@ export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[]
   const passes = (section: Section, span: number, of: Wood = wood): boolean => {
     if (byLaw(of)) return find(section, of).span >= span;
     asked = of;
-    return worstAt(section, span).passes;
+    return worstAtShared(section, span).passes;
   };
   return Object.assign(find, { passes });
 

@@ -1,4 +1,5 @@
 import type { Units } from '../../quantity/index.ts';
+import { Lately } from '../../quantity/lately.ts';
 import { refusal } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import {
@@ -113,7 +114,9 @@ interface Known extends About {
   readonly page: Workings;
 }
 
-const KNOWN = new WeakMap<Member, Known[]>();
+/** The member in hand and those it is held against. */
+const MOST_MEMBERS = 16;
+const KNOWN = new Lately<Member, Known[]>(MOST_MEMBERS);
 
 /** The workings of a page; the same object for the same member, page, units and what else it goes by. */
 export function pageOf(member: Member, id: PageId, units: Units, about: About = ALONE): Workings {

@@ -140,8 +140,6 @@ function act(state: State, action: Action): Step {
       return still(openMoves(state));
     case 'workings':
       return still(openedWorkings(state));
-    case 'help':
-      return still({ ...state, mode: { name: 'help', scroll: 0 } });
     case 'save':
       return save(state, false);
     case 'save-as':

@@ -90,8 +90,6 @@ function press(state: State, mode: LinksMode, press: KeyPress): State {
       return redo(state);
     case 'units':
       return withSession(state, { ...state.session, units: unitsOf(state) === 'us' ? 'si' : 'us' });
-    case 'help':
-      return { ...state, mode: { name: 'help', scroll: 0 } };
     case 'type':
       if (line?.is === 'link') return begin(state, mode, line.knob.key, '');
       return line === null ? state : goTo(state, line);

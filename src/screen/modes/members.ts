@@ -1,5 +1,15 @@
 import { renamed, whoLoses, withoutMember } from '../../explore/links/index.ts';
-import { fullFault, nameFault, toldName, withDuplicate, withMemberAt } from '../../session/index.ts';
+import {
+  fullFault,
+  nameFault,
+  readCount,
+  textFault,
+  toldName,
+  withDuplicate,
+  withMemberAt,
+} from '../../session/index.ts';
+import { MAX_TITLE } from '../../session/session.ts';
+import type { Member } from '../../timber/member.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
 import { redo, undo } from '../history.ts';
@@ -17,7 +27,9 @@ import {
   type State,
   type Step,
   still,
+  type TypedQuestion,
   unitsOf,
+  withMember,
   withSession,
 } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
@@ -105,7 +117,7 @@ function inHand(state: State, mode: MembersMode, member: number): State {
 function act(state: State, mode: MembersMode, action: MembersAction): Step {
   switch (action) {
     case 'filter':
-      return still(typing(state, mode, { of: 'filter', edit: editOf(mode.filter), fault: null }));
+      return still(asking(state, mode, 'filter', mode.filter));
     case 'sort': {
       const sort = MEMBER_SORTS[(MEMBER_SORTS.indexOf(mode.sort) + 1) % MEMBER_SORTS.length]!;
       return still(inMode(state, { ...mode, sort }));
@@ -120,8 +132,6 @@ function act(state: State, mode: MembersMode, action: MembersAction): Step {
       return still(redo(state));
     case 'units':
       return still(withSession(state, { ...state.session, units: unitsOf(state) === 'us' ? 'si' : 'us' }));
-    case 'help':
-      return still({ ...state, mode: { name: 'help', scroll: 0 } });
     case 'add': {
       const fault = fullFault(state.session);
       return still(fault === null ? startAdding(state, mode) : refused(state, fault));
@@ -143,9 +153,11 @@ function ofMember(state: State, mode: MembersMode, action: MembersAction): State
     case 'duplicate':
       return duplicate(state);
     case 'rename':
-      return typing(state, mode, { of: 'name', edit: editOf(memberOf(state).name), fault: null });
+      return asking(state, mode, 'name', memberOf(state).name);
     case 'note':
-      return typing(state, mode, { of: 'note', edit: editOf(memberOf(state).note), fault: null });
+      return asking(state, mode, 'note', memberOf(state).note);
+    case 'count':
+      return asking(state, mode, 'count', '');
     case 'delete':
       return askDelete(state, mode);
     case 'up':
@@ -216,6 +228,10 @@ function typing(state: State, mode: MembersMode, asks: MembersQuestion): State {
   return atListed(inMode(state, { ...mode, asks, filter: asks.edit.text }));
 }
 
+function asking(state: State, mode: MembersMode, of: TypedQuestion['of'], text: string): State {
+  return typing(state, mode, { of, edit: editOf(text), fault: null });
+}
+
 /** With a listed member in hand, where any is listed. */
 function atListed(state: State): State {
   if (state.mode.name !== 'members') return state;
@@ -230,26 +246,47 @@ function answer(state: State, mode: MembersMode, asks: MembersQuestion, press: K
   const done = { ...mode, asks: null };
   if (isCancel(press)) return inMode(state, asks.of === 'filter' ? { ...done, filter: '' } : done);
   if (asks.of === 'delete') return press.name === 'enter' ? deleted(state, mode) : state;
-  if (press.name === 'enter') return asks.of === 'filter' ? inMode(state, done) : named(state, mode, asks);
+  if (press.name === 'enter') return take(state, mode, asks);
   const edit = edited(asks.edit, press);
   return edit === null ? state : typing(state, mode, { ...asks, edit, fault: null });
 }
 
-function named(
-  state: State,
-  mode: MembersMode,
-  asks: MembersQuestion & { readonly of: 'name' | 'filter' },
-): State {
+/** Enter: what was typed holds, or why it may not. */
+function take(state: State, mode: MembersMode, asks: TypedQuestion): State {
+  const text = asks.edit.text.trim();
+  const faulty = (fault: string) => typing(state, mode, { ...asks, fault });
+  const done: MembersMode = { ...mode, asks: null };
+  const member = memberOf(state);
+  const changed = (to: Member) =>
+    inMode(to.note === member.note && to.count === member.count ? state : withMember(state, to), done);
+  switch (asks.of) {
+    case 'filter':
+      return inMode(state, done);
+    case 'name': {
+      const fault = nameFault(state.session, text, member.name);
+      return fault === null ? named(state, done, text) : faulty(fault);
+    }
+    case 'note': {
+      const fault = textFault(text, MAX_TITLE);
+      return fault === null ? changed({ ...member, note: text }) : faulty(fault);
+    }
+    case 'count': {
+      if (text === '') return inMode(state, done);
+      const read = readCount(text);
+      return 'fault' in read ? faulty(read.fault) : changed({ ...member, count: read.count });
+    }
+  }
+}
+
+/** With the member in hand called otherwise, wherever it is called. */
+function named(state: State, mode: MembersMode, name: string): State {
   const { name: before } = memberOf(state);
-  const name = asks.edit.text.trim();
-  const fault = nameFault(state.session, name, before);
-  if (fault !== null) return typing(state, mode, { ...asks, fault });
-  if (name === before) return inMode(state, { ...mode, asks: null });
+  if (name === before) return inMode(state, mode);
   const next = withSession(state, renamed(state.session, before, name));
   const { [before]: began, ...others } = state.began ?? {};
   return {
     ...next,
     ...(began === undefined ? {} : { began: { ...others, [name]: { ...began, name } } }),
-    mode: { ...mode, asks: null, from: mode.from === before ? name : mode.from },
+    mode: { ...mode, from: mode.from === before ? name : mode.from },
   };
 }

@@ -68,8 +68,6 @@ function press(state: State, mode: SettingsMode, press: KeyPress): State {
       return undo(state);
     case 'redo':
       return redo(state);
-    case 'help':
-      return { ...state, mode: { name: 'help', scroll: 0 } };
     default:
       return state;
   }

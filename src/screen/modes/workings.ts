@@ -16,7 +16,7 @@ import {
   withSession,
 } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import type { FootView } from '../view.ts';
+import { ALL_KEYS, type FootView } from '../view.ts';
 import { type WorkingsSubject, workingsSubject } from '../workings-subject.ts';
 import { isCancel, type ModeRules, scrolled } from './mode.ts';
 
@@ -129,6 +129,7 @@ function drawPage(
     { keys: 'l', does: 'list' },
     { keys: 'i', does: 'units' },
     { keys: 'next', does: pageWord(ids[(at + 1) % ids.length]!) },
+    ALL_KEYS,
   ];
   drawText({ title: `${headOf(subject)}: ${title}`, lines, offset: mode.scroll, foot }, canvas, glyphs);
 }
@@ -156,6 +157,7 @@ function drawList(
     { keys: 'Esc', does: 'back' },
     { keys: glyphs.upDown, does: 'page' },
     { keys: 'Enter', does: 'open' },
+    ALL_KEYS,
   ];
   const offset = windowStart(lines.length, textRows(state.rows), line);
   drawText({ title: `${headOf(subject)}: every page`, lines, offset, foot }, canvas, glyphs);

@@ -3,7 +3,7 @@ import type { Addition } from '../additions.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { heading, rule, write } from './region.ts';
 import { drawSketch, WITH_REACTIONS } from './sketch.ts';
@@ -56,6 +56,7 @@ export function drawAdd(
     { keys: '↑↓', does: 'choose' },
     { keys: 'Enter', does: 'add' },
     { keys: 'Esc', does: 'back' },
+    ALL_KEYS,
   ];
   drawKeys(foot, canvas, 1, columns - 1, canvas.rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);

@@ -19,6 +19,7 @@ const below = (canvas: Canvas) => noteRows(canvas) + 1;
 const TOLD_ROWS = 6;
 /** Cells for the marks of a row: in hand, at hand, lit, blanks. */
 const MARGIN = 6;
+/** What is told is wrapped at this: longer lines are hard to read. */
 const MOST_COLUMNS = 130;
 /** The words before a field take no more than this part of the row. */
 const ASKS = 0.4;
@@ -44,7 +45,7 @@ function drawSizes(view: BuyingView, canvas: Canvas, glyphs: Glyphs): void {
   const { columns } = canvas;
   const line = { x: 0, y: ABOVE - 1, columns, rows: 1 };
   rule(canvas, line, glyphs);
-  const placed = placeColumns(view.columns, view.rows, MARGIN, Math.min(columns, MOST_COLUMNS) - MARGIN - 1);
+  const placed = placeColumns(view.columns, view.rows, MARGIN, columns - MARGIN - 1);
   drawHeads(view.columns, placed, canvas, line);
   const shown = Math.max(1, canvas.rows - ABOVE - below(canvas));
   const from = windowStart(view.rows.length, shown, view.inHand);

@@ -2,7 +2,7 @@ import type { CompareRow, CompareView } from '../compare-view.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import type { EntryPlace } from './knobs.ts';
 import { heading, rule } from './region.ts';
@@ -179,5 +179,6 @@ function footOf(view: CompareView, design: number, typing: boolean) {
     { keys: '↑↓', does: 'scroll' },
     { keys: 'Esc', does: 'back' },
     { keys: 'w', does: 'workings' },
+    ALL_KEYS,
   ];
 }

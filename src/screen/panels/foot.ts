@@ -2,11 +2,9 @@ import type { Canvas } from '../draw/canvas.ts';
 import { cells, clip } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { Notice } from '../state.ts';
-import type { FootView, View } from '../view.ts';
+import { ALL_KEYS, type FootView, type View } from '../view.ts';
 import type { Region } from './region.ts';
 
-/** The key that lists all others: it stands whatever else has no room. */
-const ALL_KEYS = '?';
 const GAP = 2;
 
 /** The keys that matter now, or the message of the moment in their place. */
@@ -21,7 +19,7 @@ export function drawFoot(
     return;
   }
   const end = region.x + region.columns - 1;
-  const always = view.foot.find((item) => item.keys === ALL_KEYS);
+  const always = view.foot.find((item) => item.keys === ALL_KEYS.keys);
   const kept = always === undefined ? 0 : widthOf(always, glyphs) + GAP;
   const text = clip(cells(view.notice.text), region.columns - 2 - kept, glyphs);
   canvas.put(region.x + 1, region.y, text, view.notice.style);
@@ -51,7 +49,7 @@ export function drawKeys(
   y: number,
   glyphs: Glyphs,
 ): void {
-  const always = foot.find((item) => item.keys === ALL_KEYS);
+  const always = foot.find((item) => item.keys === ALL_KEYS.keys);
   let room = end - x - (always === undefined ? 0 : widthOf(always, glyphs));
   let column = x;
   let full = false;

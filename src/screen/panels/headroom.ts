@@ -4,7 +4,7 @@ import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { HeadroomView, StoreyView } from '../headroom-view.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { drawKnobs, type EntryPlace } from './knobs.ts';
 import { heading, type Region, rule } from './region.ts';
@@ -57,6 +57,7 @@ export function drawHeadroom(
           { keys: 'Delete', does: 'no storey' },
           { keys: 'Esc', does: 'back' },
           { keys: 'w', does: 'workings' },
+          ALL_KEYS,
         ]
       : [
           { keys: 'Enter', does: 'take it' },

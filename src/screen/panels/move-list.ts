@@ -2,7 +2,7 @@ import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import { type MovesView, SIDE_LINES, type SideView, WAYS, type Way } from '../moves-view.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { showRatio } from './figures.ts';
 import { drawKeys } from './foot.ts';
 import { heading, rule, write } from './region.ts';
@@ -49,6 +49,7 @@ export function drawMoveList(
     { keys: 'i', does: 'units' },
     { keys: 'Esc', does: 'back' },
     { keys: 'w', does: 'workings' },
+    ALL_KEYS,
   ];
   drawKeys(foot, canvas, 1, canvas.columns - 1, canvas.rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);

@@ -5,7 +5,7 @@ import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs, shorten } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { ProportionView } from '../proportion-view.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { type Axis, columnOf, columnWithin, fitAxis, isOn, TICKS } from './axis.ts';
 import { showRatio } from './figures.ts';
 import { drawKeys } from './foot.ts';
@@ -57,10 +57,7 @@ export function drawProportions(
   const below = plot.y + rows + AXIS_ROWS;
   for (const [at, band] of view.bands.entries()) drawBand(band, canvas, below + at, axis, glyphs);
   write(canvas, 1, below + view.bands.length, cells(view.sources), canvas.columns - 2, 'quiet');
-  const foot = [
-    { keys: 'Esc', does: 'back' },
-    { keys: 'w', does: 'workings' },
-  ];
+  const foot = [{ keys: 'Esc', does: 'back' }, { keys: 'w', does: 'workings' }, ALL_KEYS];
   drawKeys(foot, canvas, 1, canvas.columns - 1, canvas.rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);
 }

@@ -2,7 +2,7 @@ import type { Canvas } from '../draw/canvas.ts';
 import { keepToGlyphs } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { ReachView } from '../reach-view.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { rule } from './region.ts';
 import { drawHeads, drawTableRow, placeColumns } from './table.ts';
@@ -53,6 +53,7 @@ export function drawReachTable(
     { keys: 'i', does: 'units' },
     { keys: 'Esc', does: 'back' },
     { keys: 'w', does: 'workings' },
+    ALL_KEYS,
   ];
   drawKeys(foot, canvas, 1, columns - 1, rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);

@@ -1,7 +1,7 @@
 import type { Canvas } from '../draw/canvas.ts';
 import { cells, keepToGlyphs } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { heading, rule } from './region.ts';
 import { drawHeads, drawTableRow, placeColumns, type TableColumn, type TableRow } from './table.ts';
@@ -74,6 +74,7 @@ export function drawStrip(
     ...(scrolls ? [{ keys: '↑↓', does: 'scroll' }] : []),
     { keys: 'Esc', does: 'back' },
     { keys: 'w', does: 'workings' },
+    ALL_KEYS,
   ];
   drawKeys(foot, canvas, 1, columns - 1, rows - 1, glyphs);
   keepToGlyphs(canvas, glyphs);

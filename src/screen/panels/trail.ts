@@ -3,7 +3,7 @@ import { cells, clip, keepToGlyphs } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { Notice } from '../state.ts';
 import type { TrailView } from '../trail-view.ts';
-import type { View } from '../view.ts';
+import { ALL_KEYS, type View } from '../view.ts';
 import { drawKeys } from './foot.ts';
 import { rule } from './region.ts';
 import { drawHeads, drawTableRow, placeColumns, windowStart } from './table.ts';
@@ -47,6 +47,8 @@ export function drawTrail(
     { keys: 'u', does: 'undo' },
     { keys: 'i', does: 'units' },
     { keys: 'Esc', does: 'back' },
+    { keys: 'w', does: 'workings' },
+    ALL_KEYS,
   ];
   if (notice !== null) {
     const text = clip(cells(notice.text), canvas.columns - 2, glyphs);

@@ -58,16 +58,16 @@ const BYTE_KEYS: Readonly<Record<string, Special>> = {
 const CONTROL_OFFSET = 0x60;
 const CONTROL_LETTERS = { first: 0x01, last: 0x1a };
 
-function ofByte(char: string, shift: boolean, meta: boolean): KeyPress | null {
+function ofByte(char: string, shift: boolean): KeyPress | null {
   const name = BYTE_KEYS[char];
-  if (name !== undefined) return { name, shift: false, ctrl: false, meta };
+  if (name !== undefined) return { name, shift: false, ctrl: false, meta: false };
   const code = char.codePointAt(0)!;
   if (code >= CONTROL_LETTERS.first && code <= CONTROL_LETTERS.last) {
-    return { name: 'char', char: String.fromCharCode(code + CONTROL_OFFSET), shift, ctrl: true, meta };
+    return { name: 'char', char: String.fromCharCode(code + CONTROL_OFFSET), shift, ctrl: true, meta: false };
   }
   // The remaining control codes are no key anybody presses on purpose.
   if (code < 0x20 || (code >= 0x80 && code < 0xa0)) return null;
-  return { name: 'char', char, shift: /^\p{Lu}$/u.test(char) || shift, ctrl: false, meta };
+  return { name: 'char', char, shift: /^\p{Lu}$/u.test(char) || shift, ctrl: false, meta: false };
 }
 
 /**
@@ -81,11 +81,13 @@ export function readKeys(input: string, key: Key): KeyPress[] {
   // Two Escapes in one write reach Ink as one with meta.
   if (special === 'escape') return Array(meta ? 2 : 1).fill({ name: special, shift, ctrl, meta: false });
   if (special !== null) return [{ name: special, shift, ctrl, meta }];
+  // No key of the program is a character with Alt; a terminal's own answers begin like one.
+  if (meta) return [];
   if (ctrl) return [...input].map((char) => ({ name: 'char', char, shift, ctrl, meta }));
 
   const presses: KeyPress[] = [];
   for (const char of input) {
-    const press = ofByte(char, shift && input.length === 1, meta);
+    const press = ofByte(char, shift && input.length === 1);
     if (press !== null) presses.push(press);
   }
   return presses;

@@ -16,6 +16,11 @@ async function stopJob(): Promise<void> {
   await new Promise((resolve) => setTimeout(resolve, STOP_MS));
 }
 
+/** A window resized meanwhile told the shell alone: lets Node look at its size anew, as the signal for that does. */
+function lookAtSize(): void {
+  process.emit('SIGWINCH', 'SIGWINCH');
+}
+
 /**
  * Ctrl-Z and SIGTSTP: gives the terminal back, stops, and takes the terminal again on `fg`.
  * A stop from outside (SIGSTOP) cannot be prepared for; going on after it takes the terminal anew.
@@ -42,6 +47,7 @@ export function Suspender({ children }: SuspenderProps): ReactNode {
         await suspendTerminal(during);
       } finally {
         listen();
+        lookAtSize();
       }
     };
     const stop = (): void => void giveWay(stopJob);

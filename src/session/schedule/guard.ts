@@ -9,9 +9,14 @@ const GUARD = "'";
 /** Nothing is cut from a cell. */
 const WHOLE = Number.MAX_SAFE_INTEGER / 4;
 
-/** A cell that is read as text everywhere: one that a spreadsheet would run gets an apostrophe before it. */
+/**
+ * A cell that is read as text everywhere: one that a spreadsheet would run gets an apostrophe before it. Line ends stay,
+ * but not a carriage return by itself, by which a terminal would write over the line.
+ */
 export function guarded(text: string): string {
-  const plain = isHarmful(text) ? text.replace(/[^\t\r\n]+/g, (part) => harmless(part, WHOLE)) : text;
+  const plain = isHarmful(text)
+    ? text.replace(/[^\t\r\n]+|\r(?!\n)/g, (part) => harmless(part, WHOLE))
+    : text;
   return FORMULA.test(plain) && !NUMBER.test(plain) ? GUARD + plain : plain;
 }
 

@@ -5,6 +5,7 @@ import { escapeHtml } from '../write/escape-html.ts';
 interface Within {
   info: Record<string, unknown>;
   appendXML(xml: string): void;
+  endSubset(): void;
 }
 
 /** The day of a date written as in ISO 8601; null for any other. */
@@ -22,6 +23,7 @@ const NO_DAY = new Date(0);
 export class SheetDocument extends PDFDocument {
   readonly #title: string;
   readonly #day: Date | null;
+  #operators: string[] = [];
 
   /** `size`: of the paper, points. */
   constructor(title: string, date: string | null, size: readonly [number, number]) {
@@ -41,7 +43,37 @@ export class SheetDocument extends PDFDocument {
     });
     this.#title = title;
     this.#day = day;
-    if (day === null) delete (this as unknown as Within).info.CreationDate;
+    const within = this as unknown as Within;
+    if (day === null) delete within.info.CreationDate;
+    // Tagged as PDF/UA asks, but it does not claim the standard: no validator has held the file to it.
+    within.endSubset = () => undefined;
+  }
+
+  /** What is drawn on the page at hand: written to it in one piece, of which pdfkit would keep thousands a page. */
+  override addContent(operators: string): this {
+    this.#operators.push(operators);
+    return this;
+  }
+
+  #settle(): void {
+    if (this.#operators.length > 0) this.page.write(this.#operators.join('\n'));
+    this.#operators = [];
+  }
+
+  override addPage(options?: PDFKit.PDFDocumentOptions): this {
+    this.#settle();
+    super.addPage(options);
+    return this;
+  }
+
+  override switchToPage(page: number): PDFKit.PDFPage {
+    this.#settle();
+    return super.switchToPage(page);
+  }
+
+  override end(): void {
+    this.#settle();
+    super.end();
   }
 
   /** The layout is this program's own: pdfkit, which would measure every text twice, need not. */

@@ -9,6 +9,7 @@ import {
   scaleLoadEffects,
   slopedLength,
 } from '../../loads/index.ts';
+import { Lately } from '../../quantity/lately.ts';
 import { type Beam, beamFields, beamLength, type Field, supportPlaces } from '../../statics/beam.ts';
 import { bearingArea } from '../factors/bearing-area.ts';
 import type { Bracing, Member } from '../member.ts';
@@ -56,7 +57,9 @@ export interface PrepareOptions {
 /** A wet 10 3/4 x 48 in glulam of Southern Pine weighs 11.6 lb/in: the heaviest on the racks, rounded up. */
 export const HEAVIEST = 16;
 
-const KNOWN = new WeakMap<Member, Prepared>();
+/** Searches are dear, and hold some tens of kilobytes each. */
+const MOST_KNOWN = 128;
+const KNOWN = new Lately<Member, Prepared>(MOST_KNOWN);
 
 /** Searches combinations and patterns of a member once, for all sizes of section; the same object for the same member. */
 export function prepare(member: Member, options: PrepareOptions = {}): Prepared {

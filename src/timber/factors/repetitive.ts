@@ -8,8 +8,8 @@ const REPETITIVE: Readonly<Record<RepetitiveRule, number>> = { lumber: 1.15, LVL
 
 /** Members in contact or near each other that count as repetitive (NDS 4.3.9). */
 export const REPETITIVE_PLIES = 3;
-/** in */
-const FARTHEST_APART = 24;
+/** in, on centers (NDS 4.3.9) */
+export const FARTHEST_APART = 24;
 
 /** Cr on Fb: stated, or three plies or more. */
 export function repetitiveFactor(rule: RepetitiveRule, stated: boolean, plies: number): number {

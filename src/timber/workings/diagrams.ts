@@ -1,7 +1,6 @@
-import { type CurvesOf, reactionRange } from '../../loads/index.ts';
+import type { CurvesOf } from '../../loads/index.ts';
 import { makeUpAt, type Share } from '../../loads/make-up.ts';
 import { showSpan, type Units } from '../../quantity/index.ts';
-import { beamLength } from '../../statics/beam.ts';
 import { deadFactorOf } from '../checks/prepare.ts';
 import type { Member } from '../member.ts';
 import { sharesText, shown } from './demand.ts';
@@ -74,35 +73,16 @@ export function diagramLines(member: Member, place: DiagramPlace, units: Units):
   return lines;
 }
 
-/** A value under this share of what all the load could bring is rounding. */
-const ROUNDING = 1e-11;
-/** How a curve goes with the length of the member, at a given load. */
-const LENGTHS: Readonly<Record<CurveQuantity, 0 | 1 | 3>> = { shear: 0, moment: 1, deflection: 3 };
-
-/** What is so little that it is nothing: of all that bears on the supports. */
-function roundingOf({ member, ownWeight }: Work, quantity: CurveQuantity): number {
-  const borne = reactionRange(member, ownWeight).reduce(
-    (total, { max, min }) => total + Math.max(Math.abs(max), Math.abs(min)),
-    0,
-  );
-  return ROUNDING * borne * beamLength(member.beam) ** LENGTHS[quantity];
-}
-
 function extremeOf(work: Work, { at, which }: DiagramPlace, quantity: CurveQuantity, sign: 1 | -1): Extreme {
   const { member, ownWeight, prepared } = work;
   const { combinations, deflectionCombinations } = prepared.effects;
   const deflecting = quantity === 'deflection';
   const deadFactor = deflecting ? deadFactorOf(member) : 1;
   const list = deflecting ? deflectionCombinations : combinations;
-  const rounding = roundingOf(work, quantity);
   let best: Extreme | null = null;
   list.forEach((combination, index) => {
     if (which !== 'envelope' && which !== index) return;
-    const shares = makeUpAt(member, ownWeight, { quantity, at, combination, deadFactor, sign })
-      .filter((share) => Math.abs(share.value) > rounding)
-      .map((share) => ({ ...share, value: sign * share.value }));
-    const sum = shares.reduce((total, { factor, value }) => total + factor * value, 0);
-    const value = Math.abs(sum) <= rounding ? 0 : sum;
+    const { value, shares } = makeUpAt(member, ownWeight, { quantity, at, combination, deadFactor, sign });
     if (best !== null && sign * value <= sign * best.value) return;
     best = { value, combination: combination.label, shares };
   });

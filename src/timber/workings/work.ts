@@ -1,4 +1,5 @@
 import type { Units } from '../../quantity/index.ts';
+import { Lately } from '../../quantity/lately.ts';
 import { explain } from '../checks/explain.ts';
 import { HEAVIEST, type Prepared, prepare } from '../checks/prepare.ts';
 import { heavyEnough, rate } from '../checks/rate.ts';
@@ -32,7 +33,9 @@ export interface NoWork {
   readonly refused: string;
 }
 
-const KNOWN = new WeakMap<Member, Partial<Record<Units, Work | NoWork>>>();
+/** The member in hand and those it is held against. */
+const MOST_MEMBERS = 16;
+const KNOWN = new Lately<Member, Partial<Record<Units, Work | NoWork>>>(MOST_MEMBERS);
 
 /** The work of a member; the same object for the same member and units. */
 export function workOf(member: Member, units: Units): Work | NoWork {

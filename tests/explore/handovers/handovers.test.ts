@@ -5,6 +5,7 @@ import { sweepsOf } from '../../../src/explore/handovers/sweep.ts';
 import type { Ranking } from '../../../src/explore/rack/best.ts';
 import { bestOf } from '../../../src/explore/rack/ranked.ts';
 import type { Member } from '../../../src/timber/member.ts';
+import { runs } from '../../support/runs.ts';
 import { memberOf } from '../../support/session.ts';
 import { anyPart, withSets } from '../choice-members.ts';
 
@@ -91,7 +92,7 @@ describe('handovers of random members', () => {
           });
         },
       ),
-      { numRuns: 60 },
+      { numRuns: runs(60) },
     );
   });
 
@@ -193,6 +194,26 @@ describe('handovers', () => {
         [5.5, 7.25, 9.25, 11.25, 13.25, 15.25].some((depth) => Math.abs(depth - Number(to)) < 1e-6),
       ).toBe(true);
     }
+  });
+
+  it('are none at the end of a knob where the last load goes and nothing is left to carry', () => {
+    const part = { spans: ['72 in'], spacing: '12 in', area: { dead: '5 psf', live: '0 psf' } };
+    const member = memberOf({ ...part, tributary: undefined, loads: undefined });
+    const { put } = sweepsOf(member).find(({ key }) => key === 'area.dead')!;
+    const knob = { put, least: 0, most: 60 / 144 };
+    const lit = (value: number) => bestOf(put(member, value), { best: 'weight', shop: null })?.label;
+    expect([lit(0), lit(1e-6), lit(knob.most)]).toEqual([undefined, '2x4', '2x4']);
+
+    let read = 0;
+    const counted: typeof put = (of, value) => {
+      read += 1;
+      return put(of, value);
+    };
+    const { size, below, above } = aroundOf(member, { ...knob, put: counted }, 24 / 144);
+    expect([size?.label, below, above]).toEqual(['2x4', null, null]);
+    // Each reading puts the value into the member and into its lot; halving down to the smallest double takes a thousand.
+    expect(read).toBeLessThan(120);
+    expect(handoversOf(member, put, 0, knob.most).map((each) => each.size?.label)).toEqual(['2x4']);
   });
 
   it('along a span agree with the sets of the command line, loads that end with the member going along', () => {

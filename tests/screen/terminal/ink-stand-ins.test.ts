@@ -6,6 +6,7 @@ import inkSanitizeAnsi from '../../../node_modules/ink/build/sanitize-ansi.js';
 import lineUpdate from '../../../src/screen/terminal/ink-line-update.ts';
 import Output from '../../../src/screen/terminal/ink-output.ts';
 import sanitizeAnsi from '../../../src/screen/terminal/ink-sanitize.ts';
+import { runs } from '../../support/runs.ts';
 import { anyRow, ownRow } from './rows-of-any-kind.ts';
 
 test('the stand-in for sanitizeAnsi takes from any text what Ink takes', () => {
@@ -80,7 +81,7 @@ test('a frame of one styled row a line is printed as Ink prints it', () => {
       }
       expect(ours.get()).toEqual(theirs.get());
     }),
-    { numRuns: 500 },
+    { numRuns: runs(500) },
   );
 });
 

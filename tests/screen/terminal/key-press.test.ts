@@ -105,6 +105,11 @@ test('two Escapes in one write are two key presses, neither with Alt', () => {
   expect(press('', { escape: true, meta: true })).toEqual([named('escape'), named('escape')]);
 });
 
+test('a character with Alt is no key', () => {
+  expect(press('x', { meta: true })).toEqual([]);
+  expect(press('c', { meta: true, ctrl: true })).toEqual([]);
+});
+
 test('letting go of a key presses nothing', () => {
   expect(press('a', { eventType: 'release' })).toEqual([]);
 });

@@ -5,6 +5,7 @@ import { beamLength } from '../../../src/statics/index.ts';
 import { reportMember } from '../../../src/timber/index.ts';
 import type { Member } from '../../../src/timber/member.ts';
 import { ratioText, workingsIds, workingsOf } from '../../../src/timber/workings/index.ts';
+import { runs } from '../../support/runs.ts';
 import { member } from './any-member.ts';
 import { evaluate, leading, meet } from './evaluate.ts';
 
@@ -53,7 +54,7 @@ describe('the workings of a member that carries others', () => {
           }
         }
       }),
-      { numRuns: 60 },
+      { numRuns: runs(60) },
     );
   });
 
