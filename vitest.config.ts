@@ -5,7 +5,9 @@ const seed = seedOfProperties();
 /** Of the runs of costly properties, see tests/support/runs.ts; `npm run fuzz` takes them all. */
 const share = Number(process.env.THRICE_RUNS ?? 1 / 3);
 // Vitest reads this file once in its main process.
-console.log(`property tests start from seed ${seed}; costly ones take ${Math.round(100 * share)} % of their runs`);
+console.log(
+  `property tests start from seed ${seed}; costly ones take ${Math.round(100 * share)} % of their runs`,
+);
 
 export default defineConfig({
   test: {

@@ -24,17 +24,23 @@ const files = readdirSync(`${root}tests`, { recursive: true, encoding: 'utf8' })
   .map((file) => `tests/${file}`)
   .filter((file) => within.length === 0 || within.some((part) => file.startsWith(part)));
 
+/** A round takes all runs, beside whatever else the machine does. */
+const PATIENCE_MS = 1_800_000;
 // Each round tells the sums of all rounds so far.
 const tally = join(mkdtempSync(join(tmpdir(), 'thrice-fuzz-')), 'counts');
 const end = Date.now() + Number(minutes) * 60_000;
 let rounds = 0;
 while (Date.now() < end) {
   const seed = String(randomInt(2 ** 31));
-  const { status } = spawnSync('npx', ['vitest', 'run', '--reporter=dot', ...files], {
-    cwd: root,
-    env: { ...process.env, THRICE_SEED: seed, THRICE_RUNS: '1' },
-    stdio: 'inherit',
-  });
+  const { status } = spawnSync(
+    'npx',
+    ['vitest', 'run', '--reporter=dot', `--testTimeout=${PATIENCE_MS}`, ...files],
+    {
+      cwd: root,
+      env: { ...process.env, THRICE_SEED: seed, THRICE_RUNS: '1', THRICE_TALLY: tally },
+      stdio: 'inherit',
+    },
+  );
   if (status !== 0) {
     console.error(`failed from seed ${seed}; again: THRICE_SEED=${seed} THRICE_RUNS=1 npx vitest run FILE`);
     process.exit(1);

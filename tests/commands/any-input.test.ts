@@ -7,6 +7,7 @@ import { readSession } from '../../src/session/index.ts';
 import { SCHEDULE_COLUMNS } from '../../src/session/schedule/columns.ts';
 import { anyBytes, anySessionText, anySlippedSample, anyValue } from '../support/any-session.ts';
 import { ODD_TEXTS } from '../support/hostile.ts';
+import { runs } from '../support/runs.ts';
 import { command, sessionText } from '../support/session.ts';
 import { type Ended, expectSoundEnd } from '../support/sound-end.ts';
 import { tally } from '../support/tally.ts';
@@ -57,15 +58,15 @@ async function asked(text: string | Uint8Array, question: string): Promise<void>
 
 describe('a command on', () => {
   test('any session at all ends well, with sound figures', async () => {
-    await fc.assert(fc.asyncProperty(anySessionText, anyQuestion, asked), { numRuns: 30 });
+    await fc.assert(fc.asyncProperty(anySessionText, anyQuestion, asked), { numRuns: runs(60) });
   });
 
   test('a sample session with slips in it ends well, with sound figures or one line that says what is wrong', async () => {
-    await fc.assert(fc.asyncProperty(anySlippedSample, anyQuestion, asked), { numRuns: 200 });
+    await fc.assert(fc.asyncProperty(anySlippedSample, anyQuestion, asked), { numRuns: runs(400) });
   });
 
   test('any bytes ends well', async () => {
-    await fc.assert(fc.asyncProperty(anyBytes, anyQuestion, asked), { numRuns: 100 });
+    await fc.assert(fc.asyncProperty(anyBytes, anyQuestion, asked), { numRuns: runs(200) });
   });
 });
 
@@ -121,7 +122,7 @@ test('what rack and moves say passes, check says passes', async () => {
     }
     tally('sessions fuzzed');
   });
-  await fc.assert(property, { numRuns: 12, endOnFailure: true });
+  await fc.assert(property, { numRuns: runs(30), endOnFailure: true });
 });
 
 /** The keys of a member, and of a list's first entry, as --set takes them; among them some that are none. */
@@ -190,7 +191,7 @@ describe('told on the command line', () => {
         expectSoundEnd(ended, { what: asked, given: texts.join() });
         tally('command lines');
       }),
-      { numRuns: 300 },
+      { numRuns: runs(600) },
     );
   });
 
@@ -266,7 +267,7 @@ describe('told on the command line', () => {
         expectSoundEnd(ended, { what: JSON.stringify(line), given: line.join(' ') });
         tally('command lines');
       }),
-      { numRuns: 400 },
+      { numRuns: runs(800) },
     );
   });
 });
@@ -344,22 +345,11 @@ describe('from a table', () => {
         expect({ name, fault, status }).toEqual({ name, fault, status: 0 });
       }
     });
-    await fc.assert(property, { numRuns: 60 });
+    await fc.assert(property, { numRuns: runs(150) });
   });
 
   test('of what the yard has, whatever stands in its cells, comes an order or one line that says what is wrong', async () => {
-    const heads = [
-      'size',
-      'product',
-      'species',
-      'grade',
-      'lengths',
-      'each',
-      'per foot',
-      'per board foot',
-      'price',
-      'per',
-    ];
+    const heads = 'size,product,species,grade,lengths,each,per foot,per board foot,price,per'.split(',');
     const cell = fc.constantFrom(
       '2x12',
       '2x10',
@@ -395,6 +385,6 @@ describe('from a table', () => {
       expectSoundEnd(ended, { what: name, given: text });
       tally('tables');
     });
-    await fc.assert(property, { numRuns: 150 });
+    await fc.assert(property, { numRuns: runs(300) });
   });
 });

@@ -34,6 +34,8 @@ describe('the network', () => {
     ['rack', BOATHOUSE.file, '--member', 'G1'],
     ['moves', BOATHOUSE.file, '--member', 'G1'],
     ['order', BOATHOUSE.file],
+    ['schedule', BOATHOUSE.file, '--threads', '2'],
+    ['diff', BOATHOUSE.file, BOATHOUSE.file],
     ['schema'],
     ['completion', 'bash'],
     ['manual'],

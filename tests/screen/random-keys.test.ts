@@ -7,8 +7,11 @@ import { viewOf } from '../../src/screen/view-model.ts';
 import { readSession, writeSession } from '../../src/session/index.ts';
 import { reportMember } from '../../src/timber/index.ts';
 import { ABSURD } from '../support/absurd.ts';
+import { anySessionText } from '../support/any-session.ts';
 import { anyKeys } from '../support/keys.ts';
+import { runs } from '../support/runs.ts';
 import { SAMPLES } from '../support/samples.ts';
+import { sessionFile } from '../support/session.ts';
 import { afterEvents, pressing } from '../support/state.ts';
 import { twinOf } from '../support/twin.ts';
 
@@ -31,14 +34,20 @@ function readAgain({ session }: State): State['session'] {
   return read.session;
 }
 
+/** A sample session, or one of any beams at all. */
+const anyFile = fc.oneof(
+  { arbitrary: fc.constantFrom(...SAMPLES).map(({ file }) => file), weight: 3 },
+  { arbitrary: anySessionText.map((text) => sessionFile(text)), weight: 1 },
+);
+
 test('whatever keys are pressed, in whatever view, the screen shows sound figures and the verdict is that of a full evaluation', () => {
   fc.assert(
     fc.property(
-      fc.constantFrom(...SAMPLES),
+      anyFile,
       fc.constantFrom(...SIZES),
       fc.boolean(),
       anyKeys(60),
-      ({ file }, [columns, rows], settles, keys) => {
+      (file, [columns, rows], settles, keys) => {
         let state = twinOf(file, columns, rows).state();
         for (const key of keys) {
           state = pressing(state, key).state;
@@ -52,6 +61,6 @@ test('whatever keys are pressed, in whatever view, the screen shows sound figure
         expect(memberOf(state).name).toBe(again.member.name);
       },
     ),
-    { numRuns: 40 },
+    { numRuns: runs(120) },
   );
 });

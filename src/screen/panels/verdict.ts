@@ -1,6 +1,6 @@
 import { WIDEST } from '../arrange.ts';
 import type { Canvas } from '../draw/canvas.ts';
-import { cells, clip } from '../draw/cells.ts';
+import { cells, wrap } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { CureView, View } from '../view.ts';
 import { showRatio } from './figures.ts';
@@ -9,7 +9,8 @@ import { write } from './region.ts';
 
 /**
  * The verdict: a word in reverse video, what stops the member, and its cures as whole sentences. On two
- * rows the cures have the second; on one they follow, and the moves fill what is left at the right end.
+ * rows the cures have the second, behind what of the reason goes on there; on one they follow, and the moves
+ * fill what is left at the right end.
  */
 export function drawVerdict(view: View, canvas: Canvas, region: Region, glyphs: Glyphs): void {
   const { verdict } = view;
@@ -19,12 +20,14 @@ export function drawVerdict(view: View, canvas: Canvas, region: Region, glyphs: 
   canvas.put(left, region.y, word, 'verdict');
 
   const start = left + word.length + 1;
-  const reason = clip(cells(verdict.reason), right - start + 1, glyphs);
-  canvas.put(start, region.y, reason, verdict.passes ? 'strong' : 'governsStrong');
-
   const oneRow = region.rows < 2;
-  let x = oneRow && reason !== '' ? start + reason.length + 1 : start;
+  const lines = wrap(cells(verdict.reason), right - start + 1, oneRow ? 1 : 2, glyphs);
+  for (const [at, line] of lines.entries())
+    canvas.put(start, region.y + at, line, verdict.passes ? 'strong' : 'governsStrong');
+
   const y = oneRow ? region.y : region.y + 1;
+  const before = lines[y - region.y] ?? '';
+  let x = before === '' ? start : start + before.length + 1;
   const told: string[] = [];
   for (const cure of verdict.cures) {
     const sentence = cells(cure);

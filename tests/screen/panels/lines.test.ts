@@ -35,6 +35,16 @@ describe('the verdict', () => {
   const verdict = (view: View, columns: number, rows: number) =>
     drawn(columns, rows, (...to) => drawVerdict(view, ...to)).rows;
 
+  it('goes on in the second of two rows rather than lose the ratio', () => {
+    const reason = 'Bending over support 2 is nearest its limit at 0.69.';
+    const long: View = { ...passing, verdict: { ...passing.verdict, reason, cures: ['A.'] } };
+    expect(verdict(long, 60, 2)).toEqual([
+      '  PASSES  Bending over support 2 is nearest its limit at',
+      '          0.69. A.',
+    ]);
+    expect(verdict(long, 80, 2)[1]).toBe('          A.');
+  });
+
   it('says the word, what stops it, and its cures below', () => {
     expect(verdict(failing, 80, 2)).toEqual([
       '  FAILS  Bending stops it at 1.28.',
