@@ -9,14 +9,28 @@ console.log(
   `property tests start from seed ${seed}; costly ones take ${Math.round(100 * share)} % of their runs`,
 );
 
+/** Tests that put something in place of a module or of the environment, and those that start programs. */
+const APART = [
+  ...['files', 'package', 'pictures', 'terminal'].map((folder) => `tests/${folder}/**/*.test.{ts,tsx}`),
+  'tests/screen/trail.test.ts',
+];
+const ALL = 'tests/**/*.test.{ts,tsx}';
+
+const shared = {
+  setupFiles: ['tests/support/seed.ts'],
+  env: { THRICE_SEED: String(seed), THRICE_RUNS: String(share) },
+  // Generous: property tests and pseudo-terminals share slow machines.
+  testTimeout: 60_000,
+};
+
 export default defineConfig({
   test: {
-    include: ['tests/**/*.test.{ts,tsx}'],
     globalSetup: ['tests/support/tally-run.ts'],
-    setupFiles: ['tests/support/seed.ts'],
-    env: { THRICE_SEED: String(seed), THRICE_RUNS: String(share) },
-    // Generous: property tests and pseudo-terminals share slow machines.
-    testTimeout: 60_000,
+    projects: [
+      // To load the program anew for every file would take longer than most of the tests do.
+      { test: { ...shared, name: 'together', isolate: false, include: [ALL], exclude: APART } },
+      { test: { ...shared, name: 'apart', include: APART } },
+    ],
   },
 });
 

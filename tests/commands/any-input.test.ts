@@ -104,11 +104,14 @@ test('what rack and moves say passes, check says passes', async () => {
     const own = ({ product, species, grade }: RackJson['sizes'][number]) =>
       [product, species, grade].join() ===
       [member.stock.product, member.stock.species, member.stock.grade].join();
+    // A size is told as it stands; one that is laid flat has its depth across.
+    const ply = (size: RackJson['sizes'][number]) => [size.width / size.plies, size.depth];
+    const { flat } = member.section;
     const asSets = sizes.filter(own).map((size) => ({
       ...size,
       set: [
-        `section.width=${size.width / size.plies} in`,
-        `section.depth=${size.depth} in`,
+        `section.width=${ply(size)[flat ? 1 : 0]} in`,
+        `section.depth=${ply(size)[flat ? 0 : 1]} in`,
         `section.plies=${size.plies}`,
       ],
     }));

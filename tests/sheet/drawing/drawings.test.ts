@@ -6,6 +6,7 @@ import { drawProportions } from '../../../src/sheet/drawing/proportions.ts';
 import { drawSketch } from '../../../src/sheet/drawing/sketch.ts';
 import type { Picture, Sheet } from '../../../src/sheet/sheet.ts';
 import { member as anyMember } from '../../session/arbitrary-member.ts';
+import { runs } from '../../support/runs.ts';
 import { BOATHOUSE } from '../../support/samples.ts';
 import { CROWDED, jobAt } from '../support.ts';
 import { expectLabelsApart, expectWithin } from './labels.ts';
@@ -45,7 +46,7 @@ describe('the drawings of a sheet', () => {
           }
         },
       ),
-      { numRuns: 25 },
+      { numRuns: runs(25) },
     );
   });
 
