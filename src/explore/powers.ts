@@ -47,5 +47,5 @@ export const ASKS_NOTHING = 1e-12;
  * Infinity where nothing is demanded.
  */
 export function standsTo(spanToDepth: number, ratio: number, exponent: number): number {
-  return spanToDepth * ratio ** (-1 / exponent);
+  return ratio <= ASKS_NOTHING ? Number.POSITIVE_INFINITY : spanToDepth * ratio ** (-1 / exponent);
 }

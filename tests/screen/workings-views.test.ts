@@ -15,6 +15,7 @@ import { workingsSubject } from '../../src/screen/workings-subject.ts';
 import type { CheckId } from '../../src/timber/report.ts';
 import { WORKINGS_WORD, type WorkingLine } from '../../src/timber/workings/index.ts';
 import { pressing, stateOf } from '../support/state.ts';
+import { memberOf as bare, NO_AREA } from '../timber/member-of.ts';
 import { member } from '../timber/workings/any-member.ts';
 
 function shown(state: State): string[] {
@@ -188,6 +189,27 @@ describe('the numbers on the screen are those of their pages', () => {
       }),
       { numRuns: 25 },
     );
+  });
+
+  it('of the ruler where one check asks so little that it is rounding, and another more', () => {
+    const each = bare({
+      beam: {
+        spans: [12, 12, 96.625, 12],
+        overhangs: { left: 0, right: 0 },
+        supports: 'bearings',
+        fixed: { left: false, right: true },
+      },
+      tributary: 0,
+      area: NO_AREA,
+      selfWeight: false,
+      loads: [{ type: 'point', kind: 'dead', at: 2.3e-7, load: 1e-6 }],
+    });
+    const { powers, standsTo } = answerOf(each);
+    const ratios = powers.map(({ ratio }) => ratio ?? 0);
+    expect(Math.min(...ratios)).toBeLessThan(ASKS_NOTHING);
+    expect(Math.max(...ratios)).toBeGreaterThan(ASKS_NOTHING);
+    const { lines } = pageOf(each, 'crossovers', 'us');
+    expect(Number(result(lines, 'l/h that it stands to')) / standsTo!).toBeCloseTo(1, 4);
   });
 
   it('of what a nudge changes, beside the gauges', () => {
