@@ -26,6 +26,7 @@ export interface Strip {
   readonly from: number;
   readonly to: number;
   readonly now: number;
-  readonly segments: readonly Segment[];
+  /** The stretches by line: one each, but neighbours of which both ends show the same figure share one. */
+  readonly groups: readonly (readonly Segment[])[];
   show(value: number): string;
 }

@@ -1,4 +1,11 @@
-import { type Around, aroundOf, handoversOf } from '../explore/handovers/handovers.ts';
+import {
+  type Around,
+  aroundOf,
+  beginSearch,
+  type HandoverSearch,
+  type Segment,
+  segmentsFound,
+} from '../explore/handovers/handovers.ts';
 import { aroundText, lightestAlong } from '../explore/handovers/lightest-along.ts';
 import { type Swept, stretchOf, sweptOf, valueText } from '../explore/handovers/swept.ts';
 import type { Ranking } from '../explore/rack/best.ts';
@@ -84,20 +91,36 @@ export function handoverText(state: State): string | null {
   return text === null ? null : `${swept.knob.label.trim()}: ${text}`;
 }
 
-/** The handovers along the knob in hand, or along the first span where that is none that sizes go by. */
-export function stripOf(state: State): Strip {
+/** The search for the handovers along the knob in hand, or along the first span where that is none that sizes go by. */
+export function stripSearch(state: State): HandoverSearch {
   const member = memberOf(state);
   const swept = sweptNow(state)!;
-  const { knob, sweep } = swept;
+  const { from, to } = stretchOf(member, swept, unitsOf(state));
+  return beginSearch(member, swept.sweep.put, from, to, { ranking: rankingOf(state.session) });
+}
+
+/** The strip that such a search has found. */
+export function stripOf(state: State, search: HandoverSearch): Strip {
+  const swept = sweptNow(state)!;
   const units = unitsOf(state);
-  const { from, to, now } = stretchOf(member, swept, units);
-  const ranking = rankingOf(state.session);
+  const show = (value: number) => valueText(swept, value, units);
   return {
-    label: knob.label.trim(),
-    from,
-    to,
-    now,
-    segments: handoversOf(member, sweep.put, from, to, { ranking }),
-    show: (value) => valueText(swept, value, units),
+    label: swept.knob.label.trim(),
+    ...stretchOf(memberOf(state), swept, units),
+    groups: byLine(segmentsFound(search), show),
+    show,
   };
+}
+
+/** Stretches by line: neighbours that show no width share one. */
+function byLine(segments: readonly Segment[], show: (value: number) => string): Segment[][] {
+  const groups: Segment[][] = [];
+  let wasNarrow = false;
+  for (const segment of segments) {
+    const isNarrow = show(segment.from) === show(segment.to);
+    if (isNarrow && wasNarrow) groups.at(-1)!.push(segment);
+    else groups.push([segment]);
+    wasNarrow = isNarrow;
+  }
+  return groups;
 }

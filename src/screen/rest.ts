@@ -1,11 +1,12 @@
+import { isFound, onward } from '../explore/handovers/handovers.ts';
 import { isQuick } from '../explore/is-quick.ts';
 import { watched } from './carriers.ts';
-import { isAroundMissing, stripOf, withAround } from './handover-now.ts';
+import { isAroundMissing, stripOf, stripSearch, withAround } from './handover-now.ts';
 import { unjudged, withJudged } from './members-view.ts';
 import { isMovesMissing, withMoves } from './moves-beside.ts';
 import { stripRows } from './panels/strip.ts';
 import { windowStart } from './panels/table.ts';
-import { memberOf, type State } from './state.ts';
+import { type HandoversMode, memberOf, type State } from './state.ts';
 
 /** What is left to work out once a frame is on the screen; null where nothing is. `ms`: how long no key may have come. */
 export function restOf(state: State): { readonly ms: number } | null {
@@ -22,7 +23,8 @@ const IDLE = 60;
 /** The state with the next part of the rest worked out. */
 export function rested(state: State): State {
   if (!state.settled) return { ...state, settled: true };
-  if (state.mode.name === 'handovers') return state.mode.strip === null ? withStrip(state) : state;
+  if (state.mode.name === 'handovers')
+    return state.mode.strip === null ? withMoreOfStrip(state, state.mode) : state;
   if (state.mode.name === 'members' && unjudged(state, state.mode) > 0)
     return { ...state, mode: withJudged(state, state.mode) };
   if (state.watch !== undefined) return watched(state);
@@ -30,10 +32,17 @@ export function rested(state: State): State {
   return isMovesMissing(state) ? withMoves(state) : state;
 }
 
-/** With the strip found, scrolled to the stretch that holds now. */
-function withStrip(state: State): State {
-  const strip = stripOf(state);
-  const at = strip.segments.findIndex(({ to }) => strip.now < to);
-  const scroll = windowStart(strip.segments.length, stripRows(state.rows), at);
-  return { ...state, mode: { name: 'handovers', strip, scroll } };
+/** Readings of the rack at a time, so that a key never waits longer than for a frame; of a quick member they are short. */
+const READINGS = 3;
+const QUICK_READINGS = 16;
+
+/** With the search for the strip begun or gone on with; found, it is scrolled to the stretch that holds now. */
+function withMoreOfStrip(state: State, mode: HandoversMode): State {
+  if (mode.search === null) return { ...state, mode: { ...mode, search: stripSearch(state) } };
+  const search = onward(mode.search, isQuick(memberOf(state)) ? QUICK_READINGS : READINGS);
+  if (!isFound(search)) return { ...state, mode: { ...mode, search } };
+  const strip = stripOf(state, search);
+  const at = strip.groups.findIndex((group) => strip.now < group.at(-1)!.to);
+  const scroll = windowStart(strip.groups.length, stripRows(state.rows), at);
+  return { ...state, mode: { name: 'handovers', strip, search: null, scroll } };
 }

@@ -1,5 +1,6 @@
 import type { NewLoad } from '../explore/beam-edits/edit-beam.ts';
 import type { YardRow } from '../explore/buying/yard.ts';
+import type { HandoverSearch } from '../explore/handovers/handovers.ts';
 import type { Judgement } from '../explore/judge.ts';
 import { knobsOf } from '../explore/knobs/knobs.ts';
 import { linkFault, resolved } from '../explore/links/index.ts';
@@ -212,6 +213,8 @@ export interface HandoversMode {
   readonly name: 'handovers';
   /** null: still being found. */
   readonly strip: Strip | null;
+  /** What is found of it so far; null: not begun, or all found. */
+  readonly search: HandoverSearch | null;
   readonly scroll: number;
 }
 

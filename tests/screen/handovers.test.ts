@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { handoversOf } from '../../src/explore/handovers/handovers.ts';
+import { handoversOf, type Segment } from '../../src/explore/handovers/handovers.ts';
 import { sweepsOf } from '../../src/explore/handovers/sweep.ts';
 import { rankedRack } from '../../src/explore/rack/ranked.ts';
 import { restOf } from '../../src/screen/rest.ts';
@@ -7,10 +7,22 @@ import { type HandoversMode, memberOf } from '../../src/screen/state.ts';
 import { viewOf } from '../../src/screen/view-model.ts';
 import { rankingOf } from '../../src/session/index.ts';
 import { framesAreKept, shown } from '../support/shown.ts';
-import { atRest, pressing, stateOf } from '../support/state.ts';
+import { afterEvents, atRest, pressing, stateOf } from '../support/state.ts';
 import { ascii } from './panels/support.ts';
 
 const onLive = () => ({ ...stateOf(), knob: 'area.live' });
+/** Glulam over two spans and an overhang: sizes take turns along its first span. */
+const onGirder = () =>
+  stateOf([
+    {
+      spans: ['14 ft', '10 ft'],
+      overhangs: { right: '4 ft' },
+      tributary: '8 ft',
+      spacing: undefined,
+      stock: { product: 'glulam', species: 'Western species', grade: '24F-1.8E' },
+      section: { width: '5.125 in', depth: '13.5 in', plies: 1 },
+    },
+  ]);
 const PSF = 1 / 144;
 
 describe('the handovers beside the rack', () => {
@@ -94,8 +106,48 @@ describe('the strip of handovers', () => {
     const { strip } = atRest(open).mode as HandoversMode;
     const member = memberOf(open);
     const { put } = sweepsOf(member).find(({ key }) => key === 'spans.0')!;
-    expect(strip!.segments).toEqual(handoversOf(member, put, strip!.from, strip!.to));
+    expect(strip!.groups.flat()).toEqual(handoversOf(member, put, strip!.from, strip!.to));
     expect(strip!.from).toBeLessThan(strip!.now);
+    // The workings looked at on the way there do not get in the way of it, in other units either.
+    const { state: begun } = afterEvents(open, { type: 'settle' }, { type: 'settle' });
+    expect((begun.mode as HandoversMode).search).not.toBeNull();
+    const back = atRest(pressing(begun, 'w', 'escape').state).mode as HandoversMode;
+    expect(back.strip!.groups).toEqual(strip!.groups);
+    const metric = atRest(pressing(begun, 'w', 'i', 'escape').state);
+    const { groups, from, to } = (metric.mode as HandoversMode).strip!;
+    expect(groups.flat()).toEqual(handoversOf(memberOf(metric), put, from, to));
+  });
+
+  it('is found a part at a time, says how far it has come, and Escape leaves it at once', () => {
+    let state = pressing(onGirder(), 'H').state;
+    const said = new Set<string>();
+    for (let part = 0; (state.mode as HandoversMode).strip === null; part += 1) {
+      expect(part).toBeLessThan(1000);
+      said.add(/being found.*/.exec(shown(state, 80, 24).join('\n'))![0].trim());
+      expect(pressing(state, 'escape').state.mode.name).toBe('explore');
+      state = afterEvents(state, { type: 'settle' }).state;
+    }
+    const tenths = [10, 20, 30, 40, 50, 60, 70, 80, 90].map((percent) => `being found, ${percent} %`);
+    const after = [...said].slice(1);
+    expect([...said][0]).toBe('being found ...');
+    expect(after.length).toBeGreaterThan(5);
+    expect(tenths.filter((text) => said.has(text))).toEqual(after);
+  });
+
+  it('gives a line to neighbours too narrow to show, and counts them', () => {
+    const state = atRest(pressing(onGirder(), 'H').state);
+    const { strip } = state.mode as HandoversMode;
+    const { groups, show } = strip!;
+    const isNarrow = ({ from, to }: Segment) => show(from) === show(to);
+    for (const group of groups) if (group.length > 1) expect(group.every(isNarrow)).toBe(true);
+    // No two lines beside each other of stretches that show no width.
+    const lines = groups.map((group) => group.every(isNarrow));
+    expect(lines.some((narrow, at) => narrow && lines[at + 1])).toBe(false);
+    const all = groups.flat();
+    for (const [at, { from }] of all.entries()) expect(from).toBe(all[at - 1]?.to ?? strip!.from);
+    const most = Math.max(...groups.map(({ length }) => length));
+    expect(most).toBeGreaterThan(1);
+    expect(shown(state, 120, 400).join('\n')).toContain(`${most} narrower ones: `);
   });
 
   it('goes along the span where the knob in hand is a choice', () => {

@@ -1,9 +1,10 @@
 import type { Size } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
-import { type CheckId, PASS_LIMIT } from '../../timber/report.ts';
+import type { CheckId } from '../../timber/report.ts';
 import { BY_WEIGHT, type Ranking } from '../rack/best.ts';
 import { type Along, alongOf, type Put, type Reading } from './along.ts';
-import { CLOSE, turningPoint } from './turning-point.ts';
+import { pricesCross, turnsRound } from './more-places.ts';
+import { beginClosing, CLOSE, type Closing, closer, nextValue, turningPoint } from './turning-point.ts';
 
 /** A stretch of a knob along which one size is the best that passes. Segments touch. */
 export interface Segment {
@@ -31,23 +32,114 @@ export function handoversOf(
   put: Put,
   from: number,
   to: number,
-  { ranking = BY_WEIGHT, only = null }: HandoverOptions = {},
+  options: HandoverOptions = {},
 ): Segment[] {
+  const all = onward(beginSearch(member, put, from, to, options), Number.POSITIVE_INFINITY);
+  return segmentsFound(all);
+}
+
+/** A search for handovers that can be gone on with a few readings at a time. It is a value: going on makes another. */
+export interface HandoverSearch {
+  readonly along: Along;
+  readonly from: number;
+  readonly to: number;
+  /** What is done now: the range is read from end to end, then where a ratio may turn or a price steps, then where prices cross, and places are closed in on. */
+  readonly stage: 'ends' | 'turns' | 'prices' | 'places';
+  /** Values still to be read in this stage. */
+  readonly due: readonly number[];
+  /** The readings that places are closed in on between, in order of their values once they are all taken. */
+  readonly readings: readonly Reading[];
+  /** These and all that was read on the way to a place. */
+  readonly seen: readonly Reading[];
+  /** Up to here handovers are found; null before the last stage. */
+  readonly here: Reading | null;
+  /** Index of the reading that `here` goes towards. */
+  readonly next: number;
+  /** The place after `here` that is being closed in on; null between two. */
+  readonly closing: Closing | null;
+  readonly turns: readonly { readonly value: number; readonly lit: number }[];
+}
+
+/** The search of `handoversOf`, with nothing read yet. Throws RangeError where the range is empty. */
+export function beginSearch(
+  member: Member,
+  put: Put,
+  from: number,
+  to: number,
+  { ranking = BY_WEIGHT, only = null }: HandoverOptions = {},
+): HandoverSearch {
   if (!(from < to)) throw new RangeError('the range must go from less to more');
+  const due = Array.from({ length: READINGS }, (_, at) =>
+    at === READINGS - 1 ? to : from + ((to - from) * at) / (READINGS - 1),
+  );
   const along = alongOf(member, put, ranking, only);
-  const turns: { readonly value: number; readonly lit: number }[] = [];
-  const readings = spread(along, from, to);
-  const seen = [...readings];
-  for (let at = 1; at < readings.length; at += 1) {
-    let here = readings[at - 1]!;
-    const end = readings[at]!;
-    while (here.lit !== end.lit) {
-      const { after } = turningPoint(along, here, end, seen);
-      turns.push({ value: after.value, lit: after.lit });
-      here = after;
-    }
-  }
+  return {
+    along,
+    from,
+    to,
+    stage: 'ends',
+    due,
+    readings: [],
+    seen: [],
+    here: null,
+    next: 1,
+    closing: null,
+    turns: [],
+  };
+}
+
+/** The search gone on with for so many readings of the rack, or to its end. */
+export function onward(search: HandoverSearch, readings: number): HandoverSearch {
+  const until = search.seen.length + readings;
+  let now = search;
+  while (!isFound(now) && now.seen.length < until) now = stepped(now);
+  return now;
+}
+
+/** True where nothing is left to read. */
+export function isFound({ here, next, readings }: HandoverSearch): boolean {
+  return here !== null && next === readings.length;
+}
+
+/** How much of the range its handovers are found of, 0 to 1. */
+export function shareFound({ here, from, to }: HandoverSearch): number {
+  return here === null ? 0 : (here.value - from) / (to - from);
+}
+
+/** The stretches of a search that is at its end. */
+export function segmentsFound({ along, from, to, readings, turns }: HandoverSearch): Segment[] {
   return segmentsOf(along, from, to, readings[0]!.lit, turns);
+}
+
+/** One step on: a reading more, or what comes after the last one begun. */
+function stepped(search: HandoverSearch): HandoverSearch {
+  const { along, from, to, stage, due, readings, seen, here, next, closing, turns } = search;
+  if (due.length > 0) {
+    const reading = along.read(due[0]!);
+    return { ...search, due: due.slice(1), readings: [...readings, reading], seen: [...seen, reading] };
+  }
+  if (here === null) {
+    const inOrder = readings.toSorted((a, b) => a.value - b.value);
+    const within = (values: readonly number[]) => values.filter((value) => value > from && value < to);
+    const staged = { ...search, readings: inOrder, seen: inOrder };
+    if (stage === 'ends') {
+      const values = [...turnsRound(along, inOrder), ...along.steps(from, to)];
+      return { ...staged, stage: 'turns', due: within(values) };
+    }
+    if (stage === 'turns') return { ...staged, stage: 'prices', due: within(pricesCross(along, inOrder)) };
+    return { ...staged, stage: 'places', here: inOrder[0]! };
+  }
+  const end = readings[next]!;
+  if (here.lit === end.lit) return { ...search, here: end, next: next + 1 };
+  if (closing === null) return { ...search, closing: beginClosing(here, end, seen) };
+  const value = nextValue(closing, seen);
+  if (value !== null) {
+    const reading = along.read(value);
+    return { ...search, seen: [...seen, reading], closing: closer(closing, reading) };
+  }
+  const { after } = closing;
+  const turn = { value: after.value, lit: after.lit };
+  return { ...search, here: after, closing: null, turns: [...turns, turn] };
 }
 
 function segmentsOf(
@@ -83,83 +175,6 @@ function segmentsOf(
 /** The narrowest stretch of a range that is told apart from its neighbour. */
 function narrowest(from: number, to: number): number {
   return 10 * CLOSE * Math.max(Math.abs(from), Math.abs(to));
-}
-
-/**
- * Readings from end to end, with more where a price steps or crosses that of a lit size, and wherever a size might
- * pass, or fail, between two that agree: where its ratio turns round near the limit, as it does where a load helps
- * until it harms.
- */
-function spread(along: Along, from: number, to: number): Reading[] {
-  const readings = Array.from({ length: READINGS }, (_, at) =>
-    along.read(at === READINGS - 1 ? to : from + ((to - from) * at) / (READINGS - 1)),
-  );
-  const more = new Set<number>();
-  for (let at = 1; at < readings.length - 1; at += 1) {
-    const [left, here, right] = [readings[at - 1]!, readings[at]!, readings[at + 1]!];
-    const upTo = here.lit < 0 ? along.sizes.length - 1 : here.lit;
-    for (let index = 0; index <= upTo; index += 1) {
-      if (here.lit >= 0 && here.place(index) > here.place(here.lit)) continue;
-      const place = turnsRound(left, here, right, index);
-      if (place !== null) more.add(place);
-    }
-  }
-  const within = (values: Iterable<number>): Reading[] =>
-    [...values].filter((value) => value > from && value < to).map((value) => along.read(value));
-  const inOrder = (all: Reading[]): Reading[] => all.sort((a, b) => a.value - b.value);
-  const stepped = inOrder([...readings, ...within(more), ...within(along.steps(from, to))]);
-  const crossed = stepped
-    .slice(1)
-    .flatMap((right, at) => pricesCross(along.sizes.length, stepped[at]!, right));
-  return crossed.length === 0 ? stepped : inOrder([...stepped, ...within(crossed)]);
-}
-
-/**
- * Where between two readings the price of a size comes to be less than that of a lit one, or ceases to be: prices go
- * evenly with the length from one step to the next.
- */
-function pricesCross(sizes: number, left: Reading, right: Reading): number[] {
-  const places: number[] = [];
-  for (const lit of new Set([left.lit, right.lit])) {
-    if (lit < 0) continue;
-    for (let index = 0; index < sizes; index += 1) {
-      const [before, after] = [dearerBy(left, index, lit), dearerBy(right, index, lit)];
-      if (before === null || after === null || before * after >= 0) continue;
-      const share = before / (before - after);
-      // On both sides of it, so that the size that is the cheaper for a short stretch is met.
-      for (const aside of [-JUST_ASIDE, JUST_ASIDE])
-        places.push(left.value + (share + aside) * (right.value - left.value));
-    }
-  }
-  return places;
-}
-
-/** As a share of the way from one reading to the next. */
-const JUST_ASIDE = 1e-7;
-
-function dearerBy(reading: Reading, index: number, than: number): number | null {
-  const [one, other] = [reading.price(index), reading.price(than)];
-  return one === null || other === null ? null : one - other;
-}
-
-/** A ratio that turns round nearer than this to the limit may cross it between two readings. */
-const NEAR = 0.1;
-
-/** Where the ratio of a size is least (of one that fails) or greatest (of one that passes) by its parabola; null where it is far. */
-function turnsRound(left: Reading, here: Reading, right: Reading, index: number): number | null {
-  const middle = here.worst(index);
-  if (!Number.isFinite(middle)) return null;
-  const fails = middle > PASS_LIMIT;
-  if (Math.abs(middle - 1) > 2 * NEAR + 1) return null;
-  const [a, b] = [left.worst(index), right.worst(index)];
-  if (!Number.isFinite(a) || !Number.isFinite(b)) return null;
-  const turns = fails ? a > middle && b > middle : a < middle && b < middle;
-  if (!turns) return null;
-  const bend = a - 2 * middle + b;
-  const shift = (a - b) / (2 * bend);
-  const extreme = middle - ((a - b) * shift) / 4;
-  if (Math.abs(extreme - 1) > NEAR) return null;
-  return here.value + shift * (right.value - here.value);
 }
 
 /** The lit size with its neighbours along a knob. */

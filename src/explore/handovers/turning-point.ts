@@ -27,22 +27,49 @@ const MUCH = 0.8;
  * added to `seen`.
  */
 export function turningPoint(along: Along, from: Reading, to: Reading, seen: Reading[] = []): Turn {
-  let { before, after } = within(from, to, seen);
-  const close = CLOSE * Math.max(Math.abs(from.value), Math.abs(to.value));
-  let wider = 1;
-  for (let round = 0; round < ROUNDS; round += 1) {
-    const apart = Math.abs(after.value - before.value);
-    if (apart <= close) break;
-    const value = aimed(before, after, seen, close, wider) ?? (before.value + after.value) / 2;
-    if (value === before.value || value === after.value) break;
+  let closing = beginClosing(from, to, seen);
+  for (;;) {
+    const value = nextValue(closing, seen);
+    if (value === null) return closing;
     const here = along.read(value);
     seen.push(here);
-    if (here.lit === from.lit) before = here;
-    else after = here;
-    const left = Math.abs(after.value - before.value);
-    wider = left > MUCH * apart ? wider * WIDER : 1;
+    closing = closer(closing, here);
   }
-  return { before, after };
+}
+
+/** A place that is being closed in on: a value, of which each reading makes the next. */
+export interface Closing extends Turn {
+  /** How near its two sides have to come. */
+  readonly close: number;
+  /** How many times further than its own error the next guess aims. */
+  readonly wider: number;
+  readonly round: number;
+}
+
+/** The place between two readings, with those `seen` between them taken into account. */
+export function beginClosing(from: Reading, to: Reading, seen: readonly Reading[]): Closing {
+  const close = CLOSE * Math.max(Math.abs(from.value), Math.abs(to.value));
+  return { ...within(from, to, seen), close, wider: 1, round: 0 };
+}
+
+/** The value to be read next; null where the place is found. */
+export function nextValue(closing: Closing, seen: readonly Reading[]): number | null {
+  const { before, after, close, wider, round } = closing;
+  if (round === ROUNDS || Math.abs(after.value - before.value) <= close) return null;
+  const value = aimed(before, after, seen, close, wider) ?? (before.value + after.value) / 2;
+  return value === before.value || value === after.value ? null : value;
+}
+
+/** With the reading that was asked for. */
+export function closer(closing: Closing, here: Reading): Closing {
+  const apart = Math.abs(closing.after.value - closing.before.value);
+  const turn: Turn =
+    here.lit === closing.before.lit
+      ? { before: here, after: closing.after }
+      : { before: closing.before, after: here };
+  const left = Math.abs(turn.after.value - turn.before.value);
+  const wider = left > MUCH * apart ? closing.wider * WIDER : 1;
+  return { ...closing, ...turn, wider, round: closing.round + 1 };
 }
 
 /** The two ends with what has been read between them taken into account. */

@@ -80,7 +80,7 @@ function otherUnits(state: State, mode: WorkingsMode): State {
 
 /** A view to come back to in other units: the strip of handovers is found anew. */
 function inUnits(from: Mode): Mode {
-  return from.name === 'handovers' ? { ...from, strip: null } : from;
+  return from.name === 'handovers' ? { ...from, strip: null, search: null } : from;
 }
 
 /** The list of pages: a line is chosen, Enter opens its page. */

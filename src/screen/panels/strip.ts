@@ -49,10 +49,10 @@ const COLUMNS: readonly TableColumn[] = [
   { head: 'size', align: 'left' },
 ];
 
-/** The strip over its table: each stretch with the size that is best there, now under it. null: still being found. */
+/** The strip over its table: each stretch with the size that is best there, now under it. A text: how far finding it has come. */
 export function drawStrip(
   screen: Pick<View, 'title'>,
-  strip: StripView | null,
+  strip: StripView | string,
   scroll: number,
   canvas: Canvas,
   glyphs: Glyphs,
@@ -63,13 +63,13 @@ export function drawStrip(
   drawTitle(screen, canvas, { x: 0, y: 0, columns, rows: 1 }, glyphs);
   const line = { x: 0, y: 1, columns, rows: 1 };
   rule(canvas, line, glyphs);
-  heading(canvas, line, 2, cells(strip?.title ?? 'handovers'), 'strong');
-  if (strip === null) canvas.put(MARGIN, STRIP_AT, 'being found ...', 'quiet');
+  heading(canvas, line, 2, cells(typeof strip === 'string' ? 'handovers' : strip.title), 'strong');
+  if (typeof strip === 'string') canvas.put(MARGIN, STRIP_AT, cells(strip), 'quiet');
   else {
     drawBar(strip, canvas, columns - 2 * MARGIN, glyphs);
     drawTable(strip, scroll, canvas, glyphs);
   }
-  const scrolls = strip !== null && strip.stretches.length > stripRows(rows);
+  const scrolls = typeof strip !== 'string' && strip.stretches.length > stripRows(rows);
   const foot = [
     ...(scrolls ? [{ keys: '↑↓', does: 'scroll' }] : []),
     { keys: 'Esc', does: 'back' },

@@ -1,6 +1,14 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { aroundOf, handoversOf } from '../../../src/explore/handovers/handovers.ts';
+import {
+  aroundOf,
+  beginSearch,
+  handoversOf,
+  isFound,
+  onward,
+  segmentsFound,
+  shareFound,
+} from '../../../src/explore/handovers/handovers.ts';
 import { sweepsOf } from '../../../src/explore/handovers/sweep.ts';
 import type { Ranking } from '../../../src/explore/rack/best.ts';
 import { bestOf } from '../../../src/explore/rack/ranked.ts';
@@ -89,6 +97,37 @@ describe('handovers of random members', () => {
             expect(lit(segment.to - beside)).toBe(label);
             expect(lit(segment.from + beside + share * (wide - 2 * beside))).toBe(label);
           });
+        },
+      ),
+      { numRuns: runs(60) },
+    );
+  });
+
+  it('found a few readings at a time are those found at once, and no part reads more than it is asked for', () => {
+    fc.assert(
+      fc.property(
+        anyPart,
+        fc.constantFrom(...RANGES),
+        anyRanking,
+        fc.integer({ min: 1, max: 20 }),
+        (part, [key, from, to], ranking, readings) => {
+          const member = memberOf({ ...part, loads: undefined });
+          const { put } = sweepsOf(member).find((each) => each.key === key)!;
+          let search = beginSearch(member, put, from, to, { ranking });
+          while (!isFound(search)) {
+            const next = onward(search, readings);
+            const read = next.seen.length - search.seen.length;
+            expect(read).toBeLessThanOrEqual(readings);
+            expect(isFound(next) || read === readings).toBe(true);
+            expect(shareFound(next)).toBeGreaterThanOrEqual(shareFound(search));
+            // Going on from where it stood once more comes to the same: the search is a value.
+            expect(onward(search, readings).seen.map(({ value }) => value)).toEqual(
+              next.seen.map(({ value }) => value),
+            );
+            search = next;
+          }
+          expect(shareFound(search)).toBe(1);
+          expect(segmentsFound(search)).toEqual(handoversOf(member, put, from, to, { ranking }));
         },
       ),
       { numRuns: runs(60) },
