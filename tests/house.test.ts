@@ -56,6 +56,21 @@ describe('the house', () => {
     }
   });
 
+  it('has no circle of imports', () => {
+    const reached = new Map<string, 'under way' | 'done'>();
+    const visit = (file: string, path: readonly string[]): void => {
+      if (reached.get(file) === 'done') return;
+      expect(reached.get(file), [...path, file].join(' -> ')).toBeUndefined();
+      reached.set(file, 'under way');
+      for (const target of importsOf(file).filter((each) => each.startsWith('.'))) {
+        const next = normalize(join(dirname(file), target));
+        if (files.includes(next)) visit(next, [...path, file]);
+      }
+      reached.set(file, 'done');
+    };
+    for (const file of files) visit(file, []);
+  });
+
   it('keeps clocks and chance out of the core', () => {
     for (const file of files.filter((each) => CORE.includes(roomOf(each)))) {
       expect(readFileSync(join(SRC, file), 'utf8'), file).not.toMatch(

@@ -2,7 +2,7 @@ import { whyNot } from '../files/why.ts';
 import { writeWhole } from '../files/write-whole.ts';
 import { harmless, isHarmful, quoted } from '../quantity/index.ts';
 import { PAPERS, type Paper } from '../session/session.ts';
-import type { Job } from '../sheet/content/make-sheet.ts';
+import type { Job } from '../sheet/asked.ts';
 import { FORMATS, formatOf } from '../sheet/format.ts';
 import { type Loaded, load, type SessionOptions } from './load.ts';
 import { refuseSameFile } from './same-file.ts';

@@ -1,21 +1,10 @@
 import { differsInBorneOnly, linksOf } from '../explore/links/index.ts';
 import { showRatio } from '../quantity/index.ts';
 import { rankingOf } from '../session/index.ts';
-import type { Session } from '../session/session.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import type { State } from './state.ts';
-
-/** What came of changes for the members that carry the changed one, to be told once no key waits. */
-export interface Watch {
-  /** The session before the first of the changes. */
-  readonly before: Session;
-  /** How many members have been looked at. */
-  readonly seen: number;
-  /** What is to be told so far. */
-  readonly told: readonly string[];
-}
 
 /** Members looked at in one go, so that no key waits long. */
 const AT_ONCE = 25;

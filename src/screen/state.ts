@@ -11,11 +11,10 @@ import type { Session } from '../session/session.ts';
 import { sameButTrails } from '../session/trail.ts';
 import type { Size } from '../timber/index.ts';
 import type { Member, Product } from '../timber/member.ts';
-import type { Watch } from './carriers.ts';
 import type { ChartOf } from './chart-view.ts';
 import type { Edit } from './edit.ts';
 import type { FoundAround, FoundMoves, Strip } from './found.ts';
-import type { Run } from './trail.ts';
+import type { Run, Watch } from './under-way.ts';
 
 /** Everything the explorer knows; one value, never changed in place. */
 export interface State {

@@ -5,17 +5,7 @@ import type { Session, SessionMember, TrailEntry } from '../session/session.ts';
 import { trailOf, withEntry } from '../session/trail.ts';
 import type { State } from './state.ts';
 import { whatChanged } from './trail-words.ts';
-
-/** A run of changes of one thing, told as one entry: from before the first to after the last. */
-export interface Run {
-  readonly what: string;
-  /** When the last of them was, ms. */
-  readonly time: number;
-  /** The member before the first of them. */
-  readonly first: SessionMember;
-  /** The entry that tells them so far; it is the last of the trail. */
-  readonly entry: TrailEntry;
-}
+import type { Run } from './under-way.ts';
 
 /** Longer than a held key takes to begin repeating; changes further apart are told apart. */
 const RUN_MS = 2000;

@@ -1,9 +1,9 @@
 import * as z from 'zod/mini';
-import type { PARTS } from './schema.ts';
+import type { Parts } from './schema-buying.ts';
 import { MAX_SHEET_ENTRY, PAPERS } from './session.ts';
 
 /** `sheet`: the title block of the calculation sheet, each entry of which may be left out, and its paper. */
-export function sheet({ text }: typeof PARTS) {
+export function sheet({ text }: Pick<Parts, 'text'>) {
   const entry = z.optional(text(0, MAX_SHEET_ENTRY));
   return z
     .strictObject({

@@ -1,5 +1,6 @@
 import type { Paper } from '../session/session.ts';
-import { type Job, makeSheet } from './content/make-sheet.ts';
+import type { Job } from './asked.ts';
+import { makeSheet } from './content/make-sheet.ts';
 import type { Format } from './format.ts';
 import type { Sheet } from './sheet.ts';
 import { writeHtml } from './write/html.ts';

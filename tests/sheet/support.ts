@@ -3,7 +3,7 @@ import { fileURLToPath } from 'node:url';
 import { getDocument } from 'pdfjs-dist/legacy/build/pdf.mjs';
 import { readSession } from '../../src/session/index.ts';
 import type { Paper } from '../../src/session/session.ts';
-import type { Job } from '../../src/sheet/content/make-sheet.ts';
+import type { Job } from '../../src/sheet/asked.ts';
 import type { Format } from '../../src/sheet/format.ts';
 import { sheetBytes } from '../../src/sheet/index.ts';
 import { sessionText } from '../support/session.ts';

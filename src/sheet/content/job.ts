@@ -5,9 +5,9 @@ import { lengthsText, woodName } from '../../timber/member-words.ts';
 import { CHECK_IDS } from '../../timber/report.ts';
 import { CHECK_WORD } from '../../timber/words.ts';
 import { WORKINGS_WORD } from '../../timber/workings/index.ts';
+import type { Job } from '../asked.ts';
 import type { Block, Fact, Row, Section } from '../sheet.ts';
 import { left, right } from './columns.ts';
-import type { Job } from './make-sheet.ts';
 import { ratioOf, unloaded } from './member-facts.ts';
 
 /** The entries of a title block, in the order in which they stand. */

@@ -1,23 +1,9 @@
 import { checkedMember } from '../../explore/checked.ts';
-import type { Units } from '../../quantity/index.ts';
 import { sessionDocument } from '../../session/index.ts';
-import type { Session, SessionMember } from '../../session/session.ts';
-import type { CheckId } from '../../timber/report.ts';
+import type { Job } from '../asked.ts';
 import type { Sheet } from '../sheet.ts';
 import { jobSection, titleFacts } from './job.ts';
 import { memberSection } from './member.ts';
-
-/** What a sheet is asked for. */
-export interface Job {
-  readonly session: Session;
-  /** Those of the session that the sheet is of, one or more. */
-  readonly members: readonly SessionMember[];
-  readonly units: Units;
-  /** The checks to keep; null for all. */
-  readonly only: readonly CheckId[] | null;
-  /** Stands in place of the title block's; null leaves that one. */
-  readonly date: string | null;
-}
 
 /** The calculation sheet of some members of a session. The same job makes the same sheet: no clock is asked. */
 export function makeSheet(job: Job): Sheet {

@@ -14,9 +14,9 @@ import { CHECK_IDS, PASS_LIMIT } from '../../timber/report.ts';
 import { CHECK_WORD } from '../../timber/words.ts';
 import { factorText } from '../../timber/workings/figures.ts';
 import { WORKINGS_WORD } from '../../timber/workings/index.ts';
+import type { Job } from '../asked.ts';
 import type { Block, Row } from '../sheet.ts';
 import { left, right } from './columns.ts';
-import type { Job } from './make-sheet.ts';
 import { ratioOf } from './member-facts.ts';
 
 const ALL_SPANS = 'all spans';
