@@ -41,6 +41,7 @@ export async function runSchedule(
     await writer.begin();
     for await (const done of inOrder(all, (records) => sizer.size({ job, records }), sizer.ahead)) {
       await writer.write(done);
+      sizer.written(done);
       count(tally, done);
       progress.show(tally.passing + tally.failing + tally.bad, source.part());
       for (const { line, fault } of done.bad) report(line, fault);

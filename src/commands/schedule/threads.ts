@@ -1,12 +1,14 @@
 import { availableParallelism } from 'node:os';
-import type { Batch, SizedBatch } from './size-rows.ts';
-import { sizeBatch } from './size-rows.ts';
+import { type Batch, type SizedBatch, sizeBatch } from './size-rows.ts';
+import type { BatchAside, SizedAside } from './worker.ts';
 
 /** What sizes batches. */
 export interface Sizer {
   readonly size: (batch: Batch) => Promise<SizedBatch>;
   /** Batches that it has in hand at once. */
   readonly ahead: number;
+  /** The result has been written: the room of its text may be used again. */
+  readonly written: (done: SizedBatch) => void;
   readonly close: () => Promise<void>;
 }
 
@@ -14,11 +16,15 @@ export interface Sizer {
 export const ALONE: Sizer = {
   size: async (batch) => sizeBatch(batch),
   ahead: 1,
+  written: () => undefined,
   close: async () => undefined,
 };
 
 /** So that no thread waits while results are written. */
 const AHEAD = 3;
+
+/** Bytes of a batch's text: what is longer goes back as a text of its own. */
+const ROOM = 1 << 18;
 
 /** A row leaves little behind: more room for young values would only be filled before it is cleared. */
 const YOUNG_MB = 24;
@@ -32,9 +38,22 @@ export async function onThreads(threads: number): Promise<Sizer> {
     maxThreads: threads,
     resourceLimits: { maxYoungGenerationSizeMb: YOUNG_MB },
   });
+  const ahead = AHEAD * threads;
+  const free = Array.from({ length: ahead }, () => new SharedArrayBuffer(ROOM));
   return {
-    size: (batch) => pool.run(batch) as Promise<SizedBatch>,
-    ahead: AHEAD * threads,
+    async size(batch) {
+      // As many rooms as there are batches in hand.
+      const room = free.pop()!;
+      const aside: BatchAside = { batch, room };
+      const { text, ...done }: SizedAside = await pool.run(aside);
+      if (typeof text === 'number') return { ...done, text: new Uint8Array(room, 0, text) };
+      free.push(room);
+      return { ...done, text };
+    },
+    ahead,
+    written({ text }) {
+      if (typeof text !== 'string') free.push(text.buffer as SharedArrayBuffer);
+    },
     close: () => pool.destroy(),
   };
 }
