@@ -39,7 +39,7 @@ function deadWith(parts: LoadParts, w: number): States | null {
 }
 
 function effectsOfKind(parts: LoadParts, kind: LoadKind, states: States): KindEffects {
-  const response = responseOf(parts.solution, parts.grid, states);
+  const response = responseOf(parts.grid, states);
   const largest = (quantity: Quantity) => {
     const { max, min } = response.extremes(quantity);
     return Math.max(max.value, -min.value);

@@ -244,6 +244,6 @@ function placeUnder(parts: LoadParts, w: number, demand: Demanded, sign: number,
     const factor = combination.factors[states.kind] ?? 0;
     if (factor !== 0) add(sum, worstOf(parts, states, sign, read), factor);
   }
-  const { max, min } = responseOf(parts.solution, parts.grid, sum).extremes(quantity, place);
+  const { max, min } = responseOf(parts.grid, sum).extremes(quantity, place);
   return sign > 0 ? max.at : min.at;
 }

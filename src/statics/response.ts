@@ -1,39 +1,11 @@
-import { fieldOfPiece, type Grid, pieceAt } from './grid.ts';
-import {
-  DEFLECTION,
-  largestPlace,
-  M0,
-  M1,
-  MOMENT,
-  type Order,
-  pieceValue,
-  Q0,
-  Q1,
-  S0,
-  SHEAR,
-  SLOPE,
-  STRIDE,
-  V0,
-  Y0,
-} from './piece.ts';
-import type { BeamLayout, States } from './states.ts';
+import { type Grid, pieceAt } from './grid.ts';
+import { DEFLECTION, largestPlace, MOMENT, type Order, pieceValue, SHEAR, SLOPE, STRIDE } from './piece.ts';
+import type { States } from './states.ts';
 
 /** A value and its place, in from the member's left end. */
 export interface Extreme {
   readonly value: number;
   readonly at: number;
-}
-
-/** Coefficients of 1, t, t² ... with t from `from`, in; at EI = 1. */
-export interface Segment {
-  readonly from: number;
-  readonly to: number;
-  /** Index of the field it lies in. */
-  readonly field: number;
-  readonly shear: readonly number[];
-  readonly moment: readonly number[];
-  readonly slope: readonly number[];
-  readonly deflection: readonly number[];
 }
 
 export type Quantity = 'shear' | 'moment' | 'deflection';
@@ -47,12 +19,6 @@ export interface Response {
   readonly states: States;
   /** Upward force of each support, lb. */
   readonly reactions: readonly number[];
-  /** Moment in the beam over each support, in the span beside it (the one to the right, but for the last). */
-  supportMoments(): number[];
-  /** What each fixed end adds to the beam's moment on passing it from left to right, lb.in; 0 where it is not held. */
-  fixedMoments(): { readonly left: number; readonly right: number };
-  /** Piecewise polynomials, left to right. */
-  segments(): Segment[];
   /** At a jump the value to the right of it, at the member's right end the value before it. */
   shearAt(x: number): number;
   momentAt(x: number): number;
@@ -65,7 +31,7 @@ export interface Response {
 const ORDER_OF: Readonly<Record<Quantity, Order>> = { shear: SHEAR, moment: MOMENT, deflection: DEFLECTION };
 
 /** A response that reads its values from the states of a grid's pieces. */
-export function responseOf(layout: BeamLayout, grid: Grid, states: States): Response {
+export function responseOf(grid: Grid, states: States): Response {
   const { data } = states;
   const read = (order: Order) => (x: number) => {
     const p = pieceAt(grid, x);
@@ -75,30 +41,6 @@ export function responseOf(layout: BeamLayout, grid: Grid, states: States): Resp
     grid,
     states,
     reactions: Array.from(states.reactions),
-    supportMoments() {
-      const left = layout.beam.supports === 'bearings' && grid.fields[0]!.kind === 'overhang' ? 1 : 0;
-      return layout.supports.map((_, i) => {
-        if (i > 0 && i === layout.supports.length - 1) {
-          return data[STRIDE * (grid.first[left + i]! - 1) + M1]!;
-        }
-        return data[STRIDE * grid.first[left + i]! + M0]!;
-      });
-    },
-    fixedMoments() {
-      const { beam, fields } = layout;
-      const cantilever = beam.supports === 'cantilever';
-      const leading = !cantilever && fields[0]!.kind === 'overhang' ? 1 : 0;
-      const atStart = (f: number) => (f < fields.length ? data[STRIDE * grid.first[f]! + M0]! : 0);
-      const atEnd = (f: number) => (f < 0 ? 0 : data[STRIDE * (grid.first[f + 1]! - 1) + M1]!);
-      const last = leading + beam.spans.length - 1;
-      return {
-        left: cantilever || beam.fixed.left ? atStart(leading) - atEnd(leading - 1) : 0,
-        right: beam.fixed.right ? atStart(last + 1) - atEnd(last) : 0,
-      };
-    },
-    segments() {
-      return Array.from({ length: grid.count }, (_, p) => segmentOf(grid, data, p));
-    },
     shearAt: read(SHEAR),
     momentAt: read(MOMENT),
     slopeAt: read(SLOPE),
@@ -135,22 +77,4 @@ function extremeIn(
     }
   }
   return { value: sign * value, at };
-}
-
-function segmentOf(grid: Grid, data: number[], p: number): Segment {
-  const o = STRIDE * p;
-  const q0 = data[o + Q0]!;
-  const q1 = data[o + Q1]!;
-  const v = data[o + V0]!;
-  const m = data[o + M0]!;
-  const s = data[o + S0]!;
-  return {
-    from: grid.edges[p]!,
-    to: grid.edges[p + 1]!,
-    field: fieldOfPiece(grid, p),
-    shear: [v, -q0, -q1 / 2],
-    moment: [m, v, -q0 / 2, -q1 / 6],
-    slope: [s, -m, -v / 2, q0 / 6, q1 / 24],
-    deflection: [data[o + Y0]!, s, -m / 2, -v / 6, q0 / 24, q1 / 120],
-  };
 }

@@ -2,13 +2,18 @@ import { type Beam, type BeamLoad, beamFields, type Field, supportPlaces } from 
 import { type Grid, gridOf, type PieceLoads, spread } from './grid.ts';
 import { M0, M1, Q0, Q1, QE, S0, S1, STRIDE, V0, V1, Y0, Y1 } from './piece.ts';
 import { type Response, responseOf } from './response.ts';
-import type { BeamLayout, States } from './states.ts';
+import type { States } from './states.ts';
 import { zeros } from './zeros.ts';
 
 /** A beam made ready: the equations of its support moments factored, whatever it is to carry. */
-export interface BeamSolution extends BeamLayout {
-  /** Exact response at EI = 1 to these loads; cut at the places of `cuts` too, so that it can be added to others. */
-  respond(loads: readonly BeamLoad[], cuts?: readonly BeamLoad[]): Response;
+export interface BeamSolution {
+  readonly beam: Beam;
+  /** Left to right. */
+  readonly fields: readonly Field[];
+  /** in from the member's left end */
+  readonly supports: readonly number[];
+  /** Exact response at EI = 1 to these loads. */
+  respond(loads: readonly BeamLoad[]): Response;
   /** Multipliers of the elimination, one a support. */
   readonly factors: {
     readonly lower: number[];
@@ -47,9 +52,9 @@ export function solveBeam(beam: Beam): BeamSolution {
     fields,
     supports,
     factors: { lower, pivot, upper },
-    respond(loads, cuts) {
-      const grid = gridOf(beam, cuts ? [...loads, ...cuts] : loads, fields);
-      return responseOf(solution, grid, statesOf(solution, grid, spread(grid, loads)));
+    respond(loads) {
+      const grid = gridOf(beam, loads, fields);
+      return responseOf(grid, statesOf(solution, grid, spread(grid, loads)));
     },
   };
   return solution;

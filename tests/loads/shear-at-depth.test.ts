@@ -5,6 +5,7 @@ import type { Loading } from '../../src/loads/loading.ts';
 import { termValue } from '../../src/loads/term-value.ts';
 import { beamFields } from '../../src/statics/beam.ts';
 import type { Response } from '../../src/statics/response.ts';
+import { segmentsOf } from '../statics/segments.ts';
 import { everyCase } from './brute-force.ts';
 import { anyCarrier, anyMember, member } from './members.ts';
 
@@ -28,7 +29,7 @@ function largestShear(response: Response, lo: number, hi: number): number {
     from,
     to,
     shear: [, v1, v2],
-  } of response.segments()) {
+  } of segmentsOf(response)) {
     const a = Math.max(lo, from);
     const b = Math.min(hi, to);
     if (a > b || (a === b && lo !== hi)) continue;
@@ -42,7 +43,7 @@ function largestShear(response: Response, lo: number, hi: number): number {
 
 /** Shear at x by the polynomial of the segment that starts at `from`. */
 function inside(response: Response, from: number, x: number): number {
-  const segment = response.segments().find((each) => each.from === from)!;
+  const segment = segmentsOf(response).find((each) => each.from === from)!;
   const t = x - from;
   return segment.shear[0]! + t * (segment.shear[1]! + t * segment.shear[2]!);
 }

@@ -1,6 +1,7 @@
 import type { Loading } from '../../src/loads/loading.ts';
 import { supportPlaces } from '../../src/statics/beam.ts';
-import type { Response, Segment } from '../../src/statics/response.ts';
+import type { Response } from '../../src/statics/response.ts';
+import { type Segment, segmentsOf } from '../statics/segments.ts';
 
 /** A moment this small against the largest of its field is none. */
 const ZERO = 1e-9;
@@ -31,7 +32,7 @@ function crossings(c: readonly number[], h: number): number[] {
 /** All stretches of a response on which `sign` times the moment is positive, as pieces that join over the supports. */
 function stretches(response: Response, sign: number, floor: number, stops: readonly number[]) {
   const pieces: { from: number; to: number; segment: Segment }[] = [];
-  for (const segment of response.segments()) {
+  for (const segment of segmentsOf(response)) {
     const h = segment.to - segment.from;
     const all = [0, ...crossings(segment.moment, h), h];
     const most = (i: number, by: (m: number) => number) =>

@@ -22,6 +22,11 @@ describe('beamFault', () => {
       'a cantilever has no overhangs: its span is the free arm',
     ],
     [
+      beam([100], { cantilever: true, left: 10 }),
+      [],
+      'a cantilever has no overhangs: its span is the free arm',
+    ],
+    [
       beam([100], { cantilever: true, fixed: 'right' }),
       [],
       'the right end of a cantilever is free; use bearings with both ends fixed instead',
@@ -29,12 +34,18 @@ describe('beamFault', () => {
     [beam([100]), [point(5, 100.5)], 'load 1 stands at 100.5 in, off the member (0 to 100 in)'],
     [beam([100]), [point(5, 50), point(5, -1)], 'load 2 stands at -1 in, off the member (0 to 100 in)'],
     [beam([100]), [point(Number.POSITIVE_INFINITY, 5)], 'load 1 has no finite size'],
+    [beam([100]), [line(20, 80, Number.NaN, 3)], 'load 1 has no finite size'],
+    [beam([100]), [line(20, 80, 3, Number.NEGATIVE_INFINITY)], 'load 1 has no finite size'],
     [beam([100]), [line(20, 120, 3)], 'load 1 runs from 20 to 120 in, off the member (0 to 100 in)'],
     [beam([100]), [line(60, 40, 3)], 'load 1 runs from 60 to 40 in: its start must be left of its end'],
     [beam([100]), [line(60, 60, 3)], 'load 1 runs from 60 to 60 in: its start must be left of its end'],
     [beam([100]), Array(101).fill(point(1, 1)), 'a member carries at most 100 loads, not 101'],
   ])('says what is wrong in plain words (%#)', (on, loads, reason) => {
     expect(beamFault(on, loads)).toBe(reason);
+  });
+
+  test('takes as many spans and loads as the most that it says', () => {
+    expect(beamFault(beam([1, 1, 1, 1, 1, 1]), Array(100).fill(point(1, 1)))).toBeNull();
   });
 
   test('lets a load end where rounding of units puts the end of the member', () => {

@@ -2,10 +2,23 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import type { Beam, BeamLoad } from '../../src/statics/beam.ts';
 import { beamFields, beamLength, supportPlaces } from '../../src/statics/beam.ts';
-import { combine } from '../../src/statics/combine.ts';
-import type { Response } from '../../src/statics/response.ts';
+import {
+  DEFLECTION,
+  LOAD,
+  M1,
+  MOMENT,
+  pieceValue,
+  QE,
+  S1,
+  SHEAR,
+  SLOPE,
+  STRIDE,
+  V1,
+  Y1,
+} from '../../src/statics/piece.ts';
 import { solveBeam } from '../../src/statics/solve.ts';
 import { anyBeam, anyLoad, anyLoadedBeam, beam, line, point } from './beams.ts';
+import { fixedMoments, segmentsOf } from './segments.ts';
 
 /** Sum of the loads' sizes without sign, lb: what rounding is measured against. */
 function gross(loads: readonly BeamLoad[]): number {
@@ -41,17 +54,17 @@ describe('solveBeam', () => {
   test('balances forces and moments on any beam under any loads', () => {
     fc.assert(
       fc.property(anyLoadedBeam, ({ on, loads }) => {
-        const response = solveBeam(on).respond(loads);
+        const solution = solveBeam(on);
+        const response = solution.respond(loads);
         const { reactions } = response;
-        const fixedMoments = response.fixedMoments();
+        const held = fixedMoments(solution, response);
         const force = gross(loads);
         const length = beamLength(on);
         const sum = loads.map(total);
         const up = reactions.reduce((a, r) => a + r, 0);
         expect(Math.abs(up - sum.reduce((a, s) => a + s.force, 0))).toBeLessThanOrEqual(1e-10 * force);
         const turning = supportPlaces(on).reduce((a, x, i) => a + x * reactions[i]!, 0);
-        const residue =
-          turning - sum.reduce((a, s) => a + s.moment, 0) - fixedMoments.left - fixedMoments.right;
+        const residue = turning - sum.reduce((a, s) => a + s.moment, 0) - held.left - held.right;
         expect(Math.abs(residue)).toBeLessThanOrEqual(1e-10 * force * length);
       }),
       RUNS,
@@ -79,7 +92,7 @@ describe('solveBeam', () => {
     );
   });
 
-  test('gives for loads together the sum of what it gives for each alone, by its own combining too', () => {
+  test('gives for loads together the sum of what it gives for each alone', () => {
     fc.assert(
       fc.property(anyLoadedBeam, fc.integer({ min: -4, max: 4 }), ({ on, loads }, factor) => {
         const solution = solveBeam(on);
@@ -91,22 +104,22 @@ describe('solveBeam', () => {
         const first = loads.slice(0, half);
         const second = loads.slice(half);
         const together = solution.respond([...first, ...second.map(scale)]);
-        const summed = combine(solution, [
-          { response: solution.respond(first, loads), factor: 1 },
-          { response: solution.respond(second, loads), factor },
-        ]);
+        const one = solution.respond(first);
+        const two = solution.respond(second);
         const length = beamLength(on);
         const force = gross(loads) * (1 + Math.abs(factor));
         for (const x of places(on)) {
-          expect(Math.abs(together.momentAt(x) - summed.momentAt(x))).toBeLessThanOrEqual(
-            1e-10 * force * length,
-          );
-          expect(Math.abs(together.deflectionAt(x) - summed.deflectionAt(x))).toBeLessThanOrEqual(
-            1e-10 * force * length ** 3,
-          );
+          expect(
+            Math.abs(together.momentAt(x) - one.momentAt(x) - factor * two.momentAt(x)),
+          ).toBeLessThanOrEqual(1e-10 * force * length);
+          expect(
+            Math.abs(together.deflectionAt(x) - one.deflectionAt(x) - factor * two.deflectionAt(x)),
+          ).toBeLessThanOrEqual(1e-10 * force * length ** 3);
         }
         together.reactions.forEach((reaction, i) => {
-          expect(Math.abs(reaction - summed.reactions[i]!)).toBeLessThanOrEqual(1e-10 * force);
+          expect(Math.abs(reaction - one.reactions[i]! - factor * two.reactions[i]!)).toBeLessThanOrEqual(
+            1e-10 * force,
+          );
         });
       }),
       RUNS,
@@ -206,7 +219,7 @@ describe('solveBeam', () => {
   test('gives shear as the slope of moment, and moment as minus the curvature of deflection', () => {
     fc.assert(
       fc.property(anyLoadedBeam, ({ on, loads }) => {
-        const segments = solveBeam(on).respond(loads).segments();
+        const segments = segmentsOf(solveBeam(on).respond(loads));
         const derived = (c: readonly number[]) => c.slice(1).map((value, i) => (i + 1) * value);
         for (const s of segments) {
           expect(derived(s.moment).map((v) => v + 0)).toEqual(
@@ -312,12 +325,45 @@ describe('solveBeam', () => {
     );
   });
 
-  test('says the moments over supports and at fixed ends', () => {
-    const two = solveBeam(beam([120, 120])).respond([line(0, 240, 5)]);
-    expect(two.supportMoments()[1]).toBeCloseTo((-5 * 120 ** 2) / 8, 6);
-    const held: Response = solveBeam(beam([120], { fixed: 'both' })).respond([line(0, 120, 5)]);
-    expect(held.fixedMoments().left).toBeCloseTo((-5 * 120 ** 2) / 12, 6);
-    expect(held.fixedMoments().right).toBeCloseTo((5 * 120 ** 2) / 12, 6);
+  test('says at the end of each piece what its polynomials come to there', () => {
+    fc.assert(
+      fc.property(anyLoadedBeam, ({ on, loads }) => {
+        const { grid, states } = solveBeam(on).respond(loads);
+        const force = gross(loads);
+        const length = beamLength(on);
+        const ends = [
+          [LOAD, QE, 1 / length],
+          [SHEAR, V1, 1],
+          [MOMENT, M1, length],
+          [SLOPE, S1, length ** 2],
+          [DEFLECTION, Y1, length ** 3],
+        ] as const;
+        for (let p = 0; p < grid.count; p++) {
+          const h = grid.edges[p + 1]! - grid.edges[p]!;
+          for (const [order, end, size] of ends) {
+            const off = states.data[STRIDE * p + end]! - pieceValue(states.data, STRIDE * p, order, h);
+            expect(Math.abs(off)).toBeLessThanOrEqual(1e-11 * force * size);
+          }
+        }
+      }),
+      RUNS,
+    );
+  });
+
+  // Handbook cases, from memory: wl²/8 over the middle of two equal spans, wl²/12 at fixed ends, wl²/2 of a cantilever.
+  test('has the moments of the handbooks over supports and at fixed ends', () => {
+    expect(
+      solveBeam(beam([120, 120]))
+        .respond([line(0, 240, 5)])
+        .momentAt(120),
+    ).toBeCloseTo((-5 * 120 ** 2) / 8, 6);
+    const both = solveBeam(beam([120], { fixed: 'both' }));
+    const held = fixedMoments(both, both.respond([line(0, 120, 5)]));
+    expect(held.left).toBeCloseTo((-5 * 120 ** 2) / 12, 6);
+    expect(held.right).toBeCloseTo((5 * 120 ** 2) / 12, 6);
+    const arm = solveBeam(beam([120], { cantilever: true })).respond([line(0, 120, 5)]);
+    expect(arm.momentAt(0)).toBeCloseTo((-5 * 120 ** 2) / 2, 6);
+    expect(arm.extremes('moment', 0).max.value).toBeCloseTo(0, 6);
   });
 
   test('lists fields left to right', () => {
@@ -328,6 +374,9 @@ describe('solveBeam', () => {
       ['span', 10, 100],
       ['span', 110, 50],
       ['overhang', 160, 20],
+    ]);
+    expect(beamFields(beam([100], { cantilever: true }))).toEqual([
+      { kind: 'overhang', start: 0, length: 100 },
     ]);
   });
 
