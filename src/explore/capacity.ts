@@ -1,6 +1,6 @@
 import { lineLoadOf, prepare, rate, untiedUplift, woodOf } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
-import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../timber/report.ts';
+import { type CheckId, PASS_LIMIT, roomForRatios } from '../timber/report.ts';
 import { judge } from './judge.ts';
 import { scaleLoads } from './scale.ts';
 
@@ -75,7 +75,7 @@ export function capacityOf(member: Member, { close = CLOSE, near = 1 }: Capacity
 
 function lookerOf(member: Member): (factor: number) => Look {
   const wood = woodOf(member);
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   return (factor) => {
     const scaled = factor === 1 ? member : scaleLoads(member, factor);
     const prepared = prepare(scaled);

@@ -14,7 +14,7 @@ export interface Checked {
   readonly governing: CheckId | null;
   /** The largest ratio of those asked for; 0 where nothing applies. */
   readonly worst: number;
-  readonly ratios: Float64Array;
+  readonly ratios: readonly number[];
 }
 
 /** The checks of a member, all or `only` those asked for, with what they come to; words in `units`. */

@@ -32,16 +32,16 @@ const STEP_APART = 0.05;
 
 /** Ratios of all checks, in the order of CHECK_IDS, a step below a quantity, as it is, and a step above. */
 export interface Runs {
-  readonly below: Float64Array;
-  readonly here: Float64Array;
-  readonly above: Float64Array;
+  readonly below: readonly number[];
+  readonly here: readonly number[];
+  readonly above: readonly number[];
 }
 
 /** The runs of the checks that the local exponents come from. */
 export function exponentRuns(member: Member): Readonly<Record<keyof Exponents, Runs>> {
   const ratios = ratiosLike(member);
   const here = ratios(member);
-  const around = (at: (factor: number) => Float64Array): Runs => ({
+  const around = (at: (factor: number) => readonly number[]): Runs => ({
     below: at(1 - STEP),
     here,
     above: at(1 + STEP),

@@ -1,9 +1,9 @@
 import { type Prepared, prepare, prepareLike, rate, type Wood, woodOf } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
-import { CHECK_IDS } from '../timber/report.ts';
+import { roomForRatios } from '../timber/report.ts';
 
 /** Ratios of every check of a member, in the order of CHECK_IDS; NaN where a check does not apply. */
-export function ratiosOf(member: Member): Float64Array {
+export function ratiosOf(member: Member): readonly number[] {
   return ratiosLike(member)(member);
 }
 
@@ -13,11 +13,11 @@ export function ratiosOf(member: Member): Float64Array {
  */
 export function ratiosLike(
   member: Member,
-): (like: Member, how?: (prepared: Prepared) => Prepared) => Float64Array {
+): (like: Member, how?: (prepared: Prepared) => Prepared) => readonly number[] {
   const prepared: Prepared = prepare(member);
   const wood: Wood = woodOf(member);
   return (like, how) => {
-    const ratios = new Float64Array(CHECK_IDS.length);
+    const ratios = roomForRatios();
     const own = like === member ? prepared : how === undefined ? prepareLike(prepared, like) : how(prepared);
     rate(own, sameWood(member, like) ? wood : woodOf(like), like.section, ratios);
     return ratios;

@@ -56,7 +56,7 @@ function keep<T>(on: object, name: string, value: T): T {
 
 class LazyAnswer implements Answer {
   readonly #member: Member;
-  readonly #ratios: Float64Array;
+  readonly #ratios: readonly number[];
   readonly passes: boolean;
   readonly governing: CheckId | null;
   readonly worst: number;

@@ -82,7 +82,8 @@ function resultRows(designs: readonly Member[], ranking: Ranking, units: Units):
   const answers = designs.map((design) => answerOf(design, ranking));
   const ratios = designs.map(ratiosOf);
   const costs = designs.map((design) => costOf(design, ranking));
-  const ratioText = (at: number) => (of: Float64Array) => (Number.isNaN(of[at]!) ? '' : showRatio(of[at]!));
+  const ratioText = (at: number) => (of: readonly number[]) =>
+    Number.isNaN(of[at]!) ? '' : showRatio(of[at]!);
   const check = (id: CheckId, at: number) => row(CHECK_WORD[id], ratios.map(ratioText(at)));
   return [
     row(

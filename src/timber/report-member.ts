@@ -10,7 +10,7 @@ import { lookUp } from './look-up.ts';
 import type { Member } from './member.ts';
 import { isRefusal } from './reference-values.ts';
 import { refusal } from './refusal.ts';
-import type { CheckId, CheckResult, MemberReport } from './report.ts';
+import type { Analysed, CheckId, CheckResult, MemberReport } from './report.ts';
 import { sectionWeight } from './section-weight.ts';
 import { sizeLabel } from './size-label.ts';
 import { standingDepth, standingWidth } from './standing.ts';
@@ -47,8 +47,7 @@ export function reportMember(
       governing: null,
       checks: [],
       advice: [],
-      reactions: [],
-      analysis: {},
+      analysed: () => NOT_ANALYSED,
       cautions,
     };
   }
@@ -63,27 +62,22 @@ export function reportMember(
     frequency === null
       ? []
       : [{ id: 'frequency', value: frequency, unit: 'Hz', suggested: SUGGESTED_FREQUENCY }];
-  // Only some readers ask for the analysis by kind, and none of them at every nudge.
-  let analysed: ReturnType<typeof analyse> | null = null;
-  const analysis = () => {
-    analysed ??= analyse(member, w, EI);
-    return analysed;
-  };
+  let analysed: Analysed | null = null;
   return {
     ...base,
     passes,
     governing: governingOf(checks),
     checks,
     advice,
-    get reactions() {
-      return analysis().reactions;
-    },
-    get analysis() {
-      return analysis().analysis;
+    analysed() {
+      analysed ??= analyse(member, w, EI);
+      return analysed;
     },
     cautions: cautionsOf(member, prepared.loaded, frequency),
   };
 }
+
+const NOT_ANALYSED: Analysed = { reactions: [], analysis: {} };
 
 function governingOf(checks: readonly CheckResult[]): CheckId | null {
   let worst: CheckResult | null = null;

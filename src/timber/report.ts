@@ -1,4 +1,5 @@
 import type { LoadKind } from '../loads/kinds.ts';
+import { zeros } from '../statics/zeros.ts';
 
 /** Every check that can stop a member, in the order they are listed. A check that does not apply is absent. */
 export const CHECK_IDS = [
@@ -13,6 +14,11 @@ export const CHECK_IDS = [
   'notch',
 ] as const;
 export type CheckId = (typeof CHECK_IDS)[number];
+
+/** Room for one ratio a check, in the order of CHECK_IDS. */
+export function roomForRatios(): number[] {
+  return zeros(CHECK_IDS.length);
+}
 
 /** Pass is ratio <= 1 + 1e-9. */
 export const PASS_LIMIT = 1 + 1e-9;
@@ -72,12 +78,18 @@ export interface MemberReport {
     readonly unit: string;
     readonly suggested: number;
   }[];
-  readonly reactions: readonly Reaction[];
-  readonly analysis: Readonly<Partial<Record<LoadKind, KindAnalysis>>>;
+  /** Worked out when it is first asked for: only some readers do, and none of them at every nudge. */
+  readonly analysed: () => Analysed;
   /** Sentences: "top edge held throughout". */
   readonly assumptions: readonly string[];
   /** Ids and sentences of what to beware of: "unloaded", ply fastening and so on. */
   readonly cautions: readonly { readonly id: string; readonly text: string }[];
+}
+
+/** What each kind does by itself, and the reactions over all combinations; neither where nothing was checked. */
+export interface Analysed {
+  readonly reactions: readonly Reaction[];
+  readonly analysis: Readonly<Partial<Record<LoadKind, KindAnalysis>>>;
 }
 
 export interface Reaction {

@@ -1,7 +1,7 @@
 import { rackOf } from '../../src/explore/rack/rack.ts';
 import { prepare, rackSizesOf, rate, type Size, woodOf } from '../../src/timber/index.ts';
 import type { Member } from '../../src/timber/member.ts';
-import { CHECK_IDS } from '../../src/timber/report.ts';
+import { roomForRatios } from '../../src/timber/report.ts';
 import { memberOf } from '../support/session.ts';
 import { median } from './median.ts';
 
@@ -66,7 +66,7 @@ export async function run(): Promise<void> {
   const sizes = rackSizesOf(MEMBER.stock);
   const prepared = prepare(MEMBER);
   const wood = woodOf(MEMBER);
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   const sections = sizes.map(({ width, depth, plies }) => ({ width, depth, plies, flat: false }));
   const ours = (): void => {
     for (const section of sections) {

@@ -5,7 +5,7 @@ import { readSession } from '../../src/session/index.ts';
 import { beamFields } from '../../src/statics/beam.ts';
 import { prepare, rate, woodOf } from '../../src/timber/index.ts';
 import type { Member, Stock } from '../../src/timber/member.ts';
-import { CHECK_IDS, type CheckId } from '../../src/timber/report.ts';
+import { CHECK_IDS, type CheckId, roomForRatios } from '../../src/timber/report.ts';
 import { memberOf, NO_AREA, psf, simpleSpan, stockOf } from './member-of.ts';
 import { mirrored } from './mirrored.ts';
 import { member as anyMember } from './workings/any-member.ts';
@@ -16,7 +16,7 @@ type Ratios = Readonly<Record<CheckId, number>>;
 
 /** 0 where a check does not apply or asks no more than rounding does. */
 function ratiosOf(member: Member): Ratios {
-  const out = new Float64Array(CHECK_IDS.length);
+  const out = roomForRatios();
   rate(prepare(member), woodOf(member), member.section, out);
   const size = (ratio: number) => (Number.isNaN(ratio) || Math.abs(ratio) < 1e-9 ? 0 : ratio);
   return Object.fromEntries(CHECK_IDS.map((id, at) => [id, size(out[at]!)])) as Ratios;

@@ -11,11 +11,11 @@ import {
   woodOf,
 } from '../../src/timber/index.ts';
 import type { Member } from '../../src/timber/member.ts';
-import { CHECK_IDS } from '../../src/timber/report.ts';
+import { CHECK_IDS, roomForRatios } from '../../src/timber/report.ts';
 import { member as arbitraryMember } from '../session/arbitrary-member.ts';
 
 function ratios(prepared: ReturnType<typeof prepare>, member: Member): number[] {
-  const out = new Float64Array(CHECK_IDS.length);
+  const out = roomForRatios();
   rate(prepared, woodOf(member), member.section, out);
   return [...out];
 }

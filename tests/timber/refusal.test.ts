@@ -11,7 +11,7 @@ import {
   woodOf,
 } from '../../src/timber/index.ts';
 import type { Member, Stock } from '../../src/timber/member.ts';
-import { CHECK_IDS } from '../../src/timber/report.ts';
+import { CHECK_IDS, roomForRatios } from '../../src/timber/report.ts';
 import { memberOf, simpleSpan, stockOf } from './member-of.ts';
 
 const GLULAM = stockOf('glulam', 'Western species', '24F-1.8E');
@@ -192,7 +192,7 @@ test.each(ALLOWED)('%s is not refused', (_, parts) => {
 
 test('a refused section fails every check in the rating', () => {
   const member = memberOf({ notch: { left: 2, right: 0 } });
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   const prepared = prepare(member);
   const wood = woodOf(member);
   expect(refusal(member, one(1.5, 7.25))).toMatch(/NDS 4\.4\.3/);

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { prepare, rate, sectionWeight, untiedUplift, woodOf } from '../../src/timber/index.ts';
-import { CHECK_IDS } from '../../src/timber/report.ts';
+import { CHECK_IDS, roomForRatios } from '../../src/timber/report.ts';
 import { memberOf } from '../support/session.ts';
 
 const UPLIFT = CHECK_IDS.indexOf('uplift');
@@ -19,7 +19,7 @@ describe('uplift that nothing holds down', () => {
             ...(tied === undefined ? {} : { tiedDown: [tied, tied, tied] }),
           });
           const prepared = prepare(member);
-          const ratios = new Float64Array(CHECK_IDS.length);
+          const ratios = roomForRatios();
           rate(prepared, woodOf(member), member.section, ratios);
           const lifting = untiedUplift(prepared, sectionWeight(member, member.section));
           expect(lifting > 0).toBe(ratios[UPLIFT] === Number.POSITIVE_INFINITY);

@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { prepare, rate, woodOf } from '../../src/timber/index.ts';
 import type { Member } from '../../src/timber/member.ts';
-import { CHECK_IDS, type CheckId } from '../../src/timber/report.ts';
+import { CHECK_IDS, type CheckId, roomForRatios } from '../../src/timber/report.ts';
 import { reportMember } from '../../src/timber/report-member.ts';
 import { sectionWeight } from '../../src/timber/section-weight.ts';
 import { everyCase } from '../loads/brute-force.ts';
@@ -37,7 +37,7 @@ const glulam = fc
   });
 
 function ratiosOf(member: Member): (id: CheckId) => number {
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   rate(prepare(member), woodOf(member), member.section, ratios);
   return (id) => ratios[CHECK_IDS.indexOf(id)]!;
 }

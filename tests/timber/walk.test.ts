@@ -12,7 +12,7 @@ import {
   woodOf,
 } from '../../src/timber/index.ts';
 import type { Member, Product } from '../../src/timber/member.ts';
-import { CHECK_IDS } from '../../src/timber/report.ts';
+import { CHECK_IDS, roomForRatios } from '../../src/timber/report.ts';
 import { memberOf, NO_AREA, psf, stockOf } from './member-of.ts';
 
 const PRODUCTS: readonly Product[] = ['dimension lumber', 'machine stress rated', 'timber', 'glulam', 'LVL'];
@@ -47,7 +47,7 @@ test.each(WOODS)(
     expect(sizes.length).toBeGreaterThan(0);
     const prepared = prepare(member);
     const rater = woodOf(member);
-    const ratios = new Float64Array(CHECK_IDS.length);
+    const ratios = roomForRatios();
     for (const { width, depth, plies, label } of sizes) {
       const section = { width, depth, plies, flat: false };
       expect(refusal(member, section), label).toBeNull();

@@ -135,7 +135,10 @@ function reactions(which: 'max' | 'min', says: string): ResultColumn {
       if (nearest === null) return '';
       const number = (value: number) =>
         String(Number(toUnit('pointLoad', value, REACTION_UNIT[units]).toFixed(REACTION_PLACES[units])) + 0);
-      return report.reactions.map((reaction) => number(reaction[which])).join('; ');
+      return report
+        .analysed()
+        .reactions.map((reaction) => number(reaction[which]))
+        .join('; ');
     }),
   };
 }
@@ -173,7 +176,9 @@ export function resultJson(line: number, name: string, outcome: Outcome): object
               return Number.isNaN(ratio) ? [] : [[id, finite(ratio)]];
             }),
           ),
-          reactions: report.reactions.map(({ at, byKind, max, min }) => ({ at, byKind, max, min })),
+          reactions: report
+            .analysed()
+            .reactions.map(({ at, byKind, max, min }) => ({ at, byKind, max, min })),
         };
   const { own } = outcome;
   return {

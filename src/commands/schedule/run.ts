@@ -16,9 +16,9 @@ export interface Tally {
 }
 
 /** Rows that go to a thread at once: enough to outweigh the way there and back. */
-const BATCH = 64;
+const BATCH = 128;
 /** So many batches are sized before a thread would have started. */
-const NOT_WORTH_THREADS = 8;
+const NOT_WORTH_THREADS = 4;
 
 /**
  * Sizes a schedule row by row, in order, and holds no more of it than a few batches. Throws BadInput where its head is

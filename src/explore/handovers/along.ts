@@ -1,6 +1,6 @@
 import { type Prepared, prepareLike, rate, type Size, sameStock, untiedUplift } from '../../timber/index.ts';
 import type { Member, Section } from '../../timber/member.ts';
-import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../../timber/report.ts';
+import { type CheckId, PASS_LIMIT, roomForRatios } from '../../timber/report.ts';
 import { buyPiece, pieceLength, stockedLengths } from '../buying/buying.ts';
 import { judge } from '../judge.ts';
 import { overLimit } from '../limits.ts';
@@ -53,7 +53,7 @@ export function alongOf(
     ({ width, depth, plies }): Section => ({ width, depth, plies, flat: member.section.flat }),
   );
   const shelf = shelfOf(sizes, ranking);
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
 
   const read = (value: number): Reading => {
     const changed = put(member, value);

@@ -10,7 +10,7 @@ import { ratiosLike } from '../ratios.ts';
 /** What a changed member comes to. */
 export interface Outcome extends Judgement {
   /** In the order of CHECK_IDS. */
-  readonly ratios: Float64Array;
+  readonly ratios: readonly number[];
   /** The rule that forbids it, or the limit that it is over: it does not pass. */
   readonly refused: string | null;
 }

@@ -74,7 +74,10 @@ const TIE_STEP = 10;
 
 /** Supports tied down against what lifts them; empty where nothing does. */
 export function tieDown(member: Member): Ladder {
-  const lifts = () => reportMember(member).reactions.map(({ min }) => Math.max(0, -min));
+  const lifts = () =>
+    reportMember(member)
+      .analysed()
+      .reactions.map(({ min }) => Math.max(0, -min));
   let known: Member | null = null;
   const tied = (): Member => {
     known ??= {

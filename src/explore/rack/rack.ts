@@ -16,7 +16,7 @@ import {
   woodsOf,
 } from '../../timber/index.ts';
 import type { Member, Section, Stock } from '../../timber/member.ts';
-import { CHECK_IDS, type CheckId } from '../../timber/report.ts';
+import { type CheckId, roomForRatios } from '../../timber/report.ts';
 import { type Judgement, judge } from '../judge.ts';
 import { overLimit } from '../limits.ts';
 
@@ -26,7 +26,7 @@ export interface RackSize extends Judgement {
   /** lb/in */
   readonly weight: number;
   /** In the order of CHECK_IDS; empty where the size is refused. */
-  readonly ratios: Float64Array;
+  readonly ratios: readonly number[];
   /** The rule that forbids the size, or the limit that it is over; null when it counts. */
   readonly refused: string | null;
 }
@@ -40,7 +40,7 @@ export interface Rack {
   readonly woods: readonly Stock[];
 }
 
-const NO_RATIOS = new Float64Array(0);
+const NO_RATIOS: readonly number[] = [];
 
 /** The stock sizes of the member's woods under its loads, lightest first whatever the wood. */
 export function rackOf(member: Member, only: readonly CheckId[] | null = null): Rack {
@@ -51,10 +51,10 @@ export function rackOf(member: Member, only: readonly CheckId[] | null = null): 
     const section = sectionOf(member, size);
     const refused = refuse(section) ?? overLimit(member, section);
     if (refused !== null) return { size, weight, ratios: NO_RATIOS, refused, ...REFUSED };
-    const ratios = new Float64Array(CHECK_IDS.length);
+    const ratios = roomForRatios();
     rate(prepared, wood, section, ratios);
-    const judgement = judge(ratios, only);
-    return { size, weight, ratios, refused, ...judgement, passes: judgement.passes && prepared.loaded };
+    const { passes, governing, worst } = judge(ratios, only);
+    return { size, weight, ratios, refused, passes: passes && prepared.loaded, governing, worst };
   });
   return { sizes, lightest: sizes.findIndex((each) => each.passes), woods };
 }

@@ -1,6 +1,6 @@
 import { prepare, prepareScaled, rate, type Wood } from '../../timber/index.ts';
 import type { Member, Section } from '../../timber/member.ts';
-import { CHECK_IDS, type CheckId, PASS_LIMIT } from '../../timber/report.ts';
+import { type CheckId, PASS_LIMIT, roomForRatios } from '../../timber/report.ts';
 import { judge } from '../judge.ts';
 import { scaleLengths } from '../scale.ts';
 import { followsLaws, lengthByLaw } from './reach-by-law.ts';
@@ -41,7 +41,7 @@ export function reachFinder(member: Member, wood: Wood, only: readonly CheckId[]
   const longest = Math.max(...member.beam.spans);
   const here = prepare(member);
   const preparedAt = new Map<number, ReturnType<typeof prepare>>();
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   let asked = wood;
   const prepareAt = (span: number) =>
     preparedAt.get(span) ?? prepareScaled(here, scaleLengths(member, span / longest), span / longest);

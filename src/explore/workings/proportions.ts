@@ -102,7 +102,11 @@ function powerLine({ name, exponent, ratio, check }: PowerRatio): WorkingLine {
   return { symbol: name, result: plain(ratio), note: `${WORKINGS_WORD[check]}, goes with ${law}` };
 }
 
-function standsLines(lambda: number, ratios: Float64Array, powers: readonly PowerRatio[]): WorkingLine[] {
+function standsLines(
+  lambda: number,
+  ratios: readonly number[],
+  powers: readonly PowerRatio[],
+): WorkingLine[] {
   const each: { name: string; ratio: number; exponent: number }[] = [];
   for (const { check, ratio, exponent } of powers) {
     if (check !== null && ratio !== null) each.push({ name: WORKINGS_WORD[check], ratio, exponent });

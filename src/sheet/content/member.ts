@@ -76,7 +76,7 @@ function verdictOf({ units }: Job, checked: Checked): Block {
 }
 
 function sketchBlocks({ units }: Job, { member, report }: Checked): Block[] {
-  const view = sketchOf(member, report.reactions, units);
+  const view = sketchOf(member, report.analysed().reactions, units);
   const slimness = report.depth / beamLength(member.beam);
   const left = drawSketch(view, slimness, USUAL_COLUMNS).left;
   const loads = `${view.loads.length === 1 ? 'one load' : `${view.loads.length} loads`}`;
@@ -155,7 +155,7 @@ function woodBlocks(job: Job, checked: Checked): Block[] {
 const CAMBER = 1.5;
 
 function camberBlocks({ units }: Job, { member, report }: Checked): Block[] {
-  const { dead } = report.analysis;
+  const { dead } = report.analysed().analysis;
   if (member.stock.product !== 'glulam' || dead === undefined) return [];
   const camber = showSmall(CAMBER * dead.deflection, units);
   const from = showSmall(dead.deflection, units);

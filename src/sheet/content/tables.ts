@@ -83,9 +83,8 @@ export function factorTable({ checks }: Checked): Block[] {
 }
 
 export function reactionTable({ units }: Job, { report }: Checked): Block[] {
-  const kinds = LOAD_KINDS.filter((kind) =>
-    report.reactions.some(({ byKind }) => byKind[kind] !== undefined),
-  );
+  const { reactions } = report.analysed();
+  const kinds = LOAD_KINDS.filter((kind) => reactions.some(({ byKind }) => byKind[kind] !== undefined));
   const force = (value: number) => showQuantity('pointLoad', value, units);
   return [
     {
@@ -99,7 +98,7 @@ export function reactionTable({ units }: Job, { report }: Checked): Block[] {
         right('largest'),
         right('smallest'),
       ],
-      rows: report.reactions.map(({ support, at, byKind, max, min }) => ({
+      rows: reactions.map(({ support, at, byKind, max, min }) => ({
         cells: [
           `R${support + 1}`,
           showSpan(at, units),

@@ -3,7 +3,7 @@ import { beamLength, supportPlaces } from '../../statics/beam.ts';
 import { MOST_SLENDER } from '../factors/beam-stability.ts';
 import { bearingAreaReason, bearingNeeded } from '../factors/bearing-area.ts';
 import type { Section } from '../member.ts';
-import { CHECK_IDS, type CheckResult, type Factor } from '../report.ts';
+import { CHECK_IDS, type CheckResult, type Factor, roomForRatios } from '../report.ts';
 import { isSawn } from '../standing.ts';
 import { bendingCapacity, groupSlenderness } from './bending.ts';
 import { bendingFactors, durationFactor, factor, serviceFactorList } from './factor-list.ts';
@@ -32,7 +32,7 @@ export function explainChecks(
   section: Section,
   units: Units = 'us',
 ): { readonly checks: CheckResult[]; readonly passes: boolean } {
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   const groups = new Int32Array(CHECK_IDS.length);
   const passes = rate(prepared, wood, section, ratios, groups);
   const checks: CheckResult[] = [];
@@ -57,35 +57,53 @@ export function explain(
   const p = heavyEnough(prepared, wood);
   if (id === SLENDERNESS) return slenderness(p, wood, ratio, g);
   const found = governingTerm(p, wood, id, g);
-  const name = { id: CHECK_IDS[id]!, ratio, place: found.place, at: found.at, pattern: patternOf(p, found) };
-  switch (id) {
-    case SHEAR:
-      return { ...name, ...shear(p, wood, found, units) };
-    case BENDING:
-      return { ...name, ...bending(p, wood, found, g, false, units) };
-    case HOGGING:
-      return { ...name, ...bending(p, wood, found, g, true, units) };
-    case LIVE:
-      return { ...name, ...deflection(p, wood, found, p.liveLimit, 'IBC Table 1604.3', units) };
-    case TOTAL: {
-      const clause = p.member.creep === 'Kcr' ? 'NDS 3.5.2, IBC Table 1604.3' : 'IBC Table 1604.3 note';
-      return { ...name, ...deflection(p, wood, found, p.totalLimit, clause, units) };
-    }
-    case BEARING:
-      return { ...name, ...bearing(p, wood, found, units) };
-    case UPLIFT:
-      return { ...name, ...uplift(p, found) };
-    case NOTCH:
-      return { ...name, ...notch(p, wood, found, p.notch[g]!, units) };
-    default:
-      throw new Error(`no check ${id}`);
-  }
+  const part = partOf(p, wood, id, found, g, units);
+  // Written out: to spread two objects into one takes longer than all else here.
+  const check: CheckResult = {
+    id: CHECK_IDS[id]!,
+    ratio,
+    place: found.place,
+    at: found.at,
+    pattern: patternOf(p, found),
+    demand: part.demand,
+    capacity: part.capacity,
+    unit: part.unit,
+    combination: part.combination,
+    clause: part.clause,
+    factors: part.factors,
+  };
+  return part.bearingNeeded === undefined ? check : { ...check, bearingNeeded: part.bearingNeeded };
 }
 
 type Part = Pick<
   CheckResult,
   'demand' | 'capacity' | 'unit' | 'combination' | 'clause' | 'factors' | 'bearingNeeded'
 >;
+
+function partOf(p: Prepared, wood: Wood, id: number, found: Governing, g: number, units: Units): Part {
+  switch (id) {
+    case SHEAR:
+      return shear(p, wood, found, units);
+    case BENDING:
+      return bending(p, wood, found, g, false, units);
+    case HOGGING:
+      return bending(p, wood, found, g, true, units);
+    case LIVE:
+      return deflection(p, wood, found, p.liveLimit, 'IBC Table 1604.3', units);
+    case TOTAL: {
+      const clause = p.member.creep === 'Kcr' ? 'NDS 3.5.2, IBC Table 1604.3' : 'IBC Table 1604.3 note';
+      return deflection(p, wood, found, p.totalLimit, clause, units);
+    }
+    case BEARING:
+      return bearing(p, wood, found, units);
+    case UPLIFT:
+      return uplift(p, found);
+    case NOTCH:
+      return notch(p, wood, found, p.notch[g]!, units);
+    default:
+      throw new Error(`no check ${id}`);
+  }
+}
 
 function patternOf(p: Prepared, { term }: Governing): string {
   return p.effects.patterns[term.pattern] ?? '';

@@ -1,5 +1,5 @@
 import type { Member } from '../member.ts';
-import { CHECK_IDS } from '../report.ts';
+import { CHECK_IDS, roomForRatios } from '../report.ts';
 import { type Governing, governingTerm } from './governing-term.ts';
 import { type Prepared, prepare } from './prepare.ts';
 import { BENDING, HOGGING, LIVE, rate, SHEAR, TOTAL } from './rate.ts';
@@ -12,7 +12,7 @@ const SAME_PLACE = 1e-6;
 
 /** Index of the field where the worst of shear, bending and deflection stands; 0 where nothing is checked. */
 export function governingField(member: Member): number {
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   const groups = new Int32Array(CHECK_IDS.length);
   const prepared = prepare(member);
   const wood = woodOf(member);

@@ -35,7 +35,7 @@ export function rate(
   prepared: Prepared,
   wood: Wood,
   section: Section,
-  ratios: Float64Array,
+  ratios: number[],
   governing?: Int32Array,
 ): boolean {
   if (!sizeWood(wood, section) || isForbidden(prepared, wood)) {
@@ -92,7 +92,7 @@ export function rate(
 }
 
 function raise(
-  ratios: Float64Array,
+  ratios: number[],
   id: number,
   ratio: number,
   governing: Int32Array | undefined,
@@ -111,7 +111,7 @@ function rateBending(
   w: number,
   offset: number,
   id: number,
-  ratios: Float64Array,
+  ratios: number[],
   governing: Int32Array | undefined,
 ): void {
   let first = -1;
@@ -140,7 +140,7 @@ function rateVolume(
   Fb: number,
   w: number,
   id: number,
-  ratios: Float64Array,
+  ratios: number[],
   governing: Int32Array | undefined,
 ): void {
   const { volume } = set.groups[g]!;
@@ -155,7 +155,7 @@ function rateShearAtDepth(
   p: Prepared,
   wood: Wood,
   w: number,
-  ratios: Float64Array,
+  ratios: number[],
   governing: Int32Array | undefined,
 ): void {
   const typed = p.member.typedFactors?.CD?.value;

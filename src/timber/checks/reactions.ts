@@ -1,13 +1,7 @@
 import { kindAnalysis, type LoadKind, reactionRange } from '../../loads/index.ts';
 import { supportPlaces } from '../../statics/beam.ts';
 import type { Member } from '../member.ts';
-import type { KindAnalysis, Reaction } from '../report.ts';
-
-/** What each kind does by itself, and the reactions over all combinations. */
-export interface Analysed {
-  readonly reactions: Reaction[];
-  readonly analysis: Partial<Record<LoadKind, KindAnalysis>>;
-}
+import type { Analysed, KindAnalysis, Reaction } from '../report.ts';
 
 /** Analyses a member of own weight `w`, lb/in, and stiffness `EI`, lb.in². */
 export function analyse(member: Member, w: number, EI: number): Analysed {

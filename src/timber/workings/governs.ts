@@ -4,7 +4,7 @@ import { explain } from '../checks/explain.ts';
 import { governingTerm } from '../checks/governing-term.ts';
 import { deadFactorOf, type Prepared, withEffects } from '../checks/prepare.ts';
 import { rate } from '../checks/rate.ts';
-import { CHECK_IDS, type CheckId, type CheckResult } from '../report.ts';
+import { CHECK_IDS, type CheckId, type CheckResult, roomForRatios } from '../report.ts';
 import { factorText, ratioText } from './figures.ts';
 import { measured } from './result.ts';
 import { checkOf, heaviestOf, type Work } from './work.ts';
@@ -13,7 +13,7 @@ import type { WorkingLine } from './workings.ts';
 /** The checks under one combination alone. */
 interface Rated {
   readonly prepared: Prepared;
-  readonly ratios: Float64Array;
+  readonly ratios: readonly number[];
   readonly groups: Int32Array;
 }
 
@@ -66,7 +66,7 @@ function aloneOf(work: Work): Alone {
 /** All checks under other effects. The wood stands at the member's section. */
 function ratedUnder(work: Work, effects: Effects): Rated {
   const prepared = withEffects(work.member, effects, heaviestOf(work));
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   const groups = new Int32Array(CHECK_IDS.length);
   rate(prepared, work.wood, work.member.section, ratios, groups);
   return { prepared, ratios, groups };

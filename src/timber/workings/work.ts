@@ -7,7 +7,7 @@ import { type Wood, woodOf } from '../checks/wood.ts';
 import type { Member } from '../member.ts';
 import type { DesignValues } from '../reference-values.ts';
 import { refusal } from '../refusal.ts';
-import { CHECK_IDS, type CheckId, type CheckResult } from '../report.ts';
+import { CHECK_IDS, type CheckId, type CheckResult, roomForRatios } from '../report.ts';
 import { type Figures, figuresOf } from './figures.ts';
 
 /** Everything that the calculations of one member are written from: the same numbers as the report's. */
@@ -49,7 +49,7 @@ function makeWork(member: Member, units: Units): Work | NoWork {
   const refused = refusal(member);
   if (refused !== null) return { refused };
   const wood = woodOf(member);
-  const ratios = new Float64Array(CHECK_IDS.length);
+  const ratios = roomForRatios();
   const groups = new Int32Array(CHECK_IDS.length);
   const first = prepare(member);
   rate(first, wood, member.section, ratios, groups);

@@ -29,7 +29,8 @@ describe('a member that is sized', () => {
     const { lightest, nearest } = sized(member, 'us');
     expect(lightest).toBeNull();
     expect(nearest!.governing).toBe('uplift');
-    const others = (ratios: Float64Array) => Math.max(...ratios.filter((ratio) => Number.isFinite(ratio)));
+    const others = (ratios: readonly number[]) =>
+      Math.max(...ratios.filter((ratio) => Number.isFinite(ratio)));
     const allowed = rackOf(member).sizes.filter(({ refused }) => refused === null);
     expect(others(nearest!.ratios)).toBe(Math.min(...allowed.map(({ ratios }) => others(ratios))));
   });
