@@ -25,7 +25,7 @@ const shared = {
 
 export default defineConfig({
   test: {
-    globalSetup: ['tests/support/tally-run.ts'],
+    globalSetup: ['tests/support/around-run.ts'],
     projects: [
       // To load the program anew for every file would take longer than most of the tests do.
       { test: { ...shared, name: 'together', isolate: false, include: [ALL], exclude: APART } },

@@ -1,6 +1,6 @@
 import { appendFileSync } from 'node:fs';
 
-/** What a run of the tests counts: see `tally-run.ts`, which adds it up and tells it. */
+/** What a run of the tests counts: see `around-run.ts`, which adds it up and tells it. */
 export const COUNTED = [
   'sessions fuzzed',
   'command lines',
