@@ -1,8 +1,9 @@
 import { closeSync, openSync, readdirSync, readSync, statSync } from 'node:fs';
 import { homedir } from 'node:os';
 import type { Keeper } from '../files/keeper.ts';
+import type { Opened } from '../screen/effect.ts';
+import type { Offers } from '../screen/mode.ts';
 import type { FoundSession } from '../screen/open-explorer.tsx';
-import type { Offers, Opened } from '../screen/state.ts';
 import type { Session } from '../session/session.ts';
 import { readText, sessionOf } from './load.ts';
 import { BadInput } from './status.ts';

@@ -3,7 +3,7 @@ import { dirname, resolve } from 'node:path';
 import { CsvError, parse } from 'csv-parse/sync';
 import type { YardRow } from '../explore/buying/yard.ts';
 import { harmless, isHarmful } from '../quantity/index.ts';
-import type { YardAnswer } from '../screen/state.ts';
+import type { YardAnswer } from '../screen/effect.ts';
 import { MAX_FILE_NAME, type Session } from '../session/session.ts';
 import { readYardTable, type TableLine } from '../session/yard-table.ts';
 import { woodsOf } from '../timber/index.ts';

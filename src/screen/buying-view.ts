@@ -16,8 +16,9 @@ import type { Member } from '../timber/member.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { type Answer, answerOf } from './answer.ts';
 import { BUYING_BINDINGS } from './buying-keys.ts';
+import type { BuyingMode, BuyingQuestion } from './mode.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
-import { type BuyingMode, type BuyingQuestion, memberOf, type State, unitsOf } from './state.ts';
+import { memberOf, type State, unitsOf } from './state.ts';
 import { ALL_KEYS, type FootView } from './view.ts';
 
 /** A size that could be bought for the member in hand. */

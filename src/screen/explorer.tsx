@@ -5,9 +5,10 @@ import { Screen } from './draw/screen.tsx';
 import type { Theme } from './draw/theme.ts';
 import { drawState } from './draw-state.ts';
 import { Spoken } from './ear/spoken.tsx';
+import type { Effect } from './effect.ts';
 import { pressName } from './keys.ts';
 import { restOf } from './rest.ts';
-import type { Effect, State } from './state.ts';
+import type { State } from './state.ts';
 import { useKeys } from './terminal/use-keys.ts';
 import { type Event, update } from './update.ts';
 

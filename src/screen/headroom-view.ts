@@ -10,7 +10,8 @@ import { standingDepth, standingWidth } from '../timber/index.ts';
 import type { Headroom, Member } from '../timber/member.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
-import { type HeadroomMode, memberOf, type State, unitsOf } from './state.ts';
+import type { HeadroomMode } from './mode.ts';
+import { memberOf, type State, unitsOf } from './state.ts';
 import type { View } from './view.ts';
 
 /** What the headroom view shows. */

@@ -2,8 +2,8 @@ import { BUYING_BINDINGS } from './buying-keys.ts';
 import { DIAGRAM_BINDINGS } from './diagram-keys.ts';
 import { type Action, BINDINGS, WORDS } from './keys.ts';
 import { MEMBERS_BINDINGS } from './members-keys.ts';
+import type { Mode } from './mode.ts';
 import type { HelpSection } from './panels/help.ts';
-import type { Mode } from './state.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
 
 const EVERY_VIEW = 'in every view';

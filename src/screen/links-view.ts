@@ -15,9 +15,10 @@ import { sizeLabel } from '../timber/index.ts';
 import type { Member } from '../timber/member.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
+import type { LinksMode } from './mode.ts';
 import type { Question } from './panels/prompt.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
-import { type LinksMode, memberOf, type State, unitsOf } from './state.ts';
+import { memberOf, type State, unitsOf } from './state.ts';
 import { ALL_KEYS, type FootView } from './view.ts';
 
 /** A line that can be taken in hand. */

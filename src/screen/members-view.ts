@@ -8,9 +8,10 @@ import type { Member } from '../timber/member.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import { MEMBERS_BINDINGS } from './members-keys.ts';
+import type { MemberSort, MembersMode } from './mode.ts';
 import type { Question } from './panels/prompt.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
-import { type MemberSort, type MembersMode, memberOf, type State, unitsOf } from './state.ts';
+import { memberOf, type State, unitsOf } from './state.ts';
 import type { FootView } from './view.ts';
 
 export interface MembersView {

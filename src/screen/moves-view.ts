@@ -10,9 +10,10 @@ import { prepare, standingDepth, standingWidth } from '../timber/index.ts';
 import type { CheckId } from '../timber/report.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { type Answer, answerOf } from './answer.ts';
+import type { MovesMode } from './mode.ts';
 import type { TableColumn, TableRow } from './panels/table.ts';
 import { signed } from './signed.ts';
-import { type MovesMode, memberOf, type State, unitsOf } from './state.ts';
+import { memberOf, type State, unitsOf } from './state.ts';
 import type { MovesTable } from './view.ts';
 
 /** The two ways to put in more wood. */

@@ -4,19 +4,11 @@ import type { Units } from '../quantity/index.ts';
 import type { Session } from '../session/session.ts';
 import { chooseGlyphs } from './draw/glyphs.ts';
 import { chooseTheme } from './draw/theme.ts';
+import type { Effect, OpenAnswer, Opened, SheetAnswer, YardAnswer } from './effect.ts';
 import { Explorer } from './explorer.tsx';
+import { EXPLORE, type Mode, type Offers } from './mode.ts';
 import { startWith } from './modes/start.ts';
-import {
-  type Effect,
-  EXPLORE,
-  type Mode,
-  type Offers,
-  type OpenAnswer,
-  type Opened,
-  type SheetAnswer,
-  type State,
-  type YardAnswer,
-} from './state.ts';
+import type { State } from './state.ts';
 import type { Size } from './terminal/open.tsx';
 import type { Event } from './update.ts';
 

@@ -3,10 +3,11 @@ import { isQuick } from '../explore/is-quick.ts';
 import { watched } from './carriers.ts';
 import { isAroundMissing, stripOf, stripSearch, withAround } from './handover-now.ts';
 import { unjudged, withJudged } from './members-view.ts';
+import type { HandoversMode } from './mode.ts';
 import { isMovesMissing, withMoves } from './moves-beside.ts';
 import { stripRows } from './panels/strip.ts';
 import { windowStart } from './panels/table.ts';
-import { type HandoversMode, memberOf, type State } from './state.ts';
+import { memberOf, type State } from './state.ts';
 
 /** What is left to work out once a frame is on the screen; null where nothing is. `ms`: how long no key may have come. */
 export function restOf(state: State): { readonly ms: number } | null {

@@ -1,5 +1,6 @@
 import { type JobSetting, jobSettings } from '../session/job-settings.ts';
-import type { SettingsMode, State } from './state.ts';
+import type { SettingsMode } from './mode.ts';
+import type { State } from './state.ts';
 import { ALL_KEYS, type FootView } from './view.ts';
 
 export type SettingsRow =

@@ -2,7 +2,7 @@ import { KIND_WORD, LOAD_KINDS } from '../loads/kinds.ts';
 import { showInches, showQuantity, showSpan, type Units } from '../quantity/index.ts';
 import { MEMBER_KINDS, type MemberKind } from '../session/index.ts';
 import { LIMITS_BY_USE } from '../timber/member.ts';
-import type { StartMode } from './state.ts';
+import type { StartMode } from './mode.ts';
 import { ALL_KEYS, type FootView } from './view.ts';
 
 /** A line of the start that can be taken in hand. */

@@ -1,23 +1,20 @@
 import { isQuick } from '../explore/is-quick.ts';
 import { watching } from './carriers.ts';
+import {
+  type Effect,
+  type OpenAnswer,
+  type SheetAnswer,
+  type Step,
+  still,
+  type YardAnswer,
+} from './effect.ts';
 import { withYardAnswer } from './modes/buying.ts';
 import { openedHelp, opensHelp } from './modes/help.ts';
 import { rulesOf } from './modes/index.ts';
 import { withSheetAnswer } from './modes/sheet.ts';
 import { withOpened } from './modes/start.ts';
 import { rested } from './rest.ts';
-import {
-  type Effect,
-  isKept,
-  memberOf,
-  type OpenAnswer,
-  refused,
-  type SheetAnswer,
-  type State,
-  type Step,
-  still,
-  type YardAnswer,
-} from './state.ts';
+import { isKept, memberOf, refused, type State } from './state.ts';
 import type { KeyPress } from './terminal/key-press.ts';
 import { traced } from './trail.ts';
 

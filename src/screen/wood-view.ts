@@ -22,7 +22,8 @@ import type { CheckResult } from '../timber/report.ts';
 import { CHECK_WORD } from '../timber/words.ts';
 import { answerOf } from './answer.ts';
 import type { Style } from './draw/canvas.ts';
-import { memberOf, type State, unitsOf, type WoodMode } from './state.ts';
+import type { WoodMode } from './mode.ts';
+import { memberOf, type State, unitsOf } from './state.ts';
 import { ALL_KEYS, type FootView, type View } from './view.ts';
 import { WOOD_BINDINGS } from './wood-keys.ts';
 

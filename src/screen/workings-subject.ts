@@ -5,9 +5,10 @@ import type { Member } from '../timber/member.ts';
 import { choiceInHand, choicesOf } from './buying-view.ts';
 import { inStorey } from './headroom-view.ts';
 import { type LinkLine, linksView, memberNamed } from './links-view.ts';
+import type { Mode } from './mode.ts';
 import { moveInHand, movesNow } from './moves-view.ts';
 import { pinsOf } from './pins.ts';
-import { knobInHand, type Mode, memberOf, type State, unitsOf } from './state.ts';
+import { knobInHand, memberOf, type State, unitsOf } from './state.ts';
 import { memberThen, trailView } from './trail-view.ts';
 
 /** Whose calculations are asked for, and which of them first. */

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { clearHeight } from '../../src/explore/headroom.ts';
-import { type HeadroomMode, memberOf } from '../../src/screen/state.ts';
+import type { HeadroomMode } from '../../src/screen/mode.ts';
+import { memberOf } from '../../src/screen/state.ts';
 import { framesAreKept, shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii } from './panels/support.ts';

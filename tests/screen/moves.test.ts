@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { movesOf } from '../../src/explore/moves/index.ts';
-import { type MovesMode, memberOf, type State } from '../../src/screen/state.ts';
+import type { MovesMode } from '../../src/screen/mode.ts';
+import { memberOf, type State } from '../../src/screen/state.ts';
 import { framesAreKept, shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';
 import { ascii } from './panels/support.ts';

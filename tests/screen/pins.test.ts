@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
+import type { CompareMode } from '../../src/screen/mode.ts';
 import { pinsOf } from '../../src/screen/pins.ts';
-import { type CompareMode, isKept, memberOf, type State } from '../../src/screen/state.ts';
+import { isKept, memberOf, type State } from '../../src/screen/state.ts';
 import { readSession, writeSession } from '../../src/session/index.ts';
 import { shown } from '../support/shown.ts';
 import { pressing, stateOf } from '../support/state.ts';

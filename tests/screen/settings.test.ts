@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { saidAfter } from '../../src/screen/ear/said.ts';
-import type { SettingsMode, State } from '../../src/screen/state.ts';
+import type { SettingsMode } from '../../src/screen/mode.ts';
+import type { State } from '../../src/screen/state.ts';
 import { jobSettings } from '../../src/session/job-settings.ts';
 import { afterEvents, pressing, stateOf } from '../support/state.ts';
 import { frame, unicode } from './panels/support.ts';

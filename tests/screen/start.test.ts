@@ -1,8 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { drawState } from '../../src/screen/draw-state.ts';
 import { saidAfter } from '../../src/screen/ear/said.ts';
+import type { OpenAnswer } from '../../src/screen/effect.ts';
+import type { Offers } from '../../src/screen/mode.ts';
 import { startWith } from '../../src/screen/modes/start.ts';
-import { memberOf, type Offers, type OpenAnswer, type State } from '../../src/screen/state.ts';
+import { memberOf, type State } from '../../src/screen/state.ts';
 import { MEMBER_KINDS, writeSession } from '../../src/session/index.ts';
 import { afterEvents, pressing, stateOf } from '../support/state.ts';
 import { ascii, frame, unicode } from './panels/support.ts';

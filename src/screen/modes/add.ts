@@ -4,13 +4,15 @@ import { sketchOf } from '../../explore/diagrams/sketch-model.ts';
 import { reactionRange } from '../../loads/index.ts';
 import { type Addition, additionsTo, kindsOf } from '../additions.ts';
 import { isTooSmall } from '../arrange.ts';
+import { still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawAdd } from '../panels/add.ts';
-import { EXPLORE, knobInHand, memberOf, refused, type State, still, unitsOf, withMember } from '../state.ts';
+import { knobInHand, memberOf, refused, type State, unitsOf, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
 import { openChoice } from './links.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 
 type Add = ModeOf<'add'>;
 

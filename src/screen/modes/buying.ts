@@ -25,27 +25,16 @@ import {
   purchaseOf,
 } from '../buying-view.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { type Step, still, type YardAnswer } from '../effect.ts';
 import { redo, undo } from '../history.ts';
 import { startsEntry } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
+import { type BuyingMode, type BuyingQuestion, EXPLORE } from '../mode.ts';
 import { drawBuying } from '../panels/buying.ts';
-import {
-  type BuyingMode,
-  type BuyingQuestion,
-  EXPLORE,
-  memberOf,
-  refused,
-  type State,
-  type Step,
-  still,
-  unitsOf,
-  withMember,
-  withSession,
-  type YardAnswer,
-} from '../state.ts';
+import { memberOf, refused, type State, unitsOf, withMember, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 import { openedWorkings } from './workings.ts';
 
 /** What each size takes to buy, with the prices and the yard list that it goes by. */

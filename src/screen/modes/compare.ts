@@ -1,13 +1,15 @@
 import { isTooSmall } from '../arrange.ts';
 import { compareView } from '../compare-view.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { type CompareMode, EXPLORE } from '../mode.ts';
 import { drawCompare, lastCompareScroll } from '../panels/compare.ts';
 import { backTo, pinsOf, withNote, withoutPin } from '../pins.ts';
-import { type CompareMode, EXPLORE, type State, still, unitsOf, withSession } from '../state.ts';
+import { type State, unitsOf, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** Designs side by side with what differs marked: go back to one, note one, drop one. */

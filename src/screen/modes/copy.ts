@@ -1,10 +1,12 @@
 import { answerText } from '../answer-text.ts';
 import { isTooSmall } from '../arrange.ts';
 import { cells, wrap } from '../draw/cells.ts';
+import { type Step, still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawText, type TextLine } from '../panels/text.ts';
-import { EXPLORE, type State, type Step, still } from '../state.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import type { State } from '../state.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 
 /** The answer as text for a message: sent to the clipboard, and shown to be copied by hand where that is not taken. */
 export const copy: ModeRules<ModeOf<'copy'>> = {

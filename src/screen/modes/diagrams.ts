@@ -6,12 +6,14 @@ import { answerOf } from '../answer.ts';
 import { isTooSmall } from '../arrange.ts';
 import { diagramActionOf } from '../diagram-keys.ts';
 import { beamCells, diagramsView } from '../diagrams-view.ts';
+import { still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawDiagrams } from '../panels/diagrams.ts';
-import { EXPLORE, memberOf, type State, still, unitsOf, withSession } from '../state.ts';
+import { memberOf, type State, unitsOf, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 import { openedWorkings } from './workings.ts';
 
 type Diagrams = ModeOf<'diagrams'>;

@@ -1,9 +1,11 @@
 import { type Edit, edited, editOf, inserted } from '../edit.ts';
+import { still } from '../effect.ts';
 import { drawExplorer } from '../layout.ts';
-import { EXPLORE, knobInHand, memberOf, type State, still, unitsOf, withMember } from '../state.ts';
+import { EXPLORE } from '../mode.ts';
+import { knobInHand, memberOf, type State, unitsOf, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 
 /** A value being typed on the knob in hand. */
 export const entry: ModeRules<ModeOf<'entry'>> = {

@@ -8,6 +8,7 @@ import { backToBegan, markBegan } from '../began.ts';
 import { nextBest } from '../best-choice.ts';
 import { CHARTS, type ChartOf } from '../chart-view.ts';
 import { editOf, inserted } from '../edit.ts';
+import { type Step, still } from '../effect.ts';
 import { redo, undo } from '../history.ts';
 import { type Action, actionOf, startsEntry } from '../keys.ts';
 import { drawExplorer } from '../layout.ts';
@@ -18,8 +19,6 @@ import {
   memberOf,
   refused,
   type State,
-  type Step,
-  still,
   unitsOf,
   withMember,
   withSession,
@@ -35,7 +34,7 @@ import { openHandovers } from './handovers.ts';
 import { openHeadroom } from './headroom.ts';
 import { openLinks } from './links.ts';
 import { openMembers } from './members.ts';
-import type { ModeOf, ModeRules } from './mode.ts';
+import type { ModeOf, ModeRules } from './mode-rules.ts';
 import { openMoves } from './moves.ts';
 import { openReach } from './reach.ts';
 import { openSaveAs, save } from './save-as.ts';

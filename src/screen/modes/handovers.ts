@@ -4,12 +4,14 @@ import { sizeName } from '../../explore/rack/rack.ts';
 import { rankingOf } from '../../session/index.ts';
 import { answerOf } from '../answer.ts';
 import { isTooSmall } from '../arrange.ts';
+import { still } from '../effect.ts';
 import type { Strip } from '../found.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE, type HandoversMode } from '../mode.ts';
 import { drawStrip, type StripView, stripRows } from '../panels/strip.ts';
-import { EXPLORE, type HandoversMode, memberOf, type State, still } from '../state.ts';
+import { memberOf, type State } from '../state.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** Which size is the best from where to where along the knob in hand; found once the view stands. */

@@ -1,15 +1,17 @@
 import type { Turn } from '../../explore/knobs/knob.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { still } from '../effect.ts';
 import { headroomInHand, headroomView, inStorey } from '../headroom-view.ts';
 import { actionOf, startsEntry } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE, type HeadroomMode } from '../mode.ts';
 import { nudgeOf } from '../nudges.ts';
 import { drawHeadroom } from '../panels/headroom.ts';
-import { EXPLORE, type HeadroomMode, memberOf, type State, still, unitsOf, withMember } from '../state.ts';
+import { memberOf, type State, unitsOf, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
-import { isCancel, type ModeRules } from './mode.ts';
+import { isCancel, type ModeRules } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The storey that a member stands in, with knobs of its own; what is nudged or typed is taken at once. */

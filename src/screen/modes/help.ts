@@ -1,12 +1,13 @@
 import { glyphsOf } from '../draw/glyphs.ts';
+import { still } from '../effect.ts';
 import { helpSections } from '../help-text.ts';
 import { actionOf } from '../keys.ts';
+import type { HelpMode, Mode } from '../mode.ts';
 import { drawHelp, helpLines } from '../panels/help.ts';
 import { lastOffset } from '../panels/text.ts';
-import type { HelpMode, Mode, State } from '../state.ts';
-import { still } from '../state.ts';
+import type { State } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 
 /** Every key and every word of the program, those of the view it was asked for in first. */
 export const help: ModeRules<HelpMode> = {

@@ -1,4 +1,4 @@
-import type { Mode } from '../state.ts';
+import type { Mode } from '../mode.ts';
 import { add } from './add.ts';
 import { buying } from './buying.ts';
 import { changedOnDisk } from './changed-on-disk.ts';
@@ -13,7 +13,7 @@ import { help } from './help.ts';
 import { leaving } from './leaving.ts';
 import { links } from './links.ts';
 import { members } from './members.ts';
-import type { ModeOf, ModeRules } from './mode.ts';
+import type { ModeOf, ModeRules } from './mode-rules.ts';
 import { moves } from './moves.ts';
 import { proportions } from './proportions.ts';
 import { reach } from './reach.ts';

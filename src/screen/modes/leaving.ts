@@ -1,6 +1,8 @@
-import { EXPLORE, type State, type Step, still } from '../state.ts';
+import { type Step, still } from '../effect.ts';
+import { EXPLORE } from '../mode.ts';
+import type { State } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import type { ModeOf, ModeRules } from './mode.ts';
+import type { ModeOf, ModeRules } from './mode-rules.ts';
 import { asking } from './question.ts';
 import { openSaveAs, save } from './save-as.ts';
 

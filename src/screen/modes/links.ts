@@ -7,26 +7,18 @@ import { reactionRange } from '../../loads/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { still } from '../effect.ts';
 import { redo, undo } from '../history.ts';
 import { actionOf, startsEntry } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
 import { type LinkLine, linesOf, linksView, memberNamed } from '../links-view.ts';
+import { EXPLORE, type LinksMode } from '../mode.ts';
 import { nudgeOf } from '../nudges.ts';
 import { drawLinks } from '../panels/links.ts';
-import {
-  EXPLORE,
-  type LinksMode,
-  memberOf,
-  refused,
-  type State,
-  still,
-  unitsOf,
-  withMember,
-  withSession,
-} from '../state.ts';
+import { memberOf, refused, type State, unitsOf, withMember, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The reactions of other members that the one in hand carries, and where its own land. */

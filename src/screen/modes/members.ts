@@ -12,30 +12,24 @@ import { MAX_TITLE } from '../../session/session.ts';
 import type { Member } from '../../timber/member.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { type Step, still } from '../effect.ts';
 import { redo, undo } from '../history.ts';
 import { drawTooSmall } from '../layout.ts';
 import { type MembersAction, membersActionOf } from '../members-keys.ts';
 import { listed, membersView, withChanged, withJudged } from '../members-view.ts';
-import { drawMembers } from '../panels/members.ts';
 import {
   EXPLORE,
   MEMBER_SORTS,
   type MembersMode,
   type MembersQuestion,
-  memberOf,
-  refused,
-  type State,
-  type Step,
-  still,
   type TypedQuestion,
-  unitsOf,
-  withMember,
-  withSession,
-} from '../state.ts';
+} from '../mode.ts';
+import { drawMembers } from '../panels/members.ts';
+import { memberOf, refused, type State, unitsOf, withMember, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
 import { openLinks } from './links.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 import { save } from './save-as.ts';
 import { openSettings } from './settings.ts';
 import { startAdding } from './start.ts';

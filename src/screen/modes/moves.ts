@@ -1,21 +1,13 @@
 import { isTooSmall } from '../arrange.ts';
+import { still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE, type MovesMode } from '../mode.ts';
 import { moveInHand, movesNow, movesView, SIDE_LINES } from '../moves-view.ts';
 import { drawMoveList } from '../panels/move-list.ts';
-import {
-  EXPLORE,
-  type MovesMode,
-  memberOf,
-  refused,
-  type State,
-  still,
-  unitsOf,
-  withMember,
-  withSession,
-} from '../state.ts';
+import { memberOf, refused, type State, unitsOf, withMember, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
-import { isCancel, type ModeRules } from './mode.ts';
+import { isCancel, type ModeRules } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The changes that would help, best first; Enter applies the one in hand. */

@@ -1,10 +1,11 @@
 import { isTooSmall } from '../arrange.ts';
+import { still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawProportions } from '../panels/proportions.ts';
 import { proportionView } from '../proportion-view.ts';
-import { EXPLORE, still } from '../state.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The three laws over l/h. */

@@ -1,11 +1,13 @@
 import { isTooSmall } from '../arrange.ts';
+import { still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawReachTable, reachRows } from '../panels/reach-table.ts';
 import { windowStart } from '../panels/table.ts';
 import { reachView } from '../reach-view.ts';
-import { EXPLORE, type State, still, unitsOf, withSession } from '../state.ts';
+import { type State, unitsOf, withSession } from '../state.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeOf, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules, scrolled } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** The longest span of every size, and what stops it. */

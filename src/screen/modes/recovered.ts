@@ -1,9 +1,11 @@
 import type { RecoveredAnswer } from '../../files/keeper.ts';
+import { type Step, still } from '../effect.ts';
+import type { RecoveredMode } from '../mode.ts';
 import { drawText, lastOffset } from '../panels/text.ts';
 import { recoveredLines } from '../recovered-view.ts';
-import { momentOf, type RecoveredMode, type State, type Step, still } from '../state.ts';
+import { momentOf, type State } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 
 /** What was not kept when the program last ended: looked at here, and taken, dropped or set aside. */
 export const recovered: ModeRules<RecoveredMode> = {

@@ -1,11 +1,13 @@
 import { NOT_WRITTEN } from '../../files/keeper.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { type Step, still } from '../effect.ts';
 import { drawExplorer } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawPrompt } from '../panels/prompt.ts';
-import { EXPLORE, refused, type State, type Step, still } from '../state.ts';
+import { refused, type State } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 
 /** The name of a file being typed, for a session that has none. */
 export const saveAs: ModeRules<ModeOf<'save-as'>> = {

@@ -1,15 +1,17 @@
 import { type Changed, type JobSetting, jobSettings, YARD_SETTING } from '../../session/job-settings.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { type Step, still } from '../effect.ts';
 import { redo, undo } from '../history.ts';
 import { actionOf } from '../keys.ts';
 import { drawTooSmall } from '../layout.ts';
+import type { SettingsMode } from '../mode.ts';
 import { drawSettings } from '../panels/settings.ts';
 import { settingsView } from '../settings-view.ts';
-import { refused, type SettingsMode, type State, type Step, still, withSession } from '../state.ts';
+import { refused, type State, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 
 /** What is set for the whole session. */
 export const settings: ModeRules<SettingsMode> = {

@@ -1,12 +1,14 @@
 import { FORMATS, formatOf } from '../../sheet/format.ts';
 import { cells } from '../draw/cells.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { type SheetAnswer, type Step, still } from '../effect.ts';
 import { drawExplorer } from '../layout.ts';
+import { EXPLORE } from '../mode.ts';
 import { drawPrompt } from '../panels/prompt.ts';
-import { EXPLORE, memberOf, refused, type SheetAnswer, type State, type Step, still } from '../state.ts';
+import { memberOf, refused, type State } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { viewOf } from '../view-model.ts';
-import { isCancel, type ModeOf, type ModeRules } from './mode.ts';
+import { isCancel, type ModeOf, type ModeRules } from './mode-rules.ts';
 
 /** The name of the file that the calculation sheet is written to; its end says as what. */
 export const sheet: ModeRules<ModeOf<'sheet'>> = {

@@ -14,24 +14,14 @@ import {
 } from '../../session/index.ts';
 import { isTooSmall } from '../arrange.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { type OpenAnswer, type Opened, type Step, still } from '../effect.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE, type MembersMode, type Offers, type StartMode } from '../mode.ts';
 import { drawStart } from '../panels/start.ts';
 import { startLines, startView } from '../starts.ts';
-import {
-  EXPLORE,
-  type MembersMode,
-  type Offers,
-  type OpenAnswer,
-  type Opened,
-  type StartMode,
-  type State,
-  type Step,
-  still,
-  unitsOf,
-  withSession,
-} from '../state.ts';
+import { type State, unitsOf, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 
 /** An empty start with what there is to open. */
 export function startWith(offers: Offers): StartMode {

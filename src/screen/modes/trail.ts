@@ -1,22 +1,14 @@
 import { isTooSmall } from '../arrange.ts';
+import { still } from '../effect.ts';
 import { redo, undo } from '../history.ts';
 import { drawTooSmall } from '../layout.ts';
+import { EXPLORE, type TrailMode } from '../mode.ts';
 import { drawTrail } from '../panels/trail.ts';
-import {
-  EXPLORE,
-  memberOf,
-  refused,
-  type State,
-  still,
-  type TrailMode,
-  unitsOf,
-  withMember,
-  withSession,
-} from '../state.ts';
+import { memberOf, refused, type State, unitsOf, withMember, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { backText, memberThen, type TrailView, trailView } from '../trail-view.ts';
 import { titleOf } from '../view-model.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 import { openedWorkings, opensWorkings } from './workings.ts';
 
 /** What was done to the member in hand, oldest first; Enter goes back to how it stood at the line in hand. */

@@ -5,12 +5,14 @@ import { tidyRack, toggleOnRack } from '../../explore/rack/rack-woods.ts';
 import { checkStock } from '../../timber/index.ts';
 import type { Member } from '../../timber/member.ts';
 import { edited, editOf, inserted } from '../edit.ts';
+import { still } from '../effect.ts';
+import { EXPLORE, type WoodMode } from '../mode.ts';
 import { drawWood, lastWoodScroll } from '../panels/wood.ts';
-import { EXPLORE, memberOf, type State, still, unitsOf, type WoodMode, withMember } from '../state.ts';
+import { memberOf, type State, unitsOf, withMember } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { type WoodAction, woodActionOf } from '../wood-keys.ts';
 import { woodViewOf } from '../wood-view.ts';
-import { isCancel, type ModeRules } from './mode.ts';
+import { isCancel, type ModeRules } from './mode-rules.ts';
 import { openedWorkings } from './workings.ts';
 
 /** Choosing the wood: a draft of the member that Enter takes and Escape drops. */

@@ -4,21 +4,15 @@ import { CHECK_IDS } from '../../timber/report.ts';
 import type { Canvas } from '../draw/canvas.ts';
 import { cells } from '../draw/cells.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
+import { type Step, still } from '../effect.ts';
+import type { Mode, WorkingsMode } from '../mode.ts';
 import { windowStart } from '../panels/table.ts';
 import { drawText, lastOffset, type TextLine, textRows } from '../panels/text.ts';
-import {
-  type Mode,
-  type State,
-  type Step,
-  still,
-  unitsOf,
-  type WorkingsMode,
-  withSession,
-} from '../state.ts';
+import { type State, unitsOf, withSession } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 import { ALL_KEYS, type FootView } from '../view.ts';
 import { type WorkingsSubject, workingsSubject } from '../workings-subject.ts';
-import { isCancel, type ModeRules, scrolled } from './mode.ts';
+import { isCancel, type ModeRules, scrolled } from './mode-rules.ts';
 
 /** The calculation behind any number: what the view it was asked in is about first, then every other. */
 export const workings: ModeRules<WorkingsMode> = {

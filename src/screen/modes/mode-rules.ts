@@ -1,7 +1,9 @@
 import type { Canvas } from '../draw/canvas.ts';
 import type { Glyphs } from '../draw/glyphs.ts';
 import type { ScreenEntry } from '../draw/screen.tsx';
-import type { Mode, State, Step } from '../state.ts';
+import type { Step } from '../effect.ts';
+import type { Mode } from '../mode.ts';
+import type { State } from '../state.ts';
 import type { KeyPress } from '../terminal/key-press.ts';
 
 /** What a mode does with the keyboard and how it is drawn. */
