@@ -89,3 +89,54 @@ test('l/h of a member is that of its mirror image', () => {
     { numRuns: 60 },
   );
 });
+
+test('shear and deflection go by the span that they are worst in', () => {
+  const short = { limits: { live: 1, total: 1, liveMax: null }, bracingBottom: 'continuous' } as const;
+  const point = (at: number) => [{ type: 'point', kind: 'dead', at, load: 9000 }] as const;
+  const two = { beam: { ...bent([40, 60]).beam }, area: NO_AREA, ...short };
+  const shear = (at: number) => memberOf({ ...two, loads: point(at), tiedDown: [1e9, 1e9, 1e9] });
+  expect([hogs(shear(3)), hogs(shear(97))]).toEqual(['shear', 'shear']);
+  expect([governingField(shear(3)), governingField(shear(97))]).toEqual([0, 1]);
+  const limp = (spans: number[]) =>
+    bent(spans, undefined, { limits: { live: 360, total: 2000, liveMax: null } });
+  expect(hogs(limp([200, 240]))).toBe('deflection-total');
+  expect([governingField(limp([200, 240])), governingField(limp([240, 200]))]).toEqual([1, 0]);
+});
+
+test('sagging goes by its own span, and stays there where the largest moment is far from the supports', () => {
+  const member = bent([100, 240, 100], undefined, {
+    area: NO_AREA,
+    loads: [{ type: 'point', kind: 'dead', at: 220, load: 2000 }],
+    tiedDown: [1e9, 1e9, 1e9, 1e9],
+  });
+  expect(hogs(member)).toBe('bending');
+  expect(governingField(member)).toBe(1);
+});
+
+test('a support held against rotation parts span and overhang', () => {
+  const beam = (left: boolean, right: boolean) =>
+    ({
+      spans: [150],
+      overhangs: { left: 90, right: 90 },
+      supports: 'bearings',
+      fixed: { left, right },
+    }) as const;
+  const loaded = (at: number, left: boolean, right: boolean) =>
+    bent([150], undefined, {
+      beam: beam(left, right),
+      area: NO_AREA,
+      loads: [{ type: 'point', kind: 'dead', at, load: 900 }],
+    });
+  // A load on an overhang bends the support: it is the overhang's, held or not.
+  expect([governingField(loaded(10, true, true)), governingField(loaded(320, true, true))]).toEqual([0, 2]);
+  expect([governingField(loaded(10, false, false)), governingField(loaded(320, false, false))]).toEqual([
+    0, 2,
+  ]);
+  // One on the span, held at both ends, is the span's.
+  expect([governingField(loaded(110, true, true)), governingField(loaded(220, true, true))]).toEqual([1, 1]);
+});
+
+test('where a rule forbids the section, or nothing is asked, it is the first field', () => {
+  expect(governingField(bent([200, 240], undefined, { notch: { left: 9, right: 0 } }))).toBe(0);
+  expect(governingField(bent([200, 240], undefined, { area: NO_AREA, selfWeight: false }))).toBe(0);
+});
