@@ -189,4 +189,56 @@ describe('shear at d from the face', () => {
     const loading = member({ spans: [l], supports: 'cantilever' }, { area: { dead: 0.1 }, tributary: 60 });
     expect(shear(loading, 12).value).toBeCloseTo(6 * l, 9);
   });
+
+  const held = { bearing: [4, 4] };
+  const dead = (from: number, to: number, size: number) =>
+    ({ kind: 'dead', type: 'line', from, to, start: size, end: size }) as const;
+  const live = (at: number, load = 1000) => ({ kind: 'live', type: 'point', at, load }) as const;
+
+  test('is found inside the span where loads push both ways', () => {
+    // 10 lb/in down on one half, up on the other: the reactions are wl/4, and the shear in the middle as much.
+    const both = member({ spans: [l] }, { ...held, loads: [dead(0, 80, 10), dead(80, l, -10)] });
+    expect(shear(both, 12).value).toBeCloseTo(400, 8);
+    expect(shear(both, 12).term.at).toBeCloseTo(80, 8);
+    // The other half lifted by wind, D + 0.6 W up (ASCE 7 2.4.1): 200 lb of D and 240 lb of 0.6 W in the middle.
+    const wind = { kind: 'windUp', type: 'line', from: 80, to: l, start: 20, end: 20 } as const;
+    const lifted = member({ spans: [l] }, { ...held, loads: [dead(0, 80, 10), wind] });
+    expect(shear(lifted, 12, 0, 1.6).value).toBeCloseTo(440, 8);
+    // Dead load alone: 3wl/8 at its end, less what lies within d of the face.
+    expect(shear(lifted, 12, 0, 0.9).value).toBeCloseTo(600 - 140, 8);
+  });
+
+  test('takes no heed of a load right over a support', () => {
+    const two = { spans: [l, l] };
+    const plain = member(two, { bearing: [4, 4, 4], area: { live: 0.1 }, tributary: 60 });
+    const over = { ...plain, loads: [live(0), live(l), live(2 * l)] };
+    expect(shear(over, 12, 0, 1).value).toBeCloseTo(shear(plain, 12, 0, 1).value, 8);
+  });
+
+  test('on an overhang counts a load at its free end, near the face by x/d of it', () => {
+    const overhang = (arm: number, side: 'left' | 'right') =>
+      member(
+        { spans: [l], overhangs: { left: 0, right: 0, [side]: arm } },
+        { bearing: [4, 4], loads: [live(side === 'left' ? 0 : l + arm)] },
+      );
+    for (const side of ['left', 'right'] as const) {
+      expect(shear(overhang(40, side), 12, 0, 1).value).toBeCloseTo(1000, 8);
+      // 8 in from the face; the span bears 1000 x 10 / 160 of it.
+      expect(shear(overhang(10, side), 12, 0, 1).value).toBeCloseTo((8 / 12) * 1000, 8);
+    }
+  });
+
+  test('counts a load at just d in full', () => {
+    const at = member({ spans: [l] }, { ...held, loads: [live(14)] });
+    expect(shear(at, 12, 0, 1).value).toBeCloseTo((1000 * (l - 14)) / l, 8);
+    expect(shear(at, 12 + 1e-9, 0, 1).value).toBeCloseTo((1000 * (l - 14)) / l, 5);
+  });
+
+  test('has a face half the bearing from the support, its own at each', () => {
+    const loading = (left: number, right: number) =>
+      member({ spans: [l] }, { bearing: [left, right], area: { dead: 0.1 }, tributary: 60 });
+    expect(shear(loading(4, 20), 12).value).toBeCloseTo(6 * (80 - 2 - 12), 8);
+    expect(shear(loading(20, 4), 12).value).toBeCloseTo(6 * (80 - 2 - 12), 8);
+    expect(shear(loading(20, 20), 12).value).toBeCloseTo(6 * (80 - 10 - 12), 8);
+  });
 });
