@@ -1,17 +1,11 @@
-import { chmodSync, mkdtempSync, readFileSync, rmSync } from 'node:fs';
+import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { COUNTED } from './tally.ts';
 
-/**
- * Around a whole run: one folder for all that its tests write, which is removed at its end; and the file that counts go
- * to, whose sums are told.
- */
+/** Around a whole run: names the file that counts go to, and tells their sums at its end. */
 export default function setup(): () => void {
-  const folder = mkdtempSync(join(tmpdir(), 'thrice-run-'));
-  // Some tests start the program as another user, who has to come as far as their own folders.
-  chmodSync(folder, 0o755);
-  process.env.TMPDIR = folder;
+  const folder = mkdtempSync(join(tmpdir(), 'thrice-tally-'));
   // `npm run fuzz` names one file for all its rounds: each tells the sums so far.
   process.env.THRICE_TALLY ??= join(folder, 'counts');
   const file = process.env.THRICE_TALLY;
