@@ -29,7 +29,7 @@ test('a full frame fills the terminal to its last cell without scrolling', async
     [20, 5],
   ] as const) {
     const session = start({ columns, rows });
-    const screen = await session.until(/count 0/);
+    const screen = await session.until(/count 0[\s\S]*●/);
     expect(screen[0]).toMatch(new RegExp(`^${columns}x${rows}`));
     expect(screen[rows - 1]).toBe(`${'━'.repeat(columns - 1)}●`);
     expect(session.onAlternateScreen()).toBe(true);

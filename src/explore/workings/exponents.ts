@@ -69,8 +69,11 @@ function slopeText(
     ['here', 'below', here[at]!, below[at]!, STEP],
     ['above', 'here', above[at]!, here[at]!, STEP],
   ] as const;
-  const off = ([, , upper, lower, step]: (typeof sides)[number]) =>
-    Math.abs(Math.log(upper / lower) / step - slope);
+  // A demand of next to nothing may be absent on one side: that side is not what the slope comes from.
+  const off = ([, , upper, lower, step]: (typeof sides)[number]) => {
+    const between = Math.log(upper / lower) / step;
+    return Number.isFinite(between) ? Math.abs(between - slope) : Number.POSITIVE_INFINITY;
+  };
   const [first, second, upper, lower, step] = sides.reduce((best, each) =>
     off(each) < off(best) ? each : best,
   );
