@@ -85,15 +85,29 @@ export function exponentsOf(member: Member): Partial<Record<CheckId, Exponents>>
   return exponents;
 }
 
-/** Slopes on logarithmic axes; where a factor steps the slope of the side that does not step. */
-function slopesOf({ below, here, above }: Runs): number[] {
-  return Array.from(here, (ratio, index) => {
-    const left = Math.log(ratio / below[index]!) / -Math.log1p(-STEP);
-    const right = Math.log(above[index]! / ratio) / Math.log1p(STEP);
-    if (!Number.isFinite(left) || !Number.isFinite(right)) return Number.isFinite(left) ? left : right;
-    if (Math.abs(left - right) < STEP_APART) return (left + right) / 2;
-    return Math.abs(left) < Math.abs(right) ? left : right;
-  });
+function slopesOf(runs: Runs): number[] {
+  return Array.from(runs.here, (_, at) => slopeAt(runs, at).slope);
+}
+
+/** A slope on logarithmic axes, and the runs that it is taken between; NaN where the check applies on neither side. */
+export interface Slope {
+  readonly slope: number;
+  readonly from: 'below' | 'here';
+  readonly to: 'here' | 'above';
+}
+
+/**
+ * The slope of a check: between the runs on both sides, or of one side alone, where a factor steps on the other or the
+ * check does not apply there.
+ */
+export function slopeAt({ below, here, above }: Runs, at: number): Slope {
+  const left = Math.log(here[at]! / below[at]!) / -Math.log1p(-STEP);
+  const right = Math.log(above[at]! / here[at]!) / Math.log1p(STEP);
+  const ofLeft: Slope = { slope: left, from: 'below', to: 'here' };
+  const ofRight: Slope = { slope: right, from: 'here', to: 'above' };
+  if (!Number.isFinite(left) || !Number.isFinite(right)) return Number.isFinite(left) ? ofLeft : ofRight;
+  if (Math.abs(left - right) < STEP_APART) return { slope: (left + right) / 2, from: 'below', to: 'above' };
+  return Math.abs(left) < Math.abs(right) ? ofLeft : ofRight;
 }
 
 /** A local exponent this close to its ideal value is called whole. */

@@ -8,6 +8,7 @@ import {
   IDEAL,
   type Runs,
   STEP,
+  slopeAt,
   whyNotWhole,
 } from '../exponents.ts';
 import { POWERS } from '../powers.ts';
@@ -37,7 +38,7 @@ export function exponentLines({ member }: Pick<Asked, 'member'>): WorkingLine[] 
     for (const quantity of EXPONENT_QUANTITIES) {
       lines.push({
         symbol: quantity,
-        ...slopeText(runs[quantity], CHECK_IDS.indexOf(check.id), local[quantity]),
+        ...slopeText(runs[quantity], CHECK_IDS.indexOf(check.id)),
         result: signed(local[quantity], PLACES),
         ...(power === undefined ? {} : { note: `ideal ${signed(IDEAL[power.exponent][quantity], 0)}` }),
       });
@@ -59,28 +60,13 @@ const IDEAL_REASONS: readonly WorkingLine[] = [
 ];
 
 /** The two runs that an exponent comes from. */
-function slopeText(
-  { below, here, above }: Runs,
-  at: number,
-  slope: number,
-): Pick<WorkingLine, 'formula' | 'numbers'> {
-  const sides = [
-    ['above', 'below', above[at]!, below[at]!, 2 * STEP],
-    ['here', 'below', here[at]!, below[at]!, STEP],
-    ['above', 'here', above[at]!, here[at]!, STEP],
-  ] as const;
-  // A demand of next to nothing may be absent on one side: that side is not what the slope comes from.
-  const off = ([, , upper, lower, step]: (typeof sides)[number]) => {
-    const between = Math.log(upper / lower) / step;
-    return Number.isFinite(between) ? Math.abs(between - slope) : Number.POSITIVE_INFINITY;
-  };
-  const [first, second, upper, lower, step] = sides.reduce((best, each) =>
-    off(each) < off(best) ? each : best,
-  );
-  const apart = step.toFixed(STEP_PLACES);
+function slopeText(runs: Runs, at: number): Pick<WorkingLine, 'formula' | 'numbers'> {
+  const { from, to } = slopeAt(runs, at);
+  const apart = ((from === 'below' ? STEP : 0) + (to === 'above' ? STEP : 0)).toFixed(STEP_PLACES);
+  const run = (which: keyof Runs) => runs[which][at]!.toPrecision(RUN_DIGITS);
   return {
-    formula: `ln(ratio ${first} / ratio ${second}) / ${apart}`,
-    numbers: `ln(${upper.toPrecision(RUN_DIGITS)} / ${lower.toPrecision(RUN_DIGITS)}) / ${apart}`,
+    formula: `ln(ratio ${to} / ratio ${from}) / ${apart}`,
+    numbers: `ln(${run(to)} / ${run(from)}) / ${apart}`,
   };
 }
 
